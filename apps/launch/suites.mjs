@@ -1,0 +1,51 @@
+import path from 'node:path';
+import { npmCommand } from './install.mjs';
+import { ROOT } from './paths.mjs';
+import { LaunchError } from './say.mjs';
+
+const node = (file, ...args) => [process.execPath, path.join(ROOT, file), ...args];
+
+/** A command that passes or fails as a whole and counts as one test. */
+const whole = (name, budgetSeconds, command) => ({ name, budgetSeconds, command, report: null });
+
+/** A Vitest project; its tests are counted from the report it writes. */
+const vitest = (name, budgetSeconds) => {
+  const report = `test-results/${name}.json`;
+  const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
+  const command = node('node_modules/vitest/vitest.mjs', 'run', '--project', name, ...reporters);
+  return { name, budgetSeconds, command, report };
+};
+
+/** All suites in their order, each with the time it may take: over it, it fails, so that slowness is noticed. */
+export const allSuites = () => [
+  whole('format', 60, node('node_modules/prettier/bin/prettier.cjs', '--check', '.')),
+  whole('lint', 180, node('node_modules/eslint/bin/eslint.js', '.', '--max-warnings', '0')),
+  whole('typecheck', 180, [...npmCommand(), 'run', 'typecheck']),
+  vitest('engine', 60),
+  vitest('wording', 30),
+  vitest('contract', 30),
+  vitest('api', 60),
+  vitest('launch', 60),
+  {
+    name: 'web',
+    budgetSeconds: 120,
+    command: node('node_modules/@angular/cli/bin/ng.js', 'test'),
+    report: 'test-results/web.json',
+  },
+  vitest('reference', 90),
+  vitest('property', 180),
+  whole('build', 120, node('apps/launch/build-app.mjs')),
+  { ...vitest('browser', 240), needsChromium: true },
+];
+
+/** The suites with these names, in their order; all without names. The browser's tests run on the built app. */
+export function chooseSuites(names, suites) {
+  const unknown = names.filter((name) => !suites.some((suite) => suite.name === name));
+  if (unknown.length > 0) {
+    throw new LaunchError(`No suite ${unknown.join(', ')}. There are: ${suites.map(({ name }) => name).join(' ')}`);
+  }
+  if (names.length === 0) return suites;
+  const wanted = new Set(names);
+  if (wanted.has('browser')) wanted.add('build');
+  return suites.filter(({ name }) => wanted.has(name));
+}

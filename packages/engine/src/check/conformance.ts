@@ -1,0 +1,45 @@
+/** From a deviation and its uncertainty to a finding: by the rule, and by the probability that the true value conforms (JCGM 106:2012). */
+import type { Known } from '../derivation/quantity';
+import { probabilityBetween } from '../numerics/normal-distribution';
+import type { Finding } from './codes';
+import type { Tolerance } from './result';
+
+/** Limits are inclusive; 31 of 200 deviations of exactly 5 °F come out above it in doubles of kelvin. */
+export const LIMIT_SLACK_K = 1e-9;
+
+export interface Conformance {
+  readonly byRule: 'passes' | 'fails';
+  readonly probabilityWithin: number;
+  readonly finding: Extract<Finding, 'within' | 'above' | 'below' | 'too-close-to-call'>;
+}
+
+/**
+ * Guarded decision: *within* at probability `guard` or more, outside at `1 − guard` or less, between them too close to call.
+ * `probabilityOfNoTarget` counts as not within.
+ */
+export function judgeConformance(input: {
+  readonly measured: Known;
+  readonly tolerance: Tolerance;
+  readonly guard: number;
+  readonly probabilityOfNoTarget?: number;
+}): Conformance {
+  const { measured, tolerance, guard, probabilityOfNoTarget = 0 } = input;
+  const low = tolerance.low ?? -Infinity;
+  const high = tolerance.high ?? Infinity;
+  const { value, u } = measured;
+  const passes = value >= low - LIMIT_SLACK_K && value <= high + LIMIT_SLACK_K;
+  const inside = probabilityBetween(value, u, low, high, LIMIT_SLACK_K);
+  const probabilityWithin = inside * (1 - probabilityOfNoTarget);
+  const byRule = passes ? 'passes' : 'fails';
+  if (probabilityWithin >= guard) return { byRule, probabilityWithin, finding: 'within' };
+  // only the deviation can be outside: a doubtful target is not a deviation
+  if (inside > 1 - guard) return { byRule, probabilityWithin, finding: 'too-close-to-call' };
+  return {
+    byRule,
+    probabilityWithin,
+    finding: value > 0.5 * (finiteOr(low, high) + finiteOr(high, low)) ? 'above' : 'below',
+  };
+}
+
+/** Which side: the middle of the band, or the one limit of a one-sided tolerance. */
+const finiteOr = (limit: number, other: number): number => (Number.isFinite(limit) ? limit : other);

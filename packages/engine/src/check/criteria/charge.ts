@@ -1,0 +1,133 @@
+/** The criteria that judge the charge: superheat of a fixed orifice; subcooling and the superheat window of a valve. */
+import { derive } from '../../derivation/derive';
+import type { Known, Quantity } from '../../derivation/quantity';
+import { isKnown, missing } from '../../derivation/quantity';
+import { SUPERHEAT_CHART_A } from '../../methods/data/superheat-chart-a';
+import { probabilityOfNoTarget } from '../../methods/target-existence';
+import { chartRounding, targetSuperheat } from '../../methods/targets';
+import type { Reason } from '../codes';
+import type { DerivedQuantities } from '../derived-quantities';
+import { unfitPortReason } from '../fit-for-test';
+import type { CheckInput } from '../input';
+import { isFixedOrifice } from '../input';
+import type { CriterionResult, Tolerance } from '../result';
+import { judgeCriterion, judgeWindow, unjudged } from './criterion';
+
+export interface ChargeJudgement {
+  readonly input: CheckInput;
+  readonly derived: DerivedQuantities;
+  readonly unfit: Reason | null;
+  /** Gates shared by all charge criteria: impossible readings, conditions, age, airflow. */
+  readonly gates: (evidence: readonly Known[]) => readonly (Reason | null)[];
+}
+
+/** A measured subcooling below zero means about zero: nothing that rests on the readings is called *within*. */
+const negativeSubcooling = ({ subcooling }: DerivedQuantities): Reason | null =>
+  isKnown(subcooling) && subcooling.value < 0 ? { code: 'flash', figures: {} } : null;
+
+export interface SuperheatTarget {
+  readonly quantity: Quantity;
+  readonly source: 'entered' | 'makers-chart-a';
+  readonly probabilityOfNoTarget: number;
+}
+
+/** Entered; else the printed makers' chart, which is for split systems: a packaged unit needs its maker's own. */
+export function superheatTarget({ setup, readings }: CheckInput, derived: DerivedQuantities): SuperheatTarget {
+  if (setup.targetSuperheat !== undefined) {
+    return { quantity: setup.targetSuperheat, source: 'entered', probabilityOfNoTarget: 0 };
+  }
+  if (setup.kind === 'packaged') return { quantity: missing(), source: 'entered', probabilityOfNoTarget: 0 };
+  const outdoorK: Quantity = readings.outdoorDryBulb?.quantity ?? missing('outdoorDryBulb');
+  const wetBulbK = derived.returnWetBulb;
+  const quantity = derive(targetSuperheat, { wetBulbK, outdoorK }, [chartRounding(SUPERHEAT_CHART_A)]);
+  const probability =
+    isKnown(quantity) && isKnown(outdoorK) && isKnown(wetBulbK)
+      ? probabilityOfNoTarget(SUPERHEAT_CHART_A, {
+          rowK: outdoorK.value,
+          rowUK: outdoorK.u,
+          columnK: wetBulbK.value,
+          columnUK: wetBulbK.u,
+        })
+      : 0;
+  return { quantity, source: 'makers-chart-a', probabilityOfNoTarget: probability };
+}
+
+export function judgeSuperheat(
+  { input, derived, unfit, gates }: ChargeJudgement,
+  target: SuperheatTarget,
+): CriterionResult {
+  const actual = derived.superheat;
+  if (unfit !== null) return unjudged('superheat', true, 'not-verifiable', unfit, actual);
+  if (target.quantity.state === 'missing' && target.quantity.inputs.length === 0 && isKnown(actual)) {
+    return unjudged('superheat', true, 'not-judged', { code: 'target-missing', figures: {} }, actual);
+  }
+  const { procedure } = input;
+  const toleranceK = procedure.superheat.toleranceK.value;
+  const floorK = procedure.superheat.floorK.value;
+  return judgeCriterion({
+    criterion: 'superheat',
+    required: true,
+    actual,
+    target: target.quantity,
+    targetSource: target.source,
+    tolerance: (known) => flooredTolerance(known.value, toleranceK, floorK),
+    guard: procedure.guardProbability.value,
+    probabilityOfNoTarget: target.probabilityOfNoTarget,
+    mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
+    gates,
+    neverWithin: negativeSubcooling(derived),
+  });
+}
+
+/** The superheat itself must not pass under the floor, whatever the target allows. */
+function flooredTolerance(targetK: number, toleranceK: number, floorK: number): Tolerance {
+  const floored = floorK - targetK > -toleranceK;
+  return { low: floored ? floorK - targetK : -toleranceK, high: toleranceK, floored };
+}
+
+export function judgeSubcooling({ input, derived, unfit, gates }: ChargeJudgement): CriterionResult {
+  const { procedure, setup } = input;
+  const required = !isFixedOrifice(setup);
+  const actual = derived.subcooling;
+  if (unfit !== null) return unjudged('subcooling', required, 'not-verifiable', unfit, actual);
+  const unfitPort = unfitPortReason(input);
+  if (unfitPort !== null) {
+    // a wrong kind of reading is there and cannot be used; the other cases lack something
+    const finding = unfitPort.code === 'liquid-reading-at-discharge-port' ? 'not-verifiable' : 'not-judged';
+    return unjudged('subcooling', required, finding, unfitPort, actual);
+  }
+  const target = setup.targetSubcooling;
+  if (target === undefined && isKnown(actual)) {
+    return unjudged('subcooling', required, 'not-judged', { code: 'target-missing', figures: {} }, actual);
+  }
+  const toleranceK = procedure.subcooling.toleranceK.value;
+  return judgeCriterion({
+    criterion: 'subcooling',
+    required,
+    actual,
+    target: target ?? missing(),
+    targetSource: 'entered',
+    tolerance: () => ({ low: -toleranceK, high: toleranceK, floored: false }),
+    guard: procedure.guardProbability.value,
+    gates,
+    neverWithin: negativeSubcooling(derived),
+  });
+}
+
+export function judgeSuperheatWindow({ input, derived, unfit, gates }: ChargeJudgement): CriterionResult {
+  const { procedure, setup } = input;
+  const actual = derived.superheat;
+  if (unfit !== null) return unjudged('superheat-window', true, 'not-verifiable', unfit, actual);
+  const { lowK, highK } = procedure.superheatWindow;
+  const range = setup.superheatRange ?? { lowK: lowK.value, highK: highK.value };
+  return judgeWindow({
+    criterion: 'superheat-window',
+    required: true,
+    actual,
+    targetSource: setup.superheatRange === undefined ? 'procedure-window' : 'entered-range',
+    tolerance: { low: range.lowK, high: range.highK, floored: false },
+    guard: procedure.guardProbability.value,
+    gates,
+    neverWithin: negativeSubcooling(derived),
+  });
+}

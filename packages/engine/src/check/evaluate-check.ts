@@ -1,0 +1,133 @@
+/** The judgement of one check: pure, deterministic and total for every input that `readRequest` lets through. */
+import type { Known } from '../derivation/quantity';
+import { isKnown } from '../derivation/quantity';
+import { derivationSteps } from '../derivation/steps';
+import { findCautions } from './cautions';
+import type { Caution, OverallFinding, Reason, Stop } from './codes';
+import { airflowEvidence, airflowGate, judgeAirflow, judgeSplit } from './criteria/air';
+import type { ChargeJudgement } from './criteria/charge';
+import { judgeSubcooling, judgeSuperheat, judgeSuperheatWindow, superheatTarget } from './criteria/charge';
+import { conditionsGate, judgeConditions, judgeInstruments } from './criteria/conditions';
+import type { DerivedQuantities } from './derived-quantities';
+import { deriveQuantities } from './derived-quantities';
+import { engineVersion } from './engine-version';
+import { staleReason } from './evidence';
+import { unfitReason } from './fit-for-test';
+import type { CheckInput } from './input';
+import { isFixedOrifice } from './input';
+import { findNextStep } from './next-step/next-step';
+import type { CheckResult, CriterionResult, DerivedId } from './result';
+import { DERIVED_IDS } from './result';
+import { impossibleReadings } from './saturation-plausibility';
+import { findStops } from './stops';
+
+export function evaluateCheck(input: CheckInput): CheckResult {
+  const { setup, readings, procedure } = input;
+  const derived = deriveQuantities(setup, readings);
+  const unfit = unfitReason(input);
+  const impossible = impossibleReadings(input, derived);
+  const stops = findStops(input, derived);
+
+  const cooling = setup.mode === 'cooling';
+  const split = judgeSplit(input, derived, unfit);
+  const airflow = judgeAirflow(input);
+  const evidence = airflowEvidence(airflow, split);
+  const target = superheatTarget(input, derived);
+  const charge = judgeCharge(
+    {
+      input,
+      derived,
+      unfit,
+      gates: (from) => [
+        impossible?.reason ?? null,
+        frozen(stops),
+        conditionsGate(input),
+        staleReason(input, from),
+        airflowGate(evidence),
+      ],
+    },
+    target,
+  );
+  const criteria = [
+    ...charge,
+    ...(cooling ? [split] : []),
+    ...(airflow === null ? [] : [airflow]),
+    judgeConditions(input),
+    judgeInstruments(input),
+  ];
+
+  const finding = overallFinding(stops, criteria);
+  const cautions = [
+    ...(impossible === null ? [] : [impossible.caution]),
+    ...findCautions(input, derived, evidence),
+    ...hiddenFaults(input, finding),
+  ];
+  const nextStep = findNextStep({
+    input,
+    derived,
+    criteria,
+    target,
+    unfit,
+    impossible: impossible?.reason ?? null,
+    stops,
+    cautions,
+    airflow: evidence,
+    overall: finding,
+  });
+
+  return {
+    engineVersion: engineVersion(),
+    procedure: { id: procedure.id, version: procedure.version },
+    derived: knownOnly(derived),
+    criteria,
+    overall: { finding, nextStep, stops, cautions },
+    derivation: derivationSteps(resultsToExplain(derived, criteria)),
+  };
+}
+
+/** Subcooling of a fixed orifice is shown and looked at by the next step, but decides nothing. */
+function judgeCharge(
+  judgement: ChargeJudgement,
+  target: ReturnType<typeof superheatTarget>,
+): readonly CriterionResult[] {
+  return isFixedOrifice(judgement.input.setup)
+    ? [judgeSuperheat(judgement, target), judgeSubcooling(judgement)]
+    : [judgeSubcooling(judgement), judgeSuperheatWindow(judgement)];
+}
+
+/** Ice falsifies every reading of the cycle: they stay for diagnosis, without a finding on the charge. */
+const frozen = (stops: readonly Stop[]): Reason | null =>
+  stops.some(({ code }) => code === 'freezing') ? { code: 'freezing', figures: {} } : null;
+
+/** The first that applies: stop, not verifiable, not judged, outside, too close to call, within. */
+function overallFinding(stops: readonly Stop[], criteria: readonly CriterionResult[]): OverallFinding {
+  if (stops.length > 0) return 'stop';
+  const findings = criteria.filter(({ required }) => required).map(({ finding }) => finding);
+  if (findings.includes('not-verifiable')) return 'not-verifiable';
+  if (findings.includes('not-judged')) return 'not-judged';
+  const outside = findings.find((finding) => finding === 'above' || finding === 'below');
+  if (outside !== undefined) return outside;
+  return findings.includes('too-close-to-call') ? 'too-close-to-call' : 'within';
+}
+
+/** On a fixed orifice low charge and low airflow can hide each other behind a superheat that is within. */
+function hiddenFaults({ setup, readings }: CheckInput, finding: OverallFinding): readonly Caution[] {
+  const liquidPair = readings.liquidPressure !== undefined && readings.liquidLineTemperature !== undefined;
+  return isFixedOrifice(setup) && finding === 'within' && !liquidPair ? [{ code: 'faults-may-hide', figures: {} }] : [];
+}
+
+function knownOnly(derived: DerivedQuantities): CheckResult['derived'] {
+  const found: Partial<Record<DerivedId, Known>> = {};
+  for (const id of DERIVED_IDS) {
+    const quantity = derived[id];
+    if (isKnown(quantity)) found[id] = quantity;
+  }
+  return found;
+}
+
+/** What the math shows: the results first needed, each with what it came from. */
+function resultsToExplain(derived: DerivedQuantities, criteria: readonly CriterionResult[]): readonly Known[] {
+  const results = criteria.flatMap(({ actual, target, deviation }) => [actual, target, deviation]);
+  const others = [derived.superheat, derived.subcooling, derived.temperatureSplit, derived.returnRelativeHumidity];
+  return [...results, ...others].filter((quantity): quantity is Known => isKnown(quantity));
+}

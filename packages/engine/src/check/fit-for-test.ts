@@ -1,0 +1,56 @@
+/**
+ * Whether this system, as it runs now, can be judged by superheat or subcooling at all; decided before any stop or target. Rules: common practice
+ * and the scope of CEC Reference Residential Appendices, RA3.2 (2008, 2019); a mini-split meters outdoors, its small pipe is two-phase.
+ */
+import type { Reason } from './codes';
+import type { CheckInput, CheckSetup, CheckVisit } from './input';
+import { isFixedOrifice } from './input';
+import type { PreflightItem } from './request';
+
+/** Criteria that decide the check on this system. */
+export type ChargeCriterion = 'superheat' | 'subcooling' | 'superheat-window';
+
+export const chargeCriteria = (setup: CheckSetup): readonly ChargeCriterion[] =>
+  isFixedOrifice(setup) ? ['superheat'] : ['subcooling', 'superheat-window'];
+
+/** Items that make the test invalid until mended; a dirty filter or an unzeroed gauge only warns. */
+const MENDED_FIRST: readonly PreflightItem[] = [
+  'panelsOn',
+  'fullStage',
+  'economizerShut',
+  'condenserDryAndClean',
+  'fanSteady',
+];
+
+/** Why no charge criterion can be judged, or `null` when the system is fit for the test. */
+export function unfitReason({ setup, visit }: Pick<CheckInput, 'setup' | 'visit'>): Reason | null {
+  if (setup.mode === 'heating') return { code: 'heating-mode', figures: {} };
+  if (setup.kind === 'mini-split' || setup.kind === 'multi-split') return { code: 'metered-outdoors', figures: {} };
+  if (setup.stage === 'part') return { code: 'part-stage', figures: {} };
+  if (setup.chargeMode === false) return { code: 'not-in-charge-mode', figures: {} };
+  const items = unreadyItems(visit);
+  if (items.length > 0) return { code: 'not-ready', figures: { items: { kind: 'preflight', value: items } } };
+  // a packaged unit has no usual port to assume
+  if (setup.kind === 'packaged' && setup.assumed.includes('highSidePort'))
+    return { code: 'port-not-stated', figures: {} };
+  return null;
+}
+
+const unreadyItems = (visit: CheckVisit): readonly PreflightItem[] =>
+  MENDED_FIRST.filter((item) => visit.preflight[item] === 'not-ok');
+
+/** Why subcooling cannot be judged at this port, or `null`. The suction side is not affected. */
+export function unfitPortReason({ setup, readings }: Pick<CheckInput, 'setup' | 'readings'>): Reason | null {
+  if (setup.highSidePort === 'none') return { code: 'suction-port-only', figures: {} };
+  if (
+    setup.highSidePort === 'discharge' &&
+    readings.liquidPressure !== undefined &&
+    readings.dischargePressure === undefined
+  ) {
+    return { code: 'liquid-reading-at-discharge-port', figures: {} };
+  }
+  if (setup.targetSubcooling !== undefined && setup.targetSubcoolingPort !== setup.highSidePort) {
+    return { code: 'target-for-other-port', figures: {} };
+  }
+  return null;
+}

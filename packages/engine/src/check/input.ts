@@ -1,0 +1,74 @@
+/** A check in SI, ready to be judged: what `readRequest` makes of a request. */
+import type { Known } from '../derivation/quantity';
+import type { RefrigerantId } from '../refrigerants/catalogue';
+import type { UsedReadingId } from './assumed-uncertainty';
+import type { SetupField } from './codes';
+import type { Procedure } from './procedure';
+import type {
+  HighSidePort,
+  LeakSearch,
+  MeteringDevice,
+  Mode,
+  PreflightItem,
+  PreflightState,
+  Stage,
+  SystemKind,
+} from './request';
+
+export interface CheckReading {
+  /** K, absolute Pa, fraction or m³/s by the quantity. */
+  readonly quantity: Known;
+  readonly ageSeconds?: number;
+  /** Smallest step shown, in the SI unit of the quantity; 0 when not known. */
+  readonly resolution: number;
+}
+
+export type CheckReadings = Readonly<Partial<Record<UsedReadingId, CheckReading>>>;
+
+export interface CheckSetup {
+  readonly refrigerant: RefrigerantId;
+  readonly meteringDevice: MeteringDevice;
+  readonly mode: Mode;
+  readonly kind: SystemKind;
+  readonly stage: Stage;
+  readonly highSidePort: HighSidePort;
+  /** What was left out and taken by default, or is not known. */
+  readonly assumed: readonly SetupField[];
+  readonly atmosphere: Known;
+  readonly elevationAssumed: boolean;
+  readonly targetSuperheat?: Known;
+  readonly targetSubcooling?: Known;
+  readonly targetSubcoolingPort: Exclude<HighSidePort, 'none'>;
+  readonly superheatRange?: { readonly lowK: number; readonly highK: number };
+  readonly nominalCapacityW?: number;
+  readonly designAirflowM3PerS?: number;
+  readonly factoryChargeKg?: number;
+  /** Absolute. */
+  readonly maxHighPressurePa?: number;
+  readonly chargeMode?: boolean;
+  readonly liftM?: number;
+}
+
+export interface CheckVisit {
+  readonly runningMinutes?: number;
+  readonly lowestReturn?: Known;
+  readonly instrumentsCheckedDaysAgo?: number;
+  readonly preflight: Readonly<Partial<Record<PreflightItem, PreflightState>>>;
+  readonly leakSearch?: LeakSearch;
+  readonly addedThisVisitKg: number;
+  readonly additionsOnEarlierVisits: number;
+  readonly commissioning: boolean;
+  readonly hoursOff: number;
+  readonly headRaised: boolean;
+  readonly iceSeen: boolean;
+  readonly earlier?: { readonly minutesAgo: number; readonly readings: CheckReadings };
+}
+
+export interface CheckInput {
+  readonly procedure: Procedure;
+  readonly setup: CheckSetup;
+  readonly visit: CheckVisit;
+  readonly readings: CheckReadings;
+}
+
+export const isFixedOrifice = (setup: CheckSetup): boolean => setup.meteringDevice === 'fixed-orifice';

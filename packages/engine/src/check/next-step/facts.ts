@@ -1,0 +1,173 @@
+/** What the next-step table looks at: a handful of closed facts, each with a few values, drawn from the finished criteria. */
+import { isKnown } from '../../derivation/quantity';
+import { probabilityBetween } from '../../numerics/normal-distribution';
+import type { RefrigerantId } from '../../refrigerants/catalogue';
+import { differenceToK } from '../../units';
+import { isCoolWeather, lowHead } from '../cautions';
+import type { Caution, OverallFinding, Reason, ReasonCode, Stop, StopCode } from '../codes';
+import { conditionsGate } from '../criteria/conditions';
+import type { AirflowEvidence } from '../criteria/air';
+import type { SuperheatTarget } from '../criteria/charge';
+import type { DerivedQuantities } from '../derived-quantities';
+import type { CheckInput } from '../input';
+import { isFixedOrifice } from '../input';
+import type { CriterionResult } from '../result';
+import { mustShutDownForLiquid } from '../stops';
+
+export interface Facts {
+  readonly unfit: ReasonCode | 'none';
+  readonly impossible: 'none' | 'ports-swapped' | 'saturation-impossible';
+  readonly stop: StopCode | 'none';
+  readonly liquidAtCompressor: 'yes' | 'no';
+  readonly condition: 'open' | 'running-time' | 'return-too-cool' | 'outdoor-too-cold';
+  readonly runningTime: 'recorded' | 'unrecorded';
+  /** Why a required criterion has no number, or `none`. */
+  readonly lacking:
+    'none' | 'readings' | 'stale' | 'nameplate-target' | 'port' | 'outside-tables' | 'suction-line-table';
+  readonly superheatTarget: 'clear' | 'near-floor' | 'none-here' | 'not-used';
+  readonly metering: 'orifice' | 'valve';
+  readonly airflow: AirflowEvidence;
+  readonly airSeen: 'yes' | 'no';
+  readonly quality: 'good' | 'wrong-refrigerant' | 'dry-wick' | 'liquid-colder-than-air' | 'pull-down';
+  readonly overall: OverallFinding;
+  readonly settling: 'possible' | 'impossible';
+  readonly superheat: Side;
+  /** By the target where one was entered; see `subcoolingLevel` for the rest. */
+  readonly subcooling: Side;
+  readonly subcoolingLevel: 'unread' | 'unreadable' | 'low' | 'unclear' | 'clear' | 'high';
+  readonly weather: 'warm' | 'cool' | 'low-head';
+  readonly leak: 'search' | 'found' | 'add' | 'locate' | 'recover';
+  readonly head: 'usual' | 'high';
+}
+
+export type Side = 'unknown' | 'within' | 'above' | 'below';
+
+export interface Evidence {
+  readonly input: CheckInput;
+  readonly derived: DerivedQuantities;
+  readonly criteria: readonly CriterionResult[];
+  readonly target: SuperheatTarget;
+  readonly unfit: Reason | null;
+  readonly impossible: Reason | null;
+  readonly stops: readonly Stop[];
+  readonly cautions: readonly Caution[];
+  readonly airflow: AirflowEvidence;
+  readonly overall: OverallFinding;
+}
+
+/** Up to this target even a right charge runs near the floor (judged from copy A's ±5 and floor 5). */
+const NEAR_FLOOR_TARGET_K = differenceToK(7, 'deltaF');
+/** Steps of one visit add up to at most this part of the factory charge before the charge is recovered and weighed (choice). */
+const MOST_ADDED_FRACTION = 0.1;
+/** Condensing over outdoor air that suggests air in the system when subcooling is high (choice). */
+const HIGH_HEAD_K: Readonly<Partial<Record<RefrigerantId, number>>> = {
+  'R-410A': differenceToK(20, 'deltaF'),
+  'R-32': differenceToK(20, 'deltaF'),
+  'R-454B': differenceToK(20, 'deltaF'),
+};
+const HIGH_HEAD_OTHERS_K = differenceToK(30, 'deltaF');
+
+export function gatherFacts(evidence: Evidence): Facts {
+  const { input, derived, criteria, overall, airflow } = evidence;
+  const { setup, visit, readings } = input;
+  const gate = conditionsGate(input)?.code;
+  return {
+    unfit: evidence.unfit?.code ?? 'none',
+    impossible: impossibility(evidence.impossible),
+    stop: evidence.stops[0]?.code ?? 'none',
+    liquidAtCompressor: mustShutDownForLiquid(derived) ? 'yes' : 'no',
+    condition: gate === 'running-time' || gate === 'return-too-cool' || gate === 'outdoor-too-cold' ? gate : 'open',
+    runningTime: visit.runningMinutes === undefined ? 'unrecorded' : 'recorded',
+    lacking: whatIsLacking(criteria),
+    superheatTarget: superheatTargetFact(evidence),
+    metering: isFixedOrifice(setup) ? 'orifice' : 'valve',
+    airflow,
+    airSeen: readings.supplyDryBulb !== undefined || readings.airflow !== undefined ? 'yes' : 'no',
+    quality: readingQuality(evidence.cautions),
+    overall,
+    settling: canSettle(evidence) ? 'possible' : 'impossible',
+    superheat: sideOf(criteria, isFixedOrifice(setup) ? 'superheat' : 'superheat-window'),
+    subcooling: sideOf(criteria, 'subcooling'),
+    subcoolingLevel: subcoolingLevel(evidence),
+    weather: lowHead(input) !== null ? 'low-head' : isCoolWeather(input) ? 'cool' : 'warm',
+    leak: leakFact(input),
+    head: isHeadHigh(input, derived) ? 'high' : 'usual',
+  };
+}
+
+const impossibility = (reason: Reason | null): Facts['impossible'] =>
+  reason === null ? 'none' : reason.code === 'ports-swapped' ? 'ports-swapped' : 'saturation-impossible';
+
+/** The first required criterion without a finding says what is lacking; readings come before targets. */
+function whatIsLacking(criteria: readonly CriterionResult[]): Facts['lacking'] {
+  const codes = criteria.filter(({ required }) => required).map(({ reason }) => reason?.code);
+  if (codes.includes('readings-missing')) return 'readings';
+  if (codes.includes('stale')) return 'stale';
+  if (codes.includes('target-missing') || codes.includes('target-for-other-port')) return 'nameplate-target';
+  if (codes.includes('liquid-reading-at-discharge-port')) return 'port';
+  if (codes.includes('suction-port-only')) return 'suction-line-table';
+  return codes.includes('outside-curve') || codes.includes('outside-range') ? 'outside-tables' : 'none';
+}
+
+function superheatTargetFact({ input, target, criteria }: Evidence): Facts['superheatTarget'] {
+  if (!isFixedOrifice(input.setup)) return 'not-used';
+  const reason = criteria.find(({ criterion }) => criterion === 'superheat')?.reason?.code;
+  if (target.quantity.state === 'refused' && target.source === 'makers-chart-a') return 'none-here';
+  if (reason === 'no-target-here' || reason === 'target-may-not-exist') return 'none-here';
+  return isKnown(target.quantity) && target.quantity.value <= NEAR_FLOOR_TARGET_K ? 'near-floor' : 'clear';
+}
+
+function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
+  const has = (code: Caution['code']): boolean => cautions.some((caution) => caution.code === code);
+  if (has('wrong-refrigerant')) return 'wrong-refrigerant';
+  if (has('dry-wick')) return 'dry-wick';
+  if (has('liquid-colder-than-air')) return 'liquid-colder-than-air';
+  return has('pull-down') ? 'pull-down' : 'good';
+}
+
+/** Whether these instruments could ever call the criterion within: at the middle of its band. */
+function canSettle({ criteria, input }: Evidence): boolean {
+  const guard = input.procedure.guardProbability.value;
+  return criteria
+    .filter(({ required, finding }) => required && finding === 'too-close-to-call')
+    .every(({ tolerance, deviation, actual }) => {
+      const measured = deviation ?? actual;
+      if (measured === null || tolerance?.low == null || tolerance.high === null) return true;
+      const middle = 0.5 * (tolerance.low + tolerance.high);
+      return probabilityBetween(middle, measured.u, tolerance.low, tolerance.high) >= guard;
+    });
+}
+
+/** A clear finding, else what the rule says of the number. */
+function sideOf(criteria: readonly CriterionResult[], id: CriterionResult['criterion']): Side {
+  const result = criteria.find(({ criterion }) => criterion === id);
+  if (result?.byRule == null || result.tolerance === null) return 'unknown';
+  if (result.byRule === 'passes') return 'within';
+  const measured = result.deviation ?? result.actual;
+  const { high } = result.tolerance;
+  return measured !== null && high !== null && measured.value > high ? 'above' : 'below';
+}
+
+function subcoolingLevel({ input, derived }: Evidence): Facts['subcoolingLevel'] {
+  const { subcooling } = derived;
+  if (!isKnown(subcooling)) return input.setup.highSidePort === 'none' ? 'unreadable' : 'unread';
+  const { lowBelowK, clearFromK, highAboveK } = input.procedure.subcooling;
+  if (subcooling.value < lowBelowK.value) return 'low';
+  if (subcooling.value < clearFromK.value) return 'unclear';
+  return subcooling.value > highAboveK.value ? 'high' : 'clear';
+}
+
+function leakFact({ setup, visit }: CheckInput): Facts['leak'] {
+  if (visit.commissioning) return 'add';
+  if (visit.additionsOnEarlierVisits > 0) return 'locate';
+  if (visit.leakSearch === 'found') return 'found';
+  if (visit.leakSearch !== 'none-found') return 'search';
+  const { factoryChargeKg } = setup;
+  const used = factoryChargeKg !== undefined && visit.addedThisVisitKg >= MOST_ADDED_FRACTION * factoryChargeKg;
+  return used ? 'recover' : 'add';
+}
+
+function isHeadHigh({ setup }: CheckInput, { condensingOverAmbient }: DerivedQuantities): boolean {
+  const limit = HIGH_HEAD_K[setup.refrigerant] ?? HIGH_HEAD_OTHERS_K;
+  return isKnown(condensingOverAmbient) && condensingOverAmbient.value > limit;
+}

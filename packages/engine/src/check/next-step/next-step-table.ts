@@ -1,0 +1,205 @@
+/**
+ * The next step, as data: the first row whose conditions all hold gives the one thing to do and at most two things not to do yet.
+ * Order: fit for the test, impossible readings, stops, conditions, what is missing or stale, airflow, data quality, too close, outside, within.
+ * Reviewed against the fault patterns of the trade (common practice; see each procedure's sources).
+ */
+import type { NextStepCode, NotYetCode } from '../codes';
+import type { Facts } from './facts';
+
+/** Every named fact must have one of the values listed. */
+export type Conditions = { readonly [Name in keyof Facts]?: readonly Facts[Name][] };
+
+export interface NextStepRow {
+  readonly when: Conditions;
+  readonly step: NextStepCode;
+  readonly notYet: readonly NotYetCode[];
+}
+
+const MOVE_NOTHING = ['move-no-refrigerant'] as const;
+const ADD_NOTHING = ['add-nothing'] as const;
+
+const fit: readonly NextStepRow[] = [
+  { when: { unfit: ['heating-mode'] }, step: 'cooling-season-or-weigh-in', notYet: MOVE_NOTHING },
+  { when: { unfit: ['metered-outdoors'] }, step: 'weigh-in', notYet: MOVE_NOTHING },
+  { when: { unfit: ['part-stage'] }, step: 'bring-to-full-stage', notYet: MOVE_NOTHING },
+  { when: { unfit: ['not-in-charge-mode'] }, step: 'bring-to-charge-mode', notYet: MOVE_NOTHING },
+  { when: { unfit: ['not-ready'] }, step: 'mend-before-test', notYet: MOVE_NOTHING },
+  { when: { unfit: ['port-not-stated'] }, step: 'state-the-port', notYet: MOVE_NOTHING },
+];
+
+const impossible: readonly NextStepRow[] = [
+  { when: { impossible: ['ports-swapped'] }, step: 'check-hoses', notYet: ADD_NOTHING },
+  { when: { impossible: ['saturation-impossible'] }, step: 'check-refrigerant-and-probes', notYet: ADD_NOTHING },
+];
+
+/** Liquid return: the first cause that fits; at or under the uncertainty the compressor goes off as well. */
+const liquidReturnCauses: readonly (Pick<NextStepRow, 'step' | 'when'> & { readonly recover: boolean })[] = [
+  { when: { superheatTarget: ['none-here', 'near-floor'] }, step: 'come-back-at-higher-target', recover: false },
+  { when: { airflow: ['split-above', 'measured-low'] }, step: 'reread-wet-bulb-then-airflow', recover: true },
+  { when: { metering: ['orifice'], subcoolingLevel: ['high'] }, step: 'check-overcharge-or-air', recover: true },
+  { when: { metering: ['valve'], subcooling: ['above'] }, step: 'check-overcharge-or-air', recover: true },
+  { when: {}, step: 'check-metering', recover: true },
+];
+
+const stops: readonly NextStepRow[] = [
+  ...liquidReturnCauses.flatMap(({ when, step, recover }): readonly NextStepRow[] => [
+    {
+      when: { stop: ['liquid-return'], liquidAtCompressor: ['yes'], ...when },
+      step,
+      notYet: ['shut-down', 'add-nothing'],
+    },
+    {
+      when: { stop: ['liquid-return'], ...when },
+      step,
+      notYet: recover ? ADD_NOTHING : ['add-nothing', 'recover-nothing'],
+    },
+  ]),
+  {
+    when: { stop: ['freezing'], airflow: ['split-above', 'measured-low'] },
+    step: 'thaw-then-airflow',
+    notYet: ADD_NOTHING,
+  },
+  { when: { stop: ['freezing'], subcoolingLevel: ['low'] }, step: 'thaw-then-leak-search', notYet: ADD_NOTHING },
+  {
+    when: { stop: ['freezing'], subcoolingLevel: ['clear', 'high'], superheat: ['above'] },
+    step: 'thaw-then-drier-drop',
+    notYet: ADD_NOTHING,
+  },
+  { when: { stop: ['freezing'] }, step: 'thaw-then-diagnose', notYet: ADD_NOTHING },
+  { when: { stop: ['high-pressure'] }, step: 'shut-down-high-pressure', notYet: ['shut-down', 'add-nothing'] },
+  { when: { stop: ['hot-discharge'] }, step: 'shut-down-hot-discharge', notYet: ['shut-down'] },
+];
+
+const conditions: readonly NextStepRow[] = [
+  { when: { condition: ['running-time'] }, step: 'run-longer', notYet: ['do-not-judge-yet'] },
+  { when: { condition: ['outdoor-too-cold'] }, step: 'wait-for-warmer-weather', notYet: MOVE_NOTHING },
+  { when: { condition: ['return-too-cool'] }, step: 'warm-the-house', notYet: MOVE_NOTHING },
+  { when: { superheatTarget: ['none-here'] }, step: 'reach-a-target', notYet: MOVE_NOTHING },
+];
+
+const lacking: readonly NextStepRow[] = [
+  { when: { lacking: ['readings'] }, step: 'take-readings', notYet: [] },
+  { when: { lacking: ['stale'] }, step: 'take-readings-again', notYet: MOVE_NOTHING },
+  { when: { lacking: ['nameplate-target'] }, step: 'find-nameplate-target', notYet: MOVE_NOTHING },
+  { when: { lacking: ['port'] }, step: 'read-discharge-pressure', notYet: MOVE_NOTHING },
+  { when: { lacking: ['suction-line-table'] }, step: 'find-suction-line-table', notYet: MOVE_NOTHING },
+  { when: { lacking: ['outside-tables'] }, step: 'check-refrigerant-and-probes', notYet: MOVE_NOTHING },
+  { when: { runningTime: ['unrecorded'] }, step: 'record-conditions', notYet: MOVE_NOTHING },
+];
+
+const airflow: readonly NextStepRow[] = [
+  { when: { airflow: ['measured-low'] }, step: 'raise-airflow', notYet: MOVE_NOTHING },
+  {
+    when: { airflow: ['split-above'], metering: ['orifice'], superheat: ['above'] },
+    step: 'suspect-probes',
+    notYet: MOVE_NOTHING,
+  },
+  { when: { airflow: ['split-above'] }, step: 'reread-wet-bulb-then-airflow', notYet: MOVE_NOTHING },
+];
+
+const quality: readonly NextStepRow[] = [
+  { when: { quality: ['wrong-refrigerant'] }, step: 'confirm-refrigerant', notYet: MOVE_NOTHING },
+  { when: { quality: ['dry-wick'] }, step: 'wet-the-wick', notYet: MOVE_NOTHING },
+  { when: { quality: ['liquid-colder-than-air'] }, step: 'place-liquid-probe-again', notYet: MOVE_NOTHING },
+  { when: { quality: ['pull-down'] }, step: 'read-twice', notYet: MOVE_NOTHING },
+];
+
+const tooClose: readonly NextStepRow[] = [
+  {
+    when: { overall: ['too-close-to-call'], settling: ['impossible'] },
+    step: 'settle-with-better-instrument',
+    notYet: MOVE_NOTHING,
+  },
+  { when: { overall: ['too-close-to-call'] }, step: 'settle-with-another-reading', notYet: MOVE_NOTHING },
+];
+
+/** Adding comes after a search for the leak, in small steps, and only so often. */
+const lowCharge = (when: Conditions): readonly NextStepRow[] => [
+  { when: { ...when, leak: ['search'] }, step: 'leak-first', notYet: ADD_NOTHING },
+  { when: { ...when, leak: ['found'] }, step: 'mend-recover-weigh-in', notYet: ADD_NOTHING },
+  { when: { ...when, leak: ['locate'] }, step: 'locate-mend-weigh-in', notYet: ADD_NOTHING },
+  { when: { ...when, leak: ['recover'] }, step: 'recover-and-weigh-in', notYet: ADD_NOTHING },
+  { when: { ...when, leak: ['add'] }, step: 'add-in-steps', notYet: [] },
+];
+
+const outside: readonly NextStepRow[] = [
+  { when: { overall: ['above', 'below'], weather: ['low-head'] }, step: 'raise-head', notYet: MOVE_NOTHING },
+  { when: { overall: ['above', 'below'], weather: ['cool'] }, step: 'cool-weather-hold', notYet: MOVE_NOTHING },
+];
+
+const orifice: readonly NextStepRow[] = [
+  { when: { overall: ['above'], subcoolingLevel: ['unread'] }, step: 'read-liquid-pair', notYet: ADD_NOTHING },
+  ...lowCharge({ overall: ['above'], subcoolingLevel: ['low'] }),
+  {
+    when: { overall: ['above'], subcoolingLevel: ['unclear', 'unreadable'] },
+    step: 'measure-drier-drop',
+    notYet: ADD_NOTHING,
+  },
+  { when: { overall: ['above'] }, step: 'find-restriction', notYet: MOVE_NOTHING },
+  {
+    when: { overall: ['below'], subcoolingLevel: ['high'] },
+    step: 'air-test-then-recover',
+    notYet: ['add-nothing', 'recover-nothing'],
+  },
+  { when: { overall: ['below'] }, step: 'check-orifice-compressor-condenser', notYet: MOVE_NOTHING },
+];
+
+const valve: readonly NextStepRow[] = [
+  { when: { subcooling: ['below'], superheat: ['below'] }, step: 'check-bulb-and-valve', notYet: MOVE_NOTHING },
+  ...lowCharge({ subcooling: ['below'] }),
+  { when: { subcooling: ['within'], superheat: ['above'] }, step: 'check-bulb-screen-drier', notYet: MOVE_NOTHING },
+  { when: { subcooling: ['within'], superheat: ['below'] }, step: 'check-bulb-and-airflow', notYet: MOVE_NOTHING },
+  {
+    when: { subcooling: ['above'], superheat: ['above'] },
+    step: 'find-restriction-recover-nothing',
+    notYet: ['add-nothing', 'recover-nothing'],
+  },
+  {
+    when: { subcooling: ['above'], superheat: ['below'] },
+    step: 'check-bulb-then-recover',
+    notYet: ['add-nothing', 'recover-nothing'],
+  },
+  {
+    when: { subcooling: ['above'], head: ['high'] },
+    step: 'air-test-then-recover',
+    notYet: ['add-nothing', 'recover-nothing'],
+  },
+  { when: { subcooling: ['above'] }, step: 'recover-in-steps', notYet: ADD_NOTHING },
+];
+
+const forMetering = (metering: Facts['metering'], rows: readonly NextStepRow[]): readonly NextStepRow[] =>
+  rows.map(({ when, ...rest }) => ({ ...rest, when: { overall: ['above', 'below'], ...when, metering: [metering] } }));
+
+const within: readonly NextStepRow[] = [
+  {
+    when: { overall: ['within'], metering: ['orifice'], airSeen: ['no'] },
+    step: 'read-supply-or-airflow',
+    notYet: [],
+  },
+  { when: { overall: ['within'] }, step: 'record', notYet: [] },
+];
+
+export const NEXT_STEP_TABLE: readonly NextStepRow[] = [
+  ...fit,
+  ...impossible,
+  ...stops,
+  ...conditions,
+  ...lacking,
+  ...airflow,
+  ...quality,
+  ...tooClose,
+  ...outside,
+  ...forMetering('orifice', orifice),
+  ...forMetering('valve', valve),
+  ...within,
+];
+
+/** The first row that holds. The table is meant to have one for every reachable combination: none is a defect, and throws. */
+export function findRow(facts: Facts): NextStepRow {
+  const row = NEXT_STEP_TABLE.find(({ when }) => holds(when, facts));
+  if (row === undefined) throw new RangeError(`no next step for ${JSON.stringify(facts)}`);
+  return row;
+}
+
+const holds = (when: Conditions, facts: Facts): boolean =>
+  (Object.keys(when) as (keyof Facts)[]).every((name) => (when[name] as readonly unknown[]).includes(facts[name]));

@@ -1,0 +1,45 @@
+/** The next step of a check: the row of the table that holds, with the figures its sentence needs. */
+import type { CriterionResult, NextStep } from '../result';
+import type { NextStepCode, NextStepFigures, NextStepMessage } from '../codes';
+import type { CheckInput } from '../input';
+import type { ReadingId } from '../readings';
+import type { Evidence } from './facts';
+import { gatherFacts } from './facts';
+import { findRow } from './next-step-table';
+
+export function findNextStep(evidence: Evidence): NextStep {
+  const { step, notYet } = findRow(gatherFacts(evidence));
+  return { ...withFigures(step, evidence), notYet };
+}
+
+type PlainStep = { [Code in NextStepCode]: [NextStepFigures[Code]] extends [never] ? Code : never }[NextStepCode];
+
+function withFigures(code: NextStepCode, { input, criteria, unfit }: Evidence): NextStepMessage {
+  switch (code) {
+    case 'run-longer':
+      return { code, figures: { minutes: { kind: 'minutes', value: minutesLeft(input) } } };
+    case 'take-readings':
+    case 'take-readings-again':
+      return { code, figures: { readings: { kind: 'readings', value: readingsToTake(criteria) } } };
+    case 'mend-before-test':
+      return {
+        code,
+        figures: { items: unfit?.code === 'not-ready' ? unfit.figures.items : { kind: 'preflight', value: [] } },
+      };
+    default:
+      // a union of messages without figures; the compiler cannot spread the code over its members
+      return { code: code satisfies PlainStep, figures: {} } as NextStepMessage;
+  }
+}
+
+const minutesLeft = ({ visit, procedure }: CheckInput): number =>
+  procedure.conditions.leastRunningMinutes.value - (visit.runningMinutes ?? 0);
+
+/** All that required criteria wait for, in the order of the criteria. */
+function readingsToTake(criteria: readonly CriterionResult[]): readonly ReadingId[] {
+  const readings = criteria.flatMap(({ required, reason }) => {
+    if (!required || (reason?.code !== 'readings-missing' && reason?.code !== 'stale')) return [];
+    return reason.figures.readings.kind === 'readings' ? reason.figures.readings.value : [];
+  });
+  return [...new Set(readings)];
+}

@@ -1,0 +1,46 @@
+/** General rules, not those of one maker: what a careful practitioner holds a system to when the maker's own data are not at hand. Version 1. */
+import { flowToM3PerS, powerToW } from '../../units';
+import type { Procedure } from '../procedure';
+import { differenceRule, plainRule, temperatureRule } from '../procedure';
+
+const NEW_HOMES_CHECKLIST =
+  'Federal new-homes program, HVAC system checklist for raters, rev. 07, items 1.2.11 and 1.2.12';
+const CEC_2008 = 'CEC Reference Residential Appendices (2008), RA3.2';
+const CEC_2019 = 'CEC certificates of verification (2019), RA3.2';
+const CHART_A = "Makers' superheat chart, copy A (installation manual 506374-01, 03/2010, p. 20)";
+const CHOICE = 'Our choice, open to better evidence';
+const PRACTICE = 'Common practice, no source';
+
+export const GENERAL_RULES: Procedure = {
+  id: 'general-rules',
+  version: 1,
+  guardProbability: plainRule(0.8, '0.80', ['choice', CHOICE]),
+  superheat: {
+    toleranceK: differenceRule(5, 'deltaF', ['read', `${CHART_A}; ${NEW_HOMES_CHECKLIST}`]),
+    floorK: differenceRule(5, 'deltaF', ['read', CHART_A]),
+  },
+  subcooling: {
+    toleranceK: differenceRule(3, 'deltaF', ['read', NEW_HOMES_CHECKLIST]),
+    lowBelowK: differenceRule(5, 'deltaF', ['choice', CHOICE]),
+    clearFromK: differenceRule(8, 'deltaF', ['choice', CHOICE]),
+    highAboveK: differenceRule(14, 'deltaF', ['choice', CHOICE]),
+  },
+  temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', CEC_2008]) },
+  superheatWindow: {
+    lowK: differenceRule(4, 'deltaF', ['read', CEC_2008]),
+    highK: differenceRule(25, 'deltaF', ['read', CEC_2008]),
+  },
+  airflow: {
+    leastM3PerSPerW: plainRule(flowToM3PerS(350, 'cfm') / powerToW(1, 'ton'), '350 cfm/ton', ['read', CEC_2019]),
+    leastDesignFraction: plainRule(0.85, '−15 % of design', ['memory', 'ANSI/ACCA 5 QI']),
+  },
+  conditions: {
+    leastOutdoorK: temperatureRule(55, 'degF', ['read', CEC_2008]),
+    coolBelowK: temperatureRule(70, 'degF', ['choice', CHOICE]),
+    leastReturnK: temperatureRule(70, 'degF', ['read', CEC_2019]),
+    leastRunningMinutes: plainRule(15, '15 min', ['read', CEC_2008]),
+  },
+  instruments: { cautionAfterDays: plainRule(365, '12 months', ['choice', CHOICE]) },
+  mostReadingAgeSeconds: plainRule(600, '10 min', ['practice', PRACTICE]),
+  mostProbabilityOfNoTarget: plainRule(0.2, '0.20', ['choice', CHOICE]),
+};

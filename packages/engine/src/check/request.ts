@@ -1,0 +1,126 @@
+/**
+ * What a check is given, as a person or an API client states it: numbers with the units they were read in. The shape is the public contract of
+ * `POST /api/v1/evaluations`; `read-request.ts` turns it into SI quantities and names every fault.
+ */
+import type {
+  DifferenceUnit,
+  FlowUnit,
+  LengthUnit,
+  MassUnit,
+  PowerUnit,
+  PressureDifferenceUnit,
+  PressureUnit,
+  StaticPressureUnit,
+  TemperatureUnit,
+} from '../units';
+import type { ReadingId } from './readings';
+
+export const METERING_DEVICES = ['fixed-orifice', 'txv', 'eev'] as const;
+export type MeteringDevice = (typeof METERING_DEVICES)[number];
+export const MODES = ['cooling', 'heating'] as const;
+export type Mode = (typeof MODES)[number];
+export const SYSTEM_KINDS = ['split', 'packaged', 'mini-split', 'multi-split'] as const;
+export type SystemKind = (typeof SYSTEM_KINDS)[number];
+export const STAGES = ['full', 'part', 'unknown'] as const;
+export type Stage = (typeof STAGES)[number];
+export const HIGH_SIDE_PORTS = ['liquid', 'discharge', 'none'] as const;
+export type HighSidePort = (typeof HIGH_SIDE_PORTS)[number];
+export const PREFLIGHT_ITEMS = [
+  'filterAndCoil',
+  'panelsOn',
+  'fullStage',
+  'economizerShut',
+  'gaugeZeroed',
+  'condenserDryAndClean',
+  'fanSteady',
+  'accessHole',
+] as const;
+export type PreflightItem = (typeof PREFLIGHT_ITEMS)[number];
+export const PREFLIGHT_STATES = ['ok', 'not-ok', 'not-checked'] as const;
+export type PreflightState = (typeof PREFLIGHT_STATES)[number];
+export const LEAK_SEARCHES = ['none-found', 'found', 'not-done'] as const;
+export type LeakSearch = (typeof LEAK_SEARCHES)[number];
+
+export interface Amount<Unit extends string> {
+  readonly value: number;
+  readonly unit: Unit;
+}
+
+export type TemperatureAmount = Amount<TemperatureUnit>;
+/** A temperature difference; kelvin is left to temperatures, so that a slip of scale is caught. */
+export type DifferenceAmount = Amount<Exclude<DifferenceUnit, 'K'>>;
+
+export type ReadingUnit = TemperatureUnit | PressureUnit | FlowUnit | StaticPressureUnit | '%' | 'A' | 'V';
+export type PlusMinusUnit =
+  Exclude<DifferenceUnit, 'K'> | PressureDifferenceUnit | FlowUnit | StaticPressureUnit | '%' | 'A' | 'V';
+
+export interface PlusMinus extends Amount<PlusMinusUnit> {
+  /** `limit`: the maker's ±, rectangular (the default); `k2`: an expanded uncertainty, normal. */
+  readonly kind?: 'limit' | 'k2';
+}
+
+export interface ReadingInput extends Amount<ReadingUnit> {
+  readonly plusMinus?: PlusMinus;
+  readonly ageSeconds?: number;
+  /** Readings of one quantity kind by one instrument share its error. */
+  readonly instrumentId?: string;
+  /** Smallest step the instrument shows, in the unit of the reading. */
+  readonly resolution?: number;
+}
+
+export type ReadingsInput = Readonly<Partial<Record<ReadingId, ReadingInput>>>;
+
+export interface SetupInput {
+  readonly refrigerant: string;
+  readonly meteringDevice: MeteringDevice;
+  readonly mode?: Mode;
+  readonly kind?: SystemKind;
+  readonly stage?: Stage;
+  readonly highSidePort?: HighSidePort;
+  readonly elevation?: Amount<LengthUnit>;
+  /** Local (station) pressure, absolute; takes the place of the elevation. */
+  readonly stationPressure?: Amount<PressureUnit>;
+  readonly targetSuperheat?: DifferenceAmount;
+  readonly targetSubcooling?: DifferenceAmount;
+  readonly targetSubcoolingPort?: Exclude<HighSidePort, 'none'>;
+  /** The maker's superheat range for the valve, in place of the procedure's window. */
+  readonly superheatRange?: {
+    readonly low: number;
+    readonly high: number;
+    readonly unit: Exclude<DifferenceUnit, 'K'>;
+  };
+  readonly nominalCapacity?: Amount<PowerUnit>;
+  readonly designAirflow?: Amount<FlowUnit>;
+  readonly factoryCharge?: Amount<MassUnit>;
+  readonly maxHighPressure?: Amount<PressureUnit>;
+  /** Whether an inverter runs in the maker's charge mode; leave out for a single-speed unit. */
+  readonly chargeMode?: boolean;
+  readonly lineSet?: {
+    readonly length?: Amount<LengthUnit>;
+    readonly lift?: Amount<LengthUnit>;
+    readonly included?: Amount<LengthUnit>;
+  };
+}
+
+export interface VisitInput {
+  readonly runningMinutes?: number;
+  readonly lowestReturnDryBulb?: TemperatureAmount;
+  readonly instrumentsCheckedDaysAgo?: number;
+  readonly preflight?: Readonly<Partial<Record<PreflightItem, PreflightState>>>;
+  readonly leakSearch?: LeakSearch;
+  readonly addedThisVisit?: Amount<MassUnit>;
+  readonly addedBefore?: Amount<MassUnit>;
+  readonly additionsOnEarlierVisits?: number;
+  readonly commissioning?: boolean;
+  readonly hoursOff?: number;
+  readonly headRaised?: boolean;
+  readonly iceSeen?: boolean;
+  readonly earlier?: { readonly minutesAgo: number; readonly readings: ReadingsInput };
+}
+
+export interface EvaluationRequest {
+  readonly procedure?: string;
+  readonly setup: SetupInput;
+  readonly visit?: VisitInput;
+  readonly readings: ReadingsInput;
+}

@@ -1,0 +1,70 @@
+import type { Known } from '../derivation/quantity';
+import type { DerivationStep } from '../derivation/steps';
+import type { Caution, CriterionId, Finding, NextStepMessage, NotYetCode, OverallFinding, Reason, Stop } from './codes';
+
+export const DERIVED_IDS = [
+  'evaporatingDewTemperature',
+  'condensingBubbleTemperature',
+  'superheat',
+  'subcooling',
+  'temperatureSplit',
+  'condensingOverAmbient',
+  'returnWetBulb',
+  'returnRelativeHumidity',
+  'returnHumidityRatio',
+  'returnEnthalpy',
+] as const;
+export type DerivedId = (typeof DERIVED_IDS)[number];
+
+export type TargetSource =
+  | 'entered'
+  | 'makers-chart-a'
+  | 'split-table'
+  | 'procedure-window'
+  | 'entered-range'
+  | 'design-airflow'
+  | 'airflow-per-capacity';
+
+/** Limits of the deviation, in its unit; `null` on a side without a limit. */
+export interface Tolerance {
+  readonly low: number | null;
+  readonly high: number | null;
+  /** The lower limit is the superheat floor, not the tolerance of the target. */
+  readonly floored: boolean;
+}
+
+export interface CriterionResult {
+  readonly criterion: CriterionId;
+  /** Whether the overall finding waits for this criterion. */
+  readonly required: boolean;
+  readonly actual: Known | null;
+  readonly target: Known | null;
+  readonly targetSource: TargetSource | null;
+  readonly deviation: Known | null;
+  readonly tolerance: Tolerance | null;
+  readonly byRule: 'passes' | 'fails' | null;
+  /** Probability that the true deviation lies inside the tolerance and a target exists (JCGM 106:2012). */
+  readonly probabilityWithin: number | null;
+  readonly finding: Finding;
+  readonly reason: Reason | null;
+}
+
+export type NextStep = NextStepMessage & {
+  /** At most two, shown before the step itself. */
+  readonly notYet: readonly NotYetCode[];
+};
+
+export interface CheckResult {
+  readonly engineVersion: string;
+  readonly procedure: { readonly id: string; readonly version: number };
+  /** Holds only what could be computed. */
+  readonly derived: Readonly<Partial<Record<DerivedId, Known>>>;
+  readonly criteria: readonly CriterionResult[];
+  readonly overall: {
+    readonly finding: OverallFinding;
+    readonly nextStep: NextStep;
+    readonly stops: readonly Stop[];
+    readonly cautions: readonly Caution[];
+  };
+  readonly derivation: readonly DerivationStep[];
+}

@@ -1,0 +1,87 @@
+import { EngineError } from '../errors';
+import type { Formula } from './formula';
+import type { ErrorPart, Known, Quantity } from './quantity';
+import { known } from './quantity';
+
+/** Below these a secant measures rounding noise instead of a slope. */
+const SMALLEST_RELATIVE_STEP = 1e-6;
+const SMALLEST_STEP = 1e-9;
+
+/**
+ * Value, uncertainty and derivation of a formula in one go. Slopes are secants over ± one standard uncertainty, so that a kink of a table
+ * counts as far as the reading can reach it; where one side is refused the other side alone gives the slope.
+ *
+ * A missing input makes the result missing; a refused input, or a formula that throws `EngineError`, makes it refused.
+ * Source: law of propagation of uncertainty, JCGM 100:2008, 5.1.2 and 5.2.2, with secants in place of derivatives (5.1.3, note 2).
+ */
+export function derive<Name extends string>(
+  formula: Formula<Name>,
+  from: Readonly<Record<Name, Quantity>>,
+  parts: readonly ErrorPart[] = [],
+): Quantity {
+  const names = Object.keys(formula.symbols) as Name[];
+  const lacking: string[] = [];
+  for (const name of names) {
+    const input = from[name];
+    if (input.state === 'missing') lacking.push(...input.inputs);
+  }
+  if (lacking.length > 0) return { state: 'missing', inputs: [...new Set(lacking)] };
+  const at = {} as Record<Name, number>;
+  for (const name of names) {
+    const input = from[name];
+    if (input.state === 'refused') return input;
+    if (input.state === 'known') at[name] = input.value;
+  }
+  try {
+    const value = evaluate(formula, at);
+    const contributions = new Map<string, number>();
+    for (const name of names) {
+      const input = from[name] as Known;
+      if (input.u === 0) continue;
+      const slope = secantSlope(formula, at, name, { value, u: input.u });
+      for (const [key, c] of input.contributions) contributions.set(key, (contributions.get(key) ?? 0) + slope * c);
+    }
+    const step = { type: 'derived', formula, from: from as Readonly<Record<Name, Known>>, parts } as const;
+    return known({ kind: formula.gives, value, contributions, step, parts });
+  } catch (error) {
+    // the physics' own refusal becomes data; anything else is a bug
+    if (error instanceof EngineError) return { state: 'refused', error };
+    throw error;
+  }
+}
+
+function evaluate<Name extends string>(formula: Formula<Name>, at: Readonly<Record<Name, number>>): number {
+  const value = formula.of(at);
+  if (!Number.isFinite(value)) throw new RangeError(`formula ${formula.id} gave ${value}`);
+  return value;
+}
+
+function secantSlope<Name extends string>(
+  formula: Formula<Name>,
+  at: Record<Name, number>,
+  name: Name,
+  centre: { readonly value: number; readonly u: number },
+): number {
+  const x = at[name];
+  const step = Math.max(centre.u, SMALLEST_RELATIVE_STEP * Math.abs(x), SMALLEST_STEP);
+  const above = evaluateOrRefuse(formula, { ...at, [name]: x + step });
+  const below = evaluateOrRefuse(formula, { ...at, [name]: x - step });
+  if (above instanceof EngineError) {
+    if (below instanceof EngineError) throw above;
+    return (centre.value - below) / step;
+  }
+  return below instanceof EngineError ? (above - centre.value) / step : (above - below) / (2 * step);
+}
+
+function evaluateOrRefuse<Name extends string>(
+  formula: Formula<Name>,
+  at: Readonly<Record<Name, number>>,
+): number | EngineError {
+  try {
+    return evaluate(formula, at);
+  } catch (error) {
+    // a refusal on one side of the secant is an answer: the other side gives the slope
+    if (error instanceof EngineError) return error;
+    throw error;
+  }
+}

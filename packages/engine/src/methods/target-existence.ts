@@ -1,0 +1,112 @@
+/**
+ * How probable it is that a chart has no target at the true conditions, given how well they are known: near a dash a reading that is off by a
+ * degree stands on the other side.
+ */
+import { standardNormalCdf } from '../numerics/normal-distribution';
+import { temperatureFromK } from '../units';
+import type { Chart, Corners } from './chart';
+import { cornersOf } from './chart';
+
+interface Normal {
+  readonly mean: number;
+  readonly u: number;
+}
+
+/** Beyond this many standard uncertainties lies less than 6e-7 of the probability. */
+const REACH = 5;
+/** Integration panels of at most this many standard uncertainties: the 3-point rule is then good to 1e-4. */
+const PANEL = 0.75;
+const GAUSS_3: readonly (readonly [x: number, weight: number])[] = [
+  [-Math.sqrt(0.6), 5 / 9],
+  [0, 8 / 9],
+  [Math.sqrt(0.6), 5 / 9],
+];
+
+/** A standard uncertainty that stands for an exactly known coordinate, in °F. */
+const EXACT_F = 1e-7;
+
+/**
+ * Probability in [0, 1] that the chart has no value at the true row and column temperature, both taken as independent normal variables
+ * with the given means and standard uncertainties in K (JCGM 106:2012, 7.2, over two variables). Integrated row by row; exact along the columns.
+ */
+export function probabilityOfNoTarget(
+  chart: Chart,
+  at: { readonly rowK: number; readonly rowUK: number; readonly columnK: number; readonly columnUK: number },
+): number {
+  const row: Normal = { mean: temperatureFromK(at.rowK, 'degF'), u: Math.max(1.8 * at.rowUK, EXACT_F) };
+  const column: Normal = { mean: temperatureFromK(at.columnK, 'degF'), u: Math.max(1.8 * at.columnUK, EXACT_F) };
+  if (at.rowUK === 0 && at.columnUK === 0) return 0;
+  if (allPrintedWithinReach(chart, row, column)) return 0;
+  const cdfAtColumns = chart.columnsF.map((c) => standardNormalCdf((c - column.mean) / column.u));
+  let exists = 0;
+  for (let r = 0; r < chart.rowsF.length - 1; r++) {
+    const low = chart.rowsF[r]!;
+    const height = chart.rowsF[r + 1]! - low;
+    const from = Math.max(low, row.mean - REACH * row.u);
+    const to = Math.min(low + height, row.mean + REACH * row.u);
+    if (to <= from) continue;
+    const panels = Math.ceil((to - from) / (PANEL * row.u));
+    const half = (0.5 * (to - from)) / panels;
+    for (let p = 0; p < panels; p++) {
+      const middle = from + (2 * p + 1) * half;
+      for (const [x, weight] of GAUSS_3) {
+        const at = middle + half * x;
+        const z = (at - row.mean) / row.u;
+        const density = Math.exp(-0.5 * z * z) / (Math.sqrt(2 * Math.PI) * row.u);
+        exists += half * weight * density * probabilityInRow(chart, r, (at - low) / height, column, cdfAtColumns);
+      }
+    }
+  }
+  return Math.min(Math.max(1 - exists, 0), 1);
+}
+
+/** Probability over the column temperature that a value stands at this height of a row of cells. */
+function probabilityInRow(
+  chart: Chart,
+  row: number,
+  fraction: number,
+  column: Normal,
+  cdfAtColumns: readonly number[],
+): number {
+  let sum = 0;
+  for (let c = 0; c < chart.columnsF.length - 1; c++) {
+    const left = cdfAtColumns[c]!;
+    const right = cdfAtColumns[c + 1]!;
+    if (right - left < 1e-9) continue;
+    const [from, to] = printedPart(cornersOf(chart, row, c), fraction);
+    if (to <= from) continue;
+    const low = chart.columnsF[c]!;
+    const width = chart.columnsF[c + 1]! - low;
+    const cdf = (part: number): number => standardNormalCdf((low + part * width - column.mean) / column.u);
+    sum += (to === 1 ? right : cdf(to)) - (from === 0 ? left : cdf(from));
+  }
+  return sum;
+}
+
+/** The part of a cell's width where a value stands at row fraction `r`: all of it, one side of the triangle's edge, or nothing. */
+function printedPart(corners: Corners, r: number): readonly [from: number, to: number] {
+  const { c00, c01, c10, c11 } = corners;
+  const dashes = [c00, c01, c10, c11].filter((value) => value === null).length;
+  if (dashes === 0) return [0, 1];
+  if (dashes > 1) return [0, 0];
+  if (c00 === null) return [1 - r, 1];
+  if (c11 === null) return [0, 1 - r];
+  if (c01 === null) return [0, r];
+  return [r, 1];
+}
+
+function allPrintedWithinReach(chart: Chart, row: Normal, column: Normal): boolean {
+  const within = (axis: readonly number[], { mean, u }: Normal): boolean =>
+    mean - REACH * u >= axis[0]! && mean + REACH * u <= axis[axis.length - 1]!;
+  if (!within(chart.rowsF, row) || !within(chart.columnsF, column)) return false;
+  const touches = (axis: readonly number[], i: number, { mean, u }: Normal): boolean =>
+    axis[i + 1]! >= mean - REACH * u && axis[i]! <= mean + REACH * u;
+  for (let r = 0; r < chart.rowsF.length - 1; r++) {
+    if (!touches(chart.rowsF, r, row)) continue;
+    for (let c = 0; c < chart.columnsF.length - 1; c++) {
+      if (!touches(chart.columnsF, c, column)) continue;
+      if (Object.values(cornersOf(chart, r, c)).includes(null)) return false;
+    }
+  }
+  return true;
+}

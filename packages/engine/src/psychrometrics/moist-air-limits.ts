@@ -1,0 +1,56 @@
+import { assertInRange, EngineError } from '../errors';
+import { temperatureToK } from '../units/temperature';
+
+/** Dry bulbs this layer answers for, −60 to 90 °C: the span of Table 2 of ASHRAE Fundamentals (2017) ch. 1 (span from memory). */
+export const DRY_BULB_LIMITS = {
+  quantity: 'dryBulbK',
+  min: temperatureToK(-60, 'degC'),
+  max: temperatureToK(90, 'degC'),
+  reason: 'outside-moist-air-range',
+} as const;
+
+/** Total pressures this layer answers for, 50 to 110 kPa: elevations of about −700 to 5,500 m (our choice). */
+export const PRESSURE_LIMITS = {
+  quantity: 'pressurePa',
+  min: 50e3,
+  max: 110e3,
+  reason: 'outside-moist-air-range',
+} as const;
+
+export const RELATIVE_HUMIDITY_LIMITS = {
+  quantity: 'relativeHumidityRatio',
+  min: 0,
+  max: 1,
+  reason: 'outside-0-to-1',
+} as const;
+
+export const VAPOUR_PRESSURE_LIMITS = {
+  quantity: 'vapourPressurePa',
+  min: 0,
+  reason: 'negative-or-not-finite',
+} as const;
+
+export const HUMIDITY_RATIO_LIMITS = {
+  quantity: 'humidityRatio',
+  min: 0,
+  max: Number.MAX_VALUE,
+  reason: 'negative-or-not-finite',
+} as const;
+
+/** Refuses a dry bulb or a pressure outside the range of this layer, NaN included. */
+export function assertMoistAirRange(dryBulbK: number, pressurePa: number): void {
+  assertInRange(dryBulbK, DRY_BULB_LIMITS);
+  assertInRange(pressurePa, PRESSURE_LIMITS);
+}
+
+/** Refuses water vapour that would leave no dry air: its pressure must stay below the total pressure. */
+export function assertBelowTotalPressure(vapourPressurePa: number, pressurePa: number): void {
+  if (vapourPressurePa < pressurePa) return;
+  const reason = 'vapour-pressure-not-below-total';
+  throw new EngineError('inconsistent-inputs', {
+    quantity: 'vapourPressurePa',
+    value: vapourPressurePa,
+    max: pressurePa,
+    reason,
+  });
+}
