@@ -111,6 +111,11 @@ export default defineConfig(
     },
   },
   {
+    // Scripts of a service worker.
+    files: ['apps/web/public/**/*.js'],
+    languageOptions: { sourceType: 'script', globals: { importScripts: 'readonly', self: 'readonly' } },
+  },
+  {
     files: TYPESCRIPT,
     extends: [recommended, tseslint.configs.recommendedTypeChecked],
     languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
@@ -127,6 +132,11 @@ export default defineConfig(
       '@typescript-eslint/consistent-type-imports': 'error',
       '@typescript-eslint/no-floating-promises': 'error',
       '@typescript-eslint/switch-exhaustiveness-check': 'error',
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        // `const { dropped: _, ...rest } = whole` is how a field is left out.
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_', destructuredArrayIgnorePattern: '^_' },
+      ],
       // Validators of Angular are static methods given as values.
       '@typescript-eslint/unbound-method': 'off',
       'import-x/no-cycle': 'error',

@@ -6,7 +6,6 @@ const project = (name: string, root: string, include: string[], testTimeout = 20
 });
 
 export default defineConfig({
-  resolve: { tsconfigPaths: true },
   test: {
     environment: 'node',
     projects: [

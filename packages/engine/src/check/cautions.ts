@@ -6,6 +6,7 @@ import type { RefrigerantId } from '../refrigerants/catalogue';
 import { differenceToK, lengthToM, pressureDifferenceToPa } from '../units';
 import type { UsedReadingId } from './assumed-uncertainty';
 import type { Caution, CautionCode, Figure } from './codes';
+import { LIMIT_SLACK_K } from './conformance';
 import { conditionsRecorded, nearLimitCautions } from './criteria/conditions';
 import type { AirflowEvidence } from './criteria/air';
 import type { DerivedQuantities } from './derived-quantities';
@@ -77,7 +78,7 @@ function coolingCautions(input: CheckInput, derived: DerivedQuantities, airflow:
     dryWick(input, derived),
     humidityContradiction(input, derived),
     liquidColderThanAir(input),
-    isPullDown(input) ? plain('pull-down') : null,
+    isPullDown(input, derived) ? plain('pull-down') : null,
     coolWeather(input),
     lowHead(input),
     airflow === 'nothing' ? plain('airflow-not-proven') : null,
@@ -98,13 +99,15 @@ function writtenTemperature(
 ): Caution | null {
   const written = readings[id]?.quantity;
   if (written === undefined || !isKnown(right)) return null;
-  const difference = Math.abs(written.value - right.value);
-  if (difference <= WRITTEN_MATCHES_K) return null;
+  const matches = (computed: number): boolean =>
+    Math.abs(written.value - computed) <= WRITTEN_MATCHES_K + LIMIT_SLACK_K;
+  if (matches(right.value)) return null;
   const figures = { written: temperature(written.value), computed: temperature(right.value) };
-  if (isKnown(otherColumn) && Math.abs(written.value - otherColumn.value) <= WRITTEN_MATCHES_K) {
-    return { code: 'wrong-column', figures };
-  }
-  return difference > WRITTEN_DIFFERS_K ? { code: 'wrong-refrigerant', figures } : null;
+  // with a glide below the match the columns do not tell apart which was read
+  const columnsDiffer = isKnown(otherColumn) && Math.abs(right.value - otherColumn.value) > WRITTEN_MATCHES_K;
+  if (columnsDiffer && matches(otherColumn.value)) return { code: 'wrong-column', figures };
+  const differs = Math.abs(written.value - right.value) > WRITTEN_DIFFERS_K + LIMIT_SLACK_K;
+  return differs ? { code: 'wrong-refrigerant', figures } : null;
 }
 
 function flash({ subcooling }: DerivedQuantities): Caution | null {
@@ -123,7 +126,7 @@ function dryWick({ readings }: CheckInput, { returnRelativeHumidity }: DerivedQu
     const wetBulb = readings[wet];
     if (dryBulb === undefined || wetBulb === undefined) return [];
     const step = wetBulb.resolution > 0 ? wetBulb.resolution : USUAL_STEP_K;
-    return dryBulb.quantity.value - wetBulb.quantity.value < step ? [wet] : [];
+    return dryBulb.quantity.value - wetBulb.quantity.value < step - LIMIT_SLACK_K ? [wet] : [];
   });
   const damp = readings.returnWetBulb && isKnown(returnRelativeHumidity) && returnRelativeHumidity.value > DAMP_INDOORS;
   const wicks = damp && !equal.includes('returnWetBulb') ? (['returnWetBulb', ...equal] as const) : equal;
@@ -147,7 +150,9 @@ function humidityContradiction(
 function liquidColderThanAir({ readings }: CheckInput): Caution | null {
   const liquid = readings.liquidLineTemperature?.quantity.value;
   const outdoor = readings.outdoorDryBulb?.quantity.value;
-  if (liquid === undefined || outdoor === undefined || outdoor - liquid <= COLDER_THAN_AIR_K) return null;
+  if (liquid === undefined || outdoor === undefined || outdoor - liquid <= COLDER_THAN_AIR_K + LIMIT_SLACK_K) {
+    return null;
+  }
   return { code: 'liquid-colder-than-air', figures: { liquid: temperature(liquid), outdoor: temperature(outdoor) } };
 }
 
@@ -155,7 +160,11 @@ function liquidColderThanAir({ readings }: CheckInput): Caution | null {
 export function isCoolWeather({ procedure, readings }: CheckInput): boolean {
   const outdoor = readings.outdoorDryBulb?.quantity.value;
   const { leastOutdoorK, coolBelowK } = procedure.conditions;
-  return outdoor !== undefined && outdoor >= leastOutdoorK.value && outdoor < coolBelowK.value;
+  return (
+    outdoor !== undefined &&
+    outdoor >= leastOutdoorK.value - LIMIT_SLACK_K &&
+    outdoor < coolBelowK.value - LIMIT_SLACK_K
+  );
 }
 
 function coolWeather(input: CheckInput): Caution | null {

@@ -14,7 +14,8 @@ export interface Conformance {
 }
 
 /**
- * Guarded decision: *within* at probability `guard` or more, outside at `1 − guard` or less, between them too close to call.
+ * Guarded decision: *within* at probability `guard` or more, outside at `1 − guard` or less, between them too close to call. Outside also needs
+ * the other side to be as improbable: an instrument too poor to tell the sides apart finds neither.
  * `probabilityOfNoTarget` counts as not within.
  */
 export function judgeConformance(input: {
@@ -27,19 +28,17 @@ export function judgeConformance(input: {
   const low = tolerance.low ?? -Infinity;
   const high = tolerance.high ?? Infinity;
   const { value, u } = measured;
-  const passes = value >= low - LIMIT_SLACK_K && value <= high + LIMIT_SLACK_K;
-  const inside = probabilityBetween(value, u, low, high, LIMIT_SLACK_K);
+  const [from, to] = [low - LIMIT_SLACK_K, high + LIMIT_SLACK_K];
+  const passes = value >= from && value <= to;
+  const inside = probabilityBetween(value, u, from, to);
   const probabilityWithin = inside * (1 - probabilityOfNoTarget);
   const byRule = passes ? 'passes' : 'fails';
   if (probabilityWithin >= guard) return { byRule, probabilityWithin, finding: 'within' };
   // only the deviation can be outside: a doubtful target is not a deviation
-  if (inside > 1 - guard) return { byRule, probabilityWithin, finding: 'too-close-to-call' };
-  return {
-    byRule,
-    probabilityWithin,
-    finding: value > 0.5 * (finiteOr(low, high) + finiteOr(high, low)) ? 'above' : 'below',
-  };
+  if (inside <= 1 - guard) {
+    if (probabilityBetween(value, u, -Infinity, from) <= 1 - guard)
+      return { byRule, probabilityWithin, finding: 'above' };
+    if (probabilityBetween(value, u, to, Infinity) <= 1 - guard) return { byRule, probabilityWithin, finding: 'below' };
+  }
+  return { byRule, probabilityWithin, finding: 'too-close-to-call' };
 }
-
-/** Which side: the middle of the band, or the one limit of a one-sided tolerance. */
-const finiteOr = (limit: number, other: number): number => (Number.isFinite(limit) ? limit : other);

@@ -13,6 +13,7 @@ import { findProcedure } from './procedure-catalogue';
 import type { Amount, ReadingInput, ReadingsInput, SetupInput, VisitInput } from './request';
 import type { ReadingId } from './readings';
 import { READING_DIMENSIONS, READING_IDS } from './readings';
+import { UNITS_OF_DIMENSION } from './reading-units';
 
 /** A request of which some fields may be left out because their own shape was at fault. */
 export interface PartialRequest {
@@ -24,6 +25,8 @@ export interface PartialRequest {
 
 /** Slack of comparisons in kelvin: rounding of the conversions. */
 const SLACK_K = 1e-9;
+/** Far past any reading; from here on the conversions and squares of SI numbers would leave the range of a double. */
+const LARGEST_NUMBER = 1e12;
 
 class Faults {
   readonly list: Fault[] = [];
@@ -33,7 +36,7 @@ class Faults {
   }
 
   finite(path: string, value: number): boolean {
-    if (Number.isFinite(value)) return true;
+    if (Math.abs(value) <= LARGEST_NUMBER) return true;
     this.add(path, { code: 'not-a-finite-number', figures: {} });
     return false;
   }
@@ -169,10 +172,19 @@ function checkReading(
   reading: ReadingInput,
   pressures: PressureContext,
 ): void {
+  const dimension = READING_DIMENSIONS[id];
+  const units = UNITS_OF_DIMENSION[dimension];
   faults.notNegative(`${path}.plusMinus`, reading.plusMinus?.value);
+  if (reading.plusMinus !== undefined && !units.plusMinus.includes(reading.plusMinus.unit)) {
+    faults.add(`${path}.plusMinus`, { code: 'wrong-unit', figures: {} });
+  }
   faults.notNegative(`${path}.ageSeconds`, reading.ageSeconds);
   faults.notNegative(`${path}.resolution`, reading.resolution);
-  switch (READING_DIMENSIONS[id]) {
+  if (!units.reading.includes(reading.unit)) {
+    faults.add(path, { code: 'wrong-unit', figures: {} });
+    return;
+  }
+  switch (dimension) {
     case 'temperature':
       checkTemperature(faults, path, reading as Amount<TemperatureUnit>);
       break;
@@ -224,7 +236,8 @@ function checkWetBulb(faults: Faults, readings: ReadingsInput, root: string, dry
   if (dryBulb === undefined || wetBulb === undefined) return;
   const dryBulbK = temperatureToK(dryBulb.value, dryBulb.unit);
   const wetBulbK = temperatureToK(wetBulb.value, wetBulb.unit);
-  if (!(wetBulbK > dryBulbK + SLACK_K)) return;
+  // what is not a number, or not a temperature, has its own fault
+  if (!(wetBulbK > dryBulbK + SLACK_K && Number.isFinite(wetBulbK - dryBulbK))) return;
   const figures = {
     wetBulb: { kind: 'temperatureK', value: wetBulbK },
     dryBulb: { kind: 'temperatureK', value: dryBulbK },

@@ -1,7 +1,8 @@
-/** Which rules and tables gave a result: the package's version and a hash of every table and procedure. */
+/** Which rules and tables gave a result: the package's version and a hash of every table, of the procedures and of the next steps. */
 import { SPLIT_TABLE } from '../methods/data/split-table';
 import { SUPERHEAT_CHART_A } from '../methods/data/superheat-chart-a';
 import { INPUT_HASH } from '../refrigerants/generated/saturation-curves';
+import { NEXT_STEP_TABLE } from './next-step/next-step-table';
 import { PROCEDURES } from './procedure-catalogue';
 
 const VERSION = '0.1.0';
@@ -20,6 +21,7 @@ let version: string | undefined;
 
 /** `0.1.0+1a2b3c4d`: two results with the same version came from the same rules and tables. Computed once, when first asked for. */
 export function engineVersion(): string {
-  version ??= `${VERSION}+${fnv1a(JSON.stringify([INPUT_HASH, SUPERHEAT_CHART_A, SPLIT_TABLE, PROCEDURES]))}`;
+  const data = [INPUT_HASH, SUPERHEAT_CHART_A, SPLIT_TABLE, PROCEDURES, NEXT_STEP_TABLE];
+  version ??= `${VERSION}+${fnv1a(JSON.stringify(data))}`;
   return version;
 }

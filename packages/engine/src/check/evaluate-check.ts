@@ -4,7 +4,7 @@ import { isKnown } from '../derivation/quantity';
 import { derivationSteps } from '../derivation/steps';
 import { findCautions } from './cautions';
 import type { Caution, OverallFinding, Reason, Stop } from './codes';
-import { airflowEvidence, airflowGate, judgeAirflow, judgeSplit } from './criteria/air';
+import { airflowEvidence, airflowGate, airflowNearLimit, judgeAirflow, judgeSplit, splitTarget } from './criteria/air';
 import type { ChargeJudgement } from './criteria/charge';
 import { judgeSubcooling, judgeSuperheat, judgeSuperheatWindow, superheatTarget } from './criteria/charge';
 import { conditionsGate, judgeConditions, judgeInstruments } from './criteria/conditions';
@@ -29,9 +29,10 @@ export function evaluateCheck(input: CheckInput): CheckResult {
   const stops = findStops(input, derived);
 
   const cooling = setup.mode === 'cooling';
-  const split = judgeSplit(input, derived, unfit);
+  const targetSplit = splitTarget(input, derived);
+  const split = judgeSplit(input, derived, targetSplit, unfit);
   const airflow = judgeAirflow(input);
-  const evidence = airflowEvidence(airflow, split);
+  const evidence = airflowEvidence(input, derived, { airflow, split, target: targetSplit });
   const target = superheatTarget(input, derived);
   const charge = judgeCharge(
     {
@@ -60,7 +61,8 @@ export function evaluateCheck(input: CheckInput): CheckResult {
   const cautions = [
     ...(impossible === null ? [] : [impossible.caution]),
     ...findCautions(input, derived, evidence),
-    ...hiddenFaults(input, finding),
+    ...(cooling ? airflowNearLimit(airflow, split) : []),
+    ...hiddenFaults(input, derived, finding),
   ];
   const nextStep = findNextStep({
     input,
@@ -111,9 +113,13 @@ function overallFinding(stops: readonly Stop[], criteria: readonly CriterionResu
 }
 
 /** On a fixed orifice low charge and low airflow can hide each other behind a superheat that is within. */
-function hiddenFaults({ setup, readings }: CheckInput, finding: OverallFinding): readonly Caution[] {
-  const liquidPair = readings.liquidPressure !== undefined && readings.liquidLineTemperature !== undefined;
-  return isFixedOrifice(setup) && finding === 'within' && !liquidPair ? [{ code: 'faults-may-hide', figures: {} }] : [];
+function hiddenFaults(
+  { setup }: CheckInput,
+  { subcooling }: DerivedQuantities,
+  finding: OverallFinding,
+): readonly Caution[] {
+  const hidden = isFixedOrifice(setup) && finding === 'within' && !isKnown(subcooling);
+  return hidden ? [{ code: 'faults-may-hide', figures: {} }] : [];
 }
 
 function knownOnly(derived: DerivedQuantities): CheckResult['derived'] {

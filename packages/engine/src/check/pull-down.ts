@@ -2,6 +2,8 @@
 import { isKnown } from '../derivation/quantity';
 import type { Quantity } from '../derivation/quantity';
 import { differenceToK, temperatureToK } from '../units';
+import { LIMIT_SLACK_K } from './conformance';
+import type { DerivedQuantities } from './derived-quantities';
 import { deriveQuantities } from './derived-quantities';
 import type { CheckInput } from './input';
 
@@ -16,35 +18,45 @@ const LEAST_MINUTES_APART = 5;
 const STEADY_WET_BULB_K = differenceToK(0.5, 'deltaF');
 const STEADY_K = differenceToK(1, 'deltaF');
 
-/** True while the house is warm, was off for hours and humid, or the earlier readings differ, and no agreeing second set exists. */
-export function isPullDown(input: CheckInput): boolean {
-  const agreement = agreesWithEarlier(input);
-  if (agreement !== null) return !agreement;
+/** True while readings still move, or the house is warm or was off for hours and humid and no agreeing second set has shown that they do not. */
+export function isPullDown(input: CheckInput, derived: DerivedQuantities): boolean {
   const { readings, visit } = input;
+  const trend = trendSinceEarlier(input, derived);
+  if (trend !== 'unknown') return trend === 'moving';
   const warm = (readings.returnDryBulb?.quantity.value ?? 0) > WARM_RETURN_K;
-  return warm || (visit.hoursOff >= LONG_OFF_HOURS && isHumid(input));
+  return warm || (visit.hoursOff >= LONG_OFF_HOURS && isHumid(derived));
 }
 
-function isHumid({ setup, readings }: CheckInput): boolean {
-  const { returnRelativeHumidity } = deriveQuantities(setup, readings);
-  return isKnown(returnRelativeHumidity) && returnRelativeHumidity.value > HUMID;
-}
+const isHumid = ({ returnRelativeHumidity }: DerivedQuantities): boolean =>
+  isKnown(returnRelativeHumidity) && returnRelativeHumidity.value > HUMID;
 
-/** `null` without an earlier set far enough back that shares a quantity with this one. */
-function agreesWithEarlier({ setup, readings, visit }: CheckInput): boolean | null {
+/** A move shows at once; to be steady, all that is read now must have been read far enough back too. */
+function trendSinceEarlier(
+  { setup, readings, visit }: CheckInput,
+  now: DerivedQuantities,
+): 'moving' | 'steady' | 'unknown' {
   const { earlier } = visit;
-  if (earlier === undefined || earlier.minutesAgo < LEAST_MINUTES_APART) return null;
-  const now = deriveQuantities(setup, readings);
+  if (earlier === undefined) return 'unknown';
   const before = deriveQuantities(setup, earlier.readings);
-  const moved = [
+  const pairs = [
     [now.returnWetBulb, before.returnWetBulb, STEADY_WET_BULB_K],
     [readings.returnDryBulb?.quantity, earlier.readings.returnDryBulb?.quantity, STEADY_K],
+    [now.temperatureSplit, before.temperatureSplit, STEADY_K],
     [now.superheat, before.superheat, STEADY_K],
     [now.subcooling, before.subcooling, STEADY_K],
   ] as const;
-  const compared = moved.flatMap(([a, b, most]) => comparison(a, b, most));
-  return compared.length === 0 ? null : compared.every((steady) => steady);
+  const read = pairs.filter(([value]) => isKnown(value));
+  const trends = read.map(([value, previous, most]) => trendOf(value, previous, most));
+  if (trends.includes('moving')) return 'moving';
+  const proven = trends.length > 0 && !trends.includes('unknown') && earlier.minutesAgo >= LEAST_MINUTES_APART;
+  return proven ? 'steady' : 'unknown';
 }
 
-const comparison = (a: Quantity | undefined, b: Quantity | undefined, most: number): readonly boolean[] =>
-  isKnown(a) && isKnown(b) ? [Math.abs(a.value - b.value) <= most] : [];
+function trendOf(
+  now: Quantity | undefined,
+  before: Quantity | undefined,
+  most: number,
+): 'moving' | 'steady' | 'unknown' {
+  if (!isKnown(now) || !isKnown(before)) return 'unknown';
+  return Math.abs(now.value - before.value) <= most + LIMIT_SLACK_K ? 'steady' : 'moving';
+}

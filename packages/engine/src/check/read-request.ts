@@ -97,7 +97,8 @@ function readVisit(visit: VisitInput, atmosphere: Known): CheckVisit {
   return {
     preflight: visit.preflight ?? {},
     addedThisVisitKg: convert(visit.addedThisVisit, massToKg) ?? 0,
-    additionsOnEarlierVisits: visit.additionsOnEarlierVisits ?? 0,
+    // an amount from before speaks of an earlier visit also where nobody counted
+    additionsOnEarlierVisits: visit.additionsOnEarlierVisits ?? ((visit.addedBefore?.value ?? 0) > 0 ? 1 : 0),
     commissioning: visit.commissioning ?? false,
     hoursOff: visit.hoursOff ?? 0,
     headRaised: visit.headRaised ?? false,

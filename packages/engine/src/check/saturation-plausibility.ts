@@ -1,6 +1,6 @@
 /** Readings that cannot all be true of a running system: hoses swapped, a wrong refrigerant, a probe off the pipe. */
 import type { Quantity } from '../derivation/quantity';
-import { expandedUncertainty, isKnown } from '../derivation/quantity';
+import { bareValue, expandedUncertainty, isKnown } from '../derivation/quantity';
 import type { Caution, Reason } from './codes';
 import type { DerivedQuantities } from './derived-quantities';
 import { highSideReading } from './derived-quantities';
@@ -30,15 +30,15 @@ function portsSwapped({ setup, readings }: CheckInput): Caution | null {
 }
 
 function saturationImpossible({ readings }: CheckInput, derived: DerivedQuantities): boolean {
-  const { superheat, subcooling, condensingOverAmbient, evaporatingDewTemperature } = derived;
-  const returnAir = readings.returnDryBulb?.quantity;
+  const { superheat, subcooling } = derived;
+  const overAirK = bareValue(derived.condensingOverAmbient);
+  const evaporatingK = bareValue(derived.evaporatingDewTemperature);
+  const returnAirK = readings.returnDryBulb?.quantity.value;
   return (
     clearlyNegative(superheat) ||
     clearlyNegative(subcooling) ||
-    (isKnown(condensingOverAmbient) && condensingOverAmbient.value <= 0) ||
-    (isKnown(evaporatingDewTemperature) &&
-      returnAir !== undefined &&
-      evaporatingDewTemperature.value >= returnAir.value)
+    (overAirK !== undefined && overAirK <= 0) ||
+    (evaporatingK !== undefined && returnAirK !== undefined && evaporatingK >= returnAirK)
   );
 }
 

@@ -1,9 +1,10 @@
 /** What ends the check at once: the compressor, the coil or the person is at risk. Figures: see each; `choice` is ours, open to better evidence. */
 import type { Quantity } from '../derivation/quantity';
-import { expandedUncertainty, isKnown } from '../derivation/quantity';
+import { bareValue, expandedUncertainty, isKnown } from '../derivation/quantity';
 import type { RefrigerantId } from '../refrigerants/catalogue';
 import { differenceToK, pressureDifferenceToPa, temperatureToK } from '../units';
 import type { Caution, Stop } from './codes';
+import { LIMIT_SLACK_K } from './conformance';
 import type { DerivedQuantities } from './derived-quantities';
 import type { CheckInput } from './input';
 import { isFixedOrifice } from './input';
@@ -25,12 +26,13 @@ const MOST_HIGH_SIDE_GAUGE_PA: Readonly<Partial<Record<RefrigerantId, number>>> 
   'R-407C': pressureDifferenceToPa(370, 'psi'),
 };
 
-/** A mini-split, a part stage or a stopped system makes most stops meaningless; heating turns the cycle around. */
-const inFullCooling = ({ setup, visit }: CheckInput): boolean =>
-  setup.mode === 'cooling' &&
-  setup.stage !== 'part' &&
-  (setup.kind === 'split' || setup.kind === 'packaged') &&
-  visit.runningMinutes !== 0;
+/** Metered at the coil at full speed: elsewhere the usual figures of the cycle do not hold. */
+const atFullStage = ({ setup }: CheckInput): boolean =>
+  setup.stage !== 'part' && (setup.kind === 'split' || setup.kind === 'packaged');
+
+/** A stopped system makes most stops meaningless; heating turns the cycle around. */
+const inFullCooling = (input: CheckInput): boolean =>
+  input.setup.mode === 'cooling' && atFullStage(input) && input.visit.runningMinutes !== 0;
 
 export function findStops(input: CheckInput, derived: DerivedQuantities): readonly Stop[] {
   return [
@@ -48,7 +50,7 @@ function liquidReturn(input: CheckInput, { superheat }: DerivedQuantities): Stop
   // far below zero the readings contradict each other: `saturation-impossible` says so
   if (superheat.value < -uncertainty) return null;
   const floor = isFixedOrifice(input.setup) ? input.procedure.superheat.floorK.value : 0;
-  if (superheat.value - uncertainty > 0 && superheat.value >= floor) return null;
+  if (superheat.value - uncertainty > 0 && superheat.value >= floor - LIMIT_SLACK_K) return null;
   return {
     code: 'liquid-return',
     figures: {
@@ -58,9 +60,9 @@ function liquidReturn(input: CheckInput, { superheat }: DerivedQuantities): Stop
   };
 }
 
-/** Whether the compressor must be off at once: liquid is at its door within the uncertainty. */
-export const mustShutDownForLiquid = ({ superheat }: DerivedQuantities): boolean =>
-  isKnown(superheat) && superheat.value <= expandedUncertainty(superheat);
+/** Whether the compressor must be off at once; a superheat under the floor but clear of zero leaves time to act. */
+export const mustShutDown = ({ code }: Stop, { superheat }: DerivedQuantities): boolean =>
+  code !== 'liquid-return' || (isKnown(superheat) && superheat.value <= expandedUncertainty(superheat));
 
 /** Any system in cooling, a mini-split and a part stage too. */
 function freezing(input: CheckInput, { meanEvaporatingTemperature }: DerivedQuantities): Stop | null {
@@ -79,9 +81,9 @@ export function freezeRisk(input: CheckInput, derived: DerivedQuantities): Cauti
 }
 
 const coolingCoil = ({ setup, visit }: CheckInput, mean: Quantity): number | null =>
-  setup.mode === 'cooling' && visit.runningMinutes !== 0 && isKnown(mean) ? mean.value : null;
+  setup.mode === 'cooling' && visit.runningMinutes !== 0 ? (bareValue(mean) ?? null) : null;
 
-/** Suction pressure, and with it the coil, lower than in the earlier readings by more than both instruments can err. */
+/** Suction pressure, and with it the coil, lower than in the earlier readings by more than their combined standard uncertainty. */
 function isFalling({ visit, readings }: CheckInput): boolean {
   const before = visit.earlier?.readings.suctionPressure?.quantity;
   const now = readings.suctionPressure?.quantity;
@@ -93,23 +95,22 @@ function highPressure(input: CheckInput, derived: DerivedQuantities): Stop | nul
   const pressures = [readings.liquidPressure, readings.dischargePressure].flatMap((r) => (r ? [r.quantity.value] : []));
   const highest = Math.max(...pressures);
   const { condensingBubbleTemperature, condensingOverAmbient } = derived;
-  const overAir =
-    inFullCooling(input) &&
-    !visit.headRaised &&
-    isKnown(condensingOverAmbient) &&
-    condensingOverAmbient.value > MOST_CONDENSING_OVER_AIR_K;
+  const overAirK = bareValue(condensingOverAmbient) ?? 0;
+  const overAir = inFullCooling(input) && !visit.headRaised && overAirK > MOST_CONDENSING_OVER_AIR_K;
   const generalLimit = inFullCooling(input) ? MOST_HIGH_SIDE_GAUGE_PA[setup.refrigerant] : undefined;
   const limit = setup.maxHighPressurePa ?? (generalLimit && generalLimit + setup.atmosphere.value);
   if (!overAir && !(limit !== undefined && highest > limit)) return null;
-  const condensing = isKnown(condensingBubbleTemperature)
-    ? ({ kind: 'temperatureK', value: condensingBubbleTemperature.value } as const)
-    : ({ kind: 'pressurePa', value: highest } as const);
+  const condensingK = bareValue(condensingBubbleTemperature);
+  const condensing =
+    condensingK === undefined
+      ? ({ kind: 'pressurePa', value: highest } as const)
+      : ({ kind: 'temperatureK', value: condensingK } as const);
   return { code: 'high-pressure', figures: { condensing } };
 }
 
-/** In cooling and in heating alike. */
-function hotDischarge({ readings }: CheckInput): Stop | null {
-  const discharge = readings.dischargeLineTemperature?.quantity;
-  if (discharge === undefined || discharge.value <= MOST_DISCHARGE_K) return null;
+/** In cooling and in heating alike; an inverter or a part stage has its own figure. */
+function hotDischarge(input: CheckInput): Stop | null {
+  const discharge = input.readings.dischargeLineTemperature?.quantity;
+  if (discharge === undefined || !atFullStage(input) || discharge.value <= MOST_DISCHARGE_K) return null;
   return { code: 'hot-discharge', figures: { discharge: { kind: 'temperatureK', value: discharge.value } } };
 }

@@ -1,7 +1,7 @@
 import { EngineError } from '../errors';
 import type { Formula } from './formula';
-import type { ErrorPart, Known, Quantity } from './quantity';
-import { known } from './quantity';
+import type { ErrorPart, Known, Quantity, Refused } from './quantity';
+import { bareValue, known } from './quantity';
 
 /** Below these a secant measures rounding noise instead of a slope. */
 const SMALLEST_RELATIVE_STEP = 1e-6;
@@ -27,18 +27,25 @@ export function derive<Name extends string>(
   }
   if (lacking.length > 0) return { state: 'missing', inputs: [...new Set(lacking)] };
   const at = {} as Record<Name, number>;
+  let refused: Refused | undefined;
   for (const name of names) {
     const input = from[name];
-    if (input.state === 'refused') return input;
-    if (input.state === 'known') at[name] = input.value;
+    const value = bareValue(input);
+    if (input.state === 'refused') {
+      if (value === undefined) return input;
+      refused ??= input;
+    }
+    if (value !== undefined) at[name] = value;
   }
   try {
     const value = evaluate(formula, at);
+    if (refused !== undefined) return { ...refused, value };
     const contributions = new Map<string, number>();
     for (const name of names) {
       const input = from[name] as Known;
       if (input.u === 0) continue;
       const slope = secantSlope(formula, at, name, { value, u: input.u });
+      if (slope instanceof EngineError) return { state: 'refused', error: slope, value };
       for (const [key, c] of input.contributions) contributions.set(key, (contributions.get(key) ?? 0) + slope * c);
     }
     const step = { type: 'derived', formula, from: from as Readonly<Record<Name, Known>>, parts } as const;
@@ -56,19 +63,23 @@ function evaluate<Name extends string>(formula: Formula<Name>, at: Readonly<Reco
   return value;
 }
 
+/** The slope, or the refusal of the upper side when both sides are refused. */
 function secantSlope<Name extends string>(
   formula: Formula<Name>,
   at: Record<Name, number>,
   name: Name,
   centre: { readonly value: number; readonly u: number },
-): number {
+): number | EngineError {
   const x = at[name];
   const step = Math.max(centre.u, SMALLEST_RELATIVE_STEP * Math.abs(x), SMALLEST_STEP);
-  const above = evaluateOrRefuse(formula, { ...at, [name]: x + step });
-  const below = evaluateOrRefuse(formula, { ...at, [name]: x - step });
+  // one object for all evaluations: copying it cost more than most formulas
+  at[name] = x + step;
+  const above = evaluateOrRefuse(formula, at);
+  at[name] = x - step;
+  const below = evaluateOrRefuse(formula, at);
+  at[name] = x;
   if (above instanceof EngineError) {
-    if (below instanceof EngineError) throw above;
-    return (centre.value - below) / step;
+    return below instanceof EngineError ? above : (centre.value - below) / step;
   }
   return below instanceof EngineError ? (above - centre.value) / step : (above - below) / (2 * step);
 }

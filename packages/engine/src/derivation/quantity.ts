@@ -69,6 +69,8 @@ export interface Missing {
 export interface Refused {
   readonly state: 'refused';
   readonly error: EngineError;
+  /** The value where there is one, though its uncertainty reaches beyond what has an answer on both sides: it judges nothing, but it gates. */
+  readonly value?: number;
 }
 
 export type Quantity = Known | Missing | Refused;
@@ -82,6 +84,10 @@ export const expandedUncertainty = (quantity: Known): number => COVERAGE_FACTOR 
 export const missing = (...inputs: readonly string[]): Missing => ({ state: 'missing', inputs });
 
 export const isKnown = (quantity: Quantity | null | undefined): quantity is Known => quantity?.state === 'known';
+
+/** The bare value, with or without an uncertainty to it, or `undefined`: gates act on it, so that a poorer instrument never opens one. */
+export const bareValue = (quantity: Quantity): number | undefined =>
+  quantity.state === 'missing' ? undefined : quantity.value;
 
 const addInQuadrature = (contributions: ReadonlyMap<string, number>): number => {
   let sum = 0;

@@ -45,6 +45,7 @@ export function probabilityOfNoTarget(
     const from = Math.max(low, row.mean - REACH * row.u);
     const to = Math.min(low + height, row.mean + REACH * row.u);
     if (to <= from) continue;
+    const cells = cellsInRow(chart, r, cdfAtColumns);
     const panels = Math.ceil((to - from) / (PANEL * row.u));
     const half = (0.5 * (to - from)) / panels;
     for (let p = 0; p < panels; p++) {
@@ -53,42 +54,61 @@ export function probabilityOfNoTarget(
         const at = middle + half * x;
         const z = (at - row.mean) / row.u;
         const density = Math.exp(-0.5 * z * z) / (Math.sqrt(2 * Math.PI) * row.u);
-        exists += half * weight * density * probabilityInRow(chart, r, (at - low) / height, column, cdfAtColumns);
+        exists += half * weight * density * probabilityInRow(cells, (at - low) / height, column);
       }
     }
   }
   return Math.min(Math.max(1 - exists, 0), 1);
 }
 
-/** Probability over the column temperature that a value stands at this height of a row of cells. */
-function probabilityInRow(
-  chart: Chart,
-  row: number,
-  fraction: number,
-  column: Normal,
-  cdfAtColumns: readonly number[],
-): number {
-  let sum = 0;
+/** The cells of a row that the column temperature can reach: those printed in full, as one probability, and those cut by a dash. */
+interface CellsInRow {
+  readonly printed: number;
+  readonly cut: readonly CutCell[];
+}
+
+interface CutCell {
+  readonly corners: Corners;
+  readonly low: number;
+  readonly width: number;
+  readonly cdfLow: number;
+  readonly cdfHigh: number;
+}
+
+function cellsInRow(chart: Chart, row: number, cdfAtColumns: readonly number[]): CellsInRow {
+  const cut: CutCell[] = [];
+  let printed = 0;
   for (let c = 0; c < chart.columnsF.length - 1; c++) {
-    const left = cdfAtColumns[c]!;
-    const right = cdfAtColumns[c + 1]!;
-    if (right - left < 1e-9) continue;
-    const [from, to] = printedPart(cornersOf(chart, row, c), fraction);
-    if (to <= from) continue;
+    const cdfLow = cdfAtColumns[c]!;
+    const cdfHigh = cdfAtColumns[c + 1]!;
+    if (cdfHigh - cdfLow < 1e-9) continue;
+    const corners = cornersOf(chart, row, c);
+    const dashes = numberOfDashes(corners);
+    if (dashes === 0) printed += cdfHigh - cdfLow;
+    if (dashes !== 1) continue;
     const low = chart.columnsF[c]!;
-    const width = chart.columnsF[c + 1]! - low;
+    cut.push({ corners, low, width: chart.columnsF[c + 1]! - low, cdfLow, cdfHigh });
+  }
+  return { printed, cut };
+}
+
+const numberOfDashes = ({ c00, c01, c10, c11 }: Corners): number =>
+  Number(c00 === null) + Number(c01 === null) + Number(c10 === null) + Number(c11 === null);
+
+/** Probability over the column temperature that a value stands at this height of a row of cells. */
+function probabilityInRow({ printed, cut }: CellsInRow, fraction: number, column: Normal): number {
+  let sum = printed;
+  for (const { corners, low, width, cdfLow, cdfHigh } of cut) {
+    const [from, to] = printedPart(corners, fraction);
+    if (to <= from) continue;
     const cdf = (part: number): number => standardNormalCdf((low + part * width - column.mean) / column.u);
-    sum += (to === 1 ? right : cdf(to)) - (from === 0 ? left : cdf(from));
+    sum += (to === 1 ? cdfHigh : cdf(to)) - (from === 0 ? cdfLow : cdf(from));
   }
   return sum;
 }
 
-/** The part of a cell's width where a value stands at row fraction `r`: all of it, one side of the triangle's edge, or nothing. */
-function printedPart(corners: Corners, r: number): readonly [from: number, to: number] {
-  const { c00, c01, c10, c11 } = corners;
-  const dashes = [c00, c01, c10, c11].filter((value) => value === null).length;
-  if (dashes === 0) return [0, 1];
-  if (dashes > 1) return [0, 0];
+/** The part of a cell's width where a value stands at row fraction `r` when one corner is a dash: one side of the triangle's edge. */
+function printedPart({ c00, c01, c11 }: Corners, r: number): readonly [from: number, to: number] {
   if (c00 === null) return [1 - r, 1];
   if (c11 === null) return [0, 1 - r];
   if (c01 === null) return [0, r];
@@ -105,7 +125,7 @@ function allPrintedWithinReach(chart: Chart, row: Normal, column: Normal): boole
     if (!touches(chart.rowsF, r, row)) continue;
     for (let c = 0; c < chart.columnsF.length - 1; c++) {
       if (!touches(chart.columnsF, c, column)) continue;
-      if (Object.values(cornersOf(chart, r, c)).includes(null)) return false;
+      if (numberOfDashes(cornersOf(chart, r, c)) > 0) return false;
     }
   }
   return true;

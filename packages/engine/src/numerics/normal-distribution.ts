@@ -27,7 +27,8 @@ export function standardNormalCdf(z: number): number {
   for (let from = 0; from < end; from += PANEL) {
     const half = 0.5 * (Math.min(from + PANEL, end) - from);
     const middle = from + half;
-    for (const [x, weight] of LEGENDRE) area += half * weight * (density(middle - half * x) + density(middle + half * x));
+    for (const [x, weight] of LEGENDRE)
+      area += half * weight * (density(middle - half * x) + density(middle + half * x));
   }
   return 0.5 + Math.sign(z) * area;
 }
@@ -36,7 +37,13 @@ export function standardNormalCdf(z: number): number {
  * Probability that a normal variable lies in [low, high] (JCGM 106:2012, 7.2). A zero standard uncertainty gives 0 or 1, limits inclusive
  * with the slack `edge`; limits may be ±∞.
  */
-export function probabilityBetween(mean: number, standardUncertainty: number, low: number, high: number, edge = 0): number {
+export function probabilityBetween(
+  mean: number,
+  standardUncertainty: number,
+  low: number,
+  high: number,
+  edge = 0,
+): number {
   if (standardUncertainty === 0) return mean >= low - edge && mean <= high + edge ? 1 : 0;
   const above = standardNormalCdf((low - mean) / standardUncertainty);
   const below = standardNormalCdf((high - mean) / standardUncertainty);

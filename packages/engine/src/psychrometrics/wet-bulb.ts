@@ -38,6 +38,9 @@ export interface WetBulb {
 /** Far below any sensor, far above the rounding of doubles (6e-14 K), so that secant slopes over a reading's ± stay clean. */
 const TOLERANCE_K = 1e-9;
 
+/** Deficit of humidity ratio that a wet bulb of dry air, solved to 1e-9 K and given back, may show: the worth of about 1e-8 K. */
+const DRY_ROUNDING = 1e-11;
+
 const AT_FREEZING = saturationPressureAndSlope(FREEZING_K);
 const AT_TRIPLE_POINT = saturationPressureAndSlope(TRIPLE_POINT_K);
 
@@ -62,6 +65,7 @@ export function humidityRatioFromWetBulb(x: { dryBulbK: number; wetBulbK: number
   if (wetBulbK >= SATURATION_LIMITS.min) {
     const humidityRatio = humidityRatioByPsychrometricEquation(wetBulbK >= FREEZING_K ? WATER_BULB : ICE_BULB, x);
     if (humidityRatio >= 0) return humidityRatio;
+    if (humidityRatio > -DRY_ROUNDING) return 0;
   }
   const min = wetBulbKOfDryAir({ dryBulbK, humidityRatio: 0, pressurePa }, wetBulbK);
   throw new EngineError('inconsistent-inputs', {
@@ -107,11 +111,9 @@ export function wetBulbKFromRelativeHumidity(x: {
 
 /** Wet bulb of air that is known to be in range and not above saturation. */
 function wetBulb(air: HumidAir, atDryBulb: SaturationPressure): WetBulb {
-  const liquidK = liquidWetBulbK(air, atDryBulb);
   // Without a liquid one there is an iced one: at 0 °C eq. 35 stands for at least the humidity of eq. 33, so the two overlap and leave no gap.
-  return liquidK === undefined
-    ? { wetBulbK: icedBulbK(air, atDryBulb), wetBulbSurface: 'ice' }
-    : { wetBulbK: liquidK, wetBulbSurface: 'water' };
+  const wetBulbK = liquidWetBulbK(air, atDryBulb) ?? icedBulbK(air, atDryBulb);
+  return { wetBulbK, wetBulbSurface: wetBulbSurface(wetBulbK) };
 }
 
 /** The lowest wet bulb of dry air on the branch of a refused one, or on the other where that branch has none. */

@@ -1,11 +1,12 @@
 /** Airflow before charge: the temperature split and the measured airflow, and what they allow. */
 import type { Known, Quantity } from '../../derivation/quantity';
-import { isKnown, leaf, missing } from '../../derivation/quantity';
+import { bareValue, expandedUncertainty, isKnown, leaf, missing } from '../../derivation/quantity';
 import { derive } from '../../derivation/derive';
 import { probabilityOfNoTarget } from '../../methods/target-existence';
 import { SPLIT_TABLE } from '../../methods/data/split-table';
 import { chartRounding, targetTemperatureSplit } from '../../methods/targets';
-import type { Reason } from '../codes';
+import type { Caution, Figure, Reason, ReasonCode } from '../codes';
+import { LIMIT_SLACK_K } from '../conformance';
 import { staleReason } from '../evidence';
 import type { DerivedQuantities } from '../derived-quantities';
 import type { CheckInput } from '../input';
@@ -17,13 +18,21 @@ import { judgeCriterion, unjudged } from './criterion';
 export type AirflowEvidence =
   'measured-low' | 'measured-enough' | 'split-above' | 'split-within' | 'split-too-close' | 'split-below' | 'nothing';
 
-export function judgeSplit(input: CheckInput, derived: DerivedQuantities, unfit: Reason | null): CriterionResult {
+/** Target of the split, for its criterion and for the gate. */
+export function splitTarget({ readings }: CheckInput, { returnWetBulb }: DerivedQuantities): Quantity {
+  const returnDryBulbK: Quantity = readings.returnDryBulb?.quantity ?? missing('returnDryBulb');
+  return derive(targetTemperatureSplit, { returnDryBulbK, wetBulbK: returnWetBulb }, [chartRounding(SPLIT_TABLE)]);
+}
+
+export function judgeSplit(
+  input: CheckInput,
+  derived: DerivedQuantities,
+  target: Quantity,
+  unfit: Reason | null,
+): CriterionResult {
   const actual = derived.temperatureSplit;
   if (unfit !== null) return unjudged('temperature-split', false, 'not-verifiable', unfit, actual);
-  const { procedure, readings } = input;
-  const returnDryBulbK: Quantity = readings.returnDryBulb?.quantity ?? missing('returnDryBulb');
-  const wetBulbK = derived.returnWetBulb;
-  const target = derive(targetTemperatureSplit, { returnDryBulbK, wetBulbK }, [chartRounding(SPLIT_TABLE)]);
+  const { procedure } = input;
   const tolerance = procedure.temperatureSplit.toleranceK.value;
   return judgeCriterion({
     criterion: 'temperature-split',
@@ -33,19 +42,20 @@ export function judgeSplit(input: CheckInput, derived: DerivedQuantities, unfit:
     targetSource: 'split-table',
     tolerance: () => ({ low: -tolerance, high: tolerance, floored: false }),
     guard: procedure.guardProbability.value,
-    probabilityOfNoTarget: isKnown(target) ? noSplitTarget(returnDryBulbK, wetBulbK) : 0,
+    probabilityOfNoTarget: isKnown(target) ? noSplitTarget(input, derived) : 0,
     mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
     gates: (evidence) => [conditionsGate(input), staleReason(input, evidence)],
   });
 }
 
-function noSplitTarget(dryBulb: Quantity, wetBulb: Quantity): number {
-  if (!isKnown(dryBulb) || !isKnown(wetBulb)) return 0;
+function noSplitTarget({ readings }: CheckInput, { returnWetBulb }: DerivedQuantities): number {
+  const dryBulb = readings.returnDryBulb?.quantity;
+  if (dryBulb === undefined || !isKnown(returnWetBulb)) return 0;
   return probabilityOfNoTarget(SPLIT_TABLE, {
     rowK: dryBulb.value,
     rowUK: dryBulb.u,
-    columnK: wetBulb.value,
-    columnUK: wetBulb.u,
+    columnK: returnWetBulb.value,
+    columnUK: returnWetBulb.u,
   });
 }
 
@@ -82,18 +92,51 @@ function leastAirflow({ procedure, setup }: CheckInput): { target: Known; source
   return null;
 }
 
-/** Measured airflow outranks the split. Both gate by the rule on the measured value, so that a poorer instrument never opens a gate. */
-export function airflowEvidence(airflow: CriterionResult | null, split: CriterionResult): AirflowEvidence {
+/**
+ * Measured airflow outranks the split. Both gate by the rule on the bare values, so that a poorer instrument never opens a gate: a split above
+ * its band shuts it also where its target or its finding is in doubt. Readings that do not count today (conditions, age) prove nothing.
+ */
+export function airflowEvidence(
+  input: CheckInput,
+  derived: DerivedQuantities,
+  judgements: { readonly airflow: CriterionResult | null; readonly split: CriterionResult; readonly target: Quantity },
+): AirflowEvidence {
+  const { airflow, split, target } = judgements;
   if (airflow !== null && judged(airflow)) return airflow.byRule === 'fails' ? 'measured-low' : 'measured-enough';
-  if (!judged(split) || split.deviation === null) return 'nothing';
-  if (split.finding === 'above' || (split.byRule === 'fails' && split.deviation.value > 0)) return 'split-above';
+  if (counts(split) && isAboveBand(input, derived, target)) return 'split-above';
+  if (!judged(split)) return 'nothing';
   if (split.finding === 'too-close-to-call') return 'split-too-close';
   return split.finding === 'below' ? 'split-below' : 'split-within';
 }
+
+function isAboveBand({ procedure }: CheckInput, { temperatureSplit }: DerivedQuantities, target: Quantity): boolean {
+  const actualK = bareValue(temperatureSplit);
+  const targetK = bareValue(target);
+  if (actualK === undefined || targetK === undefined) return false;
+  return actualK - targetK > procedure.temperatureSplit.toleranceK.value + LIMIT_SLACK_K;
+}
+
+/** Reasons that the uncertainty of the readings alone can give. */
+const DOUBTS: readonly (ReasonCode | undefined)[] = ['target-may-not-exist', 'no-target-here', 'outside-range'];
+
+const counts = (split: CriterionResult): boolean => judged(split) || DOUBTS.includes(split.reason?.code);
 
 const judged = ({ finding }: CriterionResult): boolean => finding !== 'not-judged' && finding !== 'not-verifiable';
 
 export function airflowGate(evidence: AirflowEvidence): Reason | null {
   if (evidence === 'measured-low') return { code: 'airflow-too-low', figures: {} };
   return evidence === 'split-above' ? { code: 'split-above', figures: {} } : null;
+}
+
+/** A caution for an airflow gate whose limit lies inside the uncertainty of what is held against it. */
+export function airflowNearLimit(airflow: CriterionResult | null, split: CriterionResult): readonly Caution[] {
+  if (airflow !== null && judged(airflow)) return nearLimit(airflow, 0);
+  return judged(split) ? nearLimit(split, split.tolerance?.high ?? 0) : [];
+}
+
+function nearLimit({ actual, target, deviation }: CriterionResult, allowed: number): readonly Caution[] {
+  if (actual === null || target === null || deviation === null) return [];
+  if (Math.abs(deviation.value - allowed) >= expandedUncertainty(deviation)) return [];
+  const figure = (value: number): Figure => ({ kind: actual.kind, value });
+  return [{ code: 'near-limit', figures: { actual: figure(actual.value), limit: figure(target.value + allowed) } }];
 }

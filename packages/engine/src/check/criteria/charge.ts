@@ -1,7 +1,7 @@
 /** The criteria that judge the charge: superheat of a fixed orifice; subcooling and the superheat window of a valve. */
 import { derive } from '../../derivation/derive';
 import type { Known, Quantity } from '../../derivation/quantity';
-import { isKnown, missing } from '../../derivation/quantity';
+import { bareValue, isKnown, missing } from '../../derivation/quantity';
 import { SUPERHEAT_CHART_A } from '../../methods/data/superheat-chart-a';
 import { probabilityOfNoTarget } from '../../methods/target-existence';
 import { chartRounding, targetSuperheat } from '../../methods/targets';
@@ -23,7 +23,7 @@ export interface ChargeJudgement {
 
 /** A measured subcooling below zero means about zero: nothing that rests on the readings is called *within*. */
 const negativeSubcooling = ({ subcooling }: DerivedQuantities): Reason | null =>
-  isKnown(subcooling) && subcooling.value < 0 ? { code: 'flash', figures: {} } : null;
+  (bareValue(subcooling) ?? 0) < 0 ? { code: 'flash', figures: {} } : null;
 
 export interface SuperheatTarget {
   readonly quantity: Quantity;

@@ -13,9 +13,13 @@ interface LeastTemperature {
   readonly leastK: number;
 }
 
-/** The lowest return air of the test; without a record of it, the return reading. */
-const lowestReturn = ({ visit, readings }: CheckInput): Known | undefined =>
-  visit.lowestReturn ?? readings.returnDryBulb?.quantity;
+/** The lowest return air of the test: the recorded one, unless the return reading is lower still; without a record, the return reading. */
+function lowestReturn({ visit, readings }: CheckInput): Known | undefined {
+  const recorded = visit.lowestReturn;
+  const now = readings.returnDryBulb?.quantity;
+  if (recorded === undefined || now === undefined) return recorded ?? now;
+  return now.value < recorded.value ? now : recorded;
+}
 
 function leastTemperatures(input: CheckInput): readonly LeastTemperature[] {
   const { conditions } = input.procedure;
@@ -68,6 +72,10 @@ export function conditionsRecorded(input: CheckInput): boolean {
 }
 
 export function judgeConditions(input: CheckInput): CriterionResult {
+  // the limits are those of a cooling test
+  if (input.setup.mode === 'heating') {
+    return unjudged('conditions', false, 'not-verifiable', { code: 'heating-mode', figures: {} });
+  }
   const shut = conditionsGate(input);
   if (shut !== null) return { ...unjudged('conditions', false, 'not-verifiable', shut), byRule: 'fails' };
   const unrecorded = unjudged('conditions', false, 'not-judged', { code: 'conditions-not-recorded', figures: {} });

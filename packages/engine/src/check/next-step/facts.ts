@@ -8,17 +8,18 @@ import type { Caution, OverallFinding, Reason, ReasonCode, Stop, StopCode } from
 import { conditionsGate } from '../criteria/conditions';
 import type { AirflowEvidence } from '../criteria/air';
 import type { SuperheatTarget } from '../criteria/charge';
+import { LIMIT_SLACK_K } from '../conformance';
 import type { DerivedQuantities } from '../derived-quantities';
 import type { CheckInput } from '../input';
 import { isFixedOrifice } from '../input';
 import type { CriterionResult } from '../result';
-import { mustShutDownForLiquid } from '../stops';
+import { mustShutDown } from '../stops';
 
 export interface Facts {
   readonly unfit: ReasonCode | 'none';
   readonly impossible: 'none' | 'ports-swapped' | 'saturation-impossible';
   readonly stop: StopCode | 'none';
-  readonly liquidAtCompressor: 'yes' | 'no';
+  readonly shutDown: 'yes' | 'no';
   readonly condition: 'open' | 'running-time' | 'return-too-cool' | 'outdoor-too-cold';
   readonly runningTime: 'recorded' | 'unrecorded';
   /** Why a required criterion has no number, or `none`. */
@@ -35,6 +36,7 @@ export interface Facts {
   /** By the target where one was entered; see `subcoolingLevel` for the rest. */
   readonly subcooling: Side;
   readonly subcoolingLevel: 'unread' | 'unreadable' | 'low' | 'unclear' | 'clear' | 'high';
+  /** `warm` also stands for a valve whose head was raised by the maker's method. */
   readonly weather: 'warm' | 'cool' | 'low-head';
   readonly leak: 'search' | 'found' | 'add' | 'locate' | 'recover';
   readonly head: 'usual' | 'high';
@@ -59,6 +61,8 @@ export interface Evidence {
 const NEAR_FLOOR_TARGET_K = differenceToK(7, 'deltaF');
 /** Steps of one visit add up to at most this part of the factory charge before the charge is recovered and weighed (choice). */
 const MOST_ADDED_FRACTION = 0.1;
+/** Rounding of the conversions; far below any scale. */
+const SLACK_KG = 1e-9;
 /** Condensing over outdoor air that suggests air in the system when subcooling is high (choice). */
 const HIGH_HEAD_K: Readonly<Partial<Record<RefrigerantId, number>>> = {
   'R-410A': differenceToK(20, 'deltaF'),
@@ -75,7 +79,7 @@ export function gatherFacts(evidence: Evidence): Facts {
     unfit: evidence.unfit?.code ?? 'none',
     impossible: impossibility(evidence.impossible),
     stop: evidence.stops[0]?.code ?? 'none',
-    liquidAtCompressor: mustShutDownForLiquid(derived) ? 'yes' : 'no',
+    shutDown: evidence.stops.some((stop) => mustShutDown(stop, derived)) ? 'yes' : 'no',
     condition: gate === 'running-time' || gate === 'return-too-cool' || gate === 'outdoor-too-cold' ? gate : 'open',
     runningTime: visit.runningMinutes === undefined ? 'unrecorded' : 'recorded',
     lacking: whatIsLacking(criteria),
@@ -89,7 +93,7 @@ export function gatherFacts(evidence: Evidence): Facts {
     superheat: sideOf(criteria, isFixedOrifice(setup) ? 'superheat' : 'superheat-window'),
     subcooling: sideOf(criteria, 'subcooling'),
     subcoolingLevel: subcoolingLevel(evidence),
-    weather: lowHead(input) !== null ? 'low-head' : isCoolWeather(input) ? 'cool' : 'warm',
+    weather: weatherFact(input),
     leak: leakFact(input),
     head: isHeadHigh(input, derived) ? 'high' : 'usual',
   };
@@ -114,7 +118,8 @@ function superheatTargetFact({ input, target, criteria }: Evidence): Facts['supe
   const reason = criteria.find(({ criterion }) => criterion === 'superheat')?.reason?.code;
   if (target.quantity.state === 'refused' && target.source === 'makers-chart-a') return 'none-here';
   if (reason === 'no-target-here' || reason === 'target-may-not-exist') return 'none-here';
-  return isKnown(target.quantity) && target.quantity.value <= NEAR_FLOOR_TARGET_K ? 'near-floor' : 'clear';
+  const nearFloor = isKnown(target.quantity) && target.quantity.value <= NEAR_FLOOR_TARGET_K + LIMIT_SLACK_K;
+  return nearFloor ? 'near-floor' : 'clear';
 }
 
 function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
@@ -125,16 +130,17 @@ function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
   return has('pull-down') ? 'pull-down' : 'good';
 }
 
-/** Whether these instruments could ever call the criterion within: at the middle of its band. */
-function canSettle({ criteria, input }: Evidence): boolean {
+/** Whether these instruments could ever call the criterion within: at the middle of its band, at these conditions. */
+function canSettle({ criteria, input, target }: Evidence): boolean {
   const guard = input.procedure.guardProbability.value;
   return criteria
     .filter(({ required, finding }) => required && finding === 'too-close-to-call')
-    .every(({ tolerance, deviation, actual }) => {
+    .every(({ criterion, tolerance, deviation, actual }) => {
       const measured = deviation ?? actual;
       if (measured === null || tolerance?.low == null || tolerance.high === null) return true;
       const middle = 0.5 * (tolerance.low + tolerance.high);
-      return probabilityBetween(middle, measured.u, tolerance.low, tolerance.high) >= guard;
+      const most = probabilityBetween(middle, measured.u, tolerance.low, tolerance.high);
+      return most * (criterion === 'superheat' ? 1 - target.probabilityOfNoTarget : 1) >= guard;
     });
 }
 
@@ -148,23 +154,37 @@ function sideOf(criteria: readonly CriterionResult[], id: CriterionResult['crite
   return measured !== null && high !== null && measured.value > high ? 'above' : 'below';
 }
 
-function subcoolingLevel({ input, derived }: Evidence): Facts['subcoolingLevel'] {
+/** On a fixed orifice against its target, where one was entered; else by the general levels. */
+function subcoolingLevel({ input, derived, criteria }: Evidence): Facts['subcoolingLevel'] {
   const { subcooling } = derived;
   if (!isKnown(subcooling)) return input.setup.highSidePort === 'none' ? 'unreadable' : 'unread';
+  const side = isFixedOrifice(input.setup) ? sideOf(criteria, 'subcooling') : 'unknown';
+  if (side !== 'unknown') return LEVEL_BY_TARGET[side];
   const { lowBelowK, clearFromK, highAboveK } = input.procedure.subcooling;
   if (subcooling.value < lowBelowK.value) return 'low';
   if (subcooling.value < clearFromK.value) return 'unclear';
   return subcooling.value > highAboveK.value ? 'high' : 'clear';
 }
 
+const LEVEL_BY_TARGET = { below: 'low', within: 'clear', above: 'high' } as const;
+
+/** A leak that was found is mended first, whatever else; the charge of a new line set needs no search and has no cap. */
 function leakFact({ setup, visit }: CheckInput): Facts['leak'] {
+  if (visit.leakSearch === 'found') return 'found';
   if (visit.commissioning) return 'add';
   if (visit.additionsOnEarlierVisits > 0) return 'locate';
-  if (visit.leakSearch === 'found') return 'found';
   if (visit.leakSearch !== 'none-found') return 'search';
   const { factoryChargeKg } = setup;
-  const used = factoryChargeKg !== undefined && visit.addedThisVisitKg >= MOST_ADDED_FRACTION * factoryChargeKg;
+  const used =
+    factoryChargeKg !== undefined && visit.addedThisVisitKg >= MOST_ADDED_FRACTION * factoryChargeKg - SLACK_KG;
   return used ? 'recover' : 'add';
+}
+
+/** A head raised on purpose makes a valve's reading count in cool weather; an orifice is judged by the outdoor air, which it does not change. */
+function weatherFact(input: CheckInput): Facts['weather'] {
+  if (!isCoolWeather(input)) return 'warm';
+  if (lowHead(input) !== null) return 'low-head';
+  return input.visit.headRaised && !isFixedOrifice(input.setup) ? 'warm' : 'cool';
 }
 
 function isHeadHigh({ setup }: CheckInput, { condensingOverAmbient }: DerivedQuantities): boolean {

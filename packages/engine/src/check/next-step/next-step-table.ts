@@ -18,6 +18,13 @@ export interface NextStepRow {
 const MOVE_NOTHING = ['move-no-refrigerant'] as const;
 const ADD_NOTHING = ['add-nothing'] as const;
 
+/** Whatever keeps the system from being judged, a stop still holds: the step stays what it is, and that it must not run on is said first. */
+const shutDownFirst = (rows: readonly NextStepRow[]): readonly NextStepRow[] =>
+  rows.flatMap((row) => [
+    { ...row, when: { ...row.when, shutDown: ['yes'] }, notYet: ['shut-down', ...row.notYet] },
+    row,
+  ]);
+
 const fit: readonly NextStepRow[] = [
   { when: { unfit: ['heating-mode'] }, step: 'cooling-season-or-weigh-in', notYet: MOVE_NOTHING },
   { when: { unfit: ['metered-outdoors'] }, step: 'weigh-in', notYet: MOVE_NOTHING },
@@ -32,21 +39,26 @@ const impossible: readonly NextStepRow[] = [
   { when: { impossible: ['saturation-impossible'] }, step: 'check-refrigerant-and-probes', notYet: ADD_NOTHING },
 ];
 
-/** Liquid return: the first cause that fits; at or under the uncertainty the compressor goes off as well. */
+/** Liquid return: the first cause that fits; where the superheat is no more than its uncertainty the compressor goes off as well. */
 const liquidReturnCauses: readonly (Pick<NextStepRow, 'step' | 'when'> & { readonly recover: boolean })[] = [
   { when: { superheatTarget: ['none-here', 'near-floor'] }, step: 'come-back-at-higher-target', recover: false },
   { when: { airflow: ['split-above', 'measured-low'] }, step: 'reread-wet-bulb-then-airflow', recover: true },
   { when: { metering: ['orifice'], subcoolingLevel: ['high'] }, step: 'check-overcharge-or-air', recover: true },
   { when: { metering: ['valve'], subcooling: ['above'] }, step: 'check-overcharge-or-air', recover: true },
+  {
+    when: { metering: ['valve'], subcooling: ['unknown'], subcoolingLevel: ['high'] },
+    step: 'check-overcharge-or-air',
+    recover: true,
+  },
   { when: {}, step: 'check-metering', recover: true },
 ];
 
 const stops: readonly NextStepRow[] = [
   ...liquidReturnCauses.flatMap(({ when, step, recover }): readonly NextStepRow[] => [
     {
-      when: { stop: ['liquid-return'], liquidAtCompressor: ['yes'], ...when },
+      when: { stop: ['liquid-return'], shutDown: ['yes'], ...when },
       step,
-      notYet: ['shut-down', 'add-nothing'],
+      notYet: ['shut-down', recover ? 'add-nothing' : 'move-no-refrigerant'],
     },
     {
       when: { stop: ['liquid-return'], ...when },
@@ -180,8 +192,7 @@ const within: readonly NextStepRow[] = [
 ];
 
 export const NEXT_STEP_TABLE: readonly NextStepRow[] = [
-  ...fit,
-  ...impossible,
+  ...shutDownFirst([...fit, ...impossible]),
   ...stops,
   ...conditions,
   ...lacking,

@@ -1,0 +1,13 @@
+import type { FigureNames } from '../message-texts';
+import { readingWords } from './readings';
+import { listWords, setupWords } from './setup';
+
+const { mode, kind, stage, highSidePort } = setupWords;
+
+/** Names of readings, look-over items and setup fields inside a sentence. */
+export const names: FigureNames = {
+  reading: readingWords,
+  preflight: setupWords.preflight,
+  setup: { mode, kind, stage, highSidePort },
+  list: listWords,
+};

@@ -1,0 +1,253 @@
+/** The one thing to do next, and why. What adds or removes refrigerant always says how. */
+import type { Say } from '../message-texts';
+import type { NextStepWords } from '../language';
+
+const notYet: NextStepWords['notYet'] = {
+  'add-nothing': 'Don’t add refrigerant yet.',
+  'recover-nothing': 'Don’t recover refrigerant yet.',
+  'move-no-refrigerant': 'Don’t add or recover refrigerant yet.',
+  'shut-down': 'Don’t let it run on: shut it down.',
+  'do-not-judge-yet': 'Don’t judge the charge yet.',
+};
+
+const THEN_READ = 'then run 15 minutes and take every reading again';
+const CYLINDER = 'into a proper recovery cylinder (on the scale, at most 80 % full), never into the air';
+const LOCK_OUT = 'Lock out and test dead before opening a panel.';
+const WEIGH_IN = `recover ${CYLINDER}, evacuate, weigh in the nameplate charge corrected for the line set`;
+/** No flame while refrigerant is in the pipe: recovering comes before mending. */
+const MEND = `Recover ${CYLINDER}; only then mend, no flame before. Test with dry nitrogen through a regulator, never oxygen or air. Evacuate, weigh in the nameplate charge corrected for the line set.`;
+const THAW =
+  'Compressor off, blower on, until coil and line are free of ice; watch the drain pan, thaw water can come through the ceiling.';
+const AFTER_THAW = 'Readings at minutes 10 to 15 after thawing serve the diagnosis only, never the charge.';
+const BULB = 'bulb tight on clean pipe, at the right place, wrapped, its charge not lost';
+
+const each = (say: Say): string => `Each at most 5 % of the factory charge (not known: at most ${say.ozPerTon(2)})`;
+const add = (say: Say): string =>
+  `Add in small steps. ${each(say)}, liquid throttled into the suction side, ${THEN_READ}. Gloves and closed glasses.`;
+const recover = (say: Say): string =>
+  `in small steps ${CYLINDER}. ${each(say)}, ${THEN_READ}. Gloves and closed glasses.`;
+const drierDrop = (say: Say): string =>
+  `Measure the temperature before and after the filter-drier and along the liquid line. A drop of more than about ${say.deltaF(3)} is a restriction.`;
+const airTest = (say: Say): string =>
+  `Test for air in the system first. Compressor off, outdoor fan on. It counts only with the liquid shut into the outdoor coil (if the maker permits it, not past the low cut-out) or with both coils within ${say.deltaF(3)} of each other. Air is present when the standing pressure is more than ${say.deltaF(3)} above saturation at the coil’s temperature: then ${WEIGH_IN}. No air: recover ${recover(say)}`;
+
+/** What to do, its first sentence a title, and why. */
+const steps: NextStepWords['steps'] = {
+  'cooling-season-or-weigh-in': [
+    `Weigh the charge in, or come back in the cooling season. To weigh in: ${WEIGH_IN}. A heating table of the maker may be used instead.`,
+    'In heating the pipes change roles: the vapor line is hot gas, so no low-side hose on it.',
+  ],
+  'weigh-in': [
+    `Weigh the charge in, or use the maker’s test mode. To weigh in: ${WEIGH_IN}.`,
+    'The liquid is metered outdoors: subcooling cannot be read at this unit.',
+  ],
+  'bring-to-full-stage': [`Bring the system to full stage, ${THEN_READ}.`, 'Targets hold at full stage only.'],
+  'bring-to-charge-mode': [
+    `Put the inverter into the maker’s charge mode, ${THEN_READ}.`,
+    'Outside its charge mode the inverter’s speed moves the readings, not the charge.',
+  ],
+  'state-the-port': [
+    'State which high-side port this unit has. The liquid line is the warm pipe after the outdoor coil, the discharge line the hot one before it: it burns.',
+    'The two pressures differ by the drop through the outdoor coil.',
+  ],
+  'read-discharge-pressure': [
+    'Type the high-side pressure as discharge pressure. Judge it only against a target made for that port.',
+    'This unit has a discharge port only.',
+  ],
+  'mend-before-test': [
+    (f) => `Put this right first: ${f.items}. Lock out before reaching in, ${THEN_READ}.`,
+    'As it is, the readings do not show the charge.',
+  ],
+  'find-suction-line-table': [
+    'Find the maker’s suction-line table for this unit, or weigh the charge in.',
+    'The valve holds superheat whatever the charge, and there is no port for subcooling.',
+  ],
+  'check-hoses': [
+    'Check the hoses and whether the compressor runs. Low side on the large pipe, high side on the small one.',
+    'In cooling, suction is always below the high side.',
+  ],
+  'check-refrigerant-and-probes': [
+    'Check refrigerant, gauge zero, ports and clamps. Compare nameplate and retrofit label with the setup. If the pressure of the standing system does not match its temperature, the refrigerant may be mixed: stop, it is recovered as contaminated.',
+    'These readings do not fit a running system with this refrigerant.',
+  ],
+  'thaw-then-airflow': [
+    `Thaw the coil, then look at the airflow. ${THAW} Then re-read the wet bulb; look at filter, coil, blower, registers and ducts. ${AFTER_THAW}`,
+    'Ice with a split above its band points to too little air over the coil.',
+  ],
+  'thaw-then-leak-search': [
+    `Thaw the coil, then search for a leak. ${THAW} ${AFTER_THAW}`,
+    'Ice with low subcooling points to low charge.',
+  ],
+  'thaw-then-drier-drop': [
+    (_, say) => `Thaw the coil, then look for a restriction. ${THAW} ${drierDrop(say)} ${AFTER_THAW}`,
+    'Ice with good subcooling and high superheat: liquid is held back on its way.',
+  ],
+  'thaw-then-diagnose': [
+    `Thaw the coil, then read everything once for the diagnosis. ${THAW} ${AFTER_THAW}`,
+    'What freezes the coil is not clear from the readings so far.',
+  ],
+  'shut-down-high-pressure': [
+    `Shut the system down and find what drives the head up. ${LOCK_OUT} Outdoor coil and fan first, then air in the system, then overcharge.`,
+    'The high side is above what the system should carry.',
+  ],
+  'shut-down-hot-discharge': [
+    `Shut the system down and find what heats the discharge line. ${LOCK_OUT} Let the pipe cool. Then low charge, high head, a restriction.`,
+    'Oil and valves do not last at this temperature.',
+  ],
+  'come-back-at-higher-target': [
+    (_, say) => `Come back when the target superheat is ${say.deltaF(8)} or more. Recover nothing today.`,
+    'At these conditions even a right charge runs near the floor: it cannot be told apart.',
+  ],
+  'reread-wet-bulb-then-airflow': [
+    'Wet the wick and read the return wet bulb again. If the split stays above its band: filter, coil, blower speed, registers, ducts.',
+    'A drying wick looks exactly like low airflow.',
+  ],
+  'check-overcharge-or-air': [
+    (_, say) => airTest(say),
+    'Superheat is gone and subcooling is high; air in the system looks like overcharge.',
+  ],
+  'check-metering': [
+    `Check the metering device. Orifice: right size, seated, clean. Valve: ${BULB}.`,
+    'Liquid comes back, but the other readings do not show overcharge.',
+  ],
+  'run-longer': [
+    (f) => `Let it run ${f.minutes} more, then read. Probes stay on meanwhile.`,
+    'Readings settle only after a while of steady running.',
+  ],
+  'warm-the-house': [
+    (_, say) =>
+      `Bring the return air to at least ${say.degF(70)}. Heating may warm the house first if the occupant agrees; mind people and animals. Then cool 15 minutes and read.`,
+    'The targets do not reach down to air this cool.',
+  ],
+  'wait-for-warmer-weather': [
+    (_, say) => `Come back when it is at least ${say.degF(55)} outdoors, or weigh the charge in.`,
+    'In the cold the pressures do not show the charge.',
+  ],
+  'reach-a-target': [
+    'Wait for conditions that have a target, or come back. A house that is more humid or weather that is less hot raises the target. Heating may warm the house if the occupant agrees; mind people and animals.',
+    'The chart prints none here: the superheat would be too small to trust.',
+  ],
+  'record-conditions': [
+    'Record the running time, the lowest return air and the look-over before reading.',
+    'A result counts only for a system that was ready.',
+  ],
+  'take-readings': [(f) => `Read next: ${f.readings}.`, 'Without this the charge cannot be judged.'],
+  'take-readings-again': [
+    (f) => `Read again: ${f.readings}.`,
+    'Too old: the house and the weather have moved on, and the target with them.',
+  ],
+  'find-nameplate-target': [
+    'Find this unit’s target on the nameplate or in the maker’s data, and enter it.',
+    (say) =>
+      `No target is right for every unit; subcooling of ${say.deltaF(8)} to ${say.deltaF(14)} is common, and never a limit.`,
+  ],
+  'raise-airflow': [
+    `Raise the airflow first: filter, coil, blower speed, registers, ducts, ${THEN_READ}. With gas appliances in the house make sure no flue back-drafts.`,
+    'At low airflow a charge reads wrong; adjusting it would hide the cause.',
+  ],
+  'suspect-probes': [
+    'Check the probes before anything else. Wet the wick, warm or cool the clamps in your hand to see them answer, clamp again on clean metal.',
+    'Split and superheat both above do not belong together.',
+  ],
+  'confirm-refrigerant': [
+    'Confirm the refrigerant by nameplate and retrofit label, then correct the setup or the writing.',
+    'What you wrote differs from what this refrigerant does at that pressure.',
+  ],
+  'wet-the-wick': [
+    'Wet the wick with clean water and read again in moving air, until it stops falling.',
+    'A dry wick moves the target.',
+  ],
+  'place-liquid-probe-again': [
+    'Place the liquid-line probe again: clean metal near the valve, tight, wrapped, in the shade.',
+    'The liquid line cannot be colder than the air that cools it.',
+  ],
+  'read-twice': [
+    (_, say) =>
+      `Take a second set of readings 5 minutes later. They count when wet bulb agrees within ${say.deltaF(0.5)}, return air within ${say.deltaF(1)}, superheat and subcooling within ${say.deltaF(1)}.`,
+    'The house is still cooling down, and the target moves with it.',
+  ],
+  'settle-with-another-reading': [
+    'Take the readings once more with care: steady system, fresh wick, clamps on clean metal and wrapped.',
+    'The result lies too near the edge of its band for these readings.',
+  ],
+  'settle-with-better-instrument': [
+    'Use a better instrument, or state the ± of the one you have. Another reading with this one cannot settle it.',
+    'With this ± no reading could ever be sure enough.',
+  ],
+  'cool-weather-hold': [
+    (_, say) =>
+      `Move no refrigerant on this reading. Raise the head by the maker’s method, weigh the charge in, or come back above ${say.degF(70)}.`,
+    'In cool weather a reading outside its band is no proof of wrong charge.',
+  ],
+  'raise-head': [
+    `Raise the head pressure by the maker’s method, ${THEN_READ}.`,
+    'The valve has too little pressure to feed the coil.',
+  ],
+  'leak-first': [
+    'Search for a leak before anything is added: joints, coil, valve cores, caps. Then record what you found: a leak or none.',
+    'Refrigerant is not used up: what is missing went somewhere.',
+  ],
+  'mend-recover-weigh-in': [
+    `Recover, mend the leak, evacuate and weigh in. ${MEND}`,
+    'A charge with a known leak is not topped up.',
+  ],
+  'add-in-steps': [
+    (_, say) => `${add(say)} All steps together at most 10 % of the factory charge; beyond that recover and weigh in.`,
+    'The readings point to too little refrigerant.',
+  ],
+  'locate-mend-weigh-in': [
+    `Don’t top up again: locate the leak, mend it, weigh in. ${MEND}`,
+    'It was topped up on an earlier visit and is low again.',
+  ],
+  'recover-and-weigh-in': [
+    `Weigh the charge in: ${WEIGH_IN}.`,
+    'So much has been added that the amount inside is no longer known.',
+  ],
+  'measure-drier-drop': [(_, say) => drierDrop(say), 'Low charge and a restriction look alike so far.'],
+  'find-restriction': [
+    (_, say) =>
+      `Look for a restriction; leave the refrigerant as it is. ${drierDrop(say)} Then the orifice: size, dirt.`,
+    'There is liquid enough, but too little of it gets through.',
+  ],
+  'air-test-then-recover': [(_, say) => airTest(say), 'Air in the system looks like overcharge.'],
+  'recover-in-steps': [(_, say) => `Recover ${recover(say)}`, 'The readings point to too much refrigerant.'],
+  'check-orifice-compressor-condenser': [
+    'Check the orifice, the compressor and the air over the outdoor coil; leave the refrigerant as it is. Orifice size and seat; compressor current and pressures; a clean coil and a fan at speed.',
+    'Superheat is low without the high subcooling of an overcharge.',
+  ],
+  'check-bulb-and-valve': [
+    `Check the valve and its bulb; leave the refrigerant as it is. The ${BULB}.`,
+    'The valve lets too much through; the charge is not the cause.',
+  ],
+  'check-bulb-screen-drier': [
+    (_, say) =>
+      `Check the valve’s bulb, its screen and the drier; leave the refrigerant as it is. The ${BULB}. ${drierDrop(say)}`,
+    'Subcooling is right, so the charge is; the coil is starved on the way.',
+  ],
+  'check-bulb-and-airflow': [
+    `Check the valve’s bulb, then the airflow; leave the refrigerant as it is. The ${BULB}. Then filter, coil, blower.`,
+    'Subcooling is right, so the charge is; the coil is fed more than the air can boil off.',
+  ],
+  'find-restriction-recover-nothing': [
+    (_, say) => `Look for a restriction; recover nothing. ${drierDrop(say)} Then the valve’s screen and bulb.`,
+    'Both high: liquid backs up before something that holds it back.',
+  ],
+  'check-bulb-then-recover': [
+    (_, say) => `Check the valve and its bulb first. The ${BULB}. If they are right: recover ${recover(say)}`,
+    'An open valve and too much refrigerant go together here; the valve comes first.',
+  ],
+  'read-supply-or-airflow': [
+    'Read the supply dry bulb, or measure the airflow.',
+    'On a fixed orifice low charge and low airflow can hide each other.',
+  ],
+  'read-liquid-pair': [
+    'Read the liquid pressure and the liquid line next.',
+    'They tell low charge from a restriction.',
+  ],
+  record: [
+    'Record it, then close up: hoses off with the least loss, caps on, ports checked for leaks, label updated.',
+    'The charge is within its band at these conditions.',
+  ],
+};
+
+export const nextStepWords: NextStepWords = { notYet, steps };

@@ -1,0 +1,39 @@
+/** Why a criterion is not verifiable or not judged. */
+import type { ReasonFigures } from '@chargewright/engine';
+import type { MessageTexts } from '../message-texts';
+
+export const reasonTexts: MessageTexts<ReasonFigures> = {
+  'readings-missing': (f) => `Not read yet: ${f.readings}.`,
+  'target-missing': 'There is no target yet: take it from the nameplate or the maker’s data.',
+  'capacity-missing': 'The nominal capacity is missing: without it there is no least airflow.',
+  'conditions-not-recorded': 'Running time, lowest return air or the look-over before reading are not recorded.',
+  'instruments-not-recorded': 'It is not recorded when the instruments were last checked.',
+  'target-for-other-port': 'The target holds for another high-side port than the one this pressure was read at.',
+  'suction-port-only': 'There is only a suction port: without a liquid pressure there is no subcooling.',
+  'outside-curve': 'The pressure lies outside the range this refrigerant’s properties are known for.',
+  'outside-range': 'A reading lies outside the range of the formula that needs it.',
+  'instruments-old': (f) => `The instruments were checked ${f.days} ago: too long for these rules.`,
+  'heating-mode': 'In heating no cooling target holds.',
+  'metered-outdoors':
+    'This kind meters the liquid outdoors: the small pipe carries liquid and vapor, so subcooling cannot be read there.',
+  'part-stage': 'The system is not known to run at full stage: targets hold at full stage only.',
+  'not-in-charge-mode': 'The inverter is not in its charge mode: its speed moves the readings, not the charge.',
+  'port-not-stated': 'It is not stated which high-side port this unit has.',
+  'liquid-reading-at-discharge-port':
+    'The unit has a discharge port only: this pressure is not a liquid pressure. Type it as discharge pressure.',
+  'not-ready': (f) => `Not ready for the test: ${f.items}.`,
+  'running-time': (f) => `The system has run ${f.minutes}; it takes ${f.least}.`,
+  'return-too-cool': (f) => `The return air was down to ${f.actual}; the test needs at least ${f.least}.`,
+  'outdoor-too-cold': (f) => `It is ${f.actual} outdoors; the test needs at least ${f.least}.`,
+  stale: (f) => `Too old to count: ${f.readings}.`,
+  'ports-swapped': 'Suction reads as high as the high side: hoses swapped, or the compressor is not running.',
+  'saturation-impossible': 'These readings cannot belong together in a running system.',
+  'no-target-here': 'There is no target for these conditions: the chart prints a dash or does not reach them.',
+  'target-may-not-exist': (f) =>
+    `These conditions lie so near a dash of the chart that there may be no target (${f.probability} likely).`,
+  'airflow-too-low': 'The airflow is too low: raise it first, the charge is judged after.',
+  'split-above': 'The split is above its band: re-read the wet bulb, then look at the airflow, then judge the charge.',
+  freezing: 'The coil is freezing: no charge is judged on ice.',
+  flash:
+    'Subcooling reads below zero: it is about zero, with vapor in the liquid line. Nothing is called within on that.',
+};

@@ -1,0 +1,130 @@
+/** The setup and the visit: labels, choices and short explanations. */
+import type {
+  HighSidePort,
+  LeakSearch,
+  MeteringDevice,
+  Mode,
+  PreflightItem,
+  Stage,
+  SystemKind,
+} from '@chargewright/engine';
+
+export interface ChoiceWords {
+  readonly label: string;
+  readonly hint: string;
+}
+
+export interface SetupFieldWords<Option extends string> extends ChoiceWords {
+  /** Inside a sentence. */
+  readonly name: string;
+  readonly options: Readonly<Record<Option, ChoiceWords>>;
+}
+
+const option = (label: string, hint = ''): ChoiceWords => ({ label, hint });
+const field = (label: string, name: string, hint = '') => ({ label, name, hint });
+
+const meteringDevice: SetupFieldWords<MeteringDevice> = {
+  ...field('Metering device', 'metering device', 'At the indoor coil. It decides the method.'),
+  options: {
+    'fixed-orifice': option('Fixed orifice', 'Piston or capillary tube: judged by superheat.'),
+    txv: option('TXV', 'Valve with a bulb on the suction line: judged by subcooling.'),
+    eev: option('EEV', 'Electronic valve: judged by subcooling.'),
+  },
+};
+
+const mode: SetupFieldWords<Mode> = {
+  ...field('Mode', 'mode', 'Charge is judged in cooling.'),
+  options: { cooling: option('Cooling'), heating: option('Heating', 'No cooling target holds in heating.') },
+};
+
+const kind: SetupFieldWords<SystemKind> = {
+  ...field('Kind', 'kind of system'),
+  options: {
+    split: option('Split', 'Outdoor unit and one ducted indoor coil.'),
+    packaged: option('Packaged', 'All in one cabinet. Say which high-side port it has.'),
+    'mini-split': option('Mini-split', 'Ductless, metered outdoors: weigh the charge in.'),
+    'multi-split': option('Multi-split', 'Several heads, metered outdoors: weigh the charge in.'),
+  },
+};
+
+const stage: SetupFieldWords<Stage> = {
+  ...field('Stage', 'stage', 'Targets hold at full stage only.'),
+  options: { full: option('Full stage'), part: option('Part stage'), unknown: option('Not known') },
+};
+
+const highSidePort: SetupFieldWords<HighSidePort> = {
+  ...field('High-side port', 'high-side port', 'Where the high-side gauge connects.'),
+  options: {
+    liquid: option('Liquid line', 'The small, warm pipe after the outdoor coil.'),
+    discharge: option('Discharge line', 'The hot pipe before the outdoor coil.'),
+    none: option('None', 'Only a suction port.'),
+  },
+};
+
+const leakSearch: SetupFieldWords<LeakSearch> = {
+  ...field('Leak search', 'leak search', 'On this visit, before any refrigerant is added.'),
+  options: {
+    'not-done': option('Not done'),
+    'none-found': option('Done, none found'),
+    found: option('Leak found'),
+  },
+};
+
+/** Numbers of the setup and the visit, by their names in the contract. */
+const numbers = {
+  elevation: field('Elevation', 'elevation', 'Of the site. Gauge pressures count from the air around you.'),
+  stationPressure: field('Barometer', 'barometer reading', 'Absolute, at the site, not corrected to sea level.'),
+  targetSubcooling: field('Target subcooling', 'target subcooling', 'From the nameplate or the maker’s chart.'),
+  targetSuperheat: field(
+    'Target superheat',
+    'target superheat',
+    'From this maker’s chart at today’s conditions. Empty: the printed makers’ chart is used.',
+  ),
+  superheatRange: field('Superheat range', 'superheat range', 'The maker’s range for the valve.'),
+  nominalCapacity: field('Nominal capacity', 'nominal capacity', 'From the model number or the nameplate.'),
+  designAirflow: field('Design airflow', 'design airflow', 'From the design or the maker’s data.'),
+  factoryCharge: field('Factory charge', 'factory charge', 'From the nameplate.'),
+  maxHighPressure: field('Highest pressure allowed', 'highest pressure allowed', 'High side, from the nameplate.'),
+  lowestReturnDryBulb: field('Lowest return air', 'lowest return air', 'The coolest return air during this test.'),
+  instrumentsCheckedDaysAgo: field(
+    'Instruments checked',
+    'days since the instruments were checked',
+    'Days since gauges and thermometers were held against a reference.',
+  ),
+  runningMinutes: field('Running for', 'running time', 'Since the start or the last adjustment.'),
+  addedThisVisit: field('Added on this visit', 'amount added on this visit', 'All steps together.'),
+  addedBefore: field('Added before', 'amount added before'),
+  additionsOnEarlierVisits: field('Earlier additions', 'number of earlier additions'),
+  hoursOff: field('Off for', 'hours the system was off', 'Before this start.'),
+  lift: field('Lift', 'lift of the line set'),
+  length: field('Line length', 'length of the line set'),
+  included: field('Length in the factory charge', 'line length covered by the factory charge'),
+};
+
+const preflight: Readonly<Record<PreflightItem, ChoiceWords & { readonly name: string }>> = {
+  filterAndCoil: field('Filter and indoor coil clean', 'filter or indoor coil', 'Low airflow looks like wrong charge.'),
+  panelsOn: field('Panels on', 'panels', 'A missing panel changes the airflow.'),
+  fullStage: field('Full stage', 'stage', 'All stages called.'),
+  economizerShut: field('Economizer shut', 'economizer', 'No outdoor air mixed into the return.'),
+  gaugeZeroed: field('Gauges zeroed', 'gauge zero', 'In the open air, before connecting.'),
+  condenserDryAndClean: field('Outdoor coil dry and clean', 'outdoor coil', 'No rain, no hose water, no lint.'),
+  fanSteady: field('Outdoor fan steady', 'outdoor fan', 'It does not cycle or change speed.'),
+  accessHole: field('Access hole at the coil', 'access hole', 'The return air is read beside the coil.'),
+};
+
+export const setupWords = {
+  refrigerant: field('Refrigerant', 'refrigerant', 'From the nameplate. Look for a retrofit label too.'),
+  procedure: field('Rules', 'procedure', 'General rules, not those of one maker.'),
+  meteringDevice,
+  mode,
+  kind,
+  stage,
+  highSidePort,
+  leakSearch,
+  numbers,
+  preflight,
+};
+
+/** "a, b and c" */
+export const listWords = (names: readonly string[]): string =>
+  names.length < 2 ? (names[0] ?? '') : `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`;

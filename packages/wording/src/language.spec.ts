@@ -1,0 +1,59 @@
+import type { Caution, NextStep } from '@chargewright/engine';
+import { describe, expect, it } from 'vitest';
+import { cautionTexts } from './english/cautions';
+import { checkPageWords } from './english/check-page';
+import { faultWords } from './english/faults';
+import { findingPhrases } from './english/findings';
+import { looseChecksWords } from './english/loose-checks';
+import { names } from './english/names';
+import { nextStepWords } from './english/next-steps';
+import { offlineWords } from './english/offline';
+import { readingWords } from './english/readings';
+import { reasonTexts } from './english/reasons';
+import * as safetyWords from './english/safety';
+import { setupWords } from './english/setup';
+import { stopTexts } from './english/stops';
+import { structureFaultWords } from './english/structure-faults';
+import type { Language } from './language';
+import { cautionText, nextStepText } from './sentences';
+
+/** That this compiles is the first test: English has every section of a language. */
+const english: Language = {
+  names,
+  reasons: reasonTexts,
+  stops: stopTexts,
+  cautions: cautionTexts,
+  nextSteps: nextStepWords,
+  findings: findingPhrases,
+  faults: faultWords,
+  structureFaults: structureFaultWords,
+  readings: readingWords,
+  setup: setupWords,
+  safety: safetyWords,
+  checkPage: checkPageWords,
+  looseChecks: looseChecksWords,
+  offline: offlineWords,
+};
+
+describe('a language', () => {
+  const spanish: Language = {
+    ...english,
+    cautions: { ...cautionTexts, 'long-lines': (f) => `La línea sube ${f.lift}.` },
+    nextSteps: {
+      ...nextStepWords,
+      notYet: { ...nextStepWords.notYet, 'add-nothing': 'Todavía no agregue refrigerante.' },
+    },
+  };
+
+  it('is passed as the last argument', () => {
+    const caution: Caution = { code: 'long-lines', figures: { lift: { kind: 'lengthM', value: 9 } } };
+    expect(cautionText(caution, 'C-bar', spanish)).toBe('La línea sube 9 m.');
+    const step: NextStep = { code: 'read-liquid-pair', figures: {}, notYet: ['add-nothing'] };
+    expect(nextStepText(step, 'C-bar', spanish)).toMatch(/^Todavía no agregue refrigerante\. /);
+  });
+
+  it('is English when left out', () => {
+    const caution: Caution = { code: 'pull-down', figures: {} };
+    expect(cautionText(caution, 'F-psi')).toBe(cautionText(caution, 'F-psi', english));
+  });
+});

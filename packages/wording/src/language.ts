@@ -1,0 +1,90 @@
+/**
+ * Everything a language says. `english/` is the first and the reference; another one implements this type in a folder of its own and is passed as the
+ * last argument. A code of the engine without a sentence does not compile.
+ */
+import type {
+  CautionFigures,
+  CriterionId,
+  FaultFigures,
+  NextStepFigures,
+  NotYetCode,
+  OverallFinding,
+  ReasonFigures,
+  StopCode,
+  StopFigures,
+} from '@chargewright/engine';
+import type { CriterionParts } from './criterion-parts';
+import type { checkPageWords } from './english/check-page';
+import type { looseChecksWords } from './english/loose-checks';
+import type { offlineWords } from './english/offline';
+import type { readingWords } from './english/readings';
+import type * as safetyWords from './english/safety';
+import type { setupWords } from './english/setup';
+import type { FigureNames, MessageTexts, Say } from './message-texts';
+import type { StructureFaultKind } from './structure-fault';
+
+export interface FieldNaming {
+  readonly fields: Readonly<Record<string, { readonly name: string } | undefined>>;
+  readonly parts: Readonly<Record<string, string>>;
+  earlier(name: string): string;
+  partOf(name: string, part: string): string;
+}
+
+export interface NextStepWords {
+  readonly notYet: Readonly<Record<NotYetCode, string>>;
+  readonly steps: {
+    readonly [Code in keyof NextStepFigures]: readonly [
+      step: MessageTexts<NextStepFigures>[Code],
+      why: string | ((say: Say) => string),
+    ];
+  };
+}
+
+export interface FindingPhrases {
+  readonly criteria: Readonly<Record<CriterionId, string>>;
+  readonly words: Readonly<Record<OverallFinding, string>>;
+  readonly wordsOf: Readonly<Partial<Record<CriterionId, Partial<Record<OverallFinding, string>>>>>;
+  readonly overall: Readonly<Record<OverallFinding, string>>;
+  readonly stops: Readonly<Record<StopCode, string>>;
+  headline(parts: CriterionParts): string;
+  detail(parts: CriterionParts, reason: string, say: Say): string;
+  ruler(parts: CriterionParts): string;
+  stepName(id: string): string;
+}
+
+/** `field` is the name of the faulty field, `counterpart` that of the field it contradicts. */
+export type FaultTexts = {
+  readonly [Code in keyof FaultFigures]: (
+    figures: Readonly<Record<(FaultFigures[Code] & string) | 'field' | 'counterpart', string>>,
+  ) => string;
+};
+
+export interface FaultWords {
+  readonly faults: FaultTexts;
+  readonly naming: FieldNaming;
+}
+
+/** Only the API says these. */
+export interface StructureFaultWords {
+  readonly structure: Readonly<
+    Record<StructureFaultKind, (f: { readonly field: string; readonly allowed: string }) => string>
+  >;
+  alternatives(allowed: readonly string[]): string;
+}
+
+export interface Language {
+  readonly names: FigureNames;
+  readonly reasons: MessageTexts<ReasonFigures>;
+  readonly stops: MessageTexts<StopFigures>;
+  readonly cautions: MessageTexts<CautionFigures>;
+  readonly nextSteps: NextStepWords;
+  readonly findings: FindingPhrases;
+  readonly faults: FaultWords;
+  readonly structureFaults: StructureFaultWords;
+  readonly readings: typeof readingWords;
+  readonly setup: typeof setupWords;
+  readonly safety: typeof safetyWords;
+  readonly checkPage: typeof checkPageWords;
+  readonly looseChecks: typeof looseChecksWords;
+  readonly offline: typeof offlineWords;
+}

@@ -1,0 +1,69 @@
+import { PREFLIGHT_ITEMS, READING_IDS } from '@chargewright/engine';
+import { describe, expect, it } from 'vitest';
+import { checkPageWords } from './english/check-page';
+import { looseChecksWords } from './english/loose-checks';
+import { offlineWords } from './english/offline';
+import { readingWords } from './english/readings';
+import * as safetyWords from './english/safety';
+import { listWords, setupWords } from './english/setup';
+
+/** Every text of a tree of words; those that take figures get 2 and 8. */
+function textsOf(words: unknown, path: string): readonly (readonly [string, string])[] {
+  if (typeof words === 'string') return [[path, words]];
+  if (typeof words === 'function') {
+    const say = words as (...figures: readonly unknown[]) => string;
+    // the unit toggle answers only for a unit system
+    return [[path, say(path.startsWith('checkPage.units') ? 'F-psi' : 2, 8)]];
+  }
+  return Object.entries(words as object).flatMap(([key, value]) => textsOf(value, `${path}.${key}`));
+}
+
+const roots = Object.entries({
+  checkPage: checkPageWords,
+  looseChecks: looseChecksWords,
+  offline: offlineWords,
+  readings: readingWords,
+  safety: { ...safetyWords },
+  setup: setupWords,
+});
+
+describe('words of the page', () => {
+  it.each(roots)('%s can be printed in the font of the page', (root, words) => {
+    for (const [path, text] of textsOf(words, root)) {
+      expect(text, path).not.toMatch(/undefined|NaN|\[object|\s\s/);
+      expect(text, path).toMatch(/^[\u0020-\u007e\u00a0-\u00ff\u2000-\u206f\u20ac\u2122\u2212]*$/);
+      if (!path.endsWith('.hint')) expect(text, path).not.toBe('');
+    }
+  });
+
+  it('say how, where, and what goes wrong at each reading', () => {
+    for (const id of READING_IDS) {
+      const { label, name, place, how, mistake, missing } = readingWords[id];
+      for (const text of [how, mistake]) expect(text, id).toMatch(/^[A-Z].+\.$/);
+      expect(label).toMatch(/^[A-Z]/);
+      expect(place).toMatch(/^[a-z]/);
+      expect(missing).toBe(`Needs the ${name}`);
+    }
+  });
+
+  it('name each item of the look-over', () => {
+    for (const item of PREFLIGHT_ITEMS) expect(setupWords.preflight[item].label).toBeTruthy();
+  });
+
+  it('count in the singular too', () => {
+    expect(checkPageWords.readings.typedAgo(0)).toBe('typed just now');
+    expect(checkPageWords.readings.typedAgo(1)).toBe('typed 1 min ago');
+    expect(looseChecksWords.readings(1)).toBe('1 reading');
+    expect(looseChecksWords.setAside(1)).toContain('One stored entry');
+    expect(checkPageWords.result.needsMending(1)).toContain('One entry needs');
+  });
+});
+
+describe('listWords', () => {
+  it('strings names together', () => {
+    expect(listWords([])).toBe('');
+    expect(listWords(['a'])).toBe('a');
+    expect(listWords(['a', 'b'])).toBe('a and b');
+    expect(listWords(['a', 'b', 'c'])).toBe('a, b and c');
+  });
+});
