@@ -22,6 +22,8 @@ const DAMP_INDOORS = 0.95;
 const USUAL_STEP_K = differenceToK(0.1, 'deltaF');
 const COLDER_THAN_AIR_K = differenceToK(2, 'deltaF');
 const LONG_LIFT_M = lengthToM(20, 'ft');
+/** Rounding of the conversions; far below any gauge. */
+const SLACK_PA = 1e-3;
 
 /** Liquid less suction pressure that a valve needs to work (CEC Reference Residential Appendices, RA1.2, winter setup: least of its band). */
 const LEAST_VALVE_DIFFERENCE_PA: Readonly<Partial<Record<RefrigerantId, number>>> = {
@@ -180,7 +182,8 @@ export function lowHead(input: CheckInput): Caution | null {
   const suction = readings.suctionPressure?.quantity.value;
   const liquid = readings.liquidPressure?.quantity.value;
   if (isFixedOrifice(setup) || !isCoolWeather(input)) return null;
-  if (least === undefined || suction === undefined || liquid === undefined || liquid - suction >= least) return null;
+  if (least === undefined || suction === undefined || liquid === undefined) return null;
+  if (liquid - suction >= least - SLACK_PA) return null;
   const pressure = (value: number) => ({ kind: 'pressureDifferencePa', value }) as const;
   return { code: 'low-head', figures: { difference: pressure(liquid - suction), least: pressure(least) } };
 }

@@ -3,15 +3,8 @@
  * and the scope of CEC Reference Residential Appendices, RA3.2 (2008, 2019); a mini-split meters outdoors, its small pipe is two-phase.
  */
 import type { Reason } from './codes';
-import type { CheckInput, CheckSetup, CheckVisit } from './input';
-import { isFixedOrifice } from './input';
+import type { CheckInput, CheckVisit } from './input';
 import type { PreflightItem } from './request';
-
-/** Criteria that decide the check on this system. */
-export type ChargeCriterion = 'superheat' | 'subcooling' | 'superheat-window';
-
-export const chargeCriteria = (setup: CheckSetup): readonly ChargeCriterion[] =>
-  isFixedOrifice(setup) ? ['superheat'] : ['subcooling', 'superheat-window'];
 
 /** Items that make the test invalid until mended; a dirty filter or an unzeroed gauge only warns. */
 const MENDED_FIRST: readonly PreflightItem[] = [

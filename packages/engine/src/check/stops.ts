@@ -12,6 +12,8 @@ import { isFixedOrifice } from './input';
 /** Mean evaporating temperature at which frost is certain to grow (choice), and at which it may (water's freezing point). */
 const FREEZING_STOP_K = temperatureToK(28, 'degF');
 const FREEZING_K = temperatureToK(32, 'degF');
+/** Fall of the suction pressure from one set of readings to the next that is more than its needle's unrest (choice). */
+const FALL_PA = pressureDifferenceToPa(2, 'psi');
 /** Condensing over outdoor air (choice). */
 const MOST_CONDENSING_OVER_AIR_K = differenceToK(45, 'deltaF');
 /** Discharge line (common practice, no source). */
@@ -83,11 +85,11 @@ export function freezeRisk(input: CheckInput, derived: DerivedQuantities): Cauti
 const coolingCoil = ({ setup, visit }: CheckInput, mean: Quantity): number | null =>
   setup.mode === 'cooling' && visit.runningMinutes !== 0 ? (bareValue(mean) ?? null) : null;
 
-/** Suction pressure, and with it the coil, lower than in the earlier readings by more than their combined standard uncertainty. */
+/** Suction pressure, and with it the coil, lower than in the earlier readings. By the bare values: a poorer gauge must not lift a stop. */
 function isFalling({ visit, readings }: CheckInput): boolean {
   const before = visit.earlier?.readings.suctionPressure?.quantity;
   const now = readings.suctionPressure?.quantity;
-  return before !== undefined && now !== undefined && before.value - now.value > Math.hypot(before.u, now.u);
+  return before !== undefined && now !== undefined && before.value - now.value > FALL_PA;
 }
 
 function highPressure(input: CheckInput, derived: DerivedQuantities): Stop | null {

@@ -1,7 +1,7 @@
 import { EngineError } from '../errors';
 import type { Formula } from './formula';
 import type { ErrorPart, Known, Quantity, Refused } from './quantity';
-import { bareValue, known } from './quantity';
+import { bareValue, known, missing } from './quantity';
 
 /** Below these a secant measures rounding noise instead of a slope. */
 const SMALLEST_RELATIVE_STEP = 1e-6;
@@ -20,12 +20,9 @@ export function derive<Name extends string>(
   parts: readonly ErrorPart[] = [],
 ): Quantity {
   const names = Object.keys(formula.symbols) as Name[];
-  const lacking: string[] = [];
-  for (const name of names) {
-    const input = from[name];
-    if (input.state === 'missing') lacking.push(...input.inputs);
-  }
-  if (lacking.length > 0) return { state: 'missing', inputs: [...new Set(lacking)] };
+  // a target that nobody entered is missing without naming a reading
+  const lacking = names.map((name): Quantity => from[name]).filter((input) => input.state === 'missing');
+  if (lacking.length > 0) return missing(...new Set(lacking.flatMap(({ inputs }) => inputs)));
   const at = {} as Record<Name, number>;
   let refused: Refused | undefined;
   for (const name of names) {

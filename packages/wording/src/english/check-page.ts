@@ -81,6 +81,7 @@ export const checkPageWords = {
     runningFor: (minutes: number) => `Running ${minutes} ${minutes === 1 ? 'minute' : 'minutes'}`,
     toGo: (minutes: number) => `${minutes} min until the readings count`,
     soon: '12 minutes. Set the probes and get ready to read.',
+    counts: 'Running. Readings count.',
     ready: '15 minutes. Readings count from now on.',
     adjustedNote:
       'After an adjustment wait 15 minutes, then take every reading again. Earlier readings stay in the record.',

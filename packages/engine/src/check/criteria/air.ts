@@ -128,10 +128,10 @@ export function airflowGate(evidence: AirflowEvidence): Reason | null {
   return evidence === 'split-above' ? { code: 'split-above', figures: {} } : null;
 }
 
-/** A caution for an airflow gate whose limit lies inside the uncertainty of what is held against it. */
+/** A caution for an airflow gate whose limit lies inside the uncertainty of what is held against it; a split that is clear of it is said to be. */
 export function airflowNearLimit(airflow: CriterionResult | null, split: CriterionResult): readonly Caution[] {
   if (airflow !== null && judged(airflow)) return nearLimit(airflow, 0);
-  return judged(split) ? nearLimit(split, split.tolerance?.high ?? 0) : [];
+  return split.finding === 'too-close-to-call' ? nearLimit(split, split.tolerance?.high ?? 0) : [];
 }
 
 function nearLimit({ actual, target, deviation }: CriterionResult, allowed: number): readonly Caution[] {

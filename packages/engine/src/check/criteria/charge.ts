@@ -21,9 +21,14 @@ export interface ChargeJudgement {
   readonly gates: (evidence: readonly Known[]) => readonly (Reason | null)[];
 }
 
-/** A measured subcooling below zero means about zero: nothing that rests on the readings is called *within*. */
-const negativeSubcooling = ({ subcooling }: DerivedQuantities): Reason | null =>
-  (bareValue(subcooling) ?? 0) < 0 ? { code: 'flash', figures: {} } : null;
+/**
+ * A measured subcooling or superheat below zero means about zero: nothing that rests on the readings is called *within*, however poor the
+ * instruments that might excuse it.
+ */
+function negativeDifference({ subcooling, superheat }: DerivedQuantities): Reason | null {
+  if ((bareValue(subcooling) ?? 0) < 0) return { code: 'flash', figures: {} };
+  return (bareValue(superheat) ?? 0) < 0 ? { code: 'saturation-impossible', figures: {} } : null;
+}
 
 export interface SuperheatTarget {
   readonly quantity: Quantity;
@@ -75,7 +80,7 @@ export function judgeSuperheat(
     probabilityOfNoTarget: target.probabilityOfNoTarget,
     mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
     gates,
-    neverWithin: negativeSubcooling(derived),
+    neverWithin: negativeDifference(derived),
   });
 }
 
@@ -110,7 +115,7 @@ export function judgeSubcooling({ input, derived, unfit, gates }: ChargeJudgemen
     tolerance: () => ({ low: -toleranceK, high: toleranceK, floored: false }),
     guard: procedure.guardProbability.value,
     gates,
-    neverWithin: negativeSubcooling(derived),
+    neverWithin: negativeDifference(derived),
   });
 }
 
@@ -128,6 +133,6 @@ export function judgeSuperheatWindow({ input, derived, unfit, gates }: ChargeJud
     tolerance: { low: range.lowK, high: range.highK, floored: false },
     guard: procedure.guardProbability.value,
     gates,
-    neverWithin: negativeSubcooling(derived),
+    neverWithin: negativeDifference(derived),
   });
 }

@@ -1,0 +1,58 @@
+import express from 'express';
+import type { Express } from 'express';
+import type { Logger } from 'pino';
+import { evaluationsRoutes } from './features/evaluations/evaluations-routes';
+import { healthRoutes } from './features/health/health-routes';
+import type { HealthDeps } from './features/health/health-routes';
+import { openApiRoutes } from './features/openapi/openapi-routes';
+import { psychrometricsRoutes } from './features/psychrometrics/psychrometrics-routes';
+import { refrigerantsRoutes } from './features/refrigerants/refrigerants-routes';
+import { compress } from './http/compress';
+import { limitRate } from './http/limits';
+import type { Limits } from './http/limits';
+import { openCors } from './http/open-cors';
+import { notFound, problemHandler } from './http/problem-handler';
+import { requestLog } from './http/request-log';
+import { securityHeaders } from './http/security';
+import { staticFiles } from './http/static-files';
+
+export interface AppDeps extends HealthDeps {
+  readonly logger: Logger;
+  readonly limits: Limits;
+  readonly trustProxy: boolean | number | string;
+  readonly secure: boolean;
+  readonly webRoot: string;
+}
+
+/** Routes that answer any origin. */
+const OPEN_ROUTES = [
+  '/api/v1/evaluations',
+  '/api/v1/refrigerants',
+  '/api/v1/psychrometrics',
+  '/api/v1/openapi.json',
+  '/healthz',
+  '/readyz',
+];
+
+/** The whole server, without a socket. */
+export function createApp(deps: AppDeps): Express {
+  const { logger, limits, trustProxy, secure, webRoot } = deps;
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('trust proxy', trustProxy);
+  app.use(requestLog(logger));
+  app.use(...securityHeaders({ secure }));
+  app.use(compress);
+  app.use(OPEN_ROUTES, openCors);
+  app.use('/api', limitRate(limits));
+  app.use(evaluationsRoutes(limits));
+  app.use(refrigerantsRoutes());
+  app.use(psychrometricsRoutes());
+  app.use(openApiRoutes());
+  app.use('/api', notFound);
+  app.use(healthRoutes(deps));
+  app.use(staticFiles(webRoot));
+  app.use(notFound);
+  app.use(problemHandler);
+  return app;
+}

@@ -1,0 +1,92 @@
+import type { EvaluationAnswer } from '@chargewright/contract/evaluation';
+import { DERIVED_IDS, expandedUncertainty, moistAirEnthalpyBtuPerLb, temperatureFromK } from '@chargewright/engine';
+import type { CheckInput, CheckResult, CriterionResult, Known, Tolerance } from '@chargewright/engine';
+import {
+  cautionText,
+  derivationLines,
+  nextStepText,
+  notYetText,
+  presentValue,
+  reasonText,
+  stopText,
+} from '@chargewright/wording';
+import type { UnitSystem } from '@chargewright/wording';
+
+type Criterion = EvaluationAnswer['criteria'][number];
+type UncertainAmount = NonNullable<Criterion['actual']>;
+
+/** The result of a check in the units and words of the contract; numbers unrounded. */
+export function evaluationAnswer(input: CheckInput, result: CheckResult, system: UnitSystem): EvaluationAnswer {
+  const { engineVersion, procedure, criteria, overall, derivation } = result;
+  const { nextStep } = overall;
+  return {
+    engineVersion,
+    procedure: { id: procedure.id, version: procedure.version },
+    derived: derivedAmounts(input, result, system),
+    criteria: criteria.map((criterion) => criterionAnswer(criterion, system)),
+    overall: {
+      finding: overall.finding,
+      nextStep: {
+        code: nextStep.code,
+        text: nextStepText(nextStep, system),
+        notYet: nextStep.notYet.map((code) => ({ code, text: notYetText(code) })),
+      },
+      stops: overall.stops.map((stop) => ({ code: stop.code, text: stopText(stop, system) })),
+      cautions: overall.cautions.map((caution) => ({ code: caution.code, text: cautionText(caution, system) })),
+    },
+    diagnosis: [],
+    derivation: [...derivationLines(derivation, system)],
+  };
+}
+
+function derivedAmounts(input: CheckInput, { derived }: CheckResult, system: UnitSystem): EvaluationAnswer['derived'] {
+  const amounts: EvaluationAnswer['derived'] = {};
+  for (const id of DERIVED_IDS) {
+    const quantity = derived[id];
+    if (quantity !== undefined) amounts[id] = uncertainAmount(quantity, system);
+  }
+  const dryBulb = input.readings.returnDryBulb?.quantity;
+  const { returnHumidityRatio } = derived;
+  if (system === 'F-psi' && amounts.returnEnthalpy && dryBulb && returnHumidityRatio) {
+    // the inch-pound datum needs the state, not only the SI enthalpy
+    const dryBulbF = temperatureFromK(dryBulb.value, 'degF');
+    amounts.returnEnthalpy.value = moistAirEnthalpyBtuPerLb(dryBulbF, returnHumidityRatio.value);
+  }
+  return amounts;
+}
+
+function criterionAnswer(criterion: CriterionResult, system: UnitSystem): Criterion {
+  const { actual, target, deviation, tolerance, reason } = criterion;
+  return {
+    criterion: criterion.criterion,
+    required: criterion.required,
+    actual: actual && uncertainAmount(actual, system),
+    target: target && uncertainAmount(target, system),
+    targetSource: criterion.targetSource,
+    deviation: deviation && uncertainAmount(deviation, system),
+    tolerance: deviation && tolerance && toleranceAnswer(tolerance, deviation, system),
+    byRule: criterion.byRule,
+    probabilityWithin: criterion.probabilityWithin,
+    finding: criterion.finding,
+    reason: reason && reason.code,
+    reasonText: reason && reasonText(reason, system),
+  };
+}
+
+function uncertainAmount(quantity: Known, system: UnitSystem): UncertainAmount {
+  const { kind, value } = quantity;
+  const spread = expandedUncertainty(quantity);
+  return {
+    ...presentValue(kind, value, system),
+    // an enthalpy's unit has a datum of its own: what is left of it at zero is not part of a spread
+    plusMinus:
+      kind === 'temperatureK'
+        ? presentValue('differenceK', spread, system).value
+        : presentValue(kind, spread, system).value - presentValue(kind, 0, system).value,
+  };
+}
+
+function toleranceAnswer({ low, high }: Tolerance, { kind }: Known, system: UnitSystem): Criterion['tolerance'] {
+  const limit = (value: number | null) => (value === null ? null : presentValue(kind, value, system).value);
+  return { low: limit(low), high: limit(high), unit: presentValue(kind, 0, system).unit };
+}

@@ -1,0 +1,326 @@
+import { evaluationAnswer } from '@chargewright/contract/evaluation';
+import type { EvaluationAnswer } from '@chargewright/contract/evaluation';
+import { problem } from '@chargewright/contract/problem';
+import { READING_IDS } from '@chargewright/engine';
+import * as fc from 'fast-check';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import * as z from 'zod';
+import { EVALUATION_EXAMPLE } from '../../testing/evaluation-example';
+import { startTestServer } from '../../testing/test-server';
+import type { TestServer } from '../../testing/test-server';
+
+let server: TestServer;
+beforeAll(async () => {
+  server = await startTestServer({ limits: { requestsPerSecond: 1_000_000, evaluationsAtOnce: 100 } });
+});
+afterAll(() => server.close());
+
+const PATH = '/api/v1/evaluations';
+
+async function evaluated(body: unknown): Promise<EvaluationAnswer> {
+  const response = await server.postJson(PATH, body);
+  expect(response.status).toBe(200);
+  return evaluationAnswer.parse(await response.json());
+}
+
+async function refused(body: unknown): Promise<Readonly<Record<string, string>>> {
+  const response = await server.postJson(PATH, body);
+  expect(response.status).toBe(422);
+  expect(response.headers.get('content-type')).toMatch('application/problem+json');
+  const { errors = [] } = problem.parse(await response.json());
+  return Object.fromEntries(errors.map(({ path, message }) => [path, message]));
+}
+
+const withReadings = (readings: object) => ({
+  ...EVALUATION_EXAMPLE,
+  readings: { ...EVALUATION_EXAMPLE.readings, ...readings },
+});
+
+describe('a check that can be judged', () => {
+  it('is answered in the shape of the contract, with nothing in it that the contract does not have', async () => {
+    const response = await server.postJson(PATH, EVALUATION_EXAMPLE);
+    const body: unknown = await response.json();
+    // the schema drops what it does not know
+    expect(evaluationAnswer.parse(body)).toEqual(body);
+    expect(response.headers.get('cache-control')).toBe('no-store');
+  });
+
+  it('has its numbers, unrounded and in the units of the return dry bulb', async () => {
+    const { derived, criteria, overall, engineVersion, procedure, diagnosis } = await evaluated(EVALUATION_EXAMPLE);
+    expect(engineVersion).toMatch(/^\d+\.\d+\.\d+\+/);
+    expect(procedure).toEqual({ id: 'general-rules', version: 1 });
+    expect(derived.superheat?.unit).toBe('deltaF');
+    // 52 °F less the dew point of R-410A at 118 psig, 650 ft
+    expect(derived.superheat?.value).toBeCloseTo(52 - (derived.evaporatingDewTemperature?.value ?? NaN), 9);
+    expect(derived.temperatureSplit?.value).toBeCloseTo(19.6, 9);
+    // ±1 °F limits of two probes and ±1.5 °F of sampling, rectangular, k = 2
+    expect(derived.temperatureSplit?.plusMinus).toBeCloseTo(2 * Math.sqrt((1 + 1 + 1.5 ** 2) / 3), 9);
+    const superheat = criteria.find(({ criterion }) => criterion === 'superheat');
+    expect(superheat).toMatchObject({
+      targetSource: 'makers-chart-a',
+      tolerance: { high: 5, unit: 'deltaF' },
+      finding: 'too-close-to-call',
+      reason: null,
+      reasonText: null,
+    });
+    expect(superheat?.target?.value).toBeCloseTo(8, 9);
+    // the floor: superheat itself never under 5 °F
+    expect(superheat?.tolerance?.low).toBeCloseTo(-3, 9);
+    expect(overall.finding).toBe('too-close-to-call');
+    expect(overall.cautions.map(({ code }) => code)).toContain('gauge-not-zeroed');
+    expect(diagnosis).toEqual([]);
+  });
+
+  it('says the enthalpy on the datum of its unit', async () => {
+    const { derived } = await evaluated(EVALUATION_EXAMPLE);
+    const humidityRatio = derived.returnHumidityRatio?.value ?? NaN;
+    // ASHRAE Fundamentals (2017) ch. 1, eq. 30 IP
+    expect(derived.returnEnthalpy?.value).toBeCloseTo(0.24 * 78 + humidityRatio * (1061 + 0.444 * 78), 9);
+    expect(derived.returnEnthalpy?.unit).toBe('Btu/lb');
+    expect(derived.returnEnthalpy?.plusMinus).toBeLessThan(2);
+  });
+
+  it('shows its math', async () => {
+    const { derivation, derived } = await evaluated(EVALUATION_EXAMPLE);
+    expect(derivation.find(({ id }) => id === 'superheat')).toMatchObject({
+      formula: 'T_suction − T_dew',
+      substitution: expect.stringMatching(/^52\.0 °F − 39\.\d °F$/) as unknown,
+      value: derived.superheat?.value,
+      unit: 'deltaF',
+    });
+  });
+
+  it('lists a criterion that is not judged with nulls and the reason', async () => {
+    const { liquidPressure: _left, ...readings } = EVALUATION_EXAMPLE.readings;
+    const { criteria, derived } = await evaluated({ ...EVALUATION_EXAMPLE, readings });
+    expect(criteria.find(({ criterion }) => criterion === 'subcooling')).toMatchObject({
+      actual: null,
+      target: { value: 10, unit: 'deltaF' },
+      deviation: null,
+      tolerance: null,
+      byRule: null,
+      probabilityWithin: null,
+      finding: 'not-judged',
+      reason: 'readings-missing',
+      reasonText: expect.stringContaining('liquid pressure') as unknown,
+    });
+    expect(derived).not.toHaveProperty('subcooling');
+  });
+
+  it('needs refrigerant and metering device only', async () => {
+    const { overall } = await evaluated({ setup: { refrigerant: 'R-22', meteringDevice: 'txv' } });
+    expect(overall.finding).toBe('not-judged');
+    expect(overall.cautions.map(({ code }) => code)).toContain('elevation-assumed');
+  });
+
+  it('answers in the units of the return dry bulb, else of the first temperature, else of the pressure', async () => {
+    const { returnDryBulb: _left, ...others } = EVALUATION_EXAMPLE.readings;
+    const suction = { suctionPressure: { value: 814, unit: 'kPag' } };
+    const setup = EVALUATION_EXAMPLE.setup;
+    const unitOf = async (readings: object) =>
+      (await evaluated({ setup, readings })).derived.evaporatingDewTemperature?.unit;
+    expect(await unitOf({ ...others, returnDryBulb: { value: 26, unit: 'degC' } })).toBe('degC');
+    expect(await unitOf({ ...others, ...suction, returnDryBulb: { value: 299, unit: 'K' } })).toBe('degC');
+    expect(await unitOf({ ...others, ...suction })).toBe('degF');
+    expect(await unitOf(suction)).toBe('degC');
+    expect(await unitOf({ suctionPressure: { value: 118, unit: 'psig' } })).toBe('degF');
+  });
+
+  it('gives the same finding in °C and kPa', async () => {
+    const celsius = (value: number) => ({ value: ((value - 32) * 5) / 9, unit: 'degC' });
+    const kPag = (value: number) => ({ value: value * 6.894757293168, unit: 'kPag' });
+    const inMetric = Object.fromEntries(
+      Object.entries(EVALUATION_EXAMPLE.readings).map(([id, { value, unit }]) => [
+        id,
+        unit === 'psig' ? kPag(value) : celsius(value),
+      ]),
+    );
+    const metric = await evaluated({ ...EVALUATION_EXAMPLE, readings: inMetric });
+    const inchPound = await evaluated(EVALUATION_EXAMPLE);
+    expect(metric.overall.finding).toBe(inchPound.overall.finding);
+    expect(metric.derived.superheat?.unit).toBe('deltaC');
+    expect((metric.derived.superheat?.value ?? NaN) * 1.8).toBeCloseTo(inchPound.derived.superheat?.value ?? NaN, 9);
+  });
+
+  it('ignores fields of a newer contract', async () => {
+    const newer = { ...EVALUATION_EXAMPLE, weather: { humid: true } };
+    expect(await evaluated(newer)).toEqual(await evaluated(EVALUATION_EXAMPLE));
+  });
+
+  it('is not judged between the end of the curve and the critical point', async () => {
+    // R-410A: critical about 711 psia
+    const { criteria } = await evaluated(withReadings({ liquidPressure: { value: 705, unit: 'psia' } }));
+    expect(criteria.find(({ criterion }) => criterion === 'subcooling')).toMatchObject({
+      finding: 'not-judged',
+      reason: 'outside-curve',
+    });
+  });
+});
+
+describe('a check that cannot be', () => {
+  it('answers every fault at once, of the shape and of the values', async () => {
+    const errors = await refused({
+      procedure: 'by-feel',
+      setup: {
+        refrigerant: 'R-410A',
+        meteringDevice: 'piston',
+        elevation: { value: 20_000, unit: 'ft' },
+        targetSubcooling: { value: 10, unit: 'degF' },
+      },
+      visit: { runningMinutes: -1, preflight: { panelsOn: true } },
+      readings: {
+        returnDryBulb: { value: 78, unit: 'degF' },
+        returnWetBulb: { value: 81, unit: 'degF', plusMinus: { value: 1, unit: 'degF' } },
+        supplyRelativeHumidity: { value: 101, unit: '%' },
+        outdoorDryBulb: { value: -500, unit: 'degF' },
+        suctionPressure: null,
+        liquidPressure: { value: 800, unit: 'psia' },
+        liquidLineTemperature: { value: '106', unit: 'degF' },
+      },
+    });
+    expect(Object.keys(errors).sort()).toEqual([
+      'procedure',
+      'readings.liquidLineTemperature',
+      'readings.liquidPressure',
+      'readings.outdoorDryBulb',
+      'readings.returnWetBulb',
+      'readings.returnWetBulb.plusMinus',
+      'readings.suctionPressure',
+      'readings.supplyRelativeHumidity',
+      'setup.elevation',
+      'setup.meteringDevice',
+      'setup.targetSubcooling',
+      'visit.preflight.panelsOn',
+      'visit.runningMinutes',
+    ]);
+    expect(errors['readings.returnWetBulb']).toBe('Return wet bulb 81 °F is above return dry bulb 78 °F');
+  });
+
+  it.each([
+    ['setup.refrigerant', { setup: { refrigerant: 'R-0', meteringDevice: 'txv' } }],
+    ['readings.suctionPressure', withReadings({ suctionPressure: { value: -15, unit: 'psig' } })],
+    ['readings.liquidPressure', withReadings({ liquidPressure: { value: 900, unit: 'psig' } })],
+    ['readings.returnWetBulb', withReadings({ returnWetBulb: { value: 65, unit: 'deltaF' } })],
+    ['setup', { ...EVALUATION_EXAMPLE, setup: 'R-410A' }],
+    ['', null],
+    ['', []],
+  ])('names the field %j', async (path, body) => {
+    expect(Object.keys(await refused(body))).toEqual([path]);
+  });
+
+  it('says what would be right', async () => {
+    const errors = await refused({
+      setup: { refrigerant: 410, meteringDevice: 'txv', targetSubcooling: { value: 10, unit: 'degF' } },
+      readings: { returnWetBulb: { value: 65, unit: 'F' }, suctionPressure: { value: 118 } },
+    });
+    expect(errors).toEqual({
+      'setup.refrigerant': 'Refrigerant has the wrong type: give a text.',
+      'setup.targetSubcooling':
+        'Target subcooling is a temperature difference: give it in deltaF or deltaC, not in a unit of temperature.',
+      'readings.returnWetBulb': 'Return wet bulb has a unit that does not fit: give degF, degC or K.',
+      'readings.suctionPressure': 'Suction pressure, unit is missing.',
+    });
+  });
+
+  it('has a sentence for each fault', async () => {
+    const messages = Object.values(
+      await refused({ setup: { refrigerant: null, stage: 7 }, readings: { airflow: {} } }),
+    );
+    expect(messages).toHaveLength(4);
+    for (const message of messages) expect(message).toMatch(/^[A-Z“].{10,}/);
+  });
+});
+
+describe('a request that cannot be read', () => {
+  const post = (body: string, type = 'application/json') =>
+    server.ask(PATH, { method: 'POST', headers: { 'Content-Type': type }, body });
+
+  const form = 'application/x-www-form-urlencoded';
+  it.each([
+    ['half a body', '{"setup":', 'application/json', 400, 'malformed-json'],
+    ['an empty body', '', 'application/json', 400, 'malformed-json'],
+    ['a body with NaN', '{"a":NaN}', 'application/json', 400, 'malformed-json'],
+    ['a form', 'setup=1', form, 415, 'not-json'],
+    ['another alphabet', '{}', 'application/json; charset=latin1', 415, 'not-json'],
+    ['over 100 kB', JSON.stringify({ note: 'x'.repeat(102_400) }), 'application/json', 413, 'body-too-large'],
+  ])('as %s is refused', async (_what, body, type, status, code) => {
+    const response = await post(body, type);
+    expect(response.status).toBe(status);
+    expect(problem.parse(await response.json())).toMatchObject({ status, code });
+  });
+
+  it('may be as large as 100 kB', async () => {
+    const padding = 'x'.repeat(99_000 - JSON.stringify(EVALUATION_EXAMPLE).length);
+    expect((await server.postJson(PATH, { ...EVALUATION_EXAMPLE, note: padding })).status).toBe(200);
+  });
+
+  it('answers 405 to other methods', async () => {
+    const response = await server.ask(PATH);
+    expect(response.status).toBe(405);
+    expect(response.headers.get('allow')).toBe('POST, OPTIONS');
+    expect(problem.parse(await response.json()).code).toBe('method-not-allowed');
+  });
+});
+
+it('never answers 5xx, whatever the body', async () => {
+  const units = [
+    'degF',
+    'degC',
+    'K',
+    'psig',
+    'psia',
+    'kPaa',
+    'inHgVac',
+    '%',
+    'cfm',
+    'Pa',
+    'ft',
+    'oz',
+    'deltaF',
+    'A',
+    '',
+  ];
+  const anything = fc.jsonValue({ maxDepth: 1 });
+  const number = fc.oneof(fc.integer({ min: -500, max: 1_000 }), fc.double({ noNaN: true }), anything);
+  const plusMinus = fc.record({ value: number, unit: fc.constantFrom('deltaF', 'psi', '%') }, { requiredKeys: [] });
+  const amount = fc.record(
+    { value: number, unit: fc.constantFrom(...units), plusMinus, ageSeconds: number, resolution: number },
+    { requiredKeys: ['value', 'unit'] },
+  );
+  const any = fc.oneof({ weight: 4, arbitrary: amount }, anything);
+  const fields = (...names: readonly string[]) => fc.dictionary(fc.constantFrom(...names), any);
+  const setup = fc
+    .tuple(
+      fc.record({
+        refrigerant: fc.constantFrom<unknown>('R-410A', 'R-22', 'R-744', 'R-407C', null, 'R-0'),
+        meteringDevice: fc.constantFrom<unknown>('txv', 'fixed-orifice', 7),
+      }),
+      fields('elevation', 'stationPressure', 'targetSuperheat', 'targetSubcooling', 'nominalCapacity', 'lineSet'),
+    )
+    .map(([required, optional]) => ({ ...optional, ...required }));
+  const visit = fields('runningMinutes', 'lowestReturnDryBulb', 'preflight', 'earlier', 'addedThisVisit', 'iceSeen');
+  const body = fc.record({ setup, visit, readings: fields(...READING_IDS) }, { requiredKeys: ['setup'] });
+  const statuses = new Set<number>();
+  await fc.assert(
+    fc.asyncProperty(fc.oneof({ weight: 9, arbitrary: body }, fc.jsonValue({ maxDepth: 4 })), async (value) => {
+      const { status } = await server.postJson(PATH, value);
+      statuses.add(status);
+      expect(status).toBeLessThan(500);
+    }),
+    { numRuns: 2_000 },
+  );
+  expect([...statuses].sort()).toEqual([200, 422]);
+}, 60_000);
+
+it('answers plausible systems at the edges of what can be, without a fault of its own', async () => {
+  const edges = [-1e308, -1e-308, 0, 1e-308, 1e308, 710.9, 14.7, -14.69, -459.67, 211.9];
+  const readings = (value: number) =>
+    Object.fromEntries(
+      Object.entries(EVALUATION_EXAMPLE.readings).map(([id, { unit }], at) => [id, { value: value + at, unit }]),
+    );
+  for (const value of edges) {
+    const response = await server.postJson(PATH, { ...EVALUATION_EXAMPLE, readings: readings(value) });
+    expect([200, 422]).toContain(response.status);
+    if (response.status === 200) expect(z.json().safeParse(await response.json()).success).toBe(true);
+  }
+});

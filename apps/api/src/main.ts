@@ -1,0 +1,40 @@
+import pino from 'pino';
+import { createApp } from './app';
+import { ConfigError, readConfig } from './config';
+import { DataError, isReadable, openDatabase } from './db/open-database';
+import { LIMITS } from './http/limits';
+import { ListenError, closeServer, createServer, listen } from './server';
+
+async function main(): Promise<void> {
+  const config = readConfig(process.env);
+  const logger = pino({ level: config.logLevel, base: null });
+  const database = openDatabase(config.dataDir);
+  const app = createApp({ ...config, logger, limits: LIMITS, isReady: () => isReadable(database) });
+  const server = createServer(app, config.tls);
+  let ending = false;
+  const end = (): void => {
+    if (ending) return;
+    ending = true;
+    void closeServer(server).then(() => {
+      database.close();
+      logger.info('stopped');
+      process.exit(0);
+    });
+  };
+  process.on('SIGTERM', end).on('SIGINT', end);
+  try {
+    const port = await listen(server, config);
+    logger.info({ host: config.host, port, tls: config.tls !== undefined }, 'listening');
+  } catch (error) {
+    // the port or address is for the person to change; the data was opened already
+    database.close();
+    throw error;
+  }
+}
+
+main().catch((error: unknown) => {
+  // what the person who starts the server can mend is one line; anything else is a bug with its stack
+  const known = [ConfigError, DataError, ListenError].some((kind) => error instanceof kind);
+  console.error(known ? (error as Error).message : error);
+  process.exitCode = 1;
+});

@@ -1,0 +1,14 @@
+import type { Routes } from '@angular/router';
+import { checkPageWords, looseChecksWords } from '@chargewright/wording';
+import { CheckAChargePage } from './check-a-charge/check-a-charge-page';
+
+/** The first page is in the first download: it has to open on a roof. */
+export const routes: Routes = [
+  { path: '', pathMatch: 'full', component: CheckAChargePage, title: checkPageWords.shell.pageTitle },
+  {
+    path: 'checks',
+    loadComponent: async () => (await import('./layout/checks-page')).ChecksPage,
+    title: `${looseChecksWords.title} · ${checkPageWords.shell.product}`,
+  },
+  { path: '**', redirectTo: '' },
+];

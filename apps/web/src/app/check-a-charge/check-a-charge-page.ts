@@ -1,0 +1,295 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  ElementRef,
+  inject,
+  linkedSignal,
+  signal,
+  untracked,
+} from '@angular/core';
+import { checkPageWords, looseChecksWords, safetyWords } from '@chargewright/wording';
+import type { DraftSetup, DraftVisit, FieldKey, TypedField } from '../loose-checks/check-draft';
+import { LooseChecks } from '../loose-checks/loose-checks';
+import { StorageNote } from '../loose-checks/storage-note';
+import { NOW } from '../loose-checks/time-and-ids';
+import { InstallButton } from '../offline/install-button';
+import { NetworkNote } from '../offline/network-note';
+import { UnitPreference } from '../quantities/unit-preference';
+import { evaluateDraft } from './evaluate-draft';
+import { exampleCheck } from './example-check';
+import { typedKey } from './field-key';
+import { FindingAnnouncer } from './finding-announcer';
+import { PageClock } from './page-clock';
+import { Preflight } from './preflight';
+import { ReadingRow } from './reading-row';
+import { humidityShown, readingSections, type SectionId } from './reading-order';
+import { fieldView, inputId, isOpen, type FieldView, type PageState } from './reading-rows';
+import { RememberedElevation } from './remembered-elevation';
+import { runningMinutes } from './request-from-draft';
+import { ResultColumn } from './result-column';
+import { ResultSheet } from './result-sheet';
+import { summarise } from './result-summary';
+import { settledDraft } from './settled-draft';
+import { SetupForm, type FieldTyped } from './setup-form';
+import { SetupPlate } from './setup-plate';
+import { VisitClock } from './visit-clock';
+
+const MS_PER_MINUTE = 60_000;
+
+const SETUP_MORE: readonly TypedField[] = [
+  'nominalCapacity',
+  'factoryCharge',
+  'designAirflow',
+  'maxHighPressure',
+  'targetSuperheat',
+];
+const VISIT_FIELDS: readonly TypedField[] = ['lowestReturnDryBulb', 'instrumentsCheckedDaysAgo', 'addedThisVisit'];
+
+const sectionWords: Readonly<Record<SectionId, { title: string; note: string; safety: string }>> = {
+  outdoors: {
+    title: checkPageWords.sections.outdoors,
+    note: checkPageWords.sections.outdoorsNote,
+    safety: safetyWords.hoses,
+  },
+  indoors: {
+    title: checkPageWords.sections.indoors,
+    note: checkPageWords.sections.indoorsNote,
+    safety: safetyWords.climbing,
+  },
+  more: { title: checkPageWords.readings.moreReadings, note: '', safety: safetyWords.discharge },
+};
+
+/** Text fields bring the keyboard up, which takes the sheet's room. */
+const isTextField = (target: EventTarget | null): boolean =>
+  target instanceof HTMLInputElement && target.type === 'text';
+
+/** Judges one system: setup first, then the readings in the order of the method, the finding growing beside them. */
+@Component({
+  selector: 'app-check-a-charge-page',
+  imports: [
+    FindingAnnouncer,
+    InstallButton,
+    NetworkNote,
+    Preflight,
+    ReadingRow,
+    ResultColumn,
+    ResultSheet,
+    SetupForm,
+    SetupPlate,
+    StorageNote,
+    VisitClock,
+  ],
+  providers: [PageClock],
+  templateUrl: './check-a-charge-page.html',
+  styleUrl: './check-a-charge-page.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { '(focusin)': 'notice($event.target)', '(focusout)': 'notice($event.relatedTarget)' },
+})
+export class CheckAChargePage {
+  private readonly checks = inject(LooseChecks);
+  private readonly units = inject(UnitPreference);
+  private readonly elevation = inject(RememberedElevation);
+  private readonly clock = inject(PageClock);
+  private readonly now = inject(NOW);
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
+
+  protected readonly draft = this.checks.current;
+  protected readonly isSetUp = computed(() => {
+    const { refrigerant, meteringDevice } = this.draft().setup;
+    return refrigerant !== undefined && meteringDevice !== undefined;
+  });
+  /** On its own, so that what hangs on the check is not reset by each change within it. */
+  private readonly checkId = computed(() => this.draft().id);
+  private readonly settled = settledDraft(this.draft);
+  private readonly humidityChosen = linkedSignal<string, boolean | undefined>({
+    source: this.checkId,
+    computation: () => undefined,
+  });
+  /** Open from the start while a check is not set up; later when the person wants to change it. */
+  private readonly setupWanted = linkedSignal({
+    source: this.checkId,
+    computation: () => !untracked(this.isSetUp),
+  });
+  protected readonly fieldInUse = signal(false);
+  protected readonly clockRestarted = signal(false);
+
+  protected readonly words = checkPageWords;
+  protected readonly checkWords = looseChecksWords;
+  protected readonly standing = safetyWords.standing;
+  protected readonly sectionWords = sectionWords;
+  protected readonly system = this.units.system;
+  protected readonly isLoading = computed(() => this.checks.state() === 'loading');
+  protected readonly setupOpen = computed(() => this.setupWanted() || !this.isSetUp());
+  protected readonly setupMissing = computed(() => {
+    const { refrigerant, meteringDevice } = this.draft().setup;
+    const words = this.words.setup;
+    if (refrigerant === undefined && meteringDevice === undefined) return words.missingBoth;
+    if (refrigerant === undefined) return words.missingRefrigerant;
+    return meteringDevice === undefined ? words.missingMetering : '';
+  });
+
+  protected readonly evaluation = computed(() => evaluateDraft(this.settled(), this.clock.nowMs()));
+  private readonly pageState = computed<PageState>(() => ({
+    draft: this.draft(),
+    evaluation: this.evaluation(),
+    system: this.system(),
+    nowMs: this.clock.nowMs(),
+  }));
+  protected readonly byHumidity = computed(() => humidityShown(this.draft(), this.humidityChosen()));
+  protected readonly sections = computed(() => {
+    const page = this.pageState();
+    return readingSections(this.draft(), this.byHumidity()).map(({ id, fields }) => ({
+      id,
+      ...sectionWords[id],
+      fields: fields.map((key) => fieldView(key, page)),
+    }));
+  });
+  protected readonly asked = computed(() => this.sections().filter(({ id }) => id !== 'more'));
+  protected readonly more = computed(() => this.sections().filter(({ id }) => id === 'more'));
+  protected readonly setupFields = computed(() => this.viewsOf(this.setupTypedFields()));
+  protected readonly setupMoreFields = computed(() => this.viewsOf(SETUP_MORE));
+  protected readonly visitFields = computed(() => this.viewsOf(VISIT_FIELDS));
+  protected readonly minutes = computed(() => runningMinutes(this.draft(), this.clock.nowMs()));
+  protected readonly hasExample = computed(() =>
+    Object.values(this.draft().readings).some(({ source }) => source === 'example'),
+  );
+  protected readonly hasReadings = computed(
+    () =>
+      Object.keys(this.draft().readings).length > 0 ||
+      Object.keys(this.settled().edits).some((key) => key.startsWith('reading:')),
+  );
+  protected readonly summary = computed(() => summarise(this.evaluation(), this.hasReadings() ? 1 : 0, this.system()));
+  protected readonly sheetSummary = computed(() =>
+    this.setupOpen()
+      ? { headline: this.setupMissing() || this.words.setup.intro, notYet: [], step: '', isStop: false, leading: null }
+      : this.summary(),
+  );
+  protected readonly next = computed<FieldView | undefined>(() =>
+    this.asked()
+      .flatMap(({ fields }) => fields)
+      .find(isOpen),
+  );
+
+  protected choose(setup: Partial<DraftSetup>): void {
+    this.recallElevation();
+    this.checks.choose(setup);
+  }
+
+  protected changeVisit(patch: Partial<DraftVisit>): void {
+    this.checks.visit(patch);
+  }
+
+  protected type({ key, value }: FieldTyped): void {
+    this.checks.type(key, value);
+  }
+
+  protected commit(key: FieldKey): void {
+    this.checks.commit(key);
+    this.clock.tick();
+    const { elevation } = this.draft().typed;
+    if (key === 'typed:elevation' && elevation) this.elevation.remember(elevation);
+  }
+
+  protected fillWithExample(): void {
+    this.checks.fillWithExample(exampleCheck(this.system(), this.now().getTime()));
+    this.setupWanted.set(false);
+    this.clock.tick();
+    this.scrollUp();
+  }
+
+  protected async clearExample(): Promise<void> {
+    await this.checks.remove(this.draft().id);
+    this.scrollUp();
+  }
+
+  protected startNew(): void {
+    this.checks.startNew();
+    this.scrollUp();
+  }
+
+  protected openSetup(): void {
+    this.setupWanted.set(true);
+    this.scrollUp();
+  }
+
+  protected closeSetup(): void {
+    if (!this.isSetUp()) {
+      this.focusFirst(this.draft().setup.refrigerant === undefined ? 'refrigerant' : 'meteringDevice');
+      return;
+    }
+    this.setupWanted.set(false);
+    this.scrollUp();
+  }
+
+  protected startClock(minutesAgo: number): void {
+    this.checks.visit({ runningSince: new Date(this.now().getTime() - minutesAgo * MS_PER_MINUTE).toISOString() });
+    this.clock.tick();
+    this.clockRestarted.set(false);
+  }
+
+  /** After an adjustment nothing read before it counts. */
+  protected restartAfterAdjustment(): void {
+    this.checks.retakeAll();
+    this.startClock(0);
+    this.clockRestarted.set(true);
+  }
+
+  protected switchHumidity(): void {
+    this.humidityChosen.set(!this.byHumidity());
+  }
+
+  protected isHumidity({ key }: FieldView): boolean {
+    return key === 'reading:returnWetBulb' || key === 'reading:returnRelativeHumidity';
+  }
+
+  protected goToNext(): void {
+    const next = this.next();
+    if (next) this.focusInput(next.id);
+  }
+
+  /** Enter: the next field on the page; after the last one the keyboard goes and the result has the room. */
+  protected advanceFrom(key: FieldKey): void {
+    const inputs = [...this.host.nativeElement.querySelectorAll<HTMLInputElement>('app-number-field input')].filter(
+      (each) => each.checkVisibility?.() ?? true,
+    );
+    const at = inputs.findIndex(({ id }) => id === inputId(key));
+    const next = inputs[at + 1];
+    if (next) next.focus();
+    else inputs[at]?.blur();
+  }
+
+  protected notice(target: EventTarget | null): void {
+    this.fieldInUse.set(isTextField(target));
+  }
+
+  private setupTypedFields(): readonly TypedField[] {
+    const { meteringDevice } = this.draft().setup;
+    return meteringDevice === 'txv' || meteringDevice === 'eev' ? ['elevation', 'targetSubcooling'] : ['elevation'];
+  }
+
+  private viewsOf(fields: readonly TypedField[]): readonly FieldView[] {
+    return fields.map((field) => fieldView(typedKey(field), this.pageState()));
+  }
+
+  /** Once a check is begun it starts with the elevation of the last one. */
+  private recallElevation(): void {
+    const { typed, edits } = this.draft();
+    const remembered = this.elevation.recall();
+    if (!remembered || typed.elevation || edits['typed:elevation'] || this.isSetUp()) return;
+    this.checks.type('typed:elevation', remembered);
+    this.checks.commit('typed:elevation');
+  }
+
+  private focusInput(id: string): void {
+    this.host.nativeElement.querySelector<HTMLInputElement>(`#${id}`)?.focus();
+  }
+
+  private focusFirst(name: string): void {
+    this.host.nativeElement.querySelector<HTMLInputElement>(`input[name="${name}"]`)?.focus();
+  }
+
+  private scrollUp(): void {
+    this.host.nativeElement.ownerDocument.defaultView?.scrollTo({ top: 0 });
+  }
+}

@@ -1,0 +1,42 @@
+import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
+import type { CheckResult, CriterionResult } from '@chargewright/engine';
+import {
+  checkPageWords,
+  criterionDetail,
+  criterionName,
+  criterionParts,
+  findingWord,
+  type UnitSystem,
+} from '@chargewright/wording';
+import { MathLines } from './math-lines';
+import { ToleranceRuler } from './tolerance-ruler';
+
+/** One thing judged: a sentence, the picture, the numbers. */
+@Component({
+  selector: 'app-criterion-card',
+  imports: [MathLines, ToleranceRuler],
+  templateUrl: './criterion-card.html',
+  styleUrl: './criterion-card.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class CriterionCard {
+  readonly result = input.required<CheckResult>();
+  readonly criterion = input.required<CriterionResult>();
+  readonly system = input.required<UnitSystem>();
+
+  protected readonly open = signal(false);
+
+  protected readonly words = checkPageWords.result;
+  protected readonly ruler = checkPageWords.ruler;
+  protected readonly name = computed(() => criterionName(this.criterion().criterion));
+  protected readonly finding = computed(() => findingWord(this.criterion().finding, this.criterion().criterion));
+  protected readonly outside = computed(() => ['above', 'below'].includes(this.criterion().finding));
+  protected readonly detail = computed(() => criterionDetail(this.criterion(), this.system()));
+  protected readonly parts = computed(() => criterionParts(this.criterion(), this.system()));
+  protected readonly hasMath = computed(() => this.criterion().actual !== null || this.criterion().target !== null);
+  protected readonly mathId = computed(() => `math-${this.criterion().criterion}`);
+
+  protected toggleMath(): void {
+    this.open.update((open) => !open);
+  }
+}

@@ -1,0 +1,91 @@
+/** What the page shows of each field: words, what was typed, how old it is, and what is wrong with it. */
+import type { Fault, ReadingId } from '@chargewright/engine';
+import { checkPageWords, faultText, readingWords, setupWords, type UnitSystem } from '@chargewright/wording';
+import type { CheckDraft, FieldKey, TypedField, TypedValue } from '../loose-checks/check-draft';
+import { canBeNegative, unitsOf } from '../quantities/field-units';
+import type { NumberProblem } from '../quantities/parse-number';
+import type { Evaluation } from './evaluate-draft';
+import { pathOf, valueIn } from './field-key';
+import { ageSeconds } from './request-from-draft';
+
+/** judgement.md 9: a reading older than this is stale. */
+const STALE_AFTER_SECONDS = 600;
+
+export interface FieldView {
+  readonly key: FieldKey;
+  /** Id of the input on the page. */
+  readonly id: string;
+  readonly label: string;
+  readonly value: TypedValue | undefined;
+  readonly units: readonly [string, ...string[]];
+  readonly signed: boolean;
+  /** Beside the label: the place while nothing is read, then how old it is. */
+  readonly note: string;
+  readonly stale: boolean;
+  readonly complaints: readonly string[];
+  readonly help: { readonly place: string; readonly how: string; readonly mistake: string } | null;
+}
+
+const PROBLEM_TEXTS: Readonly<Record<NumberProblem, string>> = {
+  'not-a-number': checkPageWords.readings.notANumber,
+  'too-long': checkPageWords.readings.tooLong,
+  'thousands-mark': checkPageWords.readings.thousandsMark,
+};
+
+export const inputId = (key: FieldKey): string => key.replace(':', '-');
+
+const belongsTo = (fault: Fault, key: FieldKey): boolean => {
+  const path = pathOf(key);
+  return fault.path === path || fault.path.startsWith(`${path}.`);
+};
+
+/** What is wrong with a field, in words; an empty list when nothing is. */
+export function complaintsOf(key: FieldKey, evaluation: Evaluation, system: UnitSystem): readonly string[] {
+  const problem = evaluation.problems.get(key);
+  const faults = evaluation.faults.filter((fault) => belongsTo(fault, key)).map((fault) => faultText(fault, system));
+  return problem ? [PROBLEM_TEXTS[problem], ...faults] : faults;
+}
+
+export interface PageState {
+  readonly draft: CheckDraft;
+  readonly evaluation: Evaluation;
+  readonly system: UnitSystem;
+  readonly nowMs: number;
+}
+
+const blank = (value: TypedValue | undefined): boolean => (value?.text.trim() ?? '') === '';
+
+export function fieldView(key: FieldKey, page: PageState): FieldView {
+  const { draft, evaluation, system, nowMs } = page;
+  const value = valueIn(draft, key);
+  const shared = {
+    key,
+    id: inputId(key),
+    value,
+    units: unitsOf(key, system),
+    signed: canBeNegative(key),
+    complaints: complaintsOf(key, evaluation, system),
+  };
+  const name = key.slice(key.indexOf(':') + 1);
+  if (!key.startsWith('reading:')) {
+    const { label, hint } = setupWords.numbers[name as TypedField];
+    return { ...shared, label, note: hint, stale: false, help: null };
+  }
+  const id = name as ReadingId;
+  const words = readingWords[id];
+  const age = blank(value) ? undefined : ageSeconds(draft, id, nowMs);
+  const stale = age !== undefined && age > STALE_AFTER_SECONDS;
+  return { ...shared, label: words.label, note: noteOf(draft, key, id, age, words.place), stale, help: words };
+}
+
+function noteOf(draft: CheckDraft, key: FieldKey, id: ReadingId, age: number | undefined, place: string): string {
+  const words = checkPageWords.readings;
+  if (draft.edits[key] && !blank(draft.edits[key])) return words.editing;
+  if (age === undefined) return place;
+  const minutes = Math.floor(age / 60);
+  if (age > STALE_AFTER_SECONDS) return words.staleAgo(minutes);
+  return draft.readings[id]?.source === 'example' ? words.example : words.typedAgo(minutes);
+}
+
+/** Whether a reading still has to be taken: nothing stands there, it is too old, or it cannot be. */
+export const isOpen = (view: FieldView): boolean => blank(view.value) || view.stale || view.complaints.length > 0;

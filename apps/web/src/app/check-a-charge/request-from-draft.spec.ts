@@ -1,0 +1,139 @@
+import type { CheckDraft, DraftReading } from '../loose-checks/check-draft';
+import type { ReadingId } from '@chargewright/engine';
+import { requestFromDraft, withoutPaths } from './request-from-draft';
+
+const NOW = Date.parse('2026-12-01T12:00:00Z');
+const ago = (seconds: number) => new Date(NOW - seconds * 1000).toISOString();
+
+const reading = (quantity: ReadingId, text: string, unit: string, takenAt = ago(60)): DraftReading => ({
+  id: quantity,
+  checkId: 'check',
+  quantity,
+  text,
+  unit,
+  place: '',
+  takenAt,
+  source: 'typed',
+});
+
+const draft = (change: Partial<CheckDraft> = {}): CheckDraft => ({
+  id: 'check',
+  createdAt: ago(3600),
+  updatedAt: ago(0),
+  setup: { refrigerant: 'R-410A', meteringDevice: 'fixed-orifice' },
+  visit: { preflight: {} },
+  typed: {},
+  readings: {},
+  edits: {},
+  ...change,
+});
+
+describe('requestFromDraft', () => {
+  it('asks nothing before refrigerant and metering device are chosen', () => {
+    expect(requestFromDraft(draft({ setup: { refrigerant: 'R-410A' } }), NOW).request).toBeNull();
+  });
+
+  it('states what was chosen and leaves what was not to the engine', () => {
+    const { request } = requestFromDraft(draft(), NOW);
+    expect(request?.setup).toEqual({ refrigerant: 'R-410A', meteringDevice: 'fixed-orifice' });
+    expect(request?.readings).toEqual({});
+    expect(request?.visit).toEqual({ preflight: {} });
+  });
+
+  it('gives a reading its number, unit, age, and the step its decimals tell', () => {
+    const { request } = requestFromDraft(
+      draft({ readings: { returnWetBulb: reading('returnWetBulb', '64,50', 'degF', ago(90)) } }),
+      NOW,
+    );
+    expect(request?.readings.returnWetBulb).toEqual({ value: 64.5, unit: 'degF', resolution: 0.01, ageSeconds: 90 });
+  });
+
+  it('takes what is being typed in place of what was committed, as new', () => {
+    const { request } = requestFromDraft(
+      draft({
+        readings: { suctionPressure: reading('suctionPressure', '116', 'psig', ago(900)) },
+        edits: { 'reading:suctionPressure': { text: '8', unit: 'barg' } },
+      }),
+      NOW,
+    );
+    expect(request?.readings.suctionPressure).toEqual({ value: 8, unit: 'barg', resolution: 1, ageSeconds: 0 });
+  });
+
+  it('leaves out a reading that is being deleted', () => {
+    const { request } = requestFromDraft(
+      draft({
+        readings: { suctionPressure: reading('suctionPressure', '116', 'psig') },
+        edits: { 'reading:suctionPressure': { text: ' ', unit: 'psig' } },
+      }),
+      NOW,
+    );
+    expect(request?.readings).toEqual({});
+  });
+
+  it('names what is not a number and leaves it out', () => {
+    const read = requestFromDraft(draft({ edits: { 'reading:outdoorDryBulb': { text: '9x', unit: 'degF' } } }), NOW);
+    expect(read.problems.get('reading:outdoorDryBulb')).toBe('not-a-number');
+    expect(read.request?.readings).toEqual({});
+  });
+
+  it('names a stored unit that is not one of the field, instead of misreading it', () => {
+    const read = requestFromDraft(
+      draft({ readings: { outdoorDryBulb: reading('outdoorDryBulb', '92', 'psig') } }),
+      NOW,
+    );
+    expect(read.faults).toEqual([{ code: 'wrong-unit', figures: {}, path: 'readings.outdoorDryBulb' }]);
+    expect(read.request?.readings).toEqual({});
+  });
+
+  it('sorts typed numbers into setup and visit', () => {
+    const { request } = requestFromDraft(
+      draft({
+        typed: {
+          elevation: { text: '650', unit: 'ft' },
+          targetSubcooling: { text: '10', unit: 'deltaF' },
+          lowestReturnDryBulb: { text: '74', unit: 'degF' },
+          instrumentsCheckedDaysAgo: { text: '12', unit: 'days' },
+        },
+        visit: { preflight: { panelsOn: 'ok' }, runningSince: ago(22 * 60), iceSeen: false },
+      }),
+      NOW,
+    );
+    expect(request?.setup).toMatchObject({
+      elevation: { value: 650, unit: 'ft' },
+      targetSubcooling: { value: 10, unit: 'deltaF' },
+    });
+    expect(request?.visit).toEqual({
+      preflight: { panelsOn: 'ok' },
+      iceSeen: false,
+      runningMinutes: 22,
+      lowestReturnDryBulb: { value: 74, unit: 'degF' },
+      instrumentsCheckedDaysAgo: 12,
+    });
+  });
+
+  it('takes a time that lies ahead of the page clock as now, and an unreadable one as not recorded', () => {
+    const ahead = requestFromDraft(draft({ visit: { preflight: {}, runningSince: ago(-5) } }), NOW);
+    expect(ahead.request?.visit?.runningMinutes).toBe(0);
+    const damaged = requestFromDraft(draft({ visit: { preflight: {}, runningSince: 'yesterday' } }), NOW);
+    expect(damaged.request?.visit).toEqual({ preflight: {} });
+  });
+});
+
+describe('withoutPaths', () => {
+  it('takes single entries out of each part', () => {
+    const request = {
+      setup: {
+        refrigerant: 'R-410A',
+        meteringDevice: 'txv',
+        elevation: { value: 1e6, unit: 'ft' },
+      },
+      visit: { runningMinutes: 22 },
+      readings: { returnDryBulb: { value: 78, unit: 'degF' }, returnWetBulb: { value: 81, unit: 'degF' } },
+    } as const;
+    expect(withoutPaths(request, new Set(['readings.returnWetBulb', 'setup.elevation']))).toEqual({
+      setup: { refrigerant: 'R-410A', meteringDevice: 'txv' },
+      visit: { runningMinutes: 22 },
+      readings: { returnDryBulb: { value: 78, unit: 'degF' } },
+    });
+  });
+});

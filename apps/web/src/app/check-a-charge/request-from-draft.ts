@@ -1,0 +1,136 @@
+/** The draft as the engine is asked about it: texts become numbers, times become ages. Whatever is not a number is left out and named. */
+import type {
+  Amount,
+  EvaluationRequest,
+  Fault,
+  ReadingId,
+  ReadingInput,
+  ReadingsInput,
+  SetupInput,
+  VisitInput,
+} from '@chargewright/engine';
+import { READING_IDS } from '@chargewright/engine';
+import type { CheckDraft, FieldKey, TypedField } from '../loose-checks/check-draft';
+import { isUnitOf } from '../quantities/field-units';
+import { parseNumber, type NumberProblem, type TypedNumber } from '../quantities/parse-number';
+import { ALL_FIELD_KEYS, pathOf, readingKey, typedKey, valueIn } from './field-key';
+
+export interface DraftReadAsRequest {
+  /** Null until refrigerant and metering device are chosen: without them there is nothing to ask. */
+  readonly request: EvaluationRequest | null;
+  readonly problems: ReadonlyMap<FieldKey, NumberProblem>;
+  /** Entries whose stored unit is not one of their field. */
+  readonly faults: readonly Fault[];
+}
+
+interface Entry extends TypedNumber {
+  readonly unit: string;
+}
+
+const MS_PER_SECOND = 1000;
+const MS_PER_MINUTE = 60_000;
+
+/** The page's clock ticks every few seconds, so a value typed since the last tick would lie in its future: it is new. */
+const elapsedMs = (since: string, nowMs: number): number => Math.max(0, nowMs - Date.parse(since));
+
+/** Age of what stands in the field of a reading; something still being typed is new. */
+export function ageSeconds(draft: CheckDraft, id: ReadingId, nowMs: number): number | undefined {
+  if (draft.edits[readingKey(id)]) return 0;
+  const reading = draft.readings[id];
+  if (!reading) return undefined;
+  const age = elapsedMs(reading.takenAt, nowMs) / MS_PER_SECOND;
+  return Number.isFinite(age) ? age : undefined;
+}
+
+/** Minutes since the visit clock was started; undefined without a start or with an unreadable one. */
+export function runningMinutes(draft: CheckDraft, nowMs: number): number | undefined {
+  const { runningSince } = draft.visit;
+  if (runningSince === undefined) return undefined;
+  const minutes = elapsedMs(runningSince, nowMs) / MS_PER_MINUTE;
+  return Number.isFinite(minutes) ? minutes : undefined;
+}
+
+export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsRequest {
+  const entries = new Map<FieldKey, Entry>();
+  const problems = new Map<FieldKey, NumberProblem>();
+  const faults: Fault[] = [];
+  for (const key of ALL_FIELD_KEYS) {
+    const typed = valueIn(draft, key);
+    if (!typed) continue;
+    const parsed = parseNumber(typed.text);
+    if (parsed.state === 'problem') problems.set(key, parsed.problem);
+    if (parsed.state !== 'number') continue;
+    if (isUnitOf(key, typed.unit)) entries.set(key, { ...parsed.number, unit: typed.unit });
+    else faults.push({ code: 'wrong-unit', figures: {}, path: pathOf(key) });
+  }
+
+  const { refrigerant, meteringDevice } = draft.setup;
+  if (refrigerant === undefined || meteringDevice === undefined) return { request: null, problems, faults };
+
+  const setup: SetupInput = {
+    ...draft.setup,
+    refrigerant,
+    meteringDevice,
+    ...amounts(entries, [
+      'elevation',
+      'targetSubcooling',
+      'targetSuperheat',
+      'nominalCapacity',
+      'designAirflow',
+      'factoryCharge',
+      'maxHighPressure',
+    ]),
+  };
+  const request = { setup, visit: visitOf(draft, entries, nowMs), readings: readingsOf(draft, entries, nowMs) };
+  return { request, problems, faults };
+}
+
+/** The units were checked when the entries were made; the type of an amount cannot say which field it is for. */
+const amounts = (entries: ReadonlyMap<FieldKey, Entry>, fields: readonly TypedField[]) =>
+  Object.fromEntries(
+    fields.flatMap((field) => {
+      const entry = entries.get(typedKey(field));
+      return entry ? [[field, { value: entry.value, unit: entry.unit }]] : [];
+    }),
+  ) as Readonly<Record<string, Amount<never>>>;
+
+function visitOf(draft: CheckDraft, entries: ReadonlyMap<FieldKey, Entry>, nowMs: number): VisitInput {
+  const { runningSince: _, preflight, ...choices } = draft.visit;
+  const minutes = runningMinutes(draft, nowMs);
+  const days = entries.get('typed:instrumentsCheckedDaysAgo');
+  return {
+    ...choices,
+    preflight,
+    ...(minutes !== undefined && { runningMinutes: minutes }),
+    ...(days && { instrumentsCheckedDaysAgo: days.value }),
+    ...amounts(entries, ['lowestReturnDryBulb', 'addedThisVisit']),
+  };
+}
+
+function readingsOf(draft: CheckDraft, entries: ReadonlyMap<FieldKey, Entry>, nowMs: number): ReadingsInput {
+  const readings: Partial<Record<ReadingId, ReadingInput>> = {};
+  for (const id of READING_IDS) {
+    const entry = entries.get(readingKey(id));
+    if (!entry) continue;
+    const age = ageSeconds(draft, id, nowMs);
+    readings[id] = {
+      value: entry.value,
+      unit: entry.unit as ReadingInput['unit'],
+      resolution: entry.resolution,
+      ...(age !== undefined && { ageSeconds: age }),
+    };
+  }
+  return readings;
+}
+
+/** The request without the entries at these paths (`readings.returnWetBulb`), so that one fault does not hold up the rest. */
+export function withoutPaths(request: EvaluationRequest, paths: ReadonlySet<string>): EvaluationRequest {
+  const keep = <Part extends object>(family: string, part: Part): Part =>
+    Object.fromEntries(Object.entries(part).filter(([name]) => !paths.has(`${family}.${name}`))) as Part;
+  return {
+    ...request,
+    setup: keep('setup', request.setup),
+    ...(request.visit && { visit: keep('visit', request.visit) }),
+    readings: keep('readings', request.readings),
+  };
+}

@@ -1,0 +1,187 @@
+/** Commands to states, and states to what the page shows. Pure: the page and the phone's store apply the same commands by it. */
+import { READING_IDS, type ReadingId } from '@chargewright/engine';
+import type { CheckCommand, CheckState, DraftEdit, ExampleCheck } from './check-command';
+import type {
+  CheckDraft,
+  CheckSummary,
+  DraftReading,
+  DraftVisit,
+  FieldKey,
+  TypedField,
+  TypedValue,
+} from './check-draft';
+import { READING_PLACES } from './reading-places';
+
+type Field = { readonly reading: ReadingId } | { readonly typed: TypedField };
+
+const fieldOf = (key: FieldKey): Field => {
+  const name = key.slice(key.indexOf(':') + 1);
+  return key.startsWith('reading:') ? { reading: name as ReadingId } : { typed: name as TypedField };
+};
+
+export const emptyCheck = (id: string, at: string): CheckState => ({
+  id,
+  createdAt: at,
+  openedAt: at,
+  updatedAt: at,
+  setup: {},
+  visit: { preflight: {} },
+  typed: {},
+  readings: [],
+  retired: [],
+  edits: {},
+});
+
+/** The last reading of a quantity since the last adjustment; a blank one says that the value was taken away. */
+function lastReading(state: CheckState, quantity: ReadingId): DraftReading | undefined {
+  const superseded = new Set(state.readings.map(({ supersedes }) => supersedes));
+  return state.readings.findLast(
+    ({ id, quantity: of }) => of === quantity && !superseded.has(id) && !state.retired.includes(id),
+  );
+}
+
+function standingReadings(state: CheckState): Partial<Record<ReadingId, DraftReading>> {
+  const standing: Partial<Record<ReadingId, DraftReading>> = {};
+  for (const quantity of READING_IDS) {
+    const last = lastReading(state, quantity);
+    if (last && last.text.trim() !== '') standing[quantity] = last;
+  }
+  return standing;
+}
+
+function appendReading(
+  state: CheckState,
+  quantity: ReadingId,
+  { text, unit }: TypedValue,
+  { id, at, source }: { id: string; at: string; source: DraftReading['source'] },
+): CheckState {
+  const before = lastReading(state, quantity);
+  if (text.trim() === '' && (before === undefined || before.text.trim() === '')) return state;
+  const reading: DraftReading = {
+    id,
+    checkId: state.id,
+    quantity,
+    text,
+    unit,
+    place: READING_PLACES[quantity],
+    takenAt: at,
+    source,
+    ...(before && { supersedes: before.id }),
+  };
+  return { ...state, readings: [...state.readings, reading] };
+}
+
+function setTyped(state: CheckState, field: TypedField, value: TypedValue): CheckState {
+  const { [field]: _, ...others } = state.typed;
+  return { ...state, typed: value.text.trim() === '' ? others : { ...others, [field]: value } };
+}
+
+function type(state: CheckState, key: FieldKey, value: TypedValue, edit: { id: string; at: string }): CheckState {
+  const next: DraftEdit = {
+    id: state.edits[key]?.id ?? edit.id,
+    text: value.text,
+    unit: value.unit,
+    editedAt: edit.at,
+  };
+  return { ...state, edits: { ...state.edits, [key]: next } };
+}
+
+function commit(state: CheckState, key: FieldKey, reading: { id: string; at: string }): CheckState {
+  const { [key]: edit, ...edits } = state.edits;
+  if (!edit) return state;
+  const { text, unit } = edit;
+  const field = fieldOf(key);
+  const without = { ...state, edits };
+  return 'reading' in field
+    ? appendReading(without, field.reading, { text, unit }, { ...reading, source: 'typed' })
+    : setTyped(without, field.typed, { text, unit });
+}
+
+const mergeVisit = (visit: DraftVisit, patch: Partial<DraftVisit>): DraftVisit => ({
+  ...visit,
+  ...patch,
+  preflight: { ...visit.preflight, ...patch.preflight },
+});
+
+function fill(state: CheckState, example: ExampleCheck, ids: readonly string[], at: string): CheckState {
+  const quantities = READING_IDS.filter((quantity) => example.readings[quantity]);
+  return quantities.reduce<CheckState>(
+    (filled, quantity, index) => {
+      const value = example.readings[quantity];
+      const id = ids[index];
+      return value && id ? appendReading(filled, quantity, value, { id, at, source: 'example' }) : filled;
+    },
+    {
+      ...state,
+      setup: { ...state.setup, ...example.setup },
+      visit: mergeVisit(state.visit, example.visit ?? {}),
+      typed: { ...state.typed, ...example.typed },
+    },
+  );
+}
+
+function restored(state: CheckState): CheckState {
+  const { deletedAt: _, ...others } = state;
+  return others;
+}
+
+function entered(state: CheckState, command: Exclude<CheckCommand, { do: 'open' | 'remove' }>): CheckState {
+  switch (command.do) {
+    case 'type':
+      return type(state, command.field, command.value, { id: command.editId, at: command.at });
+    case 'commit':
+      return commit(state, command.field, { id: command.readingId, at: command.at });
+    case 'choose':
+      return { ...state, setup: { ...state.setup, ...command.setup } };
+    case 'visit':
+      return { ...state, visit: mergeVisit(state.visit, command.patch) };
+    case 'fill':
+      return fill(state, command.example, command.readingIds, command.at);
+    case 'retake':
+      return { ...state, retired: state.readings.map(({ id }) => id) };
+    case 'restore':
+      return state;
+  }
+}
+
+/** The check after a command; without a state, the command is the first of a new check. */
+export function applyCommand(state: CheckState | undefined, command: CheckCommand): CheckState {
+  const before = state ?? emptyCheck(command.checkId, command.at);
+  if (command.do === 'open') return { ...before, openedAt: command.at };
+  if (command.do === 'remove') return { ...before, deletedAt: command.at };
+  // Entering something brings a check back that another tab has removed: nothing typed is lost.
+  return { ...restored(entered(before, command)), updatedAt: command.at };
+}
+
+/** What the page shows of a check. */
+export const draftOf = (state: CheckState): CheckDraft => ({
+  id: state.id,
+  createdAt: state.createdAt,
+  updatedAt: state.updatedAt,
+  setup: state.setup,
+  visit: state.visit,
+  typed: state.typed,
+  readings: standingReadings(state),
+  edits: Object.fromEntries(
+    Object.entries(state.edits).map(([key, { text, unit }]) => [key, { text, unit }]),
+  ) as CheckDraft['edits'],
+});
+
+/** One line of the list of checks. */
+export const summaryOf = (state: CheckState): CheckSummary => ({
+  id: state.id,
+  createdAt: state.createdAt,
+  updatedAt: state.updatedAt,
+  ...(state.setup.refrigerant !== undefined && { refrigerant: state.setup.refrigerant }),
+  ...(state.setup.meteringDevice !== undefined && { meteringDevice: state.setup.meteringDevice }),
+  readingCount: Object.keys(standingReadings(state)).length,
+});
+
+/** Nothing was chosen, typed or read yet. */
+export const isEmpty = (state: CheckState): boolean =>
+  state.readings.length === 0 &&
+  Object.keys(state.edits).length === 0 &&
+  Object.keys(state.typed).length === 0 &&
+  Object.keys(state.setup).length === 0 &&
+  Object.keys(state.visit).length === 1 &&
+  Object.keys(state.visit.preflight).length === 0;

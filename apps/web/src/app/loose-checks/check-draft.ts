@@ -1,0 +1,98 @@
+/**
+ * A check on the page, as the person typed it. Text and unit are the truth; numbers are made from them when the engine is asked.
+ * The same shapes are stored on the phone (see `@chargewright/contract/stored-check`).
+ */
+import type {
+  HighSidePort,
+  LeakSearch,
+  MeteringDevice,
+  Mode,
+  PreflightItem,
+  PreflightState,
+  ReadingId,
+  Stage,
+  SystemKind,
+} from '@chargewright/engine';
+
+/** What stands in a field: the text as typed and the unit it was typed in. */
+export interface TypedValue {
+  readonly text: string;
+  readonly unit: string;
+}
+
+/** Fields of the setup and the visit that hold a typed number. */
+export const TYPED_FIELDS = [
+  'elevation',
+  'targetSubcooling',
+  'targetSuperheat',
+  'nominalCapacity',
+  'designAirflow',
+  'factoryCharge',
+  'maxHighPressure',
+  'lowestReturnDryBulb',
+  'instrumentsCheckedDaysAgo',
+  'addedThisVisit',
+] as const;
+export type TypedField = (typeof TYPED_FIELDS)[number];
+
+/** A field that can be typed into: a reading, or a number of the setup or visit. */
+export type FieldKey = `reading:${ReadingId}` | `typed:${TypedField}`;
+
+/** The choices of the setup; nothing is chosen for the person. */
+export interface DraftSetup {
+  readonly refrigerant?: string;
+  readonly meteringDevice?: MeteringDevice;
+  readonly mode?: Mode;
+  readonly kind?: SystemKind;
+  readonly stage?: Stage;
+  readonly highSidePort?: HighSidePort;
+}
+
+export interface DraftVisit {
+  /** When the system was started or last adjusted, ISO 8601 in UTC: the visit clock. */
+  readonly runningSince?: string;
+  readonly preflight: Readonly<Partial<Record<PreflightItem, PreflightState>>>;
+  readonly iceSeen?: boolean;
+  readonly leakSearch?: LeakSearch;
+  readonly commissioning?: boolean;
+}
+
+/** One committed reading. Append-only: a correction is a new reading that supersedes an old one. */
+export interface DraftReading {
+  readonly id: string;
+  readonly checkId: string;
+  readonly quantity: ReadingId;
+  readonly text: string;
+  readonly unit: string;
+  readonly place: string;
+  /** ISO 8601 in UTC. */
+  readonly takenAt: string;
+  readonly source: 'typed' | 'example';
+  readonly instrumentId?: string;
+  readonly supersedes?: string;
+}
+
+export interface CheckDraft {
+  readonly id: string;
+  readonly createdAt: string;
+  readonly updatedAt: string;
+  readonly setup: DraftSetup;
+  readonly visit: DraftVisit;
+  /** Committed numbers of setup and visit. */
+  readonly typed: Readonly<Partial<Record<TypedField, TypedValue>>>;
+  /** The reading of each quantity that stands, after corrections. */
+  readonly readings: Readonly<Partial<Record<ReadingId, DraftReading>>>;
+  /** Typed and not committed yet: every keystroke lands here and is stored within a second. */
+  readonly edits: Readonly<Partial<Record<FieldKey, TypedValue>>>;
+}
+
+/** One line of the list of loose checks. */
+export interface CheckSummary {
+  readonly id: string;
+  readonly createdAt: string;
+  readonly updatedAt: string;
+  readonly refrigerant?: string;
+  readonly meteringDevice?: MeteringDevice;
+  /** How many readings stand. */
+  readonly readingCount: number;
+}

@@ -1,0 +1,81 @@
+import { CRITERION_IDS, DERIVED_IDS, FINDINGS } from '@chargewright/engine';
+import type { DerivedId, TargetSource } from '@chargewright/engine';
+import * as z from 'zod';
+import { object } from '../parsing/object';
+import { ANSWER_UNITS, codedText, orNull, toleranceAmount, uncertainAmount } from '../amounts/answer-amounts';
+
+const TARGET_SOURCES = [
+  'entered',
+  'makers-chart-a',
+  'split-table',
+  'procedure-window',
+  'entered-range',
+  'design-airflow',
+  'airflow-per-capacity',
+] as const satisfies readonly TargetSource[];
+
+const criterion = object({
+  criterion: z.enum(CRITERION_IDS),
+  required: z.boolean().meta({ description: 'Whether the overall finding waits for this criterion.' }),
+  actual: orNull(uncertainAmount),
+  target: orNull(uncertainAmount),
+  targetSource: orNull(z.enum(TARGET_SOURCES)),
+  deviation: orNull(uncertainAmount),
+  tolerance: orNull(toleranceAmount),
+  byRule: orNull(z.enum(['passes', 'fails'])),
+  probabilityWithin: z
+    .number()
+    .nullable()
+    .meta({ description: 'Probability that the true deviation lies inside the tolerance (JCGM 106:2012).' }),
+  finding: z.enum(FINDINGS),
+  reason: z.string().nullable().meta({ description: 'Code of why it is not-verifiable or not-judged.' }),
+  reasonText: z.string().nullable(),
+}).meta({ id: 'Criterion' });
+
+const nextStep = object({
+  code: z.string(),
+  text: z.string(),
+  notYet: z.array(codedText).meta({ description: 'What must not be done before.' }),
+}).meta({ id: 'NextStep' });
+
+const diagnosis = object({
+  cause: z.string(),
+  fits: z.array(codedText),
+  doesNotFit: z.array(codedText),
+  nextMeasurement: orNull(codedText),
+}).meta({ id: 'Diagnosis' });
+
+const derivationLine = object({
+  id: z.string(),
+  name: z.string(),
+  formula: z.string(),
+  substitution: z.string(),
+  value: z.number(),
+  unit: z.enum(ANSWER_UNITS),
+  result: z.string().meta({ description: 'The value as printed.' }),
+  source: z.string(),
+}).meta({ id: 'DerivationLine' });
+
+export const evaluationAnswer = object({
+  engineVersion: z.string(),
+  procedure: object({ id: z.string(), version: z.number().int() }),
+  derived: object(
+    Object.fromEntries(DERIVED_IDS.map((id) => [id, z.exactOptional(uncertainAmount)])) as Record<
+      DerivedId,
+      z.ZodExactOptional<typeof uncertainAmount>
+    >,
+  ).meta({ description: 'Only what could be computed.' }),
+  criteria: z.array(criterion),
+  overall: object({
+    finding: z.enum([...FINDINGS, 'stop']),
+    nextStep,
+    stops: z.array(codedText),
+    cautions: z.array(codedText),
+  }),
+  diagnosis: z.array(diagnosis),
+  derivation: z.array(derivationLine),
+}).meta({
+  id: 'EvaluationAnswer',
+  description:
+    'In the unit system of returnDryBulb, or without it of the first temperature given. Numbers are unrounded.',
+});

@@ -1,0 +1,52 @@
+import { HIGH_SIDE_PORTS, METERING_DEVICES, MODES, STAGES, SYSTEM_KINDS } from '@chargewright/engine';
+import type { SetupInput } from '@chargewright/engine';
+import * as z from 'zod';
+import { object } from '../parsing/object';
+import { DIFFERENCE_UNITS_GIVEN, difference, flow, length, mass, power, pressure } from '../amounts/amounts';
+import { LONGEST_TEXT } from './readings';
+
+const required = {
+  refrigerant: z
+    .string()
+    .max(LONGEST_TEXT)
+    .meta({ description: 'ASHRAE 34 designation as in GET /api/v1/refrigerants.', examples: ['R-410A'] }),
+  meteringDevice: z.enum(METERING_DEVICES),
+};
+
+const lineSet = object({
+  length: z.exactOptional(length),
+  lift: z.exactOptional(length),
+  /** Length that the factory charge allows for. */
+  included: z.exactOptional(length),
+});
+
+const optional = {
+  mode: z.exactOptional(z.enum(MODES).meta({ description: 'Left out: cooling.' })),
+  kind: z.exactOptional(z.enum(SYSTEM_KINDS).meta({ description: 'Left out: split.' })),
+  stage: z.exactOptional(z.enum(STAGES).meta({ description: 'Left out: full.' })),
+  highSidePort: z.exactOptional(z.enum(HIGH_SIDE_PORTS).meta({ description: 'Left out: liquid.' })),
+  elevation: z.exactOptional(length),
+  stationPressure: z.exactOptional(pressure),
+  targetSuperheat: z.exactOptional(difference),
+  targetSubcooling: z.exactOptional(difference),
+  targetSubcoolingPort: z.exactOptional(z.enum(['liquid', 'discharge'])),
+  superheatRange: z.exactOptional(object({ low: z.number(), high: z.number(), unit: z.enum(DIFFERENCE_UNITS_GIVEN) })),
+  nominalCapacity: z.exactOptional(power),
+  designAirflow: z.exactOptional(flow),
+  factoryCharge: z.exactOptional(mass),
+  maxHighPressure: z.exactOptional(pressure),
+  chargeMode: z.exactOptional(z.boolean()),
+  lineSet: z.exactOptional(lineSet),
+};
+
+// Both directions: a field the engine does not know, or one that is forgotten here, does not compile.
+const everyField = { ...required, ...optional } satisfies Record<keyof SetupInput, z.ZodType>;
+
+export const setup = object(everyField).meta({ id: 'Setup' });
+
+/** What parsed of a setup; the two required fields may be among the faulty ones. */
+export const setupRest = object({
+  refrigerant: z.exactOptional(required.refrigerant),
+  meteringDevice: z.exactOptional(required.meteringDevice),
+  ...optional,
+});

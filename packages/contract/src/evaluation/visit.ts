@@ -1,0 +1,29 @@
+import { LEAK_SEARCHES, PREFLIGHT_ITEMS, PREFLIGHT_STATES } from '@chargewright/engine';
+import type { PreflightItem, VisitInput } from '@chargewright/engine';
+import * as z from 'zod';
+import { object } from '../parsing/object';
+import { mass, temperature } from '../amounts/amounts';
+import { readings } from './readings';
+
+const preflight = object(
+  Object.fromEntries(PREFLIGHT_ITEMS.map((item) => [item, z.exactOptional(z.enum(PREFLIGHT_STATES))])) as Record<
+    PreflightItem,
+    z.ZodExactOptional<z.ZodEnum<{ ok: 'ok'; 'not-ok': 'not-ok'; 'not-checked': 'not-checked' }>>
+  >,
+);
+
+export const visit = object({
+  runningMinutes: z.exactOptional(z.number().meta({ description: 'Since the start or the last adjustment.' })),
+  lowestReturnDryBulb: z.exactOptional(temperature),
+  instrumentsCheckedDaysAgo: z.exactOptional(z.number()),
+  preflight: z.exactOptional(preflight),
+  leakSearch: z.exactOptional(z.enum(LEAK_SEARCHES)),
+  addedThisVisit: z.exactOptional(mass),
+  addedBefore: z.exactOptional(mass),
+  additionsOnEarlierVisits: z.exactOptional(z.number()),
+  commissioning: z.exactOptional(z.boolean()),
+  hoursOff: z.exactOptional(z.number()),
+  headRaised: z.exactOptional(z.boolean()),
+  iceSeen: z.exactOptional(z.boolean()),
+  earlier: z.exactOptional(object({ minutesAgo: z.number(), readings })),
+} satisfies Record<keyof VisitInput, z.ZodType>).meta({ id: 'Visit' });

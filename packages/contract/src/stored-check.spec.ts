@@ -1,0 +1,73 @@
+import { describe, expect, it } from 'vitest';
+import { storedRow, type StoredRow } from './stored-check';
+
+const ID = '01900000-0000-7000-8000-000000000001';
+const CHECK_ID = '01900000-0000-7000-8000-000000000002';
+const TIME = '2026-06-01T12:00:00.000Z';
+
+const reading = {
+  id: ID,
+  kind: 'reading',
+  schema: 1,
+  body: {
+    id: ID,
+    checkId: CHECK_ID,
+    quantity: 'returnWetBulb',
+    text: '64,50',
+    unit: 'degF',
+    place: 'return',
+    takenAt: TIME,
+    source: 'typed',
+  },
+} satisfies StoredRow;
+const edit = {
+  id: ID,
+  kind: 'edit',
+  schema: 1,
+  body: { checkId: CHECK_ID, field: 'typed:elevation', text: '-', unit: 'ft', editedAt: TIME },
+} satisfies StoredRow;
+const check = {
+  id: CHECK_ID,
+  kind: 'check',
+  schema: 1,
+  body: {
+    createdAt: TIME,
+    openedAt: TIME,
+    updatedAt: TIME,
+    setup: { refrigerant: 'R-410A', meteringDevice: 'txv' },
+    visit: { preflight: { panelsOn: 'ok' }, runningSince: TIME },
+    typed: { elevation: { text: '650', unit: 'ft' } },
+    retired: [ID],
+    readingCount: 1,
+  },
+} satisfies StoredRow;
+
+const isGood = (row: unknown) => storedRow.safeParse(row).success;
+const withBody = (row: { body: object }, change: object) => ({ ...row, body: { ...row.body, ...change } });
+
+describe('a stored row', () => {
+  it.each([reading, edit, check])('of kind $kind is read as it was written', (row) => {
+    expect(storedRow.parse(structuredClone(row))).toEqual(row);
+  });
+
+  it('keeps any text that was typed, not only numbers', () => {
+    expect(isGood(withBody(reading, { text: 'about 64?' }))).toBe(true);
+    expect(isGood(withBody(edit, { text: '' }))).toBe(true);
+  });
+
+  it.each([
+    ['no body', { ...reading, body: undefined }],
+    ['an id that is no UUIDv7', { ...reading, id: 'b0a1f0b2-3c4d-4e5f-8a9b-0c1d2e3f4a5b' }],
+    ['an unknown kind', { ...reading, kind: 'note' }],
+    ['an unknown quantity', withBody(reading, { quantity: 'shoeSize' })],
+    ['a number in place of a text', withBody(reading, { text: 64.5 })],
+    ['a time that is none', withBody(reading, { takenAt: 'yesterday' })],
+    ['an endless text', withBody(reading, { text: '6'.repeat(201) })],
+    ['an unknown field', withBody(edit, { field: 'reading:elevation' })],
+    ['an unknown metering device', withBody(check, { setup: { meteringDevice: 'tap' } })],
+    ['a missing pre-flight', withBody(check, { visit: {} })],
+    ['another version', { ...check, schema: 2 }],
+  ])('with %s is refused', (_, row) => {
+    expect(isGood(row)).toBe(false);
+  });
+});

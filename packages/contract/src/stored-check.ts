@@ -1,0 +1,112 @@
+/**
+ * Rows of a check as a phone keeps them. Every row is `{ id, kind, schema, body }`; a reading has the same shape in loose checks and in
+ * records. Rows are parsed whenever they are read, since the store of a browser outlives the version of the page that wrote it.
+ */
+import {
+  HIGH_SIDE_PORTS,
+  LEAK_SEARCHES,
+  METERING_DEVICES,
+  MODES,
+  PREFLIGHT_ITEMS,
+  PREFLIGHT_STATES,
+  READING_IDS,
+  STAGES,
+  SYSTEM_KINDS,
+} from '@chargewright/engine';
+import * as z from 'zod';
+
+// zod would try `new Function`, which the page's content security policy reports as a violation.
+z.config({ jitless: true });
+
+/** The version of the row shapes below; it rises with every change that older rows do not fulfil. */
+export const STORED_CHECK_SCHEMA = 1;
+
+/** Fields of the setup and the visit that hold a typed number. */
+export const STORED_TYPED_FIELDS = [
+  'elevation',
+  'targetSubcooling',
+  'targetSuperheat',
+  'nominalCapacity',
+  'designAirflow',
+  'factoryCharge',
+  'maxHighPressure',
+  'lowestReturnDryBulb',
+  'instrumentsCheckedDaysAgo',
+  'addedThisVisit',
+] as const;
+
+const MAX_TEXT = 200;
+const MAX_READINGS = 10_000;
+
+const id = z.uuidv7();
+const text = z.string().max(MAX_TEXT);
+const time = z.iso.datetime();
+const typedValue = { text, unit: text };
+const fieldKey = z.union([
+  z.templateLiteral(['reading:', z.enum(READING_IDS)]),
+  z.templateLiteral(['typed:', z.enum(STORED_TYPED_FIELDS)]),
+]);
+
+const setup = z.object({
+  refrigerant: z.exactOptional(text),
+  meteringDevice: z.exactOptional(z.enum(METERING_DEVICES)),
+  mode: z.exactOptional(z.enum(MODES)),
+  kind: z.exactOptional(z.enum(SYSTEM_KINDS)),
+  stage: z.exactOptional(z.enum(STAGES)),
+  highSidePort: z.exactOptional(z.enum(HIGH_SIDE_PORTS)),
+});
+
+const visit = z.object({
+  runningSince: z.exactOptional(time),
+  preflight: z.partialRecord(z.enum(PREFLIGHT_ITEMS), z.enum(PREFLIGHT_STATES)),
+  iceSeen: z.exactOptional(z.boolean()),
+  leakSearch: z.exactOptional(z.enum(LEAK_SEARCHES)),
+  commissioning: z.exactOptional(z.boolean()),
+});
+
+const row = <Kind extends string, Body extends z.ZodType>(kind: Kind, body: Body) =>
+  z.object({ id, kind: z.literal(kind), schema: z.literal(STORED_CHECK_SCHEMA), body });
+
+/** The check itself; its id is the row's. */
+export const storedCheckRow = row(
+  'check',
+  z.object({
+    createdAt: time,
+    openedAt: time,
+    updatedAt: time,
+    deletedAt: z.exactOptional(time),
+    setup,
+    visit,
+    typed: z.partialRecord(z.enum(STORED_TYPED_FIELDS), z.object(typedValue)),
+    /** Readings that an adjustment of the system made void. */
+    retired: z.array(id).max(MAX_READINGS),
+    /** How many readings stand, kept here so that a list need not read them all. */
+    readingCount: z.int().nonnegative(),
+  }),
+);
+
+/** One committed value. Append-only: a correction is a new reading that names the one it supersedes; a blank text takes the value away. */
+export const storedReadingRow = row(
+  'reading',
+  z.object({
+    id,
+    checkId: id,
+    quantity: z.enum(READING_IDS),
+    ...typedValue,
+    place: text,
+    takenAt: time,
+    source: z.enum(['typed', 'example']),
+    instrumentId: z.exactOptional(text),
+    supersedes: z.exactOptional(id),
+  }),
+);
+
+/** What stands in a field and is not committed yet. */
+export const storedEditRow = row('edit', z.object({ checkId: id, field: fieldKey, ...typedValue, editedAt: time }));
+
+export const storedRow = z.discriminatedUnion('kind', [storedCheckRow, storedReadingRow, storedEditRow]);
+
+export type StoredCheckRow = z.infer<typeof storedCheckRow>;
+export type StoredReadingRow = z.infer<typeof storedReadingRow>;
+export type StoredEditRow = z.infer<typeof storedEditRow>;
+export type StoredRow = z.infer<typeof storedRow>;

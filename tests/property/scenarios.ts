@@ -1,0 +1,101 @@
+/** Corners that chance alone would hardly reach: several rare things at once, drawn more often than they happen. */
+import fc from 'fast-check';
+import type { Drives, Overrides } from './drives';
+import { between, drivesWith, mixed } from './drives';
+
+const always = <T>(value: T): fc.Arbitrary<T> => fc.constant(value);
+
+/** Nothing in the way of a judgement. */
+const CLEAR: Overrides = {
+  mode: always('cooling' as const),
+  kind: always('split' as const),
+  stage: always('full' as const),
+  highSidePort: always('liquid' as const),
+  chargeMode: always(undefined),
+  evaporatingF: between(38, 46),
+  outdoorF: between(78, 100),
+  condensingOverAirF: between(12, 18),
+  returnF: between(74, 79),
+  relativeHumidity: between(0.45, 0.6),
+  splitMarginF: between(-1, 1),
+  dischargeLineF: always(undefined),
+  airflowPerTon: always(undefined),
+  maxHighPressurePsi: always(undefined),
+  humidityBy: always('wet-bulb' as const),
+  leftOut: always([]),
+  writtenEvaporating: always(undefined),
+  writtenCondensing: always(undefined),
+  accuracy: always('tight' as const),
+  ageSeconds: always(undefined),
+  runningMinutes: always(22),
+  lowestReturnF: always(undefined),
+  preflight: always({ panelsOn: 'ok' } as const),
+  targetSubcoolingPort: always(undefined),
+  superheatRangeF: always(undefined),
+  earlier: always(undefined),
+};
+
+const VALVE: Overrides = { ...CLEAR, meteringDevice: always('txv' as const), targetSubcoolingF: between(9, 12) };
+const ORIFICE: Overrides = {
+  ...CLEAR,
+  meteringDevice: always('fixed-orifice' as const),
+  targetSuperheatF: always(undefined),
+};
+
+const SCENARIOS: readonly Overrides[] = [
+  // steps of one visit used up
+  {
+    ...VALVE,
+    subcoolingMarginF: between(-8, -5),
+    leakSearch: always('none-found' as const),
+    factoryChargeLb: between(4, 8),
+    addedThisVisitLb: between(0.9, 2),
+    earlierAdditions: always(undefined),
+    commissioning: always(undefined),
+  },
+  // superheat alone, high
+  {
+    ...ORIFICE,
+    superheatMarginF: between(8, 12),
+    leftOut: always(['liquidPressure', 'liquidLineTemperature'] as const),
+  },
+  // the liquid pressure read at a discharge port
+  { ...VALVE, highSidePort: always('discharge' as const), rightHighSide: always(false) },
+  // a valve that floods, short of charge and overcharged
+  { ...VALVE, superheatMarginF: between(-9.6, -8.9), subcoolingMarginF: between(-8, -5) },
+  { ...VALVE, superheatMarginF: between(-9.6, -8.9), subcoolingMarginF: between(5, 9) },
+  // a valve that starves, overcharged; and one short of charge again after earlier visits
+  { ...VALVE, superheatMarginF: between(16, 22), subcoolingMarginF: between(5, 9) },
+  { ...VALVE, subcoolingMarginF: between(-8, -5), commissioning: always(undefined), earlierAdditions: always(2) },
+  // an orifice that starves with an unclear subcooling
+  {
+    ...ORIFICE,
+    superheatMarginF: between(8, 12),
+    targetSubcoolingF: always(undefined),
+    subcoolingMarginF: between(-4.6, -2.4),
+  },
+  // a packaged unit whose port nobody stated
+  { ...CLEAR, kind: always('packaged' as const), highSidePort: always(undefined) },
+];
+
+const systems = (further: Overrides): fc.Arbitrary<Drives> =>
+  mixed(
+    [100, drivesWith(further)],
+    ...SCENARIOS.map((overrides) => [1, drivesWith({ ...overrides, ...further })] as const),
+  );
+
+export const anySystem = systems({});
+
+/** Every reading with a stated ±, which can be multiplied. */
+export const statedSystem = systems({
+  accuracy: fc.constantFrom('stated' as const, 'tight' as const, 'poor' as const, 'coverage-2' as const),
+});
+
+/** Fit for the test by its setup and pre-flight. */
+export const fitSystem = drivesWith({
+  mode: fc.constantFrom('cooling' as const, undefined),
+  kind: fc.constantFrom('split' as const, undefined),
+  stage: fc.constantFrom('full' as const, 'unknown' as const, undefined),
+  chargeMode: fc.constantFrom(true, undefined),
+  preflight: fc.constantFrom(undefined, {}, { panelsOn: 'ok', filterAndCoil: 'not-ok' } as const),
+});
