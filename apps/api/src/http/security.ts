@@ -6,8 +6,7 @@ const NONE = "'none'";
 const ONE_YEAR_S = 31_536_000;
 
 /** What the page may use of the device; the rest of the list is nobody's. */
-const PERMISSIONS =
-  'bluetooth=(self), camera=(self), screen-wake-lock=(self), geolocation=(), microphone=(), payment=(), usb=()';
+const PERMISSIONS = 'camera=(self), screen-wake-lock=(self), geolocation=(), microphone=(), payment=(), usb=()';
 
 /**
  * Headers that confine the page to its own origin. `secure`: browsers reach the server by HTTPS; without it HSTS and the upgrade of

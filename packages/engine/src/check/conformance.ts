@@ -27,18 +27,19 @@ export function judgeConformance(input: {
   const { measured, tolerance, guard, probabilityOfNoTarget = 0 } = input;
   const low = tolerance.low ?? -Infinity;
   const high = tolerance.high ?? Infinity;
-  const { value, u } = measured;
+  const { value, u, meanShift } = measured;
+  const mean = value + meanShift;
   const [from, to] = [low - LIMIT_SLACK_K, high + LIMIT_SLACK_K];
   const passes = value >= from && value <= to;
-  const inside = probabilityBetween(value, u, from, to);
+  const inside = probabilityBetween(mean, u, from, to);
   const probabilityWithin = inside * (1 - probabilityOfNoTarget);
   const byRule = passes ? 'passes' : 'fails';
   if (probabilityWithin >= guard) return { byRule, probabilityWithin, finding: 'within' };
   // only the deviation can be outside: a doubtful target is not a deviation
   if (inside <= 1 - guard) {
-    if (probabilityBetween(value, u, -Infinity, from) <= 1 - guard)
+    if (probabilityBetween(mean, u, -Infinity, from) <= 1 - guard)
       return { byRule, probabilityWithin, finding: 'above' };
-    if (probabilityBetween(value, u, to, Infinity) <= 1 - guard) return { byRule, probabilityWithin, finding: 'below' };
+    if (probabilityBetween(mean, u, to, Infinity) <= 1 - guard) return { byRule, probabilityWithin, finding: 'below' };
   }
   return { byRule, probabilityWithin, finding: 'too-close-to-call' };
 }

@@ -99,23 +99,17 @@ describe('R-410A, valve', () => {
 });
 
 describe('R-407C, valve', () => {
-  it('counts superheat from dew and subcooling from bubble: the other column costs the glide', () => {
+  // a published equation for the blend as one fluid puts the dew point of 63.2 psig at 40 °F, a maker’s table the bubble point of 249 psig at
+  // 108 °F (its table lies up to 1.14 °F from the equations); the other column would be 10 and 8 °F off
+  it('counts superheat from the dew point and subcooling from the bubble point', () => {
     const { derived } = evaluate(
       valveRequest({
         setup: { refrigerant: 'R-407C' },
-        readings: { suctionPressure: 60, suctionLineTemperature: 46, liquidPressure: 250 },
+        readings: { suctionPressure: 63.2, suctionLineTemperature: 52, liquidPressure: 249, liquidLineTemperature: 98 },
       }),
     );
-    const input = inputOf(
-      valveRequest({
-        setup: { refrigerant: 'R-407C' },
-        readings: { suctionPressure: 60, suctionLineTemperature: 46, liquidPressure: 250 },
-      }),
-    );
-    // NIST-type mixture model: 10 °F of glide at suction, 8 at the high side
-    expect(deltaF(derived.superheat)).toBeCloseTo(46 - degF(derived.evaporatingDewTemperature), 9);
-    expect(deltaF(derived.subcooling)).toBeCloseTo(degF(derived.condensingBubbleTemperature) - 95, 9);
-    expect(input.setup.refrigerant).toBe('R-407C');
+    expect(Math.abs(deltaF(derived.superheat) - 12)).toBeLessThan(0.15);
+    expect(Math.abs(deltaF(derived.subcooling) - 10)).toBeLessThan(1.2);
   });
 });
 
@@ -254,11 +248,11 @@ describe('the overall finding', () => {
     );
     expect(evaluate(orificeRequest({ readings: high })).overall.finding).toBe('above');
     expect(evaluate(orificeRequest({ readings: { ...high, returnWetBulb: null } })).overall.finding).toBe('not-judged');
-    expect(evaluate(orificeRequest({ readings: { ...high, outdoorDryBulb: 50 } })).overall.finding).toBe(
+    expect(evaluate(orificeRequest({ readings: { ...high, returnDryBulb: 69 } })).overall.finding).toBe(
       'not-verifiable',
     );
     expect(
-      evaluate(orificeRequest({ readings: { ...high, outdoorDryBulb: 50, dischargeLineTemperature: 230 } })).overall
+      evaluate(orificeRequest({ readings: { ...high, returnDryBulb: 69, dischargeLineTemperature: 230 } })).overall
         .finding,
     ).toBe('stop');
   });
@@ -300,7 +294,9 @@ describe('a result', () => {
   it('is the same for the same input, and does not change the input', () => {
     const input = inputOf(orificeRequest());
     const before = JSON.stringify(input);
-    expect(evaluateCheck(input)).toEqual(evaluateCheck(input));
+    const text = (result: CheckResult): string =>
+      JSON.stringify(result, (_, value: unknown) => (value instanceof Map ? [...value] : value));
+    expect(text(evaluateCheck(input))).toBe(text(evaluateCheck(input)));
     expect(JSON.stringify(input)).toBe(before);
   });
 

@@ -38,15 +38,18 @@ export function derive<Name extends string>(
     const value = evaluate(formula, at);
     if (refused !== undefined) return { ...refused, value };
     const contributions = new Map<string, number>();
+    let meanShift = 0;
     for (const name of names) {
       const input = from[name] as Known;
       if (input.u === 0) continue;
-      const slope = secantSlope(formula, at, name, { value, u: input.u });
-      if (slope instanceof EngineError) return { state: 'refused', error: slope, value };
+      const secant = secantOver(formula, at, name, { value, u: input.u });
+      if (secant instanceof EngineError) return { state: 'refused', error: secant, value };
+      const { slope, bend } = secant;
+      meanShift += slope * input.meanShift + bend;
       for (const [key, c] of input.contributions) contributions.set(key, (contributions.get(key) ?? 0) + slope * c);
     }
     const step = { type: 'derived', formula, from: from as Readonly<Record<Name, Known>>, parts } as const;
-    return known({ kind: formula.gives, value, contributions, step, parts });
+    return known({ kind: formula.gives, value, contributions, meanShift, step, parts });
   } catch (error) {
     // the physics' own refusal becomes data; anything else is a bug
     if (error instanceof EngineError) return { state: 'refused', error };
@@ -60,13 +63,19 @@ function evaluate<Name extends string>(formula: Formula<Name>, at: Readonly<Reco
   return value;
 }
 
-/** The slope, or the refusal of the upper side when both sides are refused. */
-function secantSlope<Name extends string>(
+interface Secant {
+  readonly slope: number;
+  /** Mean of the values at both ends less the value in the middle; 0 where one end is refused. */
+  readonly bend: number;
+}
+
+/** The secant over ± u, or the refusal of the upper side when both sides are refused. */
+function secantOver<Name extends string>(
   formula: Formula<Name>,
   at: Record<Name, number>,
   name: Name,
   centre: { readonly value: number; readonly u: number },
-): number | EngineError {
+): Secant | EngineError {
   const x = at[name];
   const step = Math.max(centre.u, SMALLEST_RELATIVE_STEP * Math.abs(x), SMALLEST_STEP);
   // one object for all evaluations: copying it cost more than most formulas
@@ -76,9 +85,10 @@ function secantSlope<Name extends string>(
   const below = evaluateOrRefuse(formula, at);
   at[name] = x;
   if (above instanceof EngineError) {
-    return below instanceof EngineError ? above : (centre.value - below) / step;
+    return below instanceof EngineError ? above : { slope: (centre.value - below) / step, bend: 0 };
   }
-  return below instanceof EngineError ? (above - centre.value) / step : (above - below) / (2 * step);
+  if (below instanceof EngineError) return { slope: (above - centre.value) / step, bend: 0 };
+  return { slope: (above - below) / (2 * step), bend: 0.5 * (above + below) - centre.value };
 }
 
 function evaluateOrRefuse<Name extends string>(

@@ -56,6 +56,8 @@ export interface Known {
   readonly u: number;
   /** Signed contribution to `u` by error key: slope × standard uncertainty. */
   readonly contributions: ReadonlyMap<string, number>;
+  /** By how much the mean of the possible values lies off `value`, where a formula bends within ±u: second order, in the unit of `value`. */
+  readonly meanShift: number;
   readonly step: LeafStep | DerivedStep;
 }
 
@@ -113,12 +115,13 @@ export function known(input: {
   readonly kind: QuantityKind;
   readonly value: number;
   readonly contributions: Map<string, number>;
+  readonly meanShift?: number;
   readonly step: LeafStep | DerivedStep;
   readonly parts: readonly ErrorPart[];
 }): Known {
-  const { kind, value, contributions, step, parts } = input;
+  const { kind, value, contributions, meanShift = 0, step, parts } = input;
   for (const { key, u } of parts) contributions.set(key, (contributions.get(key) ?? 0) + u);
-  return { state: 'known', kind, value, u: addInQuadrature(contributions), contributions, step };
+  return { state: 'known', kind, value, u: addInQuadrature(contributions), contributions, meanShift, step };
 }
 
 /** Covariance of two results that share error sources (JCGM 102:2011, 6.2: Σ of the products of their contributions). */
