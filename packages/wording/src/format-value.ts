@@ -92,6 +92,12 @@ export function formatBare(kind: QuantityKind, value: number, system: UnitSystem
   return formatTrimmed(shown.value, decimalsOf(kind, shown.unit));
 }
 
+/** "52.0": the bare number of `formatValue`, for figures that keep their width while they change. */
+export function formatFigure(kind: QuantityKind, value: number, system: UnitSystem): string {
+  const shown = presentValue(kind, value, system);
+  return formatNumber(shown.value, decimalsOf(kind, shown.unit));
+}
+
 /** A probability is never printed as certain. */
 export function formatProbability(probability: number): string {
   const percent = Math.round(probability * 100);

@@ -5,7 +5,7 @@ import { lengthFromM, PA_PER_PSI, temperatureFromK, temperatureToK } from '../un
 import type { CautionCode, Figure } from './codes';
 import { deriveQuantities } from './derived-quantities';
 import type { EvaluationRequest, ReadingInput } from './request';
-import type { Changes } from './testing/healthy-systems';
+import type { Changes, ReadingChanges } from './testing/healthy-systems';
 import {
   cautionCodes,
   evaluate,
@@ -175,7 +175,7 @@ describe('liquid-colder-than-air', () => {
 });
 
 describe('cool-weather and low-head', () => {
-  const outdoor = (degF: number, changes: Changes['readings'] = {}) =>
+  const outdoor = (degF: number, changes: ReadingChanges = {}) =>
     valveRequest({ readings: { outdoorDryBulb: degF, ...changes } });
 
   it.each([

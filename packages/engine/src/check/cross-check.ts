@@ -148,7 +148,7 @@ function checkVisit(faults: Faults, visit: VisitInput, pressures: PressureContex
   faults.notNegative('visit.additionsOnEarlierVisits', visit.additionsOnEarlierVisits);
   faults.notNegative('visit.hoursOff', visit.hoursOff);
   if (visit.lowestReturnDryBulb !== undefined) {
-    checkTemperature(faults, 'visit.lowestReturnDryBulb', visit.lowestReturnDryBulb as Amount<TemperatureUnit>);
+    checkTemperature(faults, 'visit.lowestReturnDryBulb', visit.lowestReturnDryBulb);
   }
   if (visit.earlier !== undefined) {
     faults.notNegative('visit.earlier.minutesAgo', visit.earlier.minutesAgo);

@@ -1,6 +1,6 @@
 /** What a derivation rests on: which readings, and whether any of them is too old to count. */
 import type { Known, Quantity } from '../derivation/quantity';
-import { EngineError } from '../errors';
+import type { EngineError } from '../errors';
 import type { CheckInput } from './input';
 import type { Reason } from './codes';
 import type { ReadingId } from './readings';

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { bubblePressurePa, dewPressurePa } from '../refrigerants/saturation';
 import { PA_PER_PSI, temperatureToK } from '../units';
 import type { ReadingInput } from './request';
-import type { Changes } from './testing/healthy-systems';
+import type { Changes, ReadingChanges } from './testing/healthy-systems';
 import {
   cautionCodes,
   criterionOf,
@@ -53,7 +53,7 @@ describe('ports-swapped', () => {
 });
 
 describe('saturation-impossible', () => {
-  it.each<[string, Changes['readings'], boolean]>([
+  it.each<[string, ReadingChanges, boolean]>([
     ['superheat below −U', { suctionLineTemperature: 36 }, true],
     ['superheat below zero inside U', { suctionLineTemperature: 39.6 }, false],
     ['subcooling below −U', { liquidLineTemperature: 108 }, true],

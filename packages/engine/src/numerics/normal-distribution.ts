@@ -1,36 +1,28 @@
-/** Abscissae of the 5-point Gauss-Legendre half rule on [−1, 1], 10 points in all (Abramowitz & Stegun (1964), table 25.4). */
-const LEGENDRE: readonly (readonly [x: number, weight: number])[] = [
-  [0.14887433898163122, 0.29552422471475287],
-  [0.4333953941292472, 0.26926671930999635],
-  [0.6794095682990244, 0.21908636251598204],
-  [0.8650633666889845, 0.1494513491505806],
-  [0.9739065285171717, 0.06667134430868814],
-];
-
 const density = (z: number): number => Math.exp(-0.5 * z * z) / Math.sqrt(2 * Math.PI);
 
-/** Beyond this |z| the tail is below 1e-16, less than a double can show beside 1. */
-const TAIL_Z = 8.3;
-/** Panels of one standard deviation keep the 10-point rule below 1e-15. */
-const PANEL = 1;
+/** Beyond this |z| four terms of the tail's expansion leave less than 3e-17. */
+const FAR_Z = 7;
 
 /**
- * Probability that a standard normal variable is at most `z` (JCGM 100:2008, annex G; defined by Abramowitz & Stegun (1964), eq. 26.2.2).
- * Integrated panel by panel, absolute error below 1e-14; ±∞ give 1 and 0, NaN throws `RangeError`.
+ * Probability that a standard normal variable is at most `z`, absolute error below 2e-15: the series of Abramowitz & Stegun (1964), eq. 26.2.11, in
+ * the order of Marsaglia, J. Stat. Softw. 11(4) (2004), and far out the expansion of eq. 26.2.12. ±∞ give 1 and 0, NaN throws `RangeError`.
  */
 export function standardNormalCdf(z: number): number {
   if (Number.isNaN(z)) throw new RangeError('standardNormalCdf: z is NaN');
-  if (z >= TAIL_Z) return 1;
-  if (z <= -TAIL_Z) return 0;
-  let area = 0;
-  const end = Math.abs(z);
-  for (let from = 0; from < end; from += PANEL) {
-    const half = 0.5 * (Math.min(from + PANEL, end) - from);
-    const middle = from + half;
-    for (const [x, weight] of LEGENDRE)
-      area += half * weight * (density(middle - half * x) + density(middle + half * x));
+  const square = z * z;
+  if (Math.abs(z) > FAR_Z) {
+    const tail = (density(z) / Math.abs(z)) * (1 - (1 - (3 - 15 / square) / square) / square);
+    return z > 0 ? 1 - tail : tail;
   }
-  return 0.5 + Math.sign(z) * area;
+  let term = z;
+  let sum = z;
+  let before = NaN;
+  for (let n = 3; sum !== before; n += 2) {
+    before = sum;
+    term *= square / n;
+    sum += term;
+  }
+  return 0.5 + sum * density(z);
 }
 
 /**

@@ -37,6 +37,12 @@ export const HUMIDITY_RATIO_LIMITS = {
   reason: 'negative-or-not-finite',
 } as const;
 
+/**
+ * What two readings of one state, each solved to 1e-9 K and put back, may contradict each other by, in K: rounding where the air is saturated or dry,
+ * and no fault of the readings.
+ */
+export const SOLVED_K = 2e-9;
+
 /** Refuses a dry bulb or a pressure outside the range of this layer, NaN included. */
 export function assertMoistAirRange(dryBulbK: number, pressurePa: number): void {
   assertInRange(dryBulbK, DRY_BULB_LIMITS);

@@ -27,6 +27,9 @@ const VAPOUR_HEAT = 1.86;
 /** Where t and t* count from, and where the bulb freezes. */
 export const FREEZING_K = temperatureToK(0, 'degC');
 
+/** The equation of a measured bulb, taken at its word: eq. 33 from 0 °C up, eq. 35 below. */
+export const bulbEquation = (wetBulbK: number): BulbEquation => (wetBulbK >= FREEZING_K ? WATER_BULB : ICE_BULB);
+
 /**
  * Humidity ratio by eq. 33 or 35 as printed. The caller has checked the ranges and that the wet bulb is not above the dry bulb.
  * Negative where even dry air would show more; `EngineError` `inconsistent-inputs` where the wet bulb would boil at this pressure.
@@ -40,6 +43,37 @@ export function humidityRatioByPsychrometricEquation(
   const t = x.dryBulbK - FREEZING_K;
   const tStar = x.wetBulbK - FREEZING_K;
   return ((a - b * tStar) * saturated - DRY_AIR_HEAT * (t - tStar)) / (a + VAPOUR_HEAT * t - c * tStar);
+}
+
+/**
+ * Dry bulb in K at which a wet bulb stands for a humidity ratio: eq. 33 or 35 solved for t, wherever it may lie. It is the wet bulb itself at
+ * saturation, where b = c − 1.86, and the drier the air the higher. `EngineError` `inconsistent-inputs` where the wet bulb would boil.
+ */
+export function dryBulbKByPsychrometricEquation(
+  { a, b, c }: BulbEquation,
+  x: { wetBulbK: number; humidityRatio: number; pressurePa: number },
+): number {
+  const [vapourPressurePa] = saturationPressureAndSlope(x.wetBulbK);
+  const saturated = humidityRatioFromVapourPressure({ vapourPressurePa, pressurePa: x.pressurePa });
+  const W = x.humidityRatio;
+  const tStar = x.wetBulbK - FREEZING_K;
+  const heat = (a - b * tStar) * saturated + DRY_AIR_HEAT * tStar - W * (a - c * tStar);
+  return FREEZING_K + heat / (DRY_AIR_HEAT + W * VAPOUR_HEAT);
+}
+
+/**
+ * Vapour pressure in Pa that a wet bulb stands for at a trial dry bulb, by eq. 33 or 35 and eq. 20, and its analytic slope per K of dry bulb, which is
+ * negative throughout.
+ */
+export function vapourPressureByPsychrometricEquation(
+  bulb: BulbEquation,
+  x: { dryBulbK: number; wetBulbK: number; pressurePa: number },
+): readonly [pressurePa: number, slopePaPerK: number] {
+  const W = humidityRatioByPsychrometricEquation(bulb, x);
+  const denominator = bulb.a + VAPOUR_HEAT * (x.dryBulbK - FREEZING_K) - bulb.c * (x.wetBulbK - FREEZING_K);
+  const slope = -(DRY_AIR_HEAT + VAPOUR_HEAT * W) / denominator;
+  const moles = MOLAR_MASS_RATIO + W;
+  return [(x.pressurePa * W) / moles, (x.pressurePa * MOLAR_MASS_RATIO * slope) / (moles * moles)];
 }
 
 export interface HumidAir {

@@ -184,14 +184,16 @@ describe('the branch of the wet bulb', () => {
     }
   });
 
-  it('finds a wet bulb between 0 and 0.01 °C, where saturation is over ice and the bulb wet', () => {
-    const dryBulbK = 278.15;
-    const wetBulbK = 273.155;
-    const humidityRatio = humidityRatioFromWetBulb({ dryBulbK, wetBulbK, pressurePa: 101_325 });
-    const found = wetBulbFromHumidityRatio({ dryBulbK, humidityRatio, pressurePa: 101_325 });
-    expect(found.wetBulbSurface).toBe('water');
-    expect(Math.abs(found.wetBulbK - wetBulbK)).toBeLessThan(1e-9);
-  });
+  it.each([273.1501, 273.155, 273.1599, TRIPLE_POINT_K - 1e-5, TRIPLE_POINT_K - 1e-8])(
+    'finds a wet bulb of %d K, between 0 and 0.01 °C, where saturation is over ice and the bulb wet',
+    (wetBulbK) => {
+      const dryBulbK = 278.15;
+      const humidityRatio = humidityRatioFromWetBulb({ dryBulbK, wetBulbK, pressurePa: 101_325 });
+      const found = wetBulbFromHumidityRatio({ dryBulbK, humidityRatio, pressurePa: 101_325 });
+      expect(found.wetBulbSurface).toBe('water');
+      expect(Math.abs(found.wetBulbK - wetBulbK)).toBeLessThan(1e-9);
+    },
+  );
 });
 
 describe('dry air', () => {

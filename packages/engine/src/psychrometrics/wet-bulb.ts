@@ -12,6 +12,7 @@ import { bracketedNewton } from '../numerics/bracketed-newton';
 import { humidityRatioFromVapourPressure, relativeHumidityFromHumidityRatio } from './humidity-ratio';
 import { assertMoistAirRange, RELATIVE_HUMIDITY_LIMITS } from './moist-air-limits';
 import {
+  bulbEquation,
   FREEZING_K,
   humidityRatioByPsychrometricEquation,
   ICE_BULB,
@@ -63,7 +64,7 @@ export function humidityRatioFromWetBulb(x: { dryBulbK: number; wetBulbK: number
   }
   // eq. 5 ends at −100 °C, far below the wet bulb of any air in range (dry air at −60 °C: −60.02 °C)
   if (wetBulbK >= SATURATION_LIMITS.min) {
-    const humidityRatio = humidityRatioByPsychrometricEquation(wetBulbK >= FREEZING_K ? WATER_BULB : ICE_BULB, x);
+    const humidityRatio = humidityRatioByPsychrometricEquation(bulbEquation(wetBulbK), x);
     if (humidityRatio >= 0) return humidityRatio;
     if (humidityRatio > -DRY_ROUNDING) return 0;
   }
@@ -126,24 +127,25 @@ function wetBulbKOfDryAir(dryAir: HumidAir, refusedK: number): number {
 /** The wet bulb ≥ 0 °C on eq. 33, if there is one. Split at the triple point, where saturation has a kink that would slow Newton. */
 function liquidWetBulbK(air: HumidAir, atDryBulb: SaturationPressure): number | undefined {
   if (air.dryBulbK > TRIPLE_POINT_K && wetBulbImbalance(WATER_BULB, air, TRIPLE_POINT_K, AT_TRIPLE_POINT)[0] <= 0) {
-    return solve(WATER_BULB, air, TRIPLE_POINT_K, air.dryBulbK, atDryBulb);
+    const start = wetBulbGuessK(WATER_BULB, air, air.dryBulbK, atDryBulb);
+    return solve(WATER_BULB, air, { lower: TRIPLE_POINT_K, upper: air.dryBulbK, start });
   }
   if (air.dryBulbK < FREEZING_K || wetBulbImbalance(WATER_BULB, air, FREEZING_K, AT_FREEZING)[0] > 0) return undefined;
-  return solve(WATER_BULB, air, FREEZING_K, Math.min(air.dryBulbK, TRIPLE_POINT_K), AT_FREEZING);
+  // from below: a step that began at the triple point would have the slope over water, and end on it unaware
+  const upper = Math.min(air.dryBulbK, TRIPLE_POINT_K);
+  return solve(WATER_BULB, air, { lower: FREEZING_K, upper, start: FREEZING_K });
 }
 
 /** The iced bulb ≤ 0 °C on eq. 35, for air that has one. */
 function icedBulbK(air: HumidAir, atDryBulb: SaturationPressure): number {
-  return air.dryBulbK < FREEZING_K
-    ? solve(ICE_BULB, air, SATURATION_LIMITS.min, air.dryBulbK, atDryBulb)
-    : solve(ICE_BULB, air, SATURATION_LIMITS.min, FREEZING_K, AT_FREEZING);
+  const [upper, atUpper] = air.dryBulbK < FREEZING_K ? [air.dryBulbK, atDryBulb] : [FREEZING_K, AT_FREEZING];
+  const start = wetBulbGuessK(ICE_BULB, air, upper, atUpper);
+  return solve(ICE_BULB, air, { lower: SATURATION_LIMITS.min, upper, start });
 }
 
-function solve(bulb: BulbEquation, air: HumidAir, lower: number, upper: number, atUpper: SaturationPressure): number {
+function solve(bulb: BulbEquation, air: HumidAir, within: { lower: number; upper: number; start: number }): number {
   return bracketedNewton((wetBulbK) => wetBulbImbalance(bulb, air, wetBulbK), {
-    lower,
-    upper,
-    start: wetBulbGuessK(bulb, air, upper, atUpper),
+    ...within,
     tolerance: TOLERANCE_K,
     curvature: WET_BULB_CURVATURE_PER_K,
     quantity: 'wetBulbK',

@@ -9,6 +9,9 @@ import { NOW } from '../loose-checks/time-and-ids';
 import { UnitPreference } from '../quantities/unit-preference';
 import { CheckAChargePage } from './check-a-charge-page';
 
+// A whole page is drawn anew at each step, which a busy machine takes seconds for.
+vi.setConfig({ testTimeout: 30_000, hookTimeout: 30_000 });
+
 /** A phone's store that keeps everything in memory. */
 const memoryStore = (): LooseCheckStore => {
   const states = new Map<string, CheckState>();

@@ -1,9 +1,11 @@
 import {
+  afterNextRender,
   ChangeDetectionStrategy,
   Component,
   computed,
   ElementRef,
   inject,
+  Injector,
   linkedSignal,
   signal,
   untracked,
@@ -18,7 +20,7 @@ import { NetworkNote } from '../offline/network-note';
 import { UnitPreference } from '../quantities/unit-preference';
 import { evaluateDraft } from './evaluate-draft';
 import { exampleCheck } from './example-check';
-import { typedKey } from './field-key';
+import { readingKey, typedKey } from './field-key';
 import { FindingAnnouncer } from './finding-announcer';
 import { PageClock } from './page-clock';
 import { Preflight } from './preflight';
@@ -32,7 +34,7 @@ import { ResultSheet } from './result-sheet';
 import { summarise } from './result-summary';
 import { settledDraft } from './settled-draft';
 import { SetupForm, type FieldTyped } from './setup-form';
-import { SetupPlate } from './setup-plate';
+import { plateTitle, SetupPlate } from './setup-plate';
 import { VisitClock } from './visit-clock';
 
 const MS_PER_MINUTE = 60_000;
@@ -93,6 +95,7 @@ export class CheckAChargePage {
   private readonly clock = inject(PageClock);
   private readonly now = inject(NOW);
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
+  private readonly injector = inject(Injector);
 
   protected readonly draft = this.checks.current;
   protected readonly isSetUp = computed(() => {
@@ -162,7 +165,13 @@ export class CheckAChargePage {
   protected readonly summary = computed(() => summarise(this.evaluation(), this.hasReadings() ? 1 : 0, this.system()));
   protected readonly sheetSummary = computed(() =>
     this.setupOpen()
-      ? { headline: this.setupMissing() || this.words.setup.intro, notYet: [], step: '', isStop: false, leading: null }
+      ? {
+          headline: this.setupMissing() || plateTitle(this.draft()),
+          notYet: [],
+          step: '',
+          isStop: false,
+          leading: null,
+        }
       : this.summary(),
   );
   protected readonly next = computed<FieldView | undefined>(() =>
@@ -195,22 +204,22 @@ export class CheckAChargePage {
     this.checks.fillWithExample(exampleCheck(this.system(), this.now().getTime()));
     this.setupWanted.set(false);
     this.clock.tick();
-    this.scrollUp();
+    this.startAtTop();
   }
 
   protected async clearExample(): Promise<void> {
     await this.checks.remove(this.draft().id);
-    this.scrollUp();
+    this.startAtTop();
   }
 
   protected startNew(): void {
     this.checks.startNew();
-    this.scrollUp();
+    this.startAtTop();
   }
 
   protected openSetup(): void {
     this.setupWanted.set(true);
-    this.scrollUp();
+    this.startAtTop();
   }
 
   protected closeSetup(): void {
@@ -219,7 +228,7 @@ export class CheckAChargePage {
       return;
     }
     this.setupWanted.set(false);
-    this.scrollUp();
+    this.startAtTop();
   }
 
   protected startClock(minutesAgo: number): void {
@@ -237,6 +246,8 @@ export class CheckAChargePage {
 
   protected switchHumidity(): void {
     this.humidityChosen.set(!this.byHumidity());
+    const id = this.byHumidity() ? 'returnRelativeHumidity' : 'returnWetBulb';
+    this.onceShown(() => this.focusInput(inputId(readingKey(id))));
   }
 
   protected isHumidity({ key }: FieldView): boolean {
@@ -289,7 +300,13 @@ export class CheckAChargePage {
     this.host.nativeElement.querySelector<HTMLInputElement>(`input[name="${name}"]`)?.focus();
   }
 
-  private scrollUp(): void {
+  /** Another view of the page: from its top, and the keyboard's place with it, since the button pressed is gone. */
+  private startAtTop(): void {
     this.host.nativeElement.ownerDocument.defaultView?.scrollTo({ top: 0 });
+    this.onceShown(() => this.host.nativeElement.querySelector('h1')?.focus({ preventScroll: true }));
+  }
+
+  private onceShown(act: () => void): void {
+    afterNextRender(act, { injector: this.injector });
   }
 }

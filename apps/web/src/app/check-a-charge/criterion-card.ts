@@ -6,6 +6,7 @@ import {
   criterionName,
   criterionParts,
   findingWord,
+  formatFigure,
   type UnitSystem,
 } from '@chargewright/wording';
 import { MathLines } from './math-lines';
@@ -32,7 +33,11 @@ export class CriterionCard {
   protected readonly finding = computed(() => findingWord(this.criterion().finding, this.criterion().criterion));
   protected readonly outside = computed(() => ['above', 'below'].includes(this.criterion().finding));
   protected readonly detail = computed(() => criterionDetail(this.criterion(), this.system()));
-  protected readonly parts = computed(() => criterionParts(this.criterion(), this.system()));
+  protected readonly figure = computed(() => {
+    const { actual } = this.criterion();
+    return actual && formatFigure(actual.kind, actual.value, this.system());
+  });
+  protected readonly plusMinus = computed(() => criterionParts(this.criterion(), this.system()).plusMinus);
   protected readonly hasMath = computed(() => this.criterion().actual !== null || this.criterion().target !== null);
   protected readonly mathId = computed(() => `math-${this.criterion().criterion}`);
 

@@ -2,7 +2,7 @@
 import type { Fault, ReadingId } from '@chargewright/engine';
 import { checkPageWords, faultText, readingWords, setupWords, type UnitSystem } from '@chargewright/wording';
 import type { CheckDraft, FieldKey, TypedField, TypedValue } from '../loose-checks/check-draft';
-import { canBeNegative, unitsOf } from '../quantities/field-units';
+import { canBeNegative, systemOfUnit, unitsOf } from '../quantities/field-units';
 import type { NumberProblem } from '../quantities/parse-number';
 import type { Evaluation } from './evaluate-draft';
 import { pathOf, valueIn } from './field-key';
@@ -64,7 +64,7 @@ export function fieldView(key: FieldKey, page: PageState): FieldView {
     value,
     units: unitsOf(key, system),
     signed: canBeNegative(key),
-    complaints: complaintsOf(key, evaluation, system),
+    complaints: complaintsOf(key, evaluation, value ? systemOfUnit(key, value.unit, system) : system),
   };
   const name = key.slice(key.indexOf(':') + 1);
   if (!key.startsWith('reading:')) {

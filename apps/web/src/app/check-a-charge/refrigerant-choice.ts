@@ -1,6 +1,12 @@
 import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
-import { COMMON_REFRIGERANT_IDS, REFRIGERANT_IDS, refrigerantFacts, type RefrigerantId } from '@chargewright/engine';
-import { checkPageWords, setupWords } from '@chargewright/wording';
+import {
+  COMMON_REFRIGERANT_IDS,
+  isRefrigerantId,
+  REFRIGERANT_IDS,
+  refrigerantFacts,
+  type RefrigerantId,
+} from '@chargewright/engine';
+import { checkPageWords, safetyWords, setupWords } from '@chargewright/wording';
 import { ChoiceGroup, type Choice } from './choice-group';
 
 const words = checkPageWords.setup;
@@ -13,6 +19,9 @@ const choiceOf = (id: RefrigerantId): Choice<RefrigerantId> => ({
 
 /** Digits and letters decide: "410", "r410a" and "R-410A" find the same. */
 const plain = (text: string): string => text.toLowerCase().replace(/[^a-z0-9]/g, '');
+
+/** Classes 2L, 2 and 3 of ASHRAE 34 burn. */
+const FLAMMABLE = /[23]/;
 
 const COMMON: ReadonlySet<string> = new Set(COMMON_REFRIGERANT_IDS);
 const byNumber = new Intl.Collator('en', { numeric: true });
@@ -32,6 +41,9 @@ const OTHERS = REFRIGERANT_IDS.filter((id) => !COMMON.has(id)).toSorted(byNumber
       [chosen]="chosen()"
       (chose)="chose.emit($event)"
     />
+    @if (burns()) {
+      <p class="safety">{{ safety }}</p>
+    }
     <details [open]="chosenIsOther()">
       <summary>{{ words.otherRefrigerants }}</summary>
       <label class="search">
@@ -76,6 +88,11 @@ export class RefrigerantChoice {
   protected readonly label = setupWords.refrigerant.label;
   protected readonly hint = setupWords.refrigerant.hint;
   protected readonly common: readonly Choice[] = COMMON_REFRIGERANT_IDS.map(choiceOf);
+  protected readonly safety = safetyWords.flammable;
+  protected readonly burns = computed(() => {
+    const chosen = this.chosen();
+    return chosen !== undefined && isRefrigerantId(chosen) && FLAMMABLE.test(refrigerantFacts(chosen).safetyClass);
+  });
   protected readonly found = computed<readonly Choice[]>(() => {
     const sought = plain(this.sought());
     return OTHERS.filter((id) => plain(id).includes(sought)).map(choiceOf);

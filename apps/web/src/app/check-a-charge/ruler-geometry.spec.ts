@@ -1,4 +1,4 @@
-import { placeLabels, rulerGeometry, type RulerValues } from './ruler-geometry';
+import { isClear, placePair, rulerGeometry, type RulerValues } from './ruler-geometry';
 
 const values: RulerValues = {
   scale: { low: 0, high: 40 },
@@ -55,31 +55,35 @@ describe('rulerGeometry', () => {
   });
 });
 
-describe('placeLabels', () => {
+describe('placePair', () => {
   const label = (x: number, text = '18.3 °F') => ({ x, text, fontPx: 10 });
+  const at = (first: number, second: number, width = 400) =>
+    placePair(label(first), label(second), width).map(({ x }) => x);
 
   it('leaves labels with room where they belong', () => {
-    expect(placeLabels([label(100), label(200)], 400).map(({ x }) => x)).toEqual([100, 200]);
+    expect(at(100, 200)).toEqual([100, 200]);
   });
 
-  it('moves a later label aside, to the side it stands on', () => {
-    const [first, second] = placeLabels([label(100), label(110)], 400);
-    expect(first?.x).toBe(100);
-    expect(second?.x).toBe(150);
-    expect(placeLabels([label(100), label(90)], 400)[1]?.x).toBe(50);
+  it('moves the second aside, to the side it stands on', () => {
+    expect(at(100, 110)).toEqual([100, 150]);
+    expect(at(100, 90)).toEqual([100, 50]);
   });
 
-  it('keeps a label inside the drawing', () => {
-    expect(placeLabels([label(398)], 400)[0]?.x).toBe(379);
-    expect(placeLabels([label(0)], 400)[0]?.x).toBe(21);
+  it('moves the first only when the second is at the end of the drawing', () => {
+    expect(at(60, 50)).toEqual([71, 21]);
+    expect(at(350, 360)).toEqual([329, 379]);
   });
 
-  it('leaves out a label that would have to leave its mark', () => {
-    expect(placeLabels([label(100), { ...label(110), fixed: true }], 400)).toHaveLength(1);
-    expect(placeLabels([label(100), { ...label(200), fixed: true }], 400)).toHaveLength(2);
+  it('keeps labels inside the drawing', () => {
+    expect(at(398, 200)).toEqual([379, 200]);
+    expect(at(0, 200)).toEqual([21, 200]);
   });
+});
 
-  it('leaves out a label that finds no room', () => {
-    expect(placeLabels([label(30), label(30)], 60)).toHaveLength(1);
+describe('isClear', () => {
+  it('says whether a label touches its neighbours', () => {
+    const label = { x: 100, text: '18.3 °F', fontPx: 10 };
+    expect(isClear(label, [{ ...label, x: 150 }])).toBe(true);
+    expect(isClear(label, [{ ...label, x: 140 }])).toBe(false);
   });
 });

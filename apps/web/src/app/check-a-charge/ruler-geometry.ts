@@ -77,8 +77,6 @@ export interface RulerLabel {
   readonly x: number;
   readonly text: string;
   readonly fontPx: number;
-  /** Belongs right under its mark: left out rather than moved aside. */
-  readonly fixed?: boolean;
 }
 
 /** Mean advance of Noto Sans for figures and lower case, as a share of the font size; measured by eye, generous. */
@@ -87,30 +85,30 @@ const GAP_PX = 8;
 
 const widthOf = ({ text, fontPx }: RulerLabel): number => text.length * fontPx * ADVANCE;
 
+const distanceOf = (a: RulerLabel, b: RulerLabel): number => (widthOf(a) + widthOf(b)) / 2 + GAP_PX;
+
 const inside = (label: RulerLabel, widthPx: number): RulerLabel => {
   const half = widthOf(label) / 2;
   return { ...label, x: Math.min(Math.max(label.x, half), Math.max(widthPx - half, half)) };
 };
 
-const apart = (a: RulerLabel, b: RulerLabel): boolean => Math.abs(a.x - b.x) >= (widthOf(a) + widthOf(b)) / 2 + GAP_PX;
-
 /**
- * Centres of labels in one row: the first keeps its place, each further one is moved aside until it is clear of those before it,
- * to the side it stands on where there is room; one that finds no room in the row, or may not be moved, is left out.
+ * Two centred labels of one row, moved apart where they would overlap: first the second one gives way, and only when it reaches the end
+ * of the drawing the first. They never change sides, so that each stays by what it names.
  */
-export function placeLabels(labels: readonly RulerLabel[], widthPx: number): readonly RulerLabel[] {
-  const placed: RulerLabel[] = [];
-  for (const wanted of labels) {
-    const label = inside(wanted, widthPx);
-    const half = widthOf(label) / 2;
-    const besides = (wanted.fixed ? [] : placed).flatMap((other) => {
-      const distance = (widthOf(other) + widthOf(label)) / 2 + GAP_PX;
-      return [other.x - distance, other.x + distance];
-    });
-    const free = [label.x, ...besides.toSorted((a, b) => Math.abs(a - label.x) - Math.abs(b - label.x))]
-      .map((x) => ({ ...label, x }))
-      .find((at) => at.x >= half && at.x <= widthPx - half && placed.every((other) => apart(at, other)));
-    if (free) placed.push(free);
-  }
-  return placed;
+export function placePair(
+  first: RulerLabel,
+  second: RulerLabel,
+  widthPx: number,
+): readonly [first: RulerLabel, second: RulerLabel] {
+  const side = second.x < first.x ? -1 : 1;
+  const distance = distanceOf(first, second);
+  const beyond = (x: number, limit: number, way: number): number => (way < 0 ? Math.min(x, limit) : Math.max(x, limit));
+  const start = inside(first, widthPx);
+  const moved = inside({ ...second, x: beyond(second.x, start.x + side * distance, side) }, widthPx);
+  return [inside({ ...start, x: beyond(start.x, moved.x - side * distance, -side) }, widthPx), moved];
 }
+
+/** Whether a label stands clear of others in its row, where it is. */
+export const isClear = (label: RulerLabel, others: readonly RulerLabel[]): boolean =>
+  others.every((other) => Math.abs(other.x - label.x) >= distanceOf(other, label));

@@ -62,10 +62,10 @@ export class SetupForm {
   protected readonly system = computed(() =>
     SYSTEM_FIELDS.map(({ field, choices }) => ({
       field,
-      choices: choices as readonly Choice[],
+      choices: choices,
       label: setupWords[field].label,
-      chosen: this.setup()[field] as string | undefined,
-      assumed: ASSUMED[field] as string,
+      chosen: this.setup()[field],
+      assumed: ASSUMED[field],
       hint: this.hintOf(field),
     })),
   );

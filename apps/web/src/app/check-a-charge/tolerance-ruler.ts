@@ -10,8 +10,8 @@ import {
   signal,
 } from '@angular/core';
 import type { CriterionResult, Finding } from '@chargewright/engine';
-import { checkPageWords, criterionParts, rulerText, type UnitSystem } from '@chargewright/wording';
-import { placeLabels, rulerGeometry, type RulerLabel } from './ruler-geometry';
+import { checkPageWords, criterionParts, formatFigure, rulerText, type UnitSystem } from '@chargewright/wording';
+import { isClear, placePair, rulerGeometry, type RulerLabel } from './ruler-geometry';
 import { rulerValues } from './ruler-scale';
 
 export type RulerMark = 'diamond' | 'circle' | 'hollow' | 'dash';
@@ -52,38 +52,41 @@ export class ToleranceRuler {
     return values && rulerGeometry(values, this.width());
   });
   private readonly parts = computed(() => criterionParts(this.result(), this.system()));
+  private readonly figure = computed(() => {
+    const { actual } = this.result();
+    return actual === null ? '' : formatFigure(actual.kind, actual.value, this.system());
+  });
   private readonly plusMinus = computed(() => {
     const { plusMinus } = this.parts();
     return plusMinus === null ? '' : this.words.plusMinus(plusMinus);
   });
-  /** Below the axis: the limits first, then the ± under its mark if there is room. */
-  protected readonly below = computed<readonly RulerLabel[]>(() => {
-    const { band, mark } = this.geometry() ?? {};
+  private readonly limits = computed<readonly RulerLabel[]>(() => {
     const { lowBare, highBare, floored } = this.parts();
-    const limits = (band?.limits ?? []).flatMap(({ x, side }) => {
+    const labels = (this.geometry()?.band?.limits ?? []).flatMap(({ x, side }) => {
       const bare = side === 'low' ? lowBare : highBare;
       if (bare === null) return [];
       return [{ x, text: side === 'low' && floored ? this.words.floor(bare) : bare, fontPx: LABEL_PX }];
     });
-    const plusMinus = this.plusMinus();
-    const under = mark && plusMinus ? [{ x: mark.x, text: plusMinus, fontPx: LABEL_PX, fixed: true }] : [];
-    return placeLabels([...limits, ...under], this.width());
+    const [low, high] = labels;
+    return low && high ? placePair(low, high, this.width()) : labels;
   });
-  /** Above the axis: the value first, with its ± where that found no room below; the target gives way. */
+  /** The ± stands under its mark if there is room, else beside the value. */
+  private readonly plusMinusBelow = computed<readonly RulerLabel[]>(() => {
+    const mark = this.geometry()?.mark;
+    if (!mark || !this.plusMinus()) return [];
+    const label = { x: mark.x, text: this.plusMinus(), fontPx: LABEL_PX };
+    return isClear(label, this.limits()) ? [label] : [];
+  });
+  protected readonly below = computed(() => [...this.limits(), ...this.plusMinusBelow()]);
   protected readonly above = computed<readonly RulerLabel[]>(() => {
-    const { mark, target } = this.geometry() ?? {};
-    const { actual, actualBare, targetBare } = this.parts();
-    const isBelow = this.below().some(({ text }) => text === this.plusMinus());
-    const value = isBelow ? actual : `${actualBare} ${this.plusMinus()}`;
-    return placeLabels(
-      [
-        ...(mark && value ? [{ x: mark.x, text: value, fontPx: VALUE_PX }] : []),
-        ...(typeof target === 'number' && targetBare
-          ? [{ x: target, text: this.words.target(targetBare), fontPx: LABEL_PX }]
-          : []),
-      ],
-      this.width(),
-    );
+    const { mark = null, target = null } = this.geometry() ?? {};
+    const { actual, targetBare } = this.parts();
+    const text = this.plusMinusBelow().length > 0 ? actual : `${this.figure()} ${this.plusMinus()}`;
+    const value = mark && text ? { x: mark.x, text, fontPx: VALUE_PX } : null;
+    const aim =
+      target !== null && targetBare ? { x: target, text: this.words.target(targetBare), fontPx: LABEL_PX } : null;
+    if (value && aim) return placePair(value, aim, this.width());
+    return [value, aim].filter((label) => label !== null);
   });
 
   constructor() {

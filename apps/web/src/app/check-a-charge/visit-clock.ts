@@ -1,4 +1,15 @@
-import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
+import {
+  afterNextRender,
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  ElementRef,
+  inject,
+  Injector,
+  input,
+  output,
+  signal,
+} from '@angular/core';
 import { checkPageWords } from '@chargewright/wording';
 import { Glyph } from '../layout/glyph';
 import { parseNumber } from '../quantities/parse-number';
@@ -16,6 +27,9 @@ const SOON_AFTER_MIN = 12;
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class VisitClock {
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
+  private readonly injector = inject(Injector);
+
   /** Undefined before it was started. */
   readonly minutes = input<number>();
 
@@ -55,14 +69,23 @@ export class VisitClock {
 
   protected ask(): void {
     this.asking.set(true);
+    this.focusOnceShown();
   }
 
   protected keepRunning(): void {
     this.asking.set(false);
+    this.focusOnceShown();
   }
 
   protected adjust(): void {
     this.asking.set(false);
     this.adjusted.emit();
+    this.focusOnceShown();
+  }
+
+  /** The button pressed gives its place to another. */
+  private focusOnceShown(): void {
+    const button = () => this.host.nativeElement.querySelector<HTMLElement>('button');
+    afterNextRender(() => button()?.focus(), { injector: this.injector });
   }
 }

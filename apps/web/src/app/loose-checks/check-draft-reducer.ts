@@ -153,6 +153,8 @@ export function applyCommand(state: CheckState | undefined, command: CheckComman
   return { ...restored(entered(before, command)), updatedAt: command.at };
 }
 
+const textAndUnit = ({ text, unit }: DraftEdit): TypedValue => ({ text, unit });
+
 /** What the page shows of a check. */
 export const draftOf = (state: CheckState): CheckDraft => ({
   id: state.id,
@@ -162,9 +164,7 @@ export const draftOf = (state: CheckState): CheckDraft => ({
   visit: state.visit,
   typed: state.typed,
   readings: standingReadings(state),
-  edits: Object.fromEntries(
-    Object.entries(state.edits).map(([key, { text, unit }]) => [key, { text, unit }]),
-  ) as CheckDraft['edits'],
+  edits: Object.fromEntries(Object.entries(state.edits).map(([key, edit]) => [key, textAndUnit(edit)])),
 });
 
 /** One line of the list of checks. */

@@ -141,7 +141,7 @@ async function purge(database: Database, now: Date): Promise<void> {
 
 /** Looks through every row, a few at a time, so that a damaged one is found before somebody needs it. */
 async function inspect(database: Database): Promise<void> {
-  const ids = (await database.rows.toCollection().primaryKeys()) as string[];
+  const ids = await database.rows.toCollection().primaryKeys();
   for (let start = 0; start < ids.length; start += ROWS_AT_ONCE) {
     const some = ids.slice(start, start + ROWS_AT_ONCE);
     await inTransaction(database, async () => {

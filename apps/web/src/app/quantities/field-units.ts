@@ -67,6 +67,13 @@ export const unitsOf = (key: FieldKey, system: UnitSystem): Units => UNITS[syste
 export const isUnitOf = (key: FieldKey, unit: string): boolean =>
   Object.values(UNITS).some((units) => units[dimensionOf(key)].includes(unit));
 
+/** The unit system that a typed unit belongs to, so that an answer to it speaks as the person did; `fallback` where it tells none. */
+export function systemOfUnit(key: FieldKey, unit: string, fallback: UnitSystem): UnitSystem {
+  if (unitsOf(key, fallback).includes(unit)) return fallback;
+  const systems = Object.keys(UNITS) as UnitSystem[];
+  return systems.find((system) => unitsOf(key, system).includes(unit)) ?? fallback;
+}
+
 /** Whether a value below zero can be meant, so that the field needs a ± key. A suction line can be in a vacuum. */
 export const canBeNegative = (key: FieldKey): boolean =>
   key === 'reading:suctionPressure' || CAN_BE_NEGATIVE.has(dimensionOf(key));

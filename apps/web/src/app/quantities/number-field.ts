@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, ElementRef, input, output, viewChild } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, output, viewChild, type ElementRef } from '@angular/core';
 import { checkPageWords, unitLabel } from '@chargewright/wording';
 import type { TypedValue } from '../loose-checks/check-draft';
 import { withSignTurned } from './parse-number';

@@ -3,7 +3,7 @@ import { bubblePressurePa, dewPressurePa } from '../../refrigerants/saturation';
 import { differenceFromK, PA_PER_PSI, temperatureToK } from '../../units';
 import type { CriterionId, Finding, ReasonCode } from '../codes';
 import type { EvaluationRequest, ReadingInput } from '../request';
-import type { Changes } from '../testing/healthy-systems';
+import type { Changes, ReadingChanges } from '../testing/healthy-systems';
 import { criterionOf, evaluate, orificeRequest, valveRequest, withPlusMinus } from '../testing/healthy-systems';
 
 const at = (refrigerant: 'R-22' | 'R-410A', degF: number) => ({
@@ -108,7 +108,7 @@ describe('superheat of a fixed orifice', () => {
     expect(foundOf(request(4.99), 'superheat').byRule).toBe('fails');
   });
 
-  it.each<[string, Changes['readings'], [Finding, ReasonCode | null]]>([
+  it.each<[string, ReadingChanges, [Finding, ReasonCode | null]]>([
     ['no wet bulb', { returnWetBulb: null }, ['not-judged', 'readings-missing']],
     ['no outdoor air', { outdoorDryBulb: null }, ['not-judged', 'readings-missing']],
     ['no suction pressure', { suctionPressure: null }, ['not-judged', 'readings-missing']],

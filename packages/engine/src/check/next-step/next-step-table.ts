@@ -53,19 +53,20 @@ const liquidReturnCauses: readonly (Pick<NextStepRow, 'step' | 'when'> & { reado
   { when: {}, step: 'check-metering', recover: true },
 ];
 
+/** On a valve liquid return is only ever a superheat of about zero; the floor is that of an orifice. */
+const underTheFloor = liquidReturnCauses.filter(({ when }) => !when.metering?.includes('valve'));
+
 const stops: readonly NextStepRow[] = [
-  ...liquidReturnCauses.flatMap(({ when, step, recover }): readonly NextStepRow[] => [
-    {
-      when: { stop: ['liquid-return'], shutDown: ['yes'], ...when },
-      step,
-      notYet: ['shut-down', recover ? 'add-nothing' : 'move-no-refrigerant'],
-    },
-    {
-      when: { stop: ['liquid-return'], ...when },
-      step,
-      notYet: recover ? ADD_NOTHING : ['add-nothing', 'recover-nothing'],
-    },
-  ]),
+  ...liquidReturnCauses.map(({ when, step, recover }): NextStepRow => ({
+    when: { stop: ['liquid-return'], shutDown: ['yes'], ...when },
+    step,
+    notYet: ['shut-down', recover ? 'add-nothing' : 'move-no-refrigerant'],
+  })),
+  ...underTheFloor.map(({ when, step, recover }): NextStepRow => ({
+    when: { stop: ['liquid-return'], ...when },
+    step,
+    notYet: recover ? ADD_NOTHING : ['add-nothing', 'recover-nothing'],
+  })),
   {
     when: { stop: ['freezing'], airflow: ['split-above', 'measured-low'] },
     step: 'thaw-then-airflow',

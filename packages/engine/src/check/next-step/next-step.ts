@@ -15,21 +15,16 @@ export function findNextStep(evidence: Evidence): NextStep {
 type PlainStep = { [Code in NextStepCode]: [NextStepFigures[Code]] extends [never] ? Code : never }[NextStepCode];
 
 function withFigures(code: NextStepCode, { input, criteria, unfit }: Evidence): NextStepMessage {
-  switch (code) {
-    case 'run-longer':
-      return { code, figures: { minutes: { kind: 'minutes', value: minutesLeft(input) } } };
-    case 'take-readings':
-    case 'take-readings-again':
-      return { code, figures: { readings: { kind: 'readings', value: readingsToTake(criteria) } } };
-    case 'mend-before-test':
-      return {
-        code,
-        figures: { items: unfit?.code === 'not-ready' ? unfit.figures.items : { kind: 'preflight', value: [] } },
-      };
-    default:
-      // a union of messages without figures; the compiler cannot spread the code over its members
-      return { code: code satisfies PlainStep, figures: {} } as NextStepMessage;
+  if (code === 'run-longer') return { code, figures: { minutes: { kind: 'minutes', value: minutesLeft(input) } } };
+  if (code === 'take-readings' || code === 'take-readings-again') {
+    return { code, figures: { readings: { kind: 'readings', value: readingsToTake(criteria) } } };
   }
+  if (code === 'mend-before-test') {
+    const items = unfit?.code === 'not-ready' ? unfit.figures.items : ({ kind: 'preflight', value: [] } as const);
+    return { code, figures: { items } };
+  }
+  // a union of messages without figures; the compiler cannot spread the code over its members
+  return { code: code satisfies PlainStep, figures: {} } as NextStepMessage;
 }
 
 const minutesLeft = ({ visit, procedure }: CheckInput): number =>

@@ -10,8 +10,9 @@ import type { CheckResult } from '../result';
 export interface Changes {
   readonly setup?: { readonly [Key in keyof SetupInput]?: SetupInput[Key] | null };
   readonly visit?: { readonly [Key in keyof VisitInput]?: VisitInput[Key] | null };
-  readonly readings?: Readonly<Partial<Record<ReadingId, number | ReadingInput | null>>>;
+  readonly readings?: ReadingChanges;
 }
+export type ReadingChanges = Readonly<Partial<Record<ReadingId, number | ReadingInput | null>>>;
 
 const UNITS: Readonly<Record<ReadingId, ReadingUnit>> = {
   returnDryBulb: 'degF',
@@ -133,10 +134,13 @@ function changed(request: EvaluationRequest, { setup = {}, visit = {}, readings 
   };
 }
 
-const merged = <T extends object>(base: T, changes: object): T =>
-  Object.fromEntries(Object.entries({ ...base, ...changes }).filter(([, value]) => value !== null)) as T;
+function merged<T extends object>(base: T, changes: object): T {
+  const fields: Record<string, unknown> = { ...base, ...changes };
+  for (const [key, value] of Object.entries(fields)) if (value === null) delete fields[key];
+  return fields as T;
+}
 
-function typed(readings: NonNullable<Changes['readings']>): ReadingsInput {
+function typed(readings: ReadingChanges): ReadingsInput {
   const entries = Object.entries(readings).map(([id, reading]) => [
     id,
     typeof reading === 'number' ? { value: reading, unit: UNITS[id as ReadingId] } : reading,

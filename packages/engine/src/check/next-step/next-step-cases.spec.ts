@@ -1,0 +1,704 @@
+/** What a technician is told, case by case: the review of the next-step table. Every row is reached, each by a system with a name. */
+import { describe, expect, it } from 'vitest';
+import { dewPressurePa } from '../../refrigerants/saturation';
+import { PA_PER_PSI, temperatureToK } from '../../units';
+import { airflowEvidence, judgeAirflow, judgeSplit, splitTarget } from '../criteria/air';
+import { superheatTarget } from '../criteria/charge';
+import type { NextStepCode, NotYetCode } from '../codes';
+import { deriveQuantities } from '../derived-quantities';
+import { unfitReason } from '../fit-for-test';
+import type { EvaluationRequest, ReadingInput } from '../request';
+import { impossibleReadings } from '../saturation-plausibility';
+import type { ReadingChanges } from '../testing/healthy-systems';
+import { evaluate, inputOf, orificeRequest, valveRequest, withPlusMinus } from '../testing/healthy-systems';
+import type { Facts } from './facts';
+import { gatherFacts } from './facts';
+import type { NextStepRow } from './next-step-table';
+import { findRow, NEXT_STEP_TABLE } from './next-step-table';
+
+type Case = readonly [name: string, request: EvaluationRequest, step: NextStepCode, ...notYet: NotYetCode[]];
+
+const orifice = orificeRequest;
+const valve = valveRequest;
+
+/** Superheat 15, target 15 and subcooling 10 °F on the healthy orifice; 12, 4…25 and 9.6 on the healthy valve. */
+const superheat = (deltaF: number): ReadingChanges => ({ suctionLineTemperature: 40 + deltaF });
+const valveSuperheat = (deltaF: number): ReadingChanges => ({ suctionLineTemperature: 39.84 + deltaF });
+const subcooling = (deltaF: number): ReadingChanges => ({ liquidLineTemperature: 105 - deltaF });
+const valveSubcooling = (deltaF: number): ReadingChanges => ({ liquidLineTemperature: 104.6 - deltaF });
+const SPLIT_ABOVE = { supplyDryBulb: 52 } as const;
+const HOT = { dischargeLineTemperature: 240 } as const;
+const icy = (refrigerant: 'R-22' | 'R-410A', superheatF = 15): ReadingChanges => ({
+  suctionPressure: {
+    value: dewPressurePa({ refrigerant, temperatureK: temperatureToK(26, 'degF') }) / PA_PER_PSI,
+    unit: 'psia',
+  },
+  suctionLineTemperature: 26 + superheatF,
+});
+const lowAirflow = { setup: { nominalCapacity: { value: 3, unit: 'ton' } }, readings: { airflow: 800 } } as const;
+const target = (deltaF: number) => ({ targetSuperheat: { value: deltaF, unit: 'deltaF' } }) as const;
+const old = (id: 'returnWetBulb' | 'liquidPressure', request: EvaluationRequest): ReadingInput => ({
+  ...request.readings[id]!,
+  ageSeconds: 900,
+});
+const LOW_ORIFICE = { ...superheat(25), ...subcooling(3) };
+const LOW_VALVE = valveSubcooling(3.6);
+const charged = { factoryCharge: { value: 6, unit: 'lb' } } as const;
+const added = (lb: number) => ({ leakSearch: 'none-found', addedThisVisit: { value: lb, unit: 'lb' } }) as const;
+
+const FIT: readonly Case[] = [
+  ['heating', valve({ setup: { mode: 'heating' } }), 'cooling-season-or-weigh-in', 'move-no-refrigerant'],
+  [
+    'heating with a hot discharge line',
+    valve({ setup: { mode: 'heating' }, readings: HOT }),
+    'cooling-season-or-weigh-in',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+  ['mini-split', valve({ setup: { kind: 'mini-split' } }), 'weigh-in', 'move-no-refrigerant'],
+  [
+    'multi-split with a frozen coil',
+    valve({ setup: { kind: 'multi-split' }, readings: icy('R-410A') }),
+    'weigh-in',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+  ['part stage', valve({ setup: { stage: 'part' } }), 'bring-to-full-stage', 'move-no-refrigerant'],
+  [
+    'part stage with a frozen coil',
+    valve({ setup: { stage: 'part' }, readings: icy('R-410A') }),
+    'bring-to-full-stage',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+  [
+    'inverter not in its charge mode',
+    valve({ setup: { chargeMode: false } }),
+    'bring-to-charge-mode',
+    'move-no-refrigerant',
+  ],
+  [
+    'inverter not in its charge mode, hot discharge',
+    valve({ setup: { chargeMode: false }, readings: HOT }),
+    'bring-to-charge-mode',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+  ['panels off', valve({ visit: { preflight: { panelsOn: 'not-ok' } } }), 'mend-before-test', 'move-no-refrigerant'],
+  [
+    'wet condenser and a head too high',
+    valve({ visit: { preflight: { condenserDryAndClean: 'not-ok' } }, readings: { liquidPressure: 565 } }),
+    'mend-before-test',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+  [
+    'packaged, port not stated',
+    valve({ setup: { kind: 'packaged', highSidePort: null } }),
+    'state-the-port',
+    'move-no-refrigerant',
+  ],
+  [
+    'packaged, port not stated, hot discharge',
+    valve({ setup: { kind: 'packaged', highSidePort: null }, readings: HOT }),
+    'state-the-port',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+];
+
+const IMPOSSIBLE: readonly Case[] = [
+  ['hoses swapped', valve({ readings: { suctionPressure: 340, liquidPressure: 118 } }), 'check-hoses', 'add-nothing'],
+  [
+    'hoses swapped, hot discharge',
+    valve({ readings: { suctionPressure: 340, liquidPressure: 118, ...HOT } }),
+    'check-hoses',
+    'shut-down',
+    'add-nothing',
+  ],
+  [
+    'condensing below the outdoor air',
+    orifice({ readings: { liquidPressure: 150, liquidLineTemperature: 75 } }),
+    'check-refrigerant-and-probes',
+    'add-nothing',
+  ],
+  [
+    'superheat far below zero, hot discharge',
+    valve({ readings: { ...valveSuperheat(-6), ...HOT } }),
+    'check-refrigerant-and-probes',
+    'shut-down',
+    'add-nothing',
+  ],
+];
+
+const STOPS: readonly Case[] = [
+  [
+    'under the floor at a target of 6',
+    orifice({ setup: target(6), readings: superheat(4) }),
+    'come-back-at-higher-target',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'under the floor in a dash',
+    orifice({ readings: { ...superheat(4), outdoorDryBulb: 100, returnWetBulb: 60 } }),
+    'come-back-at-higher-target',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'liquid at the compressor at a target of 7',
+    orifice({ setup: target(7), readings: superheat(1) }),
+    'come-back-at-higher-target',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+  [
+    'under the floor, split above',
+    orifice({ readings: { ...superheat(4), ...SPLIT_ABOVE } }),
+    'reread-wet-bulb-then-airflow',
+    'add-nothing',
+  ],
+  [
+    'liquid at the compressor, airflow measured low',
+    orifice({ ...lowAirflow, readings: { ...lowAirflow.readings, ...superheat(1) } }),
+    'reread-wet-bulb-then-airflow',
+    'shut-down',
+    'add-nothing',
+  ],
+  [
+    'under the floor, subcooling high',
+    orifice({ readings: { ...superheat(4), ...subcooling(16) } }),
+    'check-overcharge-or-air',
+    'add-nothing',
+  ],
+  [
+    'liquid at the compressor, subcooling high',
+    orifice({ readings: { ...superheat(1), ...subcooling(16) } }),
+    'check-overcharge-or-air',
+    'shut-down',
+    'add-nothing',
+  ],
+  [
+    'liquid back from a valve, subcooling above',
+    valve({ readings: { ...valveSuperheat(1), ...valveSubcooling(15) } }),
+    'check-overcharge-or-air',
+    'shut-down',
+    'add-nothing',
+  ],
+  [
+    'liquid back from a valve, no target, subcooling high',
+    valve({ setup: { targetSubcooling: null }, readings: { ...valveSuperheat(1), ...valveSubcooling(16) } }),
+    'check-overcharge-or-air',
+    'shut-down',
+    'add-nothing',
+  ],
+  ['under the floor, nothing else wrong', orifice({ readings: superheat(4) }), 'check-metering', 'add-nothing'],
+  [
+    'liquid back from a valve, subcooling within',
+    valve({ readings: valveSuperheat(1) }),
+    'check-metering',
+    'shut-down',
+    'add-nothing',
+  ],
+  [
+    'frozen, split above',
+    orifice({ readings: { ...icy('R-22'), ...SPLIT_ABOVE } }),
+    'thaw-then-airflow',
+    'add-nothing',
+  ],
+  [
+    'frozen, airflow measured low',
+    valve({ ...lowAirflow, readings: { ...lowAirflow.readings, ...icy('R-410A') } }),
+    'thaw-then-airflow',
+    'add-nothing',
+  ],
+  [
+    'frozen, subcooling 3',
+    orifice({ readings: { ...icy('R-22', 25), ...subcooling(3) } }),
+    'thaw-then-leak-search',
+    'add-nothing',
+  ],
+  [
+    'frozen, subcooling 12 and superheat high',
+    orifice({ readings: { ...icy('R-22', 30), ...subcooling(12) } }),
+    'thaw-then-drier-drop',
+    'add-nothing',
+  ],
+  [
+    'frozen, subcooling 6',
+    orifice({ readings: { ...icy('R-22'), ...subcooling(6) } }),
+    'thaw-then-diagnose',
+    'add-nothing',
+  ],
+  [
+    'frozen, subcooling 12 and superheat usual',
+    valve({ readings: { ...icy('R-410A', 10), ...valveSubcooling(12) } }),
+    'thaw-then-diagnose',
+    'add-nothing',
+  ],
+  [
+    'ice seen at 31 °F',
+    valve({ visit: { iceSeen: true }, readings: { suctionPressure: 98, suctionLineTemperature: 43 } }),
+    'thaw-then-diagnose',
+    'add-nothing',
+  ],
+  [
+    'head too high',
+    valve({ readings: { liquidPressure: 565, liquidLineTemperature: 120, outdoorDryBulb: 100 } }),
+    'shut-down-high-pressure',
+    'shut-down',
+    'add-nothing',
+  ],
+  ['hot discharge line', valve({ readings: HOT }), 'shut-down-hot-discharge', 'shut-down'],
+];
+
+const CONDITIONS: readonly Case[] = [
+  ['five minutes of running', orifice({ visit: { runningMinutes: 5 } }), 'run-longer', 'do-not-judge-yet'],
+  [
+    'cold outdoors',
+    valve({ readings: { outdoorDryBulb: 50, liquidPressure: 260, liquidLineTemperature: 78 } }),
+    'wait-for-warmer-weather',
+    'move-no-refrigerant',
+  ],
+  [
+    'cool house',
+    valve({ visit: { lowestReturnDryBulb: { value: 68, unit: 'degF' } } }),
+    'warm-the-house',
+    'move-no-refrigerant',
+  ],
+  [
+    'a dash of the chart',
+    orifice({ readings: { outdoorDryBulb: 100, returnWetBulb: 60 } }),
+    'reach-a-target',
+    'move-no-refrigerant',
+  ],
+  [
+    'beside a dash',
+    orifice({ readings: { outdoorDryBulb: 95, returnWetBulb: 64.2 } }),
+    'reach-a-target',
+    'move-no-refrigerant',
+  ],
+];
+
+const LACKING: readonly Case[] = [
+  ['no wet bulb', orifice({ readings: { returnWetBulb: null } }), 'take-readings'],
+  ['no liquid line', valve({ readings: { liquidLineTemperature: null } }), 'take-readings'],
+  [
+    'an old wet bulb',
+    orifice({ readings: { returnWetBulb: old('returnWetBulb', orifice()) } }),
+    'take-readings-again',
+    'move-no-refrigerant',
+  ],
+  [
+    'an old liquid pressure',
+    valve({ readings: { liquidPressure: old('liquidPressure', valve()) } }),
+    'take-readings-again',
+    'move-no-refrigerant',
+  ],
+  ['no nameplate target', valve({ setup: { targetSubcooling: null } }), 'find-nameplate-target', 'move-no-refrigerant'],
+  [
+    'a target for another port',
+    valve({ setup: { targetSubcoolingPort: 'discharge' } }),
+    'find-nameplate-target',
+    'move-no-refrigerant',
+  ],
+  [
+    'packaged orifice without its maker’s target',
+    orifice({ setup: { kind: 'packaged' } }),
+    'find-nameplate-target',
+    'move-no-refrigerant',
+  ],
+  [
+    'a liquid pressure at a discharge port',
+    valve({ setup: { highSidePort: 'discharge', targetSubcoolingPort: 'discharge' } }),
+    'read-discharge-pressure',
+    'move-no-refrigerant',
+  ],
+  [
+    'a suction port only',
+    valve({ setup: { highSidePort: 'none' }, readings: { liquidPressure: null } }),
+    'find-suction-line-table',
+    'move-no-refrigerant',
+  ],
+  [
+    'a suction pressure below the curve',
+    orifice({ readings: { suctionPressure: { value: 25, unit: 'inHgVac' } } }),
+    'check-refrigerant-and-probes',
+    'move-no-refrigerant',
+  ],
+  [
+    'the running time not recorded',
+    valve({ visit: { runningMinutes: null } }),
+    'record-conditions',
+    'move-no-refrigerant',
+  ],
+];
+
+const AIRFLOW: readonly Case[] = [
+  ['airflow measured low', valve(lowAirflow), 'raise-airflow', 'move-no-refrigerant'],
+  ['split above', valve({ readings: SPLIT_ABOVE }), 'reread-wet-bulb-then-airflow', 'move-no-refrigerant'],
+  [
+    'orifice, superheat below, split above',
+    orifice({ readings: { ...SPLIT_ABOVE, ...superheat(8) } }),
+    'reread-wet-bulb-then-airflow',
+    'move-no-refrigerant',
+  ],
+  [
+    'orifice, superheat above, split above',
+    orifice({ readings: { ...SPLIT_ABOVE, ...superheat(25) } }),
+    'suspect-probes',
+    'move-no-refrigerant',
+  ],
+  [
+    'valve, superheat above its window, split above',
+    valve({ readings: { ...SPLIT_ABOVE, ...valveSuperheat(32) } }),
+    'reread-wet-bulb-then-airflow',
+    'move-no-refrigerant',
+  ],
+];
+
+const QUALITY: readonly Case[] = [
+  [
+    'written saturation far off',
+    valve({ readings: { writtenEvaporatingTemperature: 50 } }),
+    'confirm-refrigerant',
+    'move-no-refrigerant',
+  ],
+  ['a dry wick in the supply', orifice({ readings: { supplyWetBulb: 59.1 } }), 'wet-the-wick', 'move-no-refrigerant'],
+  [
+    'liquid line colder than the air',
+    valve({ readings: { liquidLineTemperature: 82 } }),
+    'place-liquid-probe-again',
+    'move-no-refrigerant',
+  ],
+  [
+    'a house still warm',
+    orifice({ readings: { returnDryBulb: 82, returnWetBulb: 68, supplyDryBulb: 63.5 } }),
+    'read-twice',
+    'move-no-refrigerant',
+  ],
+];
+
+const TOO_CLOSE: readonly Case[] = [
+  [
+    'orifice at its upper limit',
+    orifice({ readings: superheat(20) }),
+    'settle-with-another-reading',
+    'move-no-refrigerant',
+  ],
+  [
+    'valve at its lower limit',
+    valve({ readings: valveSubcooling(7) }),
+    'settle-with-another-reading',
+    'move-no-refrigerant',
+  ],
+  [
+    'instruments that can never settle it',
+    withPlusMinus(valve(), { temperatureF: 5, pressurePsi: 10 }),
+    'settle-with-better-instrument',
+    'move-no-refrigerant',
+  ],
+];
+
+const ORIFICE: readonly Case[] = [
+  [
+    'superheat above, liquid pair unread',
+    orifice({ readings: { ...superheat(25), liquidPressure: null } }),
+    'read-liquid-pair',
+    'add-nothing',
+  ],
+  ['low charge, no leak search yet', orifice({ readings: LOW_ORIFICE }), 'leak-first', 'add-nothing'],
+  [
+    'low charge, leak search not done',
+    orifice({ visit: { leakSearch: 'not-done' }, readings: LOW_ORIFICE }),
+    'leak-first',
+    'add-nothing',
+  ],
+  [
+    'low charge, leak found',
+    orifice({ visit: { leakSearch: 'found' }, readings: LOW_ORIFICE }),
+    'mend-recover-weigh-in',
+    'add-nothing',
+  ],
+  ['low charge, none found', orifice({ visit: { leakSearch: 'none-found' }, readings: LOW_ORIFICE }), 'add-in-steps'],
+  [
+    'low charge, 9 % added already',
+    orifice({ setup: charged, visit: added(0.54), readings: LOW_ORIFICE }),
+    'add-in-steps',
+  ],
+  [
+    'low charge, 10 % added already',
+    orifice({ setup: charged, visit: added(0.6), readings: LOW_ORIFICE }),
+    'recover-and-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'low charge, topped up on an earlier visit',
+    orifice({ visit: { leakSearch: 'none-found', additionsOnEarlierVisits: 1 }, readings: LOW_ORIFICE }),
+    'locate-mend-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'low charge, an amount added before',
+    orifice({ visit: { leakSearch: 'none-found', addedBefore: { value: 8, unit: 'oz' } }, readings: LOW_ORIFICE }),
+    'locate-mend-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'low charge against its own subcooling target',
+    orifice({ setup: { targetSubcooling: { value: 17, unit: 'deltaF' } }, readings: superheat(25) }),
+    'leak-first',
+    'add-nothing',
+  ],
+  [
+    'superheat above, subcooling unclear',
+    orifice({ readings: { ...superheat(25), ...subcooling(6.5) } }),
+    'measure-drier-drop',
+    'add-nothing',
+  ],
+  [
+    'superheat above, no high-side port',
+    orifice({ setup: { highSidePort: 'none' }, readings: { ...superheat(25), liquidPressure: null } }),
+    'measure-drier-drop',
+    'add-nothing',
+  ],
+  ['superheat above, subcooling 10', orifice({ readings: superheat(25) }), 'find-restriction', 'move-no-refrigerant'],
+  [
+    'superheat above, subcooling right against its target',
+    orifice({
+      setup: { targetSubcooling: { value: 6, unit: 'deltaF' } },
+      readings: { ...superheat(25), ...subcooling(6) },
+    }),
+    'find-restriction',
+    'move-no-refrigerant',
+  ],
+  [
+    'superheat below, subcooling high',
+    orifice({ readings: { ...superheat(8), ...subcooling(16) } }),
+    'air-test-then-recover',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'superheat below, subcooling 10',
+    orifice({ readings: superheat(8) }),
+    'check-orifice-compressor-condenser',
+    'move-no-refrigerant',
+  ],
+  [
+    'superheat below, subcooling low',
+    orifice({ readings: { ...superheat(8), ...subcooling(3) } }),
+    'check-orifice-compressor-condenser',
+    'move-no-refrigerant',
+  ],
+  [
+    'cool weather, superheat below',
+    orifice({ readings: { outdoorDryBulb: 62 } }),
+    'cool-weather-hold',
+    'move-no-refrigerant',
+  ],
+  [
+    'cool weather with the head raised: the chart goes by the air',
+    orifice({ visit: { headRaised: true }, readings: { outdoorDryBulb: 62 } }),
+    'cool-weather-hold',
+    'move-no-refrigerant',
+  ],
+];
+
+const VALVE: readonly Case[] = [
+  ['low charge in the window', valve({ readings: LOW_VALVE }), 'leak-first', 'add-nothing'],
+  [
+    'low charge above the window',
+    valve({ readings: { ...LOW_VALVE, ...valveSuperheat(32) } }),
+    'leak-first',
+    'add-nothing',
+  ],
+  [
+    'low charge, leak found',
+    valve({ visit: { leakSearch: 'found' }, readings: LOW_VALVE }),
+    'mend-recover-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'low charge, leak found on a new line set',
+    valve({ visit: { leakSearch: 'found', commissioning: true }, readings: LOW_VALVE }),
+    'mend-recover-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'low charge, topped up twice before',
+    valve({ visit: { additionsOnEarlierVisits: 2 }, readings: LOW_VALVE }),
+    'locate-mend-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'low charge, 12 % added already',
+    valve({ setup: charged, visit: added(0.72), readings: LOW_VALVE }),
+    'recover-and-weigh-in',
+    'add-nothing',
+  ],
+  ['low charge, none found', valve({ visit: { leakSearch: 'none-found' }, readings: LOW_VALVE }), 'add-in-steps'],
+  [
+    'a new line set, charge not complete',
+    valve({ visit: { commissioning: true }, readings: LOW_VALVE }),
+    'add-in-steps',
+  ],
+  [
+    'subcooling and superheat below',
+    valve({ readings: { ...LOW_VALVE, ...valveSuperheat(2) } }),
+    'check-bulb-and-valve',
+    'move-no-refrigerant',
+  ],
+  [
+    'subcooling within, superheat above',
+    valve({ readings: valveSuperheat(32) }),
+    'check-bulb-screen-drier',
+    'move-no-refrigerant',
+  ],
+  [
+    'subcooling within, superheat below',
+    valve({ readings: valveSuperheat(2) }),
+    'check-bulb-and-airflow',
+    'move-no-refrigerant',
+  ],
+  [
+    'both above',
+    valve({ readings: { ...valveSubcooling(16), ...valveSuperheat(32) } }),
+    'find-restriction-recover-nothing',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'subcooling above, superheat below',
+    valve({ readings: { ...valveSubcooling(16), ...valveSuperheat(2) } }),
+    'check-bulb-then-recover',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'subcooling above, condensing 25 °F over the air',
+    valve({ readings: { ...valveSubcooling(16), outdoorDryBulb: 80 } }),
+    'air-test-then-recover',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'subcooling above, condensing 19 °F over the air',
+    valve({ readings: valveSubcooling(16) }),
+    'recover-in-steps',
+    'add-nothing',
+  ],
+  [
+    'R-22: subcooling above, condensing 25 °F over the air is usual',
+    valve({
+      setup: { refrigerant: 'R-22' },
+      readings: { suctionPressure: 68.5, liquidPressure: 210.8, ...subcooling(16), outdoorDryBulb: 80 },
+    }),
+    'recover-in-steps',
+    'add-nothing',
+  ],
+  [
+    'R-22: subcooling above, condensing 31 °F over the air',
+    valve({
+      setup: { refrigerant: 'R-22' },
+      readings: { suctionPressure: 68.5, liquidPressure: 210.8, ...subcooling(16), outdoorDryBulb: 74 },
+    }),
+    'air-test-then-recover',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'cool weather, subcooling below',
+    valve({ readings: { outdoorDryBulb: 62, liquidPressure: 300, liquidLineTemperature: 91 } }),
+    'cool-weather-hold',
+    'move-no-refrigerant',
+  ],
+  [
+    'cool weather, too little head',
+    valve({ readings: { outdoorDryBulb: 60, liquidPressure: 270, liquidLineTemperature: 85 } }),
+    'raise-head',
+    'move-no-refrigerant',
+  ],
+  [
+    'cool weather, head raised by the maker’s method',
+    valve({
+      visit: { headRaised: true },
+      readings: { outdoorDryBulb: 62, liquidPressure: 300, liquidLineTemperature: 91 },
+    }),
+    'leak-first',
+    'add-nothing',
+  ],
+  [
+    'cool weather, head raised, still too little',
+    valve({
+      visit: { headRaised: true },
+      readings: { outdoorDryBulb: 60, liquidPressure: 270, liquidLineTemperature: 85 },
+    }),
+    'raise-head',
+    'move-no-refrigerant',
+  ],
+];
+
+const WITHIN: readonly Case[] = [
+  ['healthy orifice', orifice(), 'record'],
+  ['healthy valve', valve(), 'record'],
+  [
+    'healthy valve in cool weather',
+    valve({ readings: { outdoorDryBulb: 65, liquidPressure: 300, liquidLineTemperature: 86.5 } }),
+    'record',
+  ],
+  ['orifice within, airflow unseen', orifice({ readings: { supplyDryBulb: null } }), 'read-supply-or-airflow'],
+  [
+    'orifice within, airflow measured',
+    orifice({ ...lowAirflow, readings: { supplyDryBulb: null, airflow: 1200 } }),
+    'record',
+  ],
+  ['valve within, airflow unseen', valve({ readings: { supplyDryBulb: null } }), 'record'],
+];
+
+const GROUPS = { FIT, IMPOSSIBLE, STOPS, CONDITIONS, LACKING, AIRFLOW, QUALITY, TOO_CLOSE, ORIFICE, VALVE, WITHIN };
+const CASES: readonly Case[] = Object.values(GROUPS).flat();
+
+describe.each(Object.entries(GROUPS))('%s', (_, cases) => {
+  it.each(cases.map(([name, request, step, ...notYet]) => ({ name, request, step, notYet })))(
+    '$name: $step',
+    ({ request, step, notYet }) => {
+      const { nextStep } = evaluate(request).overall;
+      expect([nextStep.code, ...nextStep.notYet]).toEqual([step, ...notYet]);
+    },
+  );
+});
+
+function factsOf(request: EvaluationRequest): Facts {
+  const input = inputOf(request);
+  const { criteria, overall } = evaluate(request);
+  const derived = deriveQuantities(input.setup, input.readings);
+  const unfit = unfitReason(input);
+  const targetSplit = splitTarget(input, derived);
+  const split = judgeSplit(input, derived, targetSplit, unfit);
+  return gatherFacts({
+    input,
+    derived,
+    criteria,
+    target: superheatTarget(input, derived),
+    unfit,
+    impossible: impossibleReadings(input, derived)?.reason ?? null,
+    stops: overall.stops,
+    cautions: overall.cautions,
+    airflow: airflowEvidence(input, derived, { airflow: judgeAirflow(input), split, target: targetSplit }),
+    overall: overall.finding,
+  });
+}
+
+describe('the cases', () => {
+  it('are at least sixty, with names of their own in each group', () => {
+    expect(CASES.length).toBeGreaterThanOrEqual(60);
+    for (const cases of Object.values(GROUPS)) expect(new Set(cases.map(([name]) => name)).size).toBe(cases.length);
+  });
+
+  it('reach every row of the table', () => {
+    const reached = new Set<NextStepRow>(CASES.map(([, request]) => findRow(factsOf(request))));
+    expect(NEXT_STEP_TABLE.filter((row) => !reached.has(row))).toEqual([]);
+  });
+});

@@ -1,0 +1,76 @@
+/** Readings of the airflow methods as leaves, with what a digital instrument of the trade is usually good for where the person states nothing. */
+import type { ErrorPart, Known } from '../../derivation/quantity';
+import { leaf } from '../../derivation/quantity';
+import { staticPressureToPa } from '../../units';
+import type { FieldKind } from '../field-kinds';
+import { fieldKind } from '../field-kinds';
+import type { SourcedFigure } from '../sourced-figure';
+
+export const FIELD_READING_IDS = [
+  'lineVoltage',
+  'heaterCurrent',
+  'blowerHeat',
+  'dialVolume',
+  'gasRevolution',
+  'gasHeatingValue',
+  'furnaceEfficiency',
+  'returnStaticPressure',
+  'supplyStaticPressure',
+] as const;
+export type FieldReadingId = (typeof FIELD_READING_IDS)[number];
+
+interface Assumed extends SourcedFigure {
+  readonly of: 'reading' | 'absolute';
+}
+
+const choice = (value: number, of: Assumed['of'], printed: string): Assumed => ({
+  value,
+  of,
+  printed,
+  standing: 'choice',
+  source: 'Our choice, open to better evidence',
+});
+
+/** ± assumed when none is stated, as a limit: a part of the reading, or in its SI unit. */
+export const ASSUMED_FIELD_LIMITS: Readonly<Record<FieldReadingId, Assumed>> = {
+  lineVoltage: choice(0.01, 'reading', '±1 %'),
+  heaterCurrent: choice(0.02, 'reading', '±2 %'),
+  blowerHeat: choice(0.2, 'reading', '±20 %'),
+  // the meter's own error
+  dialVolume: choice(0.01, 'reading', '±1 %'),
+  // a thumb on a stopwatch, at both ends
+  gasRevolution: choice(0.5, 'absolute', '±0.5 s'),
+  gasHeatingValue: choice(0.02, 'reading', '±2 %'),
+  furnaceEfficiency: choice(0.03, 'absolute', '±3 points of percent'),
+  returnStaticPressure: choice(staticPressureToPa(0.02, 'inH2O'), 'absolute', '±0.02 in. w.c.'),
+  supplyStaticPressure: choice(staticPressureToPa(0.02, 'inH2O'), 'absolute', '±0.02 in. w.c.'),
+};
+
+const KINDS: Readonly<Record<FieldReadingId, FieldKind | 'fraction'>> = {
+  lineVoltage: 'voltageV',
+  heaterCurrent: 'currentA',
+  blowerHeat: 'heatRateW',
+  dialVolume: 'gasVolumeM3',
+  gasRevolution: 'durationS',
+  gasHeatingValue: 'heatingValueJPerM3',
+  furnaceEfficiency: 'fraction',
+  returnStaticPressure: 'staticPressurePa',
+  supplyStaticPressure: 'staticPressurePa',
+};
+
+/**
+ * A reading in SI as a quantity. `limit` is the stated ± (rectangular) in the unit of the reading; left out, the assumed one is taken. `instrumentId`
+ * makes all readings of that kind by one instrument share its error (JCGM 100:2008, 5.2.2).
+ */
+export function fieldReading(
+  id: FieldReadingId,
+  reading: { readonly value: number; readonly limit?: number; readonly instrumentId?: string },
+): Known {
+  const { value, instrumentId } = reading;
+  const assumed = ASSUMED_FIELD_LIMITS[id];
+  const limit = reading.limit ?? (assumed.of === 'reading' ? assumed.value * Math.abs(value) : assumed.value);
+  const kind = KINDS[id];
+  const key = instrumentId === undefined ? `reading:${id}` : `instrument:${kind}:${instrumentId}`;
+  const parts: readonly ErrorPart[] = limit > 0 ? [{ key, u: limit / Math.sqrt(3), shape: 'rectangular' }] : [];
+  return leaf({ id, kind: kind === 'fraction' ? kind : fieldKind(kind), value, origin: 'reading', parts });
+}
