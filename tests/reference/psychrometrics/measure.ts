@@ -8,21 +8,14 @@ import { FREEZING_K } from '../../../packages/engine/src/psychrometrics/psychrom
 import { standardAtmospherePressurePa } from '../../../packages/engine/src/psychrometrics/standard-atmosphere';
 import { temperatureFromK } from '../../../packages/engine/src/units/temperature';
 import type { AccuracyRow } from '../refrigerants/measure';
+import { row } from './accuracy-row';
 import { handbookValues, type HandbookValue } from './handbook-values';
+import { measurePairs } from './measure-pairs';
 import { oracle, oracleStates } from './oracle';
 import { figure, readTable } from './read-table';
 import { exampleDifferences, stateDifferences, type StateDifferences } from './worked-states';
 
 const HANDBOOK = 'ASHRAE Fundamentals 2017 ch. 1';
-
-type Rest = Omit<AccuracyRow, 'n' | 'mean' | 'max'>;
-
-function row(differences: readonly number[], rest: Rest): AccuracyRow {
-  const sizes = differences.map(Math.abs);
-  const max = Math.max(...sizes);
-  if (!Number.isFinite(max)) throw new Error(`${rest.quantity}, ${rest.source}: no rows, or a row without an answer`);
-  return { ...rest, n: sizes.length, mean: sizes.reduce((sum, size) => sum + size, 0) / sizes.length, max };
-}
 
 /** The table's elevations that lie outside ours, −1,500 to 18,000 ft; `accuracy.spec.ts` asserts that they are refused. */
 export const REFUSED_ELEVATIONS = ['30000 ft', '-500 m', '10000 m'];
@@ -262,5 +255,5 @@ function oracleRows(): AccuracyRow[] {
 }
 
 export function measurePsychrometrics(): AccuracyRow[] {
-  return [...handbookRows(), ...stateRows(), ...realGasRows(), ...oracleRows()];
+  return [...handbookRows(), ...stateRows(), ...realGasRows(), ...oracleRows(), ...measurePairs()];
 }

@@ -124,3 +124,33 @@ describe('guarded finding', () => {
     }
   });
 });
+
+describe('a mean shifted by a kink', () => {
+  const shifted = (value: number, u: number, meanShift: number) => {
+    const measured = leaf({
+      id: 'deviation',
+      kind: 'differenceK',
+      value,
+      origin: 'reading',
+      parts: [{ key: 'deviation', u, shape: 'normal' }],
+    });
+    return judgeConformance({
+      measured: { ...measured, meanShift },
+      tolerance: { low: -3, high: 3, floored: false },
+      guard: 0.8,
+    });
+  };
+
+  it('counts in the probability, not by the rule', () => {
+    // Φ(1) = 0.841345
+    expect(shifted(2.5, 1, -0.5)).toMatchObject({ byRule: 'passes' });
+    expect(shifted(2.5, 1, -0.5).probabilityWithin).toBeCloseTo(0.841345, 5);
+    expect(shifted(3.1, 1, -1.1).byRule).toBe('fails');
+  });
+
+  it('takes the finding within away, and never gives it', () => {
+    expect(shifted(2.1, 1, 0).finding).toBe('within');
+    expect(shifted(2.1, 1, 0.2).finding).toBe('too-close-to-call');
+    expect(shifted(2.2, 1, -0.5).finding).toBe('too-close-to-call');
+  });
+});

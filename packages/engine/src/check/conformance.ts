@@ -34,7 +34,9 @@ export function judgeConformance(input: {
   const inside = probabilityBetween(mean, u, from, to);
   const probabilityWithin = inside * (1 - probabilityOfNoTarget);
   const byRule = passes ? 'passes' : 'fails';
-  if (probabilityWithin >= guard) return { byRule, probabilityWithin, finding: 'within' };
+  // a kink may move the mean inwards as the uncertainty grows: what only that brings inside is not called within
+  const withoutShift = probabilityBetween(value, u, from, to) * (1 - probabilityOfNoTarget);
+  if (Math.min(probabilityWithin, withoutShift) >= guard) return { byRule, probabilityWithin, finding: 'within' };
   // only the deviation can be outside: a doubtful target is not a deviation
   if (inside <= 1 - guard) {
     if (probabilityBetween(mean, u, -Infinity, from) <= 1 - guard)

@@ -138,6 +138,25 @@ describe('slopes', () => {
     expect(result.u).toBeCloseTo(3e-13, 17);
   });
 
+  it('tell how far a kink takes the mean off the value: by the mean of |x|, 0.80 u normal and 0.87 u rectangular', () => {
+    // at a kink from slope 0 to 2 the mean of f is E|x|: half of the bend of 2
+    const kinked = one((x) => Math.max(0, 2 * (x - 10)));
+    const at = (value: number, u: number) => known(derive(kinked, { x: reading('x', value, part('x', u)) }));
+    for (const exact of [Math.sqrt(2 / Math.PI), Math.sqrt(3) / 2]) {
+      expect(Math.abs(at(10, 1).meanShift - exact)).toBeLessThan(0.04);
+    }
+    expect(at(10, 0.5).meanShift).toBeCloseTo(at(10, 1).meanShift / 2, 12);
+    expect(at(12, 1).meanShift).toBeCloseTo(0, 12);
+    expect(
+      known(
+        derive(
+          one((x) => -3 * x),
+          { x: at(10, 1) },
+        ),
+      ).meanShift,
+    ).toBeCloseTo(-3 * at(10, 1).meanShift, 9);
+  });
+
   it.each([
     ['above', (x: number) => x > 10.5, 4],
     ['below', (x: number) => x < 9.5, 6],

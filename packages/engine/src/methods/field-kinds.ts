@@ -12,6 +12,7 @@ export type FieldKind =
   | 'staticPressurePa'
   | 'densityKgPerM3'
   | 'specificHeatJPerKgK'
+  | 'enthalpyDifferenceJPerKg'
   | 'massFlowKgPerS'
   | 'flowPerCapacityM3PerSPerW'
   | 'chargeRateKgPerM';

@@ -28,13 +28,18 @@ const LN_TRIPLE_OVER_WATER = lnSaturationPressureOverWater(TRIPLE_POINT_K);
 /** Bound of |(ln p)″ / 2 (ln p)′| from −100 to 200 °C: 0.0059 per K at −100 °C. */
 const CURVATURE_PER_K = 0.006;
 
+/** Coefficients a, b, c of T − T₃ = L (a + b L) / (1 + c L), L = ln(p / p₃) from the triple point. */
+type FirstGuess = readonly [a: number, b: number, c: number];
+
 /**
- * Where Newton starts: a Magnus form (WMO-No. 8, coefficients from memory) through the triple point, inverted; within 0.3 K from −60 to 90 °C.
- * Only the speed depends on it.
+ * Where Newton starts: our own fits to eqs. 5 and 6, within 0.0003 K from 0.01 to 90 °C and 0.0005 K from −60 °C, so near that the first step is
+ * mostly the last. Only the speed depends on them.
  */
-function firstGuessK(lnRatioToTriple: number, factor: number, offsetK: number): number {
-  return TRIPLE_POINT_K + (offsetK * lnRatioToTriple) / (factor - lnRatioToTriple);
-}
+const GUESS_OVER_WATER: FirstGuess = [13.7678, -0.0698685, -0.0615417];
+const GUESS_OVER_ICE: FirstGuess = [12.1437, -0.0100634, -0.0456356];
+
+const firstGuessK = ([a, b, c]: FirstGuess, lnRatioToTriple: number): number =>
+  TRIPLE_POINT_K + (lnRatioToTriple * (a + b * lnRatioToTriple)) / (1 + c * lnRatioToTriple);
 
 /**
  * Dew point (frost point below 0.01 °C) in K of water vapour at a partial pressure: the temperature whose saturation pressure it is
@@ -49,7 +54,7 @@ export function dewPointKFromVapourPressure(vapourPressurePa: number): number {
     return bracketedNewton((T) => [lnSaturationPressureOverIce(T) - lnPa, lnSlopeOverIce(T)], {
       lower: SATURATION_LIMITS.min,
       upper: TRIPLE_POINT_K,
-      start: firstGuessK(lnPa - LN_TRIPLE_OVER_ICE, 22.46, 272.62),
+      start: firstGuessK(GUESS_OVER_ICE, lnPa - LN_TRIPLE_OVER_ICE),
       tolerance: TOLERANCE_K,
       curvature: CURVATURE_PER_K,
       quantity: 'dewPointK',
@@ -59,7 +64,7 @@ export function dewPointKFromVapourPressure(vapourPressurePa: number): number {
   return bracketedNewton((T) => [lnSaturationPressureOverWater(T) - lnPa, lnSlopeOverWater(T)], {
     lower: TRIPLE_POINT_K,
     upper: SATURATION_LIMITS.max,
-    start: firstGuessK(lnPa - LN_TRIPLE_OVER_WATER, 17.62, 243.12),
+    start: firstGuessK(GUESS_OVER_WATER, lnPa - LN_TRIPLE_OVER_WATER),
     tolerance: TOLERANCE_K,
     curvature: CURVATURE_PER_K,
     quantity: 'dewPointK',

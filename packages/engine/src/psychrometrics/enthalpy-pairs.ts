@@ -94,8 +94,8 @@ export function moistAirFromDewPointAndEnthalpy(x: {
 /**
  * State from humidity ratio and enthalpy.
  * Throws `EngineError`: pressure outside 50 to 110 kPa, humidity ratio outside 0 to 400, enthalpy outside −60.36 kJ/kg to 1 GJ/kg, a dry bulb that
- * comes out outside −60 to 90 °C: `out-of-range`; enthalpy below that of saturated air of this humidity ratio (`min`), reason `below-saturation`, or vapour
- * pressure not below the total: `inconsistent-inputs`.
+ * comes out outside −60 to 90 °C: `out-of-range`; enthalpy below that of saturated air of this humidity ratio (`min`): `inconsistent-inputs`, reason
+ * `below-saturation`.
  */
 export function moistAirFromHumidityRatioAndEnthalpy(x: {
   humidityRatio: number;

@@ -39,8 +39,8 @@ const COLDEST_PA = waterVapourSaturationPressurePa(DRY_BULB_LIMITS.min);
 const HOTTEST_PA = waterVapourSaturationPressurePa(DRY_BULB_LIMITS.max);
 
 /**
- * Vapour pressure in Pa of a humidity ratio, 0 to 400, that air saturated at a temperature can hold; `EngineError` `inconsistent-inputs`, reason `above-saturation`, where
- * it cannot. What is above by the solver's 1e-9 K is saturated.
+ * Vapour pressure in Pa of a humidity ratio, 0 to 400, that air saturated at a temperature can hold; where it cannot, `EngineError`
+ * `inconsistent-inputs`, reason `above-saturation`. What is above by the solver's 1e-9 K is saturated.
  */
 export function vapourPressurePaUpToSaturation(
   x: { humidityRatio: number; pressurePa: number },
@@ -97,9 +97,9 @@ export function moistAirFromDewPointAndRelativeHumidity(x: {
 
 /**
  * State from relative humidity (over ice where the dry bulb turns out below 0.01 °C) and humidity ratio.
- * Throws `EngineError`: pressure outside 50 to 110 kPa, humidity ratio outside 0 to 400 or above that of saturated air at 90 °C, relative
- * humidity outside 0 to 1, or outside the `min` and `max` between which the dry bulb is −60 to 90 °C: `out-of-range`; both 0, which is dry air of any
- * temperature: `not-supported`, reason `dependent-pair`; vapour pressure not below the total: `inconsistent-inputs`.
+ * Throws `EngineError`: pressure outside 50 to 110 kPa, humidity ratio outside 0 to 400 or above that of saturated air at 90 °C, relative humidity
+ * outside 0 to 1, or outside the `min` and `max` between which the dry bulb is −60 to 90 °C: `out-of-range`; both 0, which is dry air of any
+ * temperature: `not-supported`, reason `dependent-pair`.
  */
 export function moistAirFromRelativeHumidityAndHumidityRatio(x: {
   relativeHumidityRatio: number;

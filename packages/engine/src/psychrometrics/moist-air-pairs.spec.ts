@@ -2,7 +2,6 @@ import fc from 'fast-check';
 import { describe, expect, expectTypeOf, it } from 'vitest';
 import { attempt } from '../result';
 import { enthalpyJPerKg } from './enthalpy';
-import { humidityRatioFromRelativeHumidity } from './humidity-ratio';
 import { moistAirFromDryBulbAndRelativeHumidity, type MoistAir } from './moist-air';
 import {
   MOIST_AIR_PAIRS,
@@ -29,12 +28,10 @@ const airBetween = (lowK: number, highK: number, driest: number, share: number) 
     .filter((x) => waterVapourSaturationPressurePa(x.dryBulbK) < share * x.pressurePa)
     .map(moistAirFromDryBulbAndRelativeHumidity);
 
-type Pair = (typeof MOIST_AIR_PAIRS)[number];
-
-const names = (pair: Pair): readonly MoistAirReading[] => pair;
+type Pair = readonly [MoistAirReading, MoistAirReading];
 
 /** Of a state, what a pair names and no more. */
-function readingsOf(state: MoistAir, [one, other]: readonly [keyof MoistAir, keyof MoistAir]) {
+function readingsOf(state: MoistAir, [one, other]: Pair) {
   const { pressurePa } = state;
   return { pressurePa, [one]: state[one], [other]: state[other] } as unknown as MoistAirPair & { pressurePa: number };
 }
@@ -99,8 +96,7 @@ describe('the 13 pairs of moist air', () => {
           const again = moistAirFromDryBulbAndRelativeHumidity(found);
           expect(again.wetBulbSurface).toBe(found.wetBulbSurface);
           expect(Math.abs(again.wetBulbK - found.wetBulbK)).toBeLessThan(1e-8);
-          if (pair.includes('dewPointK' as never))
-            expect(Math.abs(again.dewPointK! - found.dewPointK!)).toBeLessThan(1e-8);
+          if (pair.includes('dewPointK')) expect(Math.abs(again.dewPointK! - found.dewPointK!)).toBeLessThan(1e-8);
           // 1e-9 K of dry bulb is worth less than 1e-9 of the humidity while vapour has less than nine tenths of the pressure
           const tolerance = 1e-9 * (1e-3 + again.humidityRatio) * (1 + again.humidityRatio);
           expect(Math.abs(again.humidityRatio - found.humidityRatio)).toBeLessThan(tolerance);
@@ -131,6 +127,28 @@ describe('the 13 pairs of moist air', () => {
       }),
       { numRuns: 5000 },
     );
+  });
+
+  it('never have a dry bulb below wet bulb or dew point, nor more than saturation, where they meet but for rounding', () => {
+    const pressurePa = 101_325;
+    for (let wetBulbK = 214.1; wetBulbK < 360; wetBulbK += 0.7) {
+      const humidityRatio = moistAirFromPair({ pressurePa, wetBulbK, dewPointK: wetBulbK }).humidityRatio;
+      for (const ulps of [-3, -2, -1, 0, 1, 2, 3, 2e4]) {
+        const dewPointK = wetBulbK * (1 + ulps * Number.EPSILON);
+        const found = [
+          moistAirFromPair({ pressurePa, wetBulbK, dewPointK }),
+          moistAirFromPair({ pressurePa, wetBulbK, humidityRatio: humidityRatio * (1 + ulps * Number.EPSILON) }),
+          moistAirFromPair({ pressurePa, dewPointK, relativeHumidityRatio: 1 - Math.abs(ulps) * Number.EPSILON }),
+        ];
+        for (const { dryBulbK, ...state } of found) {
+          expect(dryBulbK).toBeGreaterThanOrEqual(Math.max(state.wetBulbK - 1e-9, state.dewPointK!));
+          expect(state.relativeHumidityRatio).toBeLessThanOrEqual(1);
+        }
+        expect(found[0]!.dryBulbK).toBeGreaterThanOrEqual(wetBulbK);
+        expect(found[1]!.dryBulbK).toBeGreaterThanOrEqual(wetBulbK);
+      }
+      expect(moistAirFromPair({ pressurePa, dewPointK: wetBulbK, relativeHumidityRatio: 1 }).dryBulbK).toBe(wetBulbK);
+    }
   });
 
   it('meet in one point at saturation, also around freezing', () => {
@@ -178,7 +196,7 @@ describe('the branch of the wet bulb', () => {
 
   it('is the wet one where the wet bulb is derived', () => {
     const iced = moistAirFromPair({ ...atPressure, wetBulbK: icedK, humidityRatio });
-    for (const pair of MOIST_AIR_PAIRS.filter((each) => !names(each).includes('wetBulbK'))) {
+    for (const pair of MOIST_AIR_PAIRS.filter((each: Pair) => !each.includes('wetBulbK'))) {
       const found = through(pair, iced);
       expect(found.wetBulbSurface).toBe('water');
       expect(found.wetBulbK).toBeGreaterThan(273.15);

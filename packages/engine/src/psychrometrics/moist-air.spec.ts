@@ -84,6 +84,14 @@ describe('moist air', () => {
     }
   });
 
+  it('has no more than saturation where the dew point lies an ulp below the dry bulb', () => {
+    for (let dryBulbK = 214.1; dryBulbK < 363; dryBulbK += 0.07) {
+      const dewPointK = dryBulbK * (1 - Number.EPSILON);
+      const state = moistAirFromDryBulbAndDewPoint({ dryBulbK, dewPointK, pressurePa: 101_325 });
+      expect(state.relativeHumidityRatio).toBeLessThanOrEqual(1);
+    }
+  });
+
   it('has a frost point below 0.01 °C and a relative humidity over ice', () => {
     const state = moistAirFromDryBulbAndRelativeHumidity({
       dryBulbK: 258.15,

