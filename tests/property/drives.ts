@@ -149,5 +149,4 @@ type Drawn<T> = { readonly [Name in keyof T]: T[Name] extends fc.Arbitrary<infer
 export type Drives = Drawn<typeof DRIVES>;
 export type Overrides = { readonly [Name in keyof Drives]?: fc.Arbitrary<Drives[Name]> };
 
-export const drivesWith = (overrides: Overrides): fc.Arbitrary<Drives> =>
-  fc.record({ ...DRIVES, ...overrides } as { [Name in keyof Drives]: fc.Arbitrary<Drives[Name]> });
+export const drivesWith = (overrides: Overrides): fc.Arbitrary<Drives> => fc.record({ ...DRIVES, ...overrides });

@@ -13,9 +13,10 @@ import type {
   StopCode,
 } from '@chargewright/engine';
 
-type Reached = 'reached';
+/** Reached by systems here, or not yet by any, with the reason. */
+type Standing = 'reached' | { readonly not: string };
 
-const namesOf = <Code extends string>(codes: Readonly<Record<Code, Reached | string>>): readonly Code[] =>
+const namesOf = <Code extends string>(codes: Readonly<Record<Code, Standing>>): readonly Code[] =>
   (Object.keys(codes) as Code[]).filter((code) => codes[code] === 'reached');
 
 export const OVERALL_FINDINGS = namesOf<OverallFinding>({
@@ -36,7 +37,7 @@ export const CRITERIA = namesOf<CriterionId>({
   airflow: 'reached',
   conditions: 'reached',
   instruments: 'reached',
-  'weigh-in': 'belongs to the procedures that allow a weigh-in',
+  'weigh-in': { not: 'belongs to the procedures that allow a weigh-in' },
 });
 
 export const REASONS = namesOf<ReasonCode>({

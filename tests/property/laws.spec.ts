@@ -11,7 +11,7 @@ import { requestOfSystem } from './request-of-system';
 import { anySystem, fitSystem, statedSystem } from './scenarios';
 import { widened, widening } from './widening';
 
-const RUNS = { numRuns: 20_000, seed: 20_261_202 };
+const RUNS = { numRuns: 10_000, seed: 20_261_202 };
 
 const inchPound = (drives: Drives): EvaluationRequest => requestOfSystem(plausibleSystem(drives), 'inch-pound');
 
@@ -27,7 +27,7 @@ describe('laws of judging', () => {
       fc.property(fitSystem, (drives) => {
         expect(evaluate(withoutReadings(inchPound(drives))).overall.finding).toBe('not-judged');
       }),
-      { ...RUNS, numRuns: 5000 },
+      { ...RUNS, numRuns: 3000 },
     );
   });
 
@@ -72,7 +72,7 @@ describe('laws of judging', () => {
         if (!isDeepStrictEqual(first, again)) expect.fail(findDifference(first, again, 0) ?? 'keys differ');
         if (!isDeepStrictEqual(copy, request)) expect.fail('the request was changed');
       }),
-      { ...RUNS, numRuns: 5000 },
+      { ...RUNS, numRuns: 3000 },
     );
   });
 

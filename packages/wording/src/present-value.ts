@@ -1,14 +1,20 @@
 import {
   differenceFromK,
+  differenceToK,
   flowFromM3PerS,
+  heatingValueFromJPerM3,
   lengthFromM,
+  lineRateFromKgPerM,
   massFromKg,
+  PA_PER_INH2O,
   powerFromW,
+  powerToW,
   pressureDifferenceFromPa,
   pressureFromPa,
   specificEnergyDifferenceToBtuPerLb,
   specificVolumeToFt3PerLb,
   temperatureFromK,
+  volumeFromM3,
   type QuantityKind,
 } from '@chargewright/engine';
 import type { UnitSystem } from './unit-system';
@@ -40,7 +46,28 @@ export type ContractUnit =
   | 'ft'
   | 'm'
   | 'min'
-  | 'd';
+  | 'd'
+  | 'V'
+  | 'A'
+  | 'W'
+  | 'Btu/h'
+  | 's'
+  | 'ft3'
+  | 'm3'
+  | 'Btu/ft3'
+  | 'MJ/m3'
+  | 'inH2O'
+  | 'Pa'
+  | 'lb/ft3'
+  | 'kg/m3'
+  | 'Btu/(lb·°F)'
+  | 'kJ/(kg·K)'
+  | 'lb/h'
+  | 'kg/s'
+  | 'cfm/ton'
+  | 'L/s/kW'
+  | 'oz/ft'
+  | 'g/m';
 
 export interface PresentedValue {
   readonly value: number;
@@ -75,6 +102,31 @@ const inchPound = (kind: QuantityKind, value: number): PresentedValue => {
       return { value: massFromKg(value, 'oz'), unit: 'oz' };
     case 'lengthM':
       return { value: lengthFromM(value, 'ft'), unit: 'ft' };
+    case 'heatRateW':
+      return { value: powerFromW(value, 'Btu/h'), unit: 'Btu/h' };
+    case 'gasVolumeM3':
+      return { value: volumeFromM3(value, 'ft3'), unit: 'ft3' };
+    case 'heatingValueJPerM3':
+      return { value: heatingValueFromJPerM3(value, 'Btu/ft3'), unit: 'Btu/ft3' };
+    case 'staticPressurePa':
+      return { value: value / PA_PER_INH2O, unit: 'inH2O' };
+    case 'densityKgPerM3':
+      return { value: 1 / specificVolumeToFt3PerLb(1 / value), unit: 'lb/ft3' };
+    case 'specificHeatJPerKgK':
+      return { value: differenceToK(specificEnergyDifferenceToBtuPerLb(value), 'deltaF'), unit: 'Btu/(lb·°F)' };
+    case 'enthalpyDifferenceJPerKg':
+      return { value: specificEnergyDifferenceToBtuPerLb(value), unit: 'Btu/lb' };
+    case 'massFlowKgPerS':
+      return { value: 3600 * massFromKg(value, 'lb'), unit: 'lb/h' };
+    case 'flowPerCapacityM3PerSPerW':
+      return { value: flowFromM3PerS(value * powerToW(1, 'ton'), 'cfm'), unit: 'cfm/ton' };
+    case 'chargeRateKgPerM':
+      return { value: lineRateFromKgPerM(value, 'oz/ft'), unit: 'oz/ft' };
+    case 'voltageV':
+    case 'currentA':
+    case 'electricPowerW':
+    case 'durationS':
+      return electrical(kind, value);
     case 'fraction':
     case 'humidityRatio':
     case 'minutes':
@@ -110,6 +162,31 @@ const metric = (kind: QuantityKind, value: number, bar: boolean): PresentedValue
       return { value: massFromKg(value, 'g'), unit: 'g' };
     case 'lengthM':
       return { value, unit: 'm' };
+    case 'heatRateW':
+      return { value: powerFromW(value, 'kW'), unit: 'kW' };
+    case 'gasVolumeM3':
+      return { value, unit: 'm3' };
+    case 'heatingValueJPerM3':
+      return { value: heatingValueFromJPerM3(value, 'MJ/m3'), unit: 'MJ/m3' };
+    case 'staticPressurePa':
+      return { value, unit: 'Pa' };
+    case 'densityKgPerM3':
+      return { value, unit: 'kg/m3' };
+    case 'specificHeatJPerKgK':
+      return { value: value / 1e3, unit: 'kJ/(kg·K)' };
+    case 'enthalpyDifferenceJPerKg':
+      return { value: value / 1e3, unit: 'kJ/kg' };
+    case 'massFlowKgPerS':
+      return { value, unit: 'kg/s' };
+    case 'flowPerCapacityM3PerSPerW':
+      return { value: flowFromM3PerS(value * powerToW(1, 'kW'), 'L/s'), unit: 'L/s/kW' };
+    case 'chargeRateKgPerM':
+      return { value: lineRateFromKgPerM(value, 'g/m'), unit: 'g/m' };
+    case 'voltageV':
+    case 'currentA':
+    case 'electricPowerW':
+    case 'durationS':
+      return electrical(kind, value);
     case 'fraction':
     case 'humidityRatio':
     case 'minutes':
@@ -118,6 +195,14 @@ const metric = (kind: QuantityKind, value: number, bar: boolean): PresentedValue
       return unitless(kind, value);
   }
 };
+
+const ELECTRICAL = { voltageV: 'V', currentA: 'A', electricPowerW: 'W', durationS: 's' } as const;
+
+/** The same on both sides of the ocean. */
+const electrical = (kind: keyof typeof ELECTRICAL, value: number): PresentedValue => ({
+  value,
+  unit: ELECTRICAL[kind],
+});
 
 const unitless = (kind: 'fraction' | 'humidityRatio' | 'minutes' | 'days' | 'count', value: number): PresentedValue => {
   switch (kind) {

@@ -4,7 +4,6 @@ import { formula } from '../../derivation/formula';
 import { assertInRange } from '../../errors';
 import { specificVolumeM3PerKg } from '../../psychrometrics/moist-air';
 import { HUMIDITY_RATIO_LIMITS } from '../../psychrometrics/moist-air-limits';
-import { fieldKind } from '../field-kinds';
 
 export type AirPlace = 'return' | 'supply';
 
@@ -26,7 +25,7 @@ export const airSpecificVolume = (place: AirPlace): Formula<'dryBulbK' | 'humidi
 /** Specific heat of moist air in J/K per kg of *dry* air, 1006 + 1860 W: the slope of the enthalpy at constant humidity, exact for eq. 30. */
 export const airSpecificHeat = formula({
   id: 'airSpecificHeat',
-  gives: fieldKind('specificHeatJPerKgK'),
+  gives: 'specificHeatJPerKgK',
   text: 'c_air(W)',
   symbols: { humidityRatio: 'W' },
   source: 'ASHRAE Handbook - Fundamentals (2017), ch. 1, eq. 30: 1.006 + 1.86 W kJ/(kg K)',

@@ -4,7 +4,6 @@ import type { Formula } from '../../derivation/formula';
 import { formula } from '../../derivation/formula';
 import { EngineError } from '../../errors';
 import { SINGLE_POINT_SAMPLING } from '../air-side';
-import { fieldKind } from '../field-kinds';
 import type { AirPlace } from './air-properties';
 import { assertPositive } from './assert-positive';
 
@@ -23,7 +22,7 @@ export const temperatureRise = formula({
 /** Dry air in kg/s that a heat in W warms by a rise in K. A rise that is not above zero: `EngineError` `inconsistent-inputs`, reason `no-temperature-rise`. */
 export const dryAirMassFlowFromHeat = formula({
   id: 'dryAirMassFlow',
-  gives: fieldKind('massFlowKgPerS'),
+  gives: 'massFlowKgPerS',
   text: 'Q / (c × dT)',
   symbols: { heatW: 'Q', specificHeatJPerKgK: 'c', riseK: 'dT' },
   source: 'Heat balance of the air; common practice as cfm = Btu/h / (1.08 × ΔT) for standard air',
@@ -51,7 +50,7 @@ export const airflowFromMass = (place: AirPlace): Formula<'dryAirMassFlowKgPerS'
 /** Dry air in kg/s in an actual flow of m³/s, with the specific volume of the place where the flow was measured. */
 export const dryAirMassFlowFromVolume = formula({
   id: 'dryAirMassFlow',
-  gives: fieldKind('massFlowKgPerS'),
+  gives: 'massFlowKgPerS',
   text: 'V_air / v',
   symbols: { airflowM3PerS: 'V_air', specificVolumeM3PerKg: 'v' },
   source: 'Definition of the specific volume, per mass of dry air',
@@ -64,7 +63,7 @@ export const dryAirMassFlowFromVolume = formula({
 /** (m³/s)/W of nominal cooling capacity: cfm per ton on a screen. */
 export const airflowPerCapacity = formula({
   id: 'airflowPerCapacity',
-  gives: fieldKind('flowPerCapacityM3PerSPerW'),
+  gives: 'flowPerCapacityM3PerSPerW',
   text: 'V_air / Q_nominal',
   symbols: { airflowM3PerS: 'V_air', nominalCapacityW: 'Q_nominal' },
   source: 'Definition',

@@ -7,7 +7,6 @@ import type { Formula } from '../../derivation/formula';
 import { formula } from '../../derivation/formula';
 import { EngineError } from '../../errors';
 import { LEAST_WEIGHT } from '../chart';
-import { fieldKind } from '../field-kinds';
 import type { SourcedFigure } from '../sourced-figure';
 
 export interface FanTableRow {
@@ -106,7 +105,7 @@ export const fanTableError = (airflowM3PerS: number): ErrorPart => ({
 /** Return and supply static pressure are read against the room, one below it and one above: their sizes add, whichever sign was written down. */
 export const totalExternalStatic = formula({
   id: 'totalExternalStatic',
-  gives: fieldKind('staticPressurePa'),
+  gives: 'staticPressurePa',
   text: 'abs(P_return) + abs(P_supply)',
   symbols: { returnStaticPa: 'P_return', supplyStaticPa: 'P_supply' },
   source: 'Definition of total external static pressure; common practice, no source',
@@ -119,7 +118,7 @@ export const totalExternalStatic = formula({
  */
 export const staticInStandardAir = formula({
   id: 'staticInStandardAir',
-  gives: fieldKind('staticPressurePa'),
+  gives: 'staticPressurePa',
   text: 'P_external × rho_standard × v / (1 + W)',
   symbols: {
     externalStaticPa: 'P_external',

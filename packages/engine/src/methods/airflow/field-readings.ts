@@ -1,9 +1,7 @@
 /** Readings of the airflow methods as leaves, with what a digital instrument of the trade is usually good for where the person states nothing. */
-import type { ErrorPart, Known } from '../../derivation/quantity';
+import type { ErrorPart, Known, QuantityKind } from '../../derivation/quantity';
 import { leaf } from '../../derivation/quantity';
 import { staticPressureToPa } from '../../units';
-import type { FieldKind } from '../field-kinds';
-import { fieldKind } from '../field-kinds';
 import type { SourcedFigure } from '../sourced-figure';
 
 export const FIELD_READING_IDS = [
@@ -46,7 +44,7 @@ export const ASSUMED_FIELD_LIMITS: Readonly<Record<FieldReadingId, Assumed>> = {
   supplyStaticPressure: choice(staticPressureToPa(0.02, 'inH2O'), 'absolute', '±0.02 in. w.c.'),
 };
 
-const KINDS: Readonly<Record<FieldReadingId, FieldKind | 'fraction'>> = {
+const KINDS: Readonly<Record<FieldReadingId, QuantityKind>> = {
   lineVoltage: 'voltageV',
   heaterCurrent: 'currentA',
   blowerHeat: 'heatRateW',
@@ -72,5 +70,5 @@ export function fieldReading(
   const kind = KINDS[id];
   const key = instrumentId === undefined ? `reading:${id}` : `instrument:${kind}:${instrumentId}`;
   const parts: readonly ErrorPart[] = limit > 0 ? [{ key, u: limit / Math.sqrt(3), shape: 'rectangular' }] : [];
-  return leaf({ id, kind: kind === 'fraction' ? kind : fieldKind(kind), value, origin: 'reading', parts });
+  return leaf({ id, kind, value, origin: 'reading', parts });
 }

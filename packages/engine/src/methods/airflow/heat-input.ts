@@ -1,7 +1,6 @@
 /** Heat given to the air: by resistance elements, or by a gas furnace whose meter is clocked. */
 import { formula } from '../../derivation/formula';
 import { EngineError } from '../../errors';
-import { fieldKind } from '../field-kinds';
 import { assertPositive } from './assert-positive';
 
 /**
@@ -10,7 +9,7 @@ import { assertPositive } from './assert-positive';
  */
 export const electricHeat = formula({
   id: 'electricHeat',
-  gives: fieldKind('electricPowerW'),
+  gives: 'electricPowerW',
   text: 'U × I',
   symbols: { voltageV: 'U', currentA: 'I' },
   source: 'Electric power at power factor 1 (resistance heat, single phase); 1 W = 3.412 Btu/h',
@@ -27,7 +26,7 @@ export const electricHeat = formula({
  */
 export const gasInput = formula({
   id: 'gasInput',
-  gives: fieldKind('heatRateW'),
+  gives: 'heatRateW',
   text: 'V_dial / t × H_gas',
   symbols: { dialVolumeM3: 'V_dial', revolutionS: 't', heatingValueJPerM3: 'H_gas' },
   source: 'Clocking the gas meter: 3600 / seconds × dial size × heating value; common practice, no source',
@@ -42,7 +41,7 @@ export const gasInput = formula({
 /** Heat in W that reaches the air from a gas input, by the efficiency as a fraction; outside 0 to 1: `EngineError` `out-of-range`, reason `outside-0-to-1`. */
 export const gasHeat = formula({
   id: 'gasHeat',
-  gives: fieldKind('heatRateW'),
+  gives: 'heatRateW',
   text: 'Q_gas × eta',
   symbols: { gasInputW: 'Q_gas', efficiencyFraction: 'eta' },
   source: 'Efficiency as the nameplate states it: steady state (output over input), or AFUE in its place',
@@ -63,7 +62,7 @@ export const gasHeat = formula({
 /** Heat of the elements or the furnace and of the blower's motor in the air stream, W. */
 export const totalHeat = formula({
   id: 'totalHeat',
-  gives: fieldKind('heatRateW'),
+  gives: 'heatRateW',
   text: 'Q_heater + Q_blower',
   symbols: { heaterW: 'Q_heater', blowerW: 'Q_blower' },
   source: 'Heat balance; all power of a blower inside the air stream becomes heat in it',

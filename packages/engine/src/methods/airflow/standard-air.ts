@@ -6,7 +6,6 @@
 import { leaf } from '../../derivation/quantity';
 import { formula } from '../../derivation/formula';
 import { lengthToM, massToKg } from '../../units';
-import { fieldKind } from '../field-kinds';
 import type { SourcedFigure } from '../sourced-figure';
 
 /** kg/m³. */
@@ -19,7 +18,7 @@ export const STANDARD_AIR_DENSITY: SourcedFigure = {
 
 export const standardAirDensity = leaf({
   id: 'standardAirDensity',
-  kind: fieldKind('densityKgPerM3'),
+  kind: 'densityKgPerM3',
   value: STANDARD_AIR_DENSITY.value,
   origin: 'constant',
 });

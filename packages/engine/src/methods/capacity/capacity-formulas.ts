@@ -3,7 +3,6 @@
  * blower's heat is inside: the result is what the house gets, not what the coil does.
  */
 import { formula } from '../../derivation/formula';
-import { fieldKind } from '../field-kinds';
 import { assertPositive } from '../airflow/assert-positive';
 
 /** J/(kg K), liquid water near 10 °C, counted from 0 °C as enthalpies of moist air are (from memory; rounding of 4.19). */
@@ -27,7 +26,7 @@ export const totalCapacity = formula({
 /** Enthalpy of the condensate over that of water at 0 °C, in J per kg of dry air; it leaves at the supply air's temperature. Nothing condensed: 0. */
 export const condensateEnthalpy = formula({
   id: 'condensateEnthalpy',
-  gives: fieldKind('enthalpyDifferenceJPerKg'),
+  gives: 'enthalpyDifferenceJPerKg',
   text: 'max(W_return − W_supply, 0) × h_water(T_supply)',
   symbols: { returnHumidityRatio: 'W_return', supplyHumidityRatio: 'W_supply', supplyDryBulbK: 'T_supply' },
   source:
@@ -94,7 +93,7 @@ export const capacityRatio = formula({
 /** Dry air in kg/s in a flow stated as standard air. */
 export const dryAirMassFlowFromStandard = formula({
   id: 'dryAirMassFlow',
-  gives: fieldKind('massFlowKgPerS'),
+  gives: 'massFlowKgPerS',
   text: 'V_standard × rho_standard',
   symbols: { standardAirflowM3PerS: 'V_standard', standardDensityKgPerM3: 'rho_standard' },
   source: 'Definition of standard air: 0.075 lb/ft³, from memory of ANSI/AMCA 210 and ANSI/ASHRAE 51',

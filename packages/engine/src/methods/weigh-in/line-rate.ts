@@ -11,7 +11,6 @@ import { formula } from '../../derivation/formula';
 import type { Quantity } from '../../derivation/quantity';
 import { bareValue, leaf, missing } from '../../derivation/quantity';
 import type { RefrigerantId } from '../../refrigerants/catalogue';
-import { fieldKind } from '../field-kinds';
 import type { FigureStanding } from '../sourced-figure';
 import { R410A_LINE_RATES } from './data/line-rates';
 import type { LineSetKind, LiquidLineSize, PrintedLineRate } from './data/line-rates';
@@ -37,7 +36,7 @@ export const lineRateByDensity = (
 ): Formula<'r410aKgPerM' | 'density' | 'r410aDensity'> =>
   formula({
     id,
-    gives: fieldKind('chargeRateKgPerM'),
+    gives: 'chargeRateKgPerM',
     text: 'r_410A × rho / rho_410A',
     symbols: { r410aKgPerM: 'r_410A', density: 'rho', r410aDensity: 'rho_410A' },
     source: FACTOR_SOURCE,
@@ -55,7 +54,7 @@ export interface LineRateInput {
 /** The rate and where it comes from, or `null`: only the maker's rate will do. */
 export function lineRateOf({ id, refrigerant, kind, size, makersRateKgPerM }: LineRateInput): LineRate | null {
   if (makersRateKgPerM !== undefined) {
-    const rate = leaf({ id, kind: fieldKind('chargeRateKgPerM'), value: makersRateKgPerM, origin: 'entered' });
+    const rate = leaf({ id, kind: 'chargeRateKgPerM', value: makersRateKgPerM, origin: 'entered' });
     return { rate, origin: 'maker', standing: 'entered', source: "The maker's rate, as entered" };
   }
   if (size === undefined) {
@@ -82,7 +81,7 @@ export function lineRateOf({ id, refrigerant, kind, size, makersRateKgPerM }: Li
 const printedRate = (id: string, { value, limit }: PrintedLineRate): Quantity =>
   leaf({
     id,
-    kind: fieldKind('chargeRateKgPerM'),
+    kind: 'chargeRateKgPerM',
     value,
     origin: 'constant',
     // one maker's rate stands to another's alike for all sizes
@@ -101,4 +100,4 @@ function byDensity(id: LineRateInput['id'], printed: PrintedLineRate, density: n
 }
 
 const densityLeaf = (id: string, value: number): Quantity =>
-  leaf({ id, kind: fieldKind('densityKgPerM3'), value, origin: 'constant' });
+  leaf({ id, kind: 'densityKgPerM3', value, origin: 'constant' });
