@@ -61,7 +61,8 @@ export const EXAMPLE: EvaluationRequest = {
   },
 };
 
-export const engineBenches = (): readonly BenchRow[] => [...moistAir(), saturation(), ...evaluation()];
+/** The whole check first, as a page meets it: what runs before teaches the optimiser other habits. */
+export const engineBenches = (): readonly BenchRow[] => [...evaluation(), saturation(), ...moistAir()];
 
 function sumOver<T>(items: readonly T[], of: (item: T) => number): () => number {
   return () => {
@@ -79,7 +80,7 @@ function moistAir(): readonly BenchRow[] {
       const vapourPressurePa = relativeHumidityRatio * waterVapourSaturationPressurePa(dryBulbK);
       return { dryBulbC, dryBulbK, relativeHumidityRatio, pressurePa, vapourPressurePa };
     });
-  const against = (what: string, ours: () => number, theirs: () => number): BenchRow => {
+  const against = (what: string, accuracy: string, ours: () => number, theirs: () => number): BenchRow => {
     const [own, other] = timePerCall([
       { name: 'ours', run: ours, calls: STATES },
       { name: 'psychrolib', run: theirs, calls: STATES },
@@ -88,19 +89,21 @@ function moistAir(): readonly BenchRow[] {
     return {
       what,
       measured: duration(own!.ns),
-      comparedWith: `psychrolib 1.1.1: ${duration(other!.ns)}, ${ratio.toPrecision(3)} times as long`,
+      comparedWith: `psychrolib 1.1.1, ${accuracy}: ${duration(other!.ns)}, ${ratio.toPrecision(3)} times as long`,
       goal: `≥ ${LEAST_RATIO} times`,
       met: ratio >= LEAST_RATIO,
     };
   };
   return [
     against(
-      'wet bulb from dry bulb and relative humidity',
+      'wet bulb from dry bulb and relative humidity, to 1e-9 K',
+      'to 0.001 K',
       sumOver(states, wetBulbKFromRelativeHumidity),
       sumOver(states, (s) => oracle.GetTWetBulbFromRelHum(s.dryBulbC, s.relativeHumidityRatio, s.pressurePa)),
     ),
     against(
-      'dew point from vapour pressure',
+      'dew point from vapour pressure, to 1e-9 K',
+      'to 0.001 K',
       sumOver(states, (s) => dewPointKFromVapourPressure(s.vapourPressurePa)),
       sumOver(states, (s) => oracle.GetTDewPointFromVapPres(s.dryBulbC, s.vapourPressurePa)),
     ),

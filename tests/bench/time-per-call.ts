@@ -11,7 +11,7 @@ export interface Contender {
 }
 
 const ROUNDS = 41;
-const WARM_UP_MS = 300;
+const WARM_UP_MS = 1500;
 const ROUND_MS = 15;
 
 let sink = 0;

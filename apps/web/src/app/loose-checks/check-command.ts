@@ -1,6 +1,6 @@
 /** What a person can do to a loose check. Times and ids are in the command, so that applying it twice, or on two tabs, gives the same. */
 import type { ReadingId } from '@chargewright/engine';
-import type { DraftReading, DraftSetup, DraftVisit, FieldKey, TypedField, TypedValue } from './check-draft';
+import type { DraftEdit, DraftReading, DraftSetup, DraftVisit, FieldKey, TypedField, TypedValue } from './check-draft';
 
 interface Told {
   readonly checkId: string;
@@ -17,6 +17,7 @@ export type CheckCommand = Told &
     | { readonly do: 'visit'; readonly patch: Partial<DraftVisit> }
     | { readonly do: 'fill'; readonly example: ExampleCheck; readonly readingIds: readonly string[] }
     | { readonly do: 'retake' }
+    | { readonly do: 'take-back-retake'; readonly retired: readonly string[]; readonly runningSince: string | undefined }
     | { readonly do: 'remove' }
     | { readonly do: 'restore' }
   );
@@ -29,10 +30,9 @@ export interface ExampleCheck {
   readonly readings: Readonly<Partial<Record<ReadingId, TypedValue>>>;
 }
 
-/** An edit that is not committed yet, and when its last key was pressed. */
-export interface DraftEdit extends TypedValue {
+/** An edit with the id of its row in the store. */
+export interface KnownEdit extends DraftEdit {
   readonly id: string;
-  readonly editedAt: string;
 }
 
 /** All that is known of one check: what `CheckDraft` shows, and what it leaves out (corrected readings, deletion). */
@@ -45,9 +45,9 @@ export interface CheckState {
   readonly setup: DraftSetup;
   readonly visit: DraftVisit;
   readonly typed: Readonly<Partial<Record<TypedField, TypedValue>>>;
-  /** Every reading ever committed, oldest first. */
+  /** Every reading ever committed, in the order they were. */
   readonly readings: readonly DraftReading[];
   /** Ids of readings that an adjustment of the system made void; they stay in the history. */
   readonly retired: readonly string[];
-  readonly edits: Readonly<Partial<Record<FieldKey, DraftEdit>>>;
+  readonly edits: Readonly<Partial<Record<FieldKey, KnownEdit>>>;
 }

@@ -1,9 +1,10 @@
 /** Commands to states, and states to what the page shows. Pure: the page and the phone's store apply the same commands by it. */
 import { READING_IDS, type ReadingId } from '@chargewright/engine';
-import type { CheckCommand, CheckState, DraftEdit, ExampleCheck } from './check-command';
+import type { CheckCommand, CheckState, ExampleCheck, KnownEdit } from './check-command';
 import type {
   CheckDraft,
   CheckSummary,
+  DraftEdit,
   DraftReading,
   DraftVisit,
   FieldKey,
@@ -77,7 +78,7 @@ function setTyped(state: CheckState, field: TypedField, value: TypedValue): Chec
 }
 
 function type(state: CheckState, key: FieldKey, value: TypedValue, edit: { id: string; at: string }): CheckState {
-  const next: DraftEdit = {
+  const next: KnownEdit = {
     id: state.edits[key]?.id ?? edit.id,
     text: value.text,
     unit: value.unit,
@@ -86,14 +87,15 @@ function type(state: CheckState, key: FieldKey, value: TypedValue, edit: { id: s
   return { ...state, edits: { ...state.edits, [key]: next } };
 }
 
-function commit(state: CheckState, key: FieldKey, reading: { id: string; at: string }): CheckState {
+/** A reading is as old as its last keystroke: a value that a dead battery left in its field was not taken when somebody leaves the field at last. */
+function commit(state: CheckState, key: FieldKey, id: string): CheckState {
   const { [key]: edit, ...edits } = state.edits;
   if (!edit) return state;
-  const { text, unit } = edit;
+  const { text, unit, editedAt } = edit;
   const field = fieldOf(key);
   const without = { ...state, edits };
   return 'reading' in field
-    ? appendReading(without, field.reading, { text, unit }, { ...reading, source: 'typed' })
+    ? appendReading(without, field.reading, { text, unit }, { id, at: editedAt, source: 'typed' })
     : setTyped(without, field.typed, { text, unit });
 }
 
@@ -120,6 +122,12 @@ function fill(state: CheckState, example: ExampleCheck, ids: readonly string[], 
   );
 }
 
+/** What stood before the adjustment stands again; what was read since then stays, too. */
+function takeBackRetake(state: CheckState, retired: readonly string[], runningSince: string | undefined): CheckState {
+  const { runningSince: _, ...visit } = state.visit;
+  return { ...state, retired, visit: { ...visit, ...(runningSince !== undefined && { runningSince }) } };
+}
+
 function restored(state: CheckState): CheckState {
   const { deletedAt: _, ...others } = state;
   return others;
@@ -130,7 +138,7 @@ function entered(state: CheckState, command: Exclude<CheckCommand, { do: 'open' 
     case 'type':
       return type(state, command.field, command.value, { id: command.editId, at: command.at });
     case 'commit':
-      return commit(state, command.field, { id: command.readingId, at: command.at });
+      return commit(state, command.field, command.readingId);
     case 'choose':
       return { ...state, setup: { ...state.setup, ...command.setup } };
     case 'visit':
@@ -139,6 +147,8 @@ function entered(state: CheckState, command: Exclude<CheckCommand, { do: 'open' 
       return fill(state, command.example, command.readingIds, command.at);
     case 'retake':
       return { ...state, retired: state.readings.map(({ id }) => id) };
+    case 'take-back-retake':
+      return takeBackRetake(state, command.retired, command.runningSince);
     case 'restore':
       return state;
   }
@@ -153,7 +163,7 @@ export function applyCommand(state: CheckState | undefined, command: CheckComman
   return { ...restored(entered(before, command)), updatedAt: command.at };
 }
 
-const textAndUnit = ({ text, unit }: DraftEdit): TypedValue => ({ text, unit });
+const withoutId = ({ text, unit, editedAt }: KnownEdit): DraftEdit => ({ text, unit, editedAt });
 
 /** What the page shows of a check. */
 export const draftOf = (state: CheckState): CheckDraft => ({
@@ -164,7 +174,7 @@ export const draftOf = (state: CheckState): CheckDraft => ({
   visit: state.visit,
   typed: state.typed,
   readings: standingReadings(state),
-  edits: Object.fromEntries(Object.entries(state.edits).map(([key, edit]) => [key, textAndUnit(edit)])),
+  edits: Object.fromEntries(Object.entries(state.edits).map(([key, edit]) => [key, withoutId(edit)])),
 });
 
 /** One line of the list of checks. */

@@ -20,6 +20,12 @@ export interface TypedValue {
   readonly unit: string;
 }
 
+/** An edit that is not committed yet, and when its last key was pressed. */
+export interface DraftEdit extends TypedValue {
+  /** ISO 8601 in UTC. */
+  readonly editedAt: string;
+}
+
 /** Fields of the setup and the visit that hold a typed number. */
 export const TYPED_FIELDS = [
   'elevation',
@@ -38,6 +44,14 @@ export type TypedField = (typeof TYPED_FIELDS)[number];
 /** A field that can be typed into: a reading, or a number of the setup or visit. */
 export type FieldKey = `reading:${ReadingId}` | `typed:${TypedField}`;
 
+/** Whether an inverter runs in its maker's charge mode. */
+export const CHARGE_MODES = ['on', 'off', 'no-inverter'] as const;
+export type ChargeMode = (typeof CHARGE_MODES)[number];
+
+/** Ports that a target subcooling can hold for. */
+export const TARGET_PORTS = ['liquid', 'discharge'] as const satisfies readonly HighSidePort[];
+export type TargetPort = (typeof TARGET_PORTS)[number];
+
 /** The choices of the setup; nothing is chosen for the person. */
 export interface DraftSetup {
   readonly refrigerant?: string;
@@ -46,6 +60,8 @@ export interface DraftSetup {
   readonly kind?: SystemKind;
   readonly stage?: Stage;
   readonly highSidePort?: HighSidePort;
+  readonly targetSubcoolingPort?: TargetPort;
+  readonly chargeMode?: ChargeMode;
 }
 
 export interface DraftVisit {
@@ -83,7 +99,7 @@ export interface CheckDraft {
   /** The reading of each quantity that stands, after corrections. */
   readonly readings: Readonly<Partial<Record<ReadingId, DraftReading>>>;
   /** Typed and not committed yet: every keystroke lands here and is stored within a second. */
-  readonly edits: Readonly<Partial<Record<FieldKey, TypedValue>>>;
+  readonly edits: Readonly<Partial<Record<FieldKey, DraftEdit>>>;
 }
 
 /** One line of the list of loose checks. */

@@ -1,6 +1,6 @@
 /** A check's state as rows of the phone's store, and back. Pure. */
 import type { StoredCheckRow, StoredEditRow, StoredReadingRow, StoredRow } from '@chargewright/contract/stored-check';
-import type { CheckState, DraftEdit } from './check-command';
+import type { CheckState, KnownEdit } from './check-command';
 import type { DraftReading, FieldKey } from './check-draft';
 import { emptyCheck, summaryOf } from './check-draft-reducer';
 
@@ -28,12 +28,12 @@ export const checkRow = (state: CheckState): StoredCheckRow => {
 
 const readingRow = (body: DraftReading): StoredReadingRow => ({ id: body.id, kind: 'reading', schema: SCHEMA, body });
 
-const editRow = (checkId: string, field: FieldKey, edit: DraftEdit): StoredEditRow => {
+const editRow = (checkId: string, field: FieldKey, edit: KnownEdit): StoredEditRow => {
   const { id, text, unit, editedAt } = edit;
   return { id, kind: 'edit', schema: SCHEMA, body: { checkId, field, text, unit, editedAt } };
 };
 
-const editsOf = (state: CheckState | undefined) => Object.entries(state?.edits ?? {}) as [FieldKey, DraftEdit][];
+const editsOf = (state: CheckState | undefined) => Object.entries(state?.edits ?? {}) as [FieldKey, KnownEdit][];
 
 /** What has to be written, and which rows fall away, for the store to hold `after` in place of `before`. */
 export function rowChanges(
@@ -56,8 +56,8 @@ export function rowChanges(
   };
 }
 
-const byTimeThenId = (a: DraftReading, b: DraftReading) =>
-  a.takenAt === b.takenAt ? (a.id < b.id ? -1 : 1) : a.takenAt < b.takenAt ? -1 : 1;
+/** In the order they were committed: the ids are UUIDv7. A reading can have been typed before another and committed after it. */
+const byId = (a: DraftReading, b: DraftReading) => (a.id < b.id ? -1 : 1);
 
 /** Stands in for the lost row of a check. */
 function salvaged(checkId: string, times: readonly string[]): CheckState | undefined {
@@ -84,7 +84,7 @@ export function stateFromRows(checkId: string, rows: readonly StoredRow[]): Chec
     visit: own.visit,
     typed: own.typed,
     retired: own.retired,
-    readings: readings.sort(byTimeThenId),
+    readings: readings.sort(byId),
     edits: Object.fromEntries(
       edits.map(({ id, body: { field, text, unit, editedAt } }) => [field, { id, text, unit, editedAt }]),
     ),

@@ -43,6 +43,10 @@ export class LooseChecks {
   readonly #states = signal<ReadonlyMap<string, CheckState>>(new Map());
   /** The other checks of the store. */
   readonly #stored = signal<ReadonlyMap<string, CheckSummary>>(new Map());
+  /** What stood before the last adjustment. */
+  readonly #retaken = signal<
+    { readonly id: string; readonly retired: readonly string[]; readonly runningSince: string | undefined } | undefined
+  >(undefined);
   readonly #removed = signal<{ readonly id: string; readonly wasCurrent: boolean } | undefined>(undefined);
   readonly #setAside = signal(0);
   readonly #state = computed(
@@ -67,6 +71,8 @@ export class LooseChecks {
   });
   /** How many damaged rows of the store were put aside. */
   readonly setAside = this.#setAside.asReadonly();
+  /** The open check's readings were all asked again, and `undoRetake` can bring them back. */
+  readonly retaken = computed(() => this.#retaken()?.id === this.#currentId());
   /** The id of the check that `undoRemove` brings back. */
   readonly removed = computed(() => this.#removed()?.id);
 
@@ -108,12 +114,23 @@ export class LooseChecks {
     this.#tell({ do: 'fill', example, readingIds: Object.keys(example.readings).map(() => this.#newId()) });
   }
 
-  /** After an adjustment of the system: every reading is asked again; the old ones stay in the history. */
+  /** After an adjustment of the system: the clock starts anew and every reading is asked again; the old ones stay in the history. */
   retakeAll(): void {
     for (const field of Object.keys(this.#state().edits) as FieldKey[]) {
       if (field.startsWith('reading:')) this.commit(field);
     }
+    const { id, retired, visit } = this.#state();
+    this.#retaken.set({ id, retired, runningSince: visit.runningSince });
     this.#tell({ do: 'retake' });
+    this.visit({ runningSince: this.#now().toISOString() });
+  }
+
+  /** There was no adjustment: clock and readings stand as before. What was read meanwhile stays, too. */
+  undoRetake(): void {
+    const before = this.#retaken();
+    if (!before) return;
+    this.#retaken.set(undefined);
+    this.#tell({ do: 'take-back-retake', retired: before.retired, runningSince: before.runningSince }, before.id);
   }
 
   /** Opens an empty check, unless the open one is empty. */
