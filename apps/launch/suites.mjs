@@ -19,9 +19,9 @@ const vitest = (name, budgetSeconds) => {
 /** All suites in their order, each with the time it may take: over it, it fails, so that slowness is noticed. */
 export const allSuites = () => [
   whole('format', 60, node('node_modules/prettier/bin/prettier.cjs', '--check', '.')),
-  whole('lint', 180, node('node_modules/eslint/bin/eslint.js', '.', '--max-warnings', '0')),
-  whole('typecheck', 180, [...npmCommand(), 'run', 'typecheck']),
-  vitest('engine', 60),
+  whole('lint', 300, node('node_modules/eslint/bin/eslint.js', '.', '--max-warnings', '0')),
+  whole('typecheck', 240, [...npmCommand(), 'run', 'typecheck']),
+  vitest('engine', 120),
   vitest('wording', 30),
   vitest('contract', 30),
   vitest('api', 60),
@@ -33,9 +33,9 @@ export const allSuites = () => [
     report: 'test-results/web.json',
   },
   vitest('reference', 90),
-  vitest('property', 180),
+  vitest('property', 240),
   whole('build', 120, node('apps/launch/build-app.mjs')),
-  { ...vitest('browser', 240), needsChromium: true },
+  { ...vitest('browser', 420), needsChromium: true },
 ];
 
 /** The suites with these names, in their order; all without names. The browser's tests run on the built app. */
