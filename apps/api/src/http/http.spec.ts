@@ -178,20 +178,35 @@ describe('limits', () => {
     expect((await limited.ask('/healthz')).status).toBe(200);
   });
 
-  it('refuse evaluations beyond those under way, and take them again afterwards', async () => {
-    limited = await startTestServer({ limits: { ...LIMITS, evaluationsAtOnce: 1 } });
+  const EVALUATIONS = '/api/v1/evaluations';
+  const JSON_FROM = (address: string) => ({ 'Content-Type': 'application/json', 'X-Forwarded-For': address });
+
+  /** A sender that starts a body and never ends it. */
+  const startSlowBody = (address: string) => {
     const { port } = new URL(limited.url);
-    const slow = http.request({
-      port,
-      path: '/api/v1/evaluations',
-      method: 'POST',
-      headers: { 'Content-Type': 'application/json' },
-    });
+    const slow = http.request({ port, path: EVALUATIONS, method: 'POST', headers: JSON_FROM(address) });
     slow.on('error', () => undefined);
     slow.write('{');
-    await expect.poll(async () => (await limited.postJson('/api/v1/evaluations', {})).status).toBe(503);
+    return slow;
+  };
+  const statusFor = async (address: string) =>
+    (await limited.ask(EVALUATIONS, { method: 'POST', headers: JSON_FROM(address), body: '{}' })).status;
+
+  it('refuse evaluations beyond those under way, and take them again afterwards', async () => {
+    limited = await startTestServer({ trustProxy: 'loopback', limits: { ...LIMITS, evaluationsAtOnce: 1 } });
+    const slow = startSlowBody('203.0.113.1');
+    await expect.poll(() => statusFor('203.0.113.2')).toBe(503);
     slow.destroy();
-    await expect.poll(async () => (await limited.postJson('/api/v1/evaluations', {})).status).toBe(422);
+    await expect.poll(() => statusFor('203.0.113.2')).toBe(422);
+  });
+
+  it('leave other addresses their places when one fills its own with slow bodies', async () => {
+    limited = await startTestServer({ trustProxy: 'loopback', limits: { ...LIMITS, evaluationsAtOncePerAddress: 1 } });
+    const slow = startSlowBody('203.0.113.1');
+    await expect.poll(() => statusFor('203.0.113.1')).toBe(503);
+    expect(await statusFor('203.0.113.2')).toBe(422);
+    slow.destroy();
+    await expect.poll(() => statusFor('203.0.113.1')).toBe(422);
   });
 
   it('hold for one address each when a proxy is trusted to name them', async () => {

@@ -1,5 +1,5 @@
 import type { RequestHandler } from 'express';
-import { rateLimit } from 'express-rate-limit';
+import { ipKeyGenerator, rateLimit } from 'express-rate-limit';
 import { HttpProblem } from './http-problem';
 
 export interface Limits {
@@ -7,9 +7,11 @@ export interface Limits {
   readonly requestsPerSecond: number;
   /** Evaluations whose bodies are read or judged at one time. */
   readonly evaluationsAtOnce: number;
+  /** The share of them that one address may hold: a sender of slow bodies does not shut out the others. */
+  readonly evaluationsAtOncePerAddress: number;
 }
 
-export const LIMITS: Limits = { requestsPerSecond: 1_000, evaluationsAtOnce: 100 };
+export const LIMITS: Limits = { requestsPerSecond: 1_000, evaluationsAtOnce: 400, evaluationsAtOncePerAddress: 100 };
 
 const RETRY_AFTER_S = '1';
 
@@ -28,14 +30,23 @@ export function limitRate({ requestsPerSecond }: Limits): RequestHandler {
   });
 }
 
-/** Refuses with 503 when as many requests as `most` are under way. */
-export function limitConcurrency(most: number): RequestHandler {
+/** Refuses an evaluation with 503 when as many are under way as the limits allow, of all addresses or of this one. */
+export function limitEvaluations({ evaluationsAtOnce, evaluationsAtOncePerAddress }: Limits): RequestHandler {
   let underWay = 0;
-  return (_req, res, next) => {
-    if (underWay >= most) throw new HttpProblem('busy', { headers: { 'Retry-After': RETRY_AFTER_S } });
+  const underWayOf = new Map<string, number>();
+  return (req, res, next) => {
+    const address = ipKeyGenerator(req.ip ?? '');
+    const ofAddress = underWayOf.get(address) ?? 0;
+    if (underWay >= evaluationsAtOnce || ofAddress >= evaluationsAtOncePerAddress) {
+      throw new HttpProblem('busy', { headers: { 'Retry-After': RETRY_AFTER_S } });
+    }
     underWay += 1;
+    underWayOf.set(address, ofAddress + 1);
     res.once('close', () => {
       underWay -= 1;
+      const left = (underWayOf.get(address) ?? 1) - 1;
+      if (left > 0) underWayOf.set(address, left);
+      else underWayOf.delete(address);
     });
     next();
   };

@@ -10,5 +10,5 @@ function structureMessage({ kind, path, part, expected, allowed = [] }: Structur
   const right = expected === undefined ? allowed : [typeNames[expected]];
   // what is wrong with an amount's unit names it in the sentence; that it is not there does not
   const field = kind === 'missing' || kind === 'null' ? part : path;
-  return structureFaultText({ kind, field, allowed: right });
+  return structureFaultText({ kind, field: field === '' ? 'body' : field, allowed: right });
 }

@@ -72,7 +72,8 @@ export const toleranceAmount = object({
   unit,
 }).meta({
   id: 'Tolerance',
-  description: 'Limits of the deviation, both inclusive; null on a side without a limit.',
+  description:
+    'Limits of the deviation, or of the actual value where there is no target (superheat-window); both inclusive, null on a side without a limit.',
 });
 
 /** zod's `nullable()` of a named schema; as a union it comes out right in every generator of JSON Schema. */

@@ -38,14 +38,15 @@ const EXPECTED_TYPES: Readonly<Record<string, ExpectedType>> = {
 /** The fault a person is told for an issue of zod. */
 export function structureFault(issue: z.core.$ZodIssue, input: unknown): StructureFault {
   const last = issue.path.at(-1);
-  const inAmount = issue.path.length > 1 && last !== undefined && AMOUNT_PARTS.includes(last);
+  const inAmount = (issue.path.length > 1 && AMOUNT_PARTS.includes(last ?? '')) || issue.path.at(-2) === 'plusMinus';
   const where = {
     path: (inAmount ? issue.path.slice(0, -1) : issue.path).join('.'),
     part: issue.path.join('.'),
   };
   const given = valueAt(input, issue.path);
   if (given === undefined) return { ...where, kind: 'missing' };
-  if (given === null) return { ...where, kind: 'null' };
+  // a body cannot be left out, so of a null only its type can be said
+  if (given === null && last !== undefined) return { ...where, kind: 'null' };
   if (issue.code === 'invalid_type') {
     return { ...where, kind: 'wrong-type', expected: EXPECTED_TYPES[issue.expected] ?? 'object' };
   }

@@ -1,6 +1,14 @@
 import type { EvaluationAnswer } from '@chargewright/contract/evaluation';
 import { DERIVED_IDS, expandedUncertainty, moistAirEnthalpyBtuPerLb, temperatureFromK } from '@chargewright/engine';
-import type { CheckInput, CheckResult, CriterionResult, Known, Tolerance } from '@chargewright/engine';
+import type {
+  CheckInput,
+  CheckResult,
+  CriterionId,
+  CriterionResult,
+  Known,
+  QuantityKind,
+  Tolerance,
+} from '@chargewright/engine';
 import {
   cautionText,
   derivationLines,
@@ -64,7 +72,7 @@ function criterionAnswer(criterion: CriterionResult, system: UnitSystem): Criter
     target: target && uncertainAmount(target, system),
     targetSource: criterion.targetSource,
     deviation: deviation && uncertainAmount(deviation, system),
-    tolerance: deviation && tolerance && toleranceAnswer(tolerance, deviation, system),
+    tolerance: tolerance && toleranceAnswer(tolerance, KIND_OF_TOLERANCE[criterion.criterion] ?? 'differenceK', system),
     byRule: criterion.byRule,
     probabilityWithin: criterion.probabilityWithin,
     finding: criterion.finding,
@@ -86,7 +94,10 @@ function uncertainAmount(quantity: Known, system: UnitSystem): UncertainAmount {
   };
 }
 
-function toleranceAnswer({ low, high }: Tolerance, { kind }: Known, system: UnitSystem): Criterion['tolerance'] {
+/** A tolerance stands without an actual value, so its unit cannot come from one; the others judge a temperature difference. */
+const KIND_OF_TOLERANCE: Readonly<Partial<Record<CriterionId, QuantityKind>>> = { airflow: 'flowM3PerS' };
+
+function toleranceAnswer({ low, high }: Tolerance, kind: QuantityKind, system: UnitSystem): Criterion['tolerance'] {
   const limit = (value: number | null) => (value === null ? null : presentValue(kind, value, system).value);
   return { low: limit(low), high: limit(high), unit: presentValue(kind, 0, system).unit };
 }

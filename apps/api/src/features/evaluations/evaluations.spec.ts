@@ -5,13 +5,14 @@ import { READING_IDS } from '@chargewright/engine';
 import * as fc from 'fast-check';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import * as z from 'zod';
+import { LIMITS } from '../../http/limits';
 import { EVALUATION_EXAMPLE } from '../../testing/evaluation-example';
 import { startTestServer } from '../../testing/test-server';
 import type { TestServer } from '../../testing/test-server';
 
 let server: TestServer;
 beforeAll(async () => {
-  server = await startTestServer({ limits: { requestsPerSecond: 1_000_000, evaluationsAtOnce: 100 } });
+  server = await startTestServer({ limits: { ...LIMITS, requestsPerSecond: 1_000_000 } });
 });
 afterAll(() => server.close());
 
@@ -97,7 +98,7 @@ describe('a check that can be judged', () => {
       actual: null,
       target: { value: 10, unit: 'deltaF' },
       deviation: null,
-      tolerance: null,
+      tolerance: { low: -3, high: 3, unit: 'deltaF' },
       byRule: null,
       probabilityWithin: null,
       finding: 'not-judged',
@@ -105,6 +106,30 @@ describe('a check that can be judged', () => {
       reasonText: expect.stringContaining('liquid pressure') as unknown,
     });
     expect(derived).not.toHaveProperty('subcooling');
+  });
+
+  it('gives a window its limits, with and without an actual value', async () => {
+    const setup = { ...EVALUATION_EXAMPLE.setup, meteringDevice: 'txv' };
+    const windowOf = async (body: unknown) =>
+      (await evaluated(body)).criteria.find(({ criterion }) => criterion === 'superheat-window');
+    const read = await windowOf({ ...EVALUATION_EXAMPLE, setup });
+    expect(read).toMatchObject({ target: null, deviation: null, targetSource: 'procedure-window', finding: 'within' });
+    expect(read?.tolerance?.low).toBeCloseTo(4, 9);
+    expect(read?.tolerance?.high).toBeCloseTo(25, 9);
+    const unread = await windowOf({ setup: { ...setup, superheatRange: { low: 3, high: 8, unit: 'deltaC' } } });
+    expect(unread?.actual).toBeNull();
+    expect(unread?.tolerance?.low).toBeCloseTo(5.4, 9);
+    expect(unread?.tolerance?.high).toBeCloseTo(14.4, 9);
+    expect(unread?.tolerance?.unit).toBe('deltaF');
+  });
+
+  it('gives a criterion of airflow its limits in the unit of airflow', async () => {
+    const { criteria } = await evaluated(withReadings({ airflow: { value: 1_000, unit: 'cfm' } }));
+    expect(criteria.find(({ criterion }) => criterion === 'airflow')?.tolerance).toEqual({
+      low: 0,
+      high: null,
+      unit: 'cfm',
+    });
   });
 
   it('needs refrigerant and metering device only', async () => {
@@ -219,6 +244,15 @@ describe('a check that cannot be', () => {
         'Target subcooling is a temperature difference: give it in deltaF or deltaC, not in a unit of temperature.',
       'readings.returnWetBulb': 'Return wet bulb has a unit that does not fit: give degF, degC or K.',
       'readings.suctionPressure': 'Suction pressure, unit is missing.',
+    });
+  });
+
+  it('names a body that is no object, and the kind of a ± as part of the ±', async () => {
+    expect(await refused(null)).toEqual({ '': '“body” has the wrong type: give an object.' });
+    expect(await refused(7)).toEqual({ '': '“body” has the wrong type: give an object.' });
+    const plusMinus = { value: 1, unit: 'deltaF', kind: 'k3' };
+    expect(await refused(withReadings({ returnWetBulb: { value: 65, unit: 'degF', plusMinus } }))).toEqual({
+      'readings.returnWetBulb.plusMinus': 'Return wet bulb, plus or minus has an unknown value: give limit or k2.',
     });
   });
 
