@@ -1,4 +1,4 @@
-import { checkPageWords, looseChecksWords, offlineWords } from '@chargewright/wording';
+import { checkPageWords, looseChecksWords, offlineWords, setupWords } from '@chargewright/wording';
 import { describe, expect, it } from 'vitest';
 import { accessibilityFaults } from './harness/axe';
 import type { CheckPage } from './harness/check-page';
@@ -76,7 +76,27 @@ const STATES: readonly (readonly [name: string, Visit])[] = [
       await page.getByText('is above return dry bulb').first().waitFor();
     },
   ],
+  [
+    'asked again after an adjustment',
+    async ({ check }) => {
+      await check.button(checkPageWords.visit.restart).click();
+      await check.button(checkPageWords.visit.restart).click();
+      await check.button(looseChecksWords.undo).waitFor();
+    },
+  ],
   ['the setup opened again', ({ check }) => check.button(checkPageWords.setup.changeLabel).click()],
+  [
+    'the port of the target asked',
+    async ({ page, check }) => {
+      await check.meteringDevice('txv').click({ force: true });
+      await page
+        .getByRole('radio', { name: setupWords.highSidePort.options.discharge.label, exact: true })
+        .first()
+        .click({ force: true });
+      await page.getByText(setupWords.targetSubcoolingPort.label).waitFor();
+      await page.getByText(checkPageWords.setup.more).click();
+    },
+  ],
   [
     'no network',
     async ({ page, context, check }) => {

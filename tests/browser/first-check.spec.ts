@@ -1,4 +1,4 @@
-import { checkPageWords, readingWords, setupWords } from '@chargewright/wording';
+import { checkPageWords, loadReadingHelp, looseChecksWords, readingWords, setupWords } from '@chargewright/wording';
 import { describe, expect, it } from 'vitest';
 import { HIGH_SUPERHEAT, tabTo } from './harness/check-page';
 import { browserSuite } from './harness/suite';
@@ -65,13 +65,56 @@ describe('somebody who was never here', () => {
     await check.button(checkPageWords.example.clear).click();
     await check.refrigerant('R-410A').waitFor();
     expect(await check.refrigerant('R-410A').isChecked()).toBe(false);
+    await check.button(looseChecksWords.undo).click();
+    await check.announced('Superheat is 9.5 °F above target').waitFor();
+  });
+
+  it('is told before any reading that a mini-split cannot be judged by readings', async () => {
+    const { page, check } = await suite.newPhone();
+    await check.open();
+    await check.refrigerant('R-32').click({ force: true });
+    await check.meteringDevice('eev').click({ force: true });
+    await page
+      .getByRole('radio', { name: setupWords.kind.options['mini-split'].label, exact: true })
+      .click({ force: true });
+    await check.goToReadings();
+    await page
+      .getByText(/^Weigh the charge in, or use the maker’s test mode/)
+      .first()
+      .waitFor();
+    expect(await check.button(checkPageWords.result.nextReading).count()).toBe(0);
+  });
+
+  it('states which port a target holds for, where the gauge is at the discharge port', async () => {
+    const { page, check } = await suite.newPhone();
+    await check.open();
+    await check.refrigerant('R-410A').click({ force: true });
+    await check.meteringDevice('txv').click({ force: true });
+    const discharge = page.getByRole('radio', { name: setupWords.highSidePort.options.discharge.label, exact: true });
+    await discharge.first().click({ force: true });
+    await check.goToReadings();
+    await check.type(setupWords.numbers.targetSubcooling.label, '10');
+    const { liquidPressure: _, ...readings } = HIGH_SUPERHEAT;
+    await check.read({ ...readings, dischargePressure: '400', liquidLineTemperature: '98' });
+    await page
+      .getByText(/The target holds for another high-side port/)
+      .first()
+      .waitFor();
+    await check.button(checkPageWords.result.placeButton.readings).click();
+    await page.locator('input[name="targetSubcoolingPort"]:focus').waitFor({ state: 'attached' });
+    await page.keyboard.press('ArrowRight');
+    await page
+      .getByText(/^Subcooling is .* above target$/)
+      .first()
+      .waitFor();
   });
 
   it('is told at each reading where and how to take it, and the usual mistake', async () => {
     const { page, check } = await suite.newPhone();
     await check.open();
     await check.setUp('R-22', 'fixed-orifice');
-    const { label, place, how, mistake } = readingWords.returnWetBulb;
+    const { label, place } = readingWords.returnWetBulb;
+    const { how, mistake } = (await loadReadingHelp()).returnWetBulb;
     await page.getByRole('button', { name: new RegExp(checkPageWords.readings.howToLabel(label)) }).click();
     for (const text of [place, how, mistake]) await page.getByText(text, { exact: true }).last().waitFor();
   });

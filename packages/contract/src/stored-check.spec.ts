@@ -50,6 +50,12 @@ describe('a stored row', () => {
     expect(storedRow.parse(structuredClone(row))).toEqual(row);
   });
 
+  it('may say what the target subcooling holds for and how an inverter runs', () => {
+    const setup = { refrigerant: 'R-32', targetSubcoolingPort: 'discharge', chargeMode: 'off' };
+    const row = withBody(check, { setup });
+    expect(storedRow.parse(structuredClone(row))).toEqual(row);
+  });
+
   it('keeps any text that was typed, not only numbers', () => {
     expect(isGood(withBody(reading, { text: 'about 64?' }))).toBe(true);
     expect(isGood(withBody(edit, { text: '' }))).toBe(true);
@@ -65,6 +71,8 @@ describe('a stored row', () => {
     ['an endless text', withBody(reading, { text: '6'.repeat(201) })],
     ['an unknown field', withBody(edit, { field: 'reading:elevation' })],
     ['an unknown metering device', withBody(check, { setup: { meteringDevice: 'tap' } })],
+    ['an unknown charge mode', withBody(check, { setup: { chargeMode: true } })],
+    ['a target for no port', withBody(check, { setup: { targetSubcoolingPort: 'none' } })],
     ['a missing pre-flight', withBody(check, { visit: {} })],
     ['another version', { ...check, schema: 2 }],
   ])('with %s is refused', (_, row) => {

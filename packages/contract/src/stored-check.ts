@@ -54,6 +54,8 @@ const setup = z.object({
   kind: z.exactOptional(z.enum(SYSTEM_KINDS)),
   stage: z.exactOptional(z.enum(STAGES)),
   highSidePort: z.exactOptional(z.enum(HIGH_SIDE_PORTS)),
+  targetSubcoolingPort: z.exactOptional(z.enum(['liquid', 'discharge'])),
+  chargeMode: z.exactOptional(z.enum(['on', 'off', 'no-inverter'])),
 });
 
 const visit = z.object({

@@ -9,6 +9,8 @@ export * from './api-texts';
 export { problemDetails, typeNames } from './english/api';
 export type { StructureFault, StructureFaultKind } from './structure-fault';
 export type { Language } from './language';
+export { loadReadingHelp } from './load-reading-help';
+export type { ReadingHelp } from './english/reading-help';
 export type { ReadingWords } from './english/readings';
 export type { ChoiceWords, SetupFieldWords } from './english/setup';
 export { readingWords } from './english/readings';

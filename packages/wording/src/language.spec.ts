@@ -8,6 +8,7 @@ import { looseChecksWords } from './english/loose-checks';
 import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { offlineWords } from './english/offline';
+import { readingHelp } from './english/reading-help';
 import { readingWords } from './english/readings';
 import { reasonTexts } from './english/reasons';
 import * as safetyWords from './english/safety';
@@ -28,6 +29,7 @@ const english: Language = {
   faults: faultWords,
   structureFaults: structureFaultWords,
   readings: readingWords,
+  readingHelp,
   setup: setupWords,
   safety: safetyWords,
   checkPage: checkPageWords,

@@ -17,6 +17,7 @@ import type { CriterionParts } from './criterion-parts';
 import type { checkPageWords } from './english/check-page';
 import type { looseChecksWords } from './english/loose-checks';
 import type { offlineWords } from './english/offline';
+import type { readingHelp } from './english/reading-help';
 import type { readingWords } from './english/readings';
 import type * as safetyWords from './english/safety';
 import type { setupWords } from './english/setup';
@@ -82,6 +83,7 @@ export interface Language {
   readonly faults: FaultWords;
   readonly structureFaults: StructureFaultWords;
   readonly readings: typeof readingWords;
+  readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;
   readonly safety: typeof safetyWords;
   readonly checkPage: typeof checkPageWords;

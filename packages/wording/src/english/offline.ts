@@ -3,7 +3,6 @@ export const offlineWords = {
   ready: 'Ready to work without a network',
   offline: 'No network',
   offlineNote: 'Everything on this page works without one.',
-  online: 'Network is back',
   updateAvailable: 'A newer version is ready',
   updateNow: 'Use it now',
   updateLater: 'Later',
@@ -12,8 +11,4 @@ export const offlineWords = {
   reload: 'Load again',
   install: 'Install on this phone',
   installNote: 'Opens like an app, also without a network.',
-  installed: 'Installed',
-  installByHand: 'To install, open the browser’s menu and choose “Add to home screen”.',
-  notSecure: 'This address is not secure (no https): the app cannot work without a network from here.',
-  awake: 'Keep the screen on',
 };

@@ -61,6 +61,21 @@ const highSidePort: SetupFieldWords<HighSidePort> = {
   },
 };
 
+const targetSubcoolingPort: SetupFieldWords<Exclude<HighSidePort, 'none'>> = {
+  ...field(
+    'The target holds at the',
+    'port of the target subcooling',
+    'As the nameplate or the maker’s chart says. The two ports differ by the pressure drop of the outdoor coil.',
+  ),
+  options: { liquid: option('Liquid line'), discharge: option('Discharge line') },
+};
+
+/** Not a code of the engine, which only asks whether an inverter is in its charge mode. */
+const chargeMode: SetupFieldWords<'on' | 'off' | 'no-inverter'> = {
+  ...field('Inverter in its charge mode', 'charge mode', 'Out of it, its speed moves the readings.'),
+  options: { on: option('Yes'), off: option('No'), 'no-inverter': option('Not an inverter') },
+};
+
 const leakSearch: SetupFieldWords<LeakSearch> = {
   ...field('Leak search', 'leak search', 'On this visit, before any refrigerant is added.'),
   options: {
@@ -120,6 +135,8 @@ export const setupWords = {
   kind,
   stage,
   highSidePort,
+  targetSubcoolingPort,
+  chargeMode,
   leakSearch,
   numbers,
   preflight,

@@ -1,7 +1,6 @@
 import { provideRouter } from '@angular/router';
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
-import { SwUpdate } from '@angular/service-worker';
-import { checkPageWords, readingWords } from '@chargewright/wording';
+import { checkPageWords, looseChecksWords, readingWords, setupWords } from '@chargewright/wording';
 import { applyCommand } from '../loose-checks/check-draft-reducer';
 import type { CheckState } from '../loose-checks/check-command';
 import { OPEN_STORE, type LooseCheckStore } from '../loose-checks/loose-check-store';
@@ -111,7 +110,6 @@ beforeEach(async () => {
       provideRouter([]),
       { provide: OPEN_STORE, useValue: () => Promise.resolve(memoryStore()) },
       { provide: NOW, useValue: () => now },
-      { provide: SwUpdate, useValue: { isEnabled: false } },
     ],
   });
   // Parts of the page come later in an import of their own.
@@ -208,7 +206,67 @@ describe('Check a charge', () => {
     expect(described(readingWords.returnWetBulb.label)).toContain(checkPageWords.readings.staleAgo(11));
   });
 
-  it('asks every reading again after an adjustment', async () => {
+  it('tells the age of a value that was typed and never committed, before and after it is', async () => {
+    await setUp('Fixed orifice');
+    type(readingWords.outdoorDryBulb.label, '92');
+    await settle();
+    expect(described(readingWords.outdoorDryBulb.label)).toContain(checkPageWords.readings.editing);
+    now = new Date(now.getTime() + 11 * 60_000);
+    await vi.advanceTimersByTimeAsync(10_000);
+    await settle();
+    expect(described(readingWords.outdoorDryBulb.label)).toContain(checkPageWords.readings.staleAgo(11));
+    field(readingWords.outdoorDryBulb.label).dispatchEvent(new Event('blur'));
+    await settle();
+    expect(described(readingWords.outdoorDryBulb.label)).toContain(checkPageWords.readings.staleAgo(11));
+  });
+
+  it('brings a cleared example back where it was cleared', async () => {
+    await press(checkPageWords.example.button);
+    await press(checkPageWords.example.clear);
+    expect(page.textContent).toContain(checkPageWords.setup.missingBoth);
+    await press(looseChecksWords.undo);
+    expect(page.textContent).toContain('Superheat is 9.5 °F above target');
+  });
+
+  it('asks which port the target holds for at a discharge port only', async () => {
+    const port = setupWords.targetSubcoolingPort;
+    await setUp('TXV');
+    expect(page.textContent).not.toContain(port.label);
+    await press(checkPageWords.setup.changeLabel);
+    await choose(setupWords.highSidePort.options.discharge.label);
+    expect(page.textContent).toContain(port.label);
+    await press(checkPageWords.setup.done);
+    expect(page.textContent).toContain(port.label);
+  });
+
+  it('says at once that heating is not judged, and why, and asks for no reading', async () => {
+    await choose('R-410A');
+    await choose('TXV');
+    await choose('Heating');
+    await press(checkPageWords.setup.done);
+    const sheet = page.querySelector('app-result-sheet')?.textContent;
+    expect(sheet).toContain('Weigh the charge in');
+    expect(sheet).toContain('In heating');
+    expect(all('app-result-sheet button')).toEqual([]);
+  });
+
+  it('leads to the setup when the next step is there', async () => {
+    await choose('R-22');
+    await choose('Fixed orifice');
+    await choose('Packaged');
+    await press(checkPageWords.setup.done);
+    await press(checkPageWords.result.placeButton.setup);
+    expect(document.activeElement?.getAttribute('name')).toBe('highSidePort');
+  });
+
+  it('leads to the leak search, folded in though it is', async () => {
+    await press(checkPageWords.example.button);
+    await press(checkPageWords.result.placeButton.readings);
+    expect(document.activeElement?.getAttribute('name')).toBe('leakSearch');
+    expect(document.activeElement?.closest('details')?.open).toBe(true);
+  });
+
+  it('asks every reading again after an adjustment, and brings them back if there was none', async () => {
     await press(checkPageWords.example.button);
     await press(checkPageWords.visit.restart);
     expect(page.textContent).toContain(checkPageWords.visit.confirmRestart);
@@ -219,6 +277,9 @@ describe('Check a charge', () => {
     await settle();
     expect(field(readingWords.suctionPressure.label).value).toBe('');
     expect(page.textContent).toContain(checkPageWords.visit.runningFor(0));
+    await press(looseChecksWords.undo);
+    expect(field(readingWords.suctionPressure.label).value).toBe('116.5');
+    expect(page.textContent).toContain(checkPageWords.visit.runningFor(22));
   });
 
   it('takes relative humidity in place of the wet bulb', async () => {

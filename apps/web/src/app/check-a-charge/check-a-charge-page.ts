@@ -21,20 +21,24 @@ import { UnitPreference } from '../quantities/unit-preference';
 import { evaluateDraft } from './evaluate-draft';
 import { exampleCheck } from './example-check';
 import { readingKey, typedKey } from './field-key';
+import { afterPaint } from '../loose-checks/after-paint';
 import { FindingAnnouncer } from './finding-announcer';
+import { goToControl } from './next-step-place';
 import { PageClock } from './page-clock';
 import { Preflight } from './preflight';
+import { ReadingHelpTexts } from './reading-help-texts';
 import { ReadingRow } from './reading-row';
 import { humidityShown, readingSections, type SectionId } from './reading-order';
 import { fieldView, inputId, isOpen, type FieldView, type PageState } from './reading-rows';
 import { RememberedElevation } from './remembered-elevation';
-import { runningMinutes } from './request-from-draft';
+import { asksTargetPort, runningMinutes } from './request-from-draft';
 import { ResultColumn } from './result-column';
 import { ResultSheet } from './result-sheet';
-import { summarise } from './result-summary';
+import { bareSummary, summarise } from './result-summary';
 import { settledDraft } from './settled-draft';
 import { SetupForm, type FieldTyped } from './setup-form';
 import { plateTitle, SetupPlate } from './setup-plate';
+import { TargetPort } from './target-port';
 import { VisitClock } from './visit-clock';
 
 const MS_PER_MINUTE = 60_000;
@@ -80,6 +84,7 @@ const isTextField = (target: EventTarget | null): boolean =>
     SetupForm,
     SetupPlate,
     StorageNote,
+    TargetPort,
     VisitClock,
   ],
   providers: [PageClock],
@@ -115,7 +120,10 @@ export class CheckAChargePage {
     computation: () => !untracked(this.isSetUp),
   });
   protected readonly fieldInUse = signal(false);
-  protected readonly clockRestarted = signal(false);
+  private readonly exampleCleared = linkedSignal<string, string | undefined>({
+    source: this.checkId,
+    computation: () => undefined,
+  });
 
   protected readonly words = checkPageWords;
   protected readonly checkWords = looseChecksWords;
@@ -123,6 +131,10 @@ export class CheckAChargePage {
   protected readonly sectionWords = sectionWords;
   protected readonly system = this.units.system;
   protected readonly isLoading = computed(() => this.checks.state() === 'loading');
+  protected readonly retaken = this.checks.retaken;
+  protected readonly canUndoClear = computed(
+    () => this.exampleCleared() !== undefined && this.exampleCleared() === this.checks.removed(),
+  );
   protected readonly setupOpen = computed(() => this.setupWanted() || !this.isSetUp());
   protected readonly setupMissing = computed(() => {
     const { refrigerant, meteringDevice } = this.draft().setup;
@@ -162,23 +174,32 @@ export class CheckAChargePage {
       Object.keys(this.draft().readings).length > 0 ||
       Object.keys(this.settled().edits).some((key) => key.startsWith('reading:')),
   );
-  protected readonly summary = computed(() => summarise(this.evaluation(), this.hasReadings() ? 1 : 0, this.system()));
+  protected readonly summary = computed(() => summarise(this.evaluation(), this.hasReadings(), this.system()));
   protected readonly sheetSummary = computed(() =>
-    this.setupOpen()
-      ? {
-          headline: this.setupMissing() || plateTitle(this.draft()),
-          notYet: [],
-          step: '',
-          isStop: false,
-          leading: null,
-        }
-      : this.summary(),
+    this.setupOpen() ? bareSummary(this.setupMissing() || plateTitle(this.draft())) : this.summary(),
   );
   protected readonly next = computed<FieldView | undefined>(() =>
-    this.asked()
-      .flatMap(({ fields }) => fields)
-      .find(isOpen),
+    this.summary().isRefused
+      ? undefined
+      : this.asked()
+          .flatMap(({ fields }) => fields)
+          .find(isOpen),
   );
+  /** A step in the setup comes before any reading, one among the readings after the last. */
+  private readonly place = computed(() => {
+    const { place } = this.summary();
+    return place?.view === 'setup' || !this.next() ? place : null;
+  });
+  protected readonly mainButton = computed(() => {
+    if (this.setupOpen()) return this.words.setup.done;
+    const place = this.place();
+    return place ? this.words.result.placeButton[place.view] : undefined;
+  });
+
+  constructor() {
+    const help = inject(ReadingHelpTexts);
+    afterNextRender(() => afterPaint(this.host.nativeElement.ownerDocument, () => void help.load()));
+  }
 
   protected choose(setup: Partial<DraftSetup>): void {
     this.recallElevation();
@@ -208,7 +229,15 @@ export class CheckAChargePage {
   }
 
   protected async clearExample(): Promise<void> {
-    await this.checks.remove(this.draft().id);
+    const { id } = this.draft();
+    await this.checks.remove(id);
+    this.exampleCleared.set(id);
+    this.startAtTop();
+  }
+
+  protected async undoClear(): Promise<void> {
+    await this.checks.undoRemove();
+    this.clock.tick();
     this.startAtTop();
   }
 
@@ -224,7 +253,7 @@ export class CheckAChargePage {
 
   protected closeSetup(): void {
     if (!this.isSetUp()) {
-      this.focusFirst(this.draft().setup.refrigerant === undefined ? 'refrigerant' : 'meteringDevice');
+      this.goTo(`input[name="${this.draft().setup.refrigerant === undefined ? 'refrigerant' : 'meteringDevice'}"]`);
       return;
     }
     this.setupWanted.set(false);
@@ -234,29 +263,47 @@ export class CheckAChargePage {
   protected startClock(minutesAgo: number): void {
     this.checks.visit({ runningSince: new Date(this.now().getTime() - minutesAgo * MS_PER_MINUTE).toISOString() });
     this.clock.tick();
-    this.clockRestarted.set(false);
   }
 
   /** After an adjustment nothing read before it counts. */
   protected restartAfterAdjustment(): void {
     this.checks.retakeAll();
-    this.startClock(0);
-    this.clockRestarted.set(true);
+    this.clock.tick();
+  }
+
+  protected undoRetake(): void {
+    this.checks.undoRetake();
+    this.clock.tick();
+    this.goTo('app-visit-clock button');
   }
 
   protected switchHumidity(): void {
     this.humidityChosen.set(!this.byHumidity());
     const id = this.byHumidity() ? 'returnRelativeHumidity' : 'returnWetBulb';
-    this.onceShown(() => this.focusInput(inputId(readingKey(id))));
+    this.goTo(`#${inputId(readingKey(id))}`);
   }
 
   protected isHumidity({ key }: FieldView): boolean {
     return key === 'reading:returnWetBulb' || key === 'reading:returnRelativeHumidity';
   }
 
+  protected asksPort({ key }: FieldView): boolean {
+    return key === 'typed:targetSubcooling' && asksTargetPort(this.draft().setup);
+  }
+
+  protected pressMain(): void {
+    const place = this.place();
+    if (this.setupOpen()) this.closeSetup();
+    else if (place) {
+      if (place.view === 'setup') this.openSetup();
+      this.goTo(place.control);
+    }
+  }
+
   protected goToNext(): void {
     const next = this.next();
-    if (next) this.focusInput(next.id);
+    // Within the tap, or some phones do not bring up their keyboard.
+    if (next) goToControl(this.host.nativeElement, `#${next.id}`);
   }
 
   /** Enter: the next field on the page; after the last one the keyboard goes and the result has the room. */
@@ -292,12 +339,8 @@ export class CheckAChargePage {
     this.checks.commit('typed:elevation');
   }
 
-  private focusInput(id: string): void {
-    this.host.nativeElement.querySelector<HTMLInputElement>(`#${id}`)?.focus();
-  }
-
-  private focusFirst(name: string): void {
-    this.host.nativeElement.querySelector<HTMLInputElement>(`input[name="${name}"]`)?.focus();
+  private goTo(control: string): void {
+    this.onceShown(() => goToControl(this.host.nativeElement, control));
   }
 
   /** Another view of the page: from its top, and the keyboard's place with it, since the button pressed is gone. */

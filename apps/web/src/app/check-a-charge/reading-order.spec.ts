@@ -55,7 +55,7 @@ describe('readingSections', () => {
     const sections = readingSections(
       draft(
         { meteringDevice: 'txv', highSidePort: 'discharge' },
-        { 'reading:liquidPressure': { text: '395', unit: 'psig' } },
+        { 'reading:liquidPressure': { text: '395', unit: 'psig', editedAt: '' } },
       ),
       false,
     );
@@ -64,7 +64,7 @@ describe('readingSections', () => {
 });
 
 describe('humidityShown', () => {
-  const typed = draft({}, { 'reading:returnRelativeHumidity': { text: '50', unit: '%' } });
+  const typed = draft({}, { 'reading:returnRelativeHumidity': { text: '50', unit: '%', editedAt: '' } });
 
   it('follows the choice, and without one what was typed', () => {
     expect(humidityShown(draft({}), undefined)).toBe(false);

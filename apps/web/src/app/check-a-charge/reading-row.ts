@@ -1,8 +1,9 @@
-import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
-import { checkPageWords } from '@chargewright/wording';
+import { ChangeDetectionStrategy, Component, computed, inject, input, output, signal } from '@angular/core';
+import { checkPageWords, readingWords } from '@chargewright/wording';
 import { Glyph } from '../layout/glyph';
 import type { TypedValue } from '../loose-checks/check-draft';
 import { NumberField } from '../quantities/number-field';
+import { ReadingHelpTexts } from './reading-help-texts';
 import type { FieldView } from './reading-rows';
 
 /** One field with its name, where its value comes from, what is wrong with it, and how to take it. */
@@ -14,6 +15,8 @@ import type { FieldView } from './reading-rows';
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ReadingRow {
+  private readonly helpTexts = inject(ReadingHelpTexts);
+
   readonly view = input.required<FieldView>();
   readonly optional = input(false);
 
@@ -31,7 +34,17 @@ export class ReadingRow {
     this.view().complaints.length > 0 ? `${this.complaintId()} ${this.noteId()}` : this.noteId(),
   );
 
+  protected readonly place = computed(() => {
+    const { reading } = this.view();
+    return reading && readingWords[reading].place;
+  });
+  protected readonly help = computed(() => {
+    const { reading } = this.view();
+    return reading && this.helpTexts.texts()?.[reading];
+  });
+
   protected toggleHelp(): void {
+    void this.helpTexts.load();
     this.open.update((open) => !open);
   }
 }

@@ -23,7 +23,8 @@ export interface FieldView {
   readonly note: string;
   readonly stale: boolean;
   readonly complaints: readonly string[];
-  readonly help: { readonly place: string; readonly how: string; readonly mistake: string } | null;
+  /** The reading whose "where and how" can be opened; null for a number of setup or visit. */
+  readonly reading: ReadingId | null;
 }
 
 const PROBLEM_TEXTS: Readonly<Record<NumberProblem, string>> = {
@@ -69,20 +70,21 @@ export function fieldView(key: FieldKey, page: PageState): FieldView {
   const name = key.slice(key.indexOf(':') + 1);
   if (!key.startsWith('reading:')) {
     const { label, hint } = setupWords.numbers[name as TypedField];
-    return { ...shared, label, note: hint, stale: false, help: null };
+    return { ...shared, label, note: hint, stale: false, reading: null };
   }
   const id = name as ReadingId;
   const words = readingWords[id];
   const age = blank(value) ? undefined : ageSeconds(draft, id, nowMs);
   const stale = age !== undefined && age > STALE_AFTER_SECONDS;
-  return { ...shared, label: words.label, note: noteOf(draft, key, id, age, words.place), stale, help: words };
+  return { ...shared, label: words.label, note: noteOf(draft, key, id, age, words.place), stale, reading: id };
 }
 
 function noteOf(draft: CheckDraft, key: FieldKey, id: ReadingId, age: number | undefined, place: string): string {
   const words = checkPageWords.readings;
-  if (draft.edits[key] && !blank(draft.edits[key])) return words.editing;
   if (age === undefined) return place;
   const minutes = Math.floor(age / 60);
+  // Typed and left before it was committed, as by a dead battery: its age counts, not that it is in a field.
+  if (draft.edits[key] && minutes < 1) return words.editing;
   if (age > STALE_AFTER_SECONDS) return words.staleAgo(minutes);
   return draft.readings[id]?.source === 'example' ? words.example : words.typedAgo(minutes);
 }

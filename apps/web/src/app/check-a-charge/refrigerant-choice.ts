@@ -1,13 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
-import {
-  COMMON_REFRIGERANT_IDS,
-  isRefrigerantId,
-  REFRIGERANT_IDS,
-  refrigerantFacts,
-  type RefrigerantId,
-} from '@chargewright/engine';
+import { COMMON_REFRIGERANT_IDS, REFRIGERANT_IDS, refrigerantFacts, type RefrigerantId } from '@chargewright/engine';
 import { checkPageWords, safetyWords, setupWords } from '@chargewright/wording';
 import { ChoiceGroup, type Choice } from './choice-group';
+import { flammabilityOf } from './flammability';
 
 const words = checkPageWords.setup;
 
@@ -19,9 +14,6 @@ const choiceOf = (id: RefrigerantId): Choice<RefrigerantId> => ({
 
 /** Digits and letters decide: "410", "r410a" and "R-410A" find the same. */
 const plain = (text: string): string => text.toLowerCase().replace(/[^a-z0-9]/g, '');
-
-/** Classes 2L, 2 and 3 of ASHRAE 34 burn. */
-const FLAMMABLE = /[23]/;
 
 const COMMON: ReadonlySet<string> = new Set(COMMON_REFRIGERANT_IDS);
 const byNumber = new Intl.Collator('en', { numeric: true });
@@ -91,7 +83,7 @@ export class RefrigerantChoice {
   protected readonly safety = safetyWords.flammable;
   protected readonly burns = computed(() => {
     const chosen = this.chosen();
-    return chosen !== undefined && isRefrigerantId(chosen) && FLAMMABLE.test(refrigerantFacts(chosen).safetyClass);
+    return chosen !== undefined && flammabilityOf(chosen) !== null;
   });
   protected readonly found = computed<readonly Choice[]>(() => {
     const sought = plain(this.sought());

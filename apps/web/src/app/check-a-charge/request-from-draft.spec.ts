@@ -40,6 +40,25 @@ describe('requestFromDraft', () => {
     expect(request?.visit).toEqual({ preflight: {} });
   });
 
+  it('says which port the target holds for at a discharge port with a valve, and nowhere else', () => {
+    const asked = { refrigerant: 'R-410A', meteringDevice: 'txv', targetSubcoolingPort: 'discharge' } as const;
+    const portOf = (setup: CheckDraft['setup']) =>
+      requestFromDraft(draft({ setup }), NOW).request?.setup.targetSubcoolingPort;
+    expect(portOf({ ...asked, highSidePort: 'discharge' })).toBe('discharge');
+    expect(portOf({ ...asked, highSidePort: 'liquid' })).toBeUndefined();
+    expect(portOf({ ...asked, highSidePort: 'discharge', meteringDevice: 'fixed-orifice' })).toBeUndefined();
+  });
+
+  it('says of an inverter whether it is in its charge mode, and nothing of another unit', () => {
+    const modeOf = (chargeMode: CheckDraft['setup']['chargeMode'] & string, mode: 'cooling' | 'heating' = 'cooling') =>
+      requestFromDraft(draft({ setup: { refrigerant: 'R-32', meteringDevice: 'eev', mode, chargeMode } }), NOW).request
+        ?.setup.chargeMode;
+    expect(modeOf('on')).toBe(true);
+    expect(modeOf('off')).toBe(false);
+    expect(modeOf('no-inverter')).toBeUndefined();
+    expect(modeOf('off', 'heating')).toBeUndefined();
+  });
+
   it('gives a reading its number, unit, age, and the step its decimals tell', () => {
     const { request } = requestFromDraft(
       draft({ readings: { returnWetBulb: reading('returnWetBulb', '64,50', 'degF', ago(90)) } }),
@@ -48,22 +67,22 @@ describe('requestFromDraft', () => {
     expect(request?.readings.returnWetBulb).toEqual({ value: 64.5, unit: 'degF', resolution: 0.01, ageSeconds: 90 });
   });
 
-  it('takes what is being typed in place of what was committed, as new', () => {
+  it('takes what is being typed in place of what was committed, as old as its last keystroke', () => {
     const { request } = requestFromDraft(
       draft({
         readings: { suctionPressure: reading('suctionPressure', '116', 'psig', ago(900)) },
-        edits: { 'reading:suctionPressure': { text: '8', unit: 'barg' } },
+        edits: { 'reading:suctionPressure': { text: '8', unit: 'barg', editedAt: ago(700) } },
       }),
       NOW,
     );
-    expect(request?.readings.suctionPressure).toEqual({ value: 8, unit: 'barg', resolution: 1, ageSeconds: 0 });
+    expect(request?.readings.suctionPressure).toEqual({ value: 8, unit: 'barg', resolution: 1, ageSeconds: 700 });
   });
 
   it('leaves out a reading that is being deleted', () => {
     const { request } = requestFromDraft(
       draft({
         readings: { suctionPressure: reading('suctionPressure', '116', 'psig') },
-        edits: { 'reading:suctionPressure': { text: ' ', unit: 'psig' } },
+        edits: { 'reading:suctionPressure': { text: ' ', unit: 'psig', editedAt: ago(0) } },
       }),
       NOW,
     );
@@ -71,7 +90,10 @@ describe('requestFromDraft', () => {
   });
 
   it('names what is not a number and leaves it out', () => {
-    const read = requestFromDraft(draft({ edits: { 'reading:outdoorDryBulb': { text: '9x', unit: 'degF' } } }), NOW);
+    const read = requestFromDraft(
+      draft({ edits: { 'reading:outdoorDryBulb': { text: '9x', unit: 'degF', editedAt: ago(0) } } }),
+      NOW,
+    );
     expect(read.problems.get('reading:outdoorDryBulb')).toBe('not-a-number');
     expect(read.request?.readings).toEqual({});
   });

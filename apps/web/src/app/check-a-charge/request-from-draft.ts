@@ -10,7 +10,7 @@ import type {
   VisitInput,
 } from '@chargewright/engine';
 import { READING_IDS } from '@chargewright/engine';
-import type { CheckDraft, FieldKey, TypedField } from '../loose-checks/check-draft';
+import type { CheckDraft, DraftSetup, FieldKey, TypedField } from '../loose-checks/check-draft';
 import { isUnitOf } from '../quantities/field-units';
 import { parseNumber, type NumberProblem, type TypedNumber } from '../quantities/parse-number';
 import { ALL_FIELD_KEYS, pathOf, readingKey, typedKey, valueIn } from './field-key';
@@ -33,12 +33,11 @@ const MS_PER_MINUTE = 60_000;
 /** The page's clock ticks every few seconds, so a value typed since the last tick would lie in its future: it is new. */
 const elapsedMs = (since: string, nowMs: number): number => Math.max(0, nowMs - Date.parse(since));
 
-/** Age of what stands in the field of a reading; something still being typed is new. */
+/** Age of what stands in the field of a reading, counted from the last keystroke while it is being typed. */
 export function ageSeconds(draft: CheckDraft, id: ReadingId, nowMs: number): number | undefined {
-  if (draft.edits[readingKey(id)]) return 0;
-  const reading = draft.readings[id];
-  if (!reading) return undefined;
-  const age = elapsedMs(reading.takenAt, nowMs) / MS_PER_SECOND;
+  const takenAt = draft.edits[readingKey(id)]?.editedAt ?? draft.readings[id]?.takenAt;
+  if (takenAt === undefined) return undefined;
+  const age = elapsedMs(takenAt, nowMs) / MS_PER_SECOND;
   return Number.isFinite(age) ? age : undefined;
 }
 
@@ -49,6 +48,14 @@ export function runningMinutes(draft: CheckDraft, nowMs: number): number | undef
   const minutes = elapsedMs(runningSince, nowMs) / MS_PER_MINUTE;
   return Number.isFinite(minutes) ? minutes : undefined;
 }
+
+/** Only at a discharge port does a target for the liquid port differ from one for this port. An answer to a question out of sight does not count. */
+export const asksTargetPort = ({ highSidePort, meteringDevice }: DraftSetup): boolean =>
+  highSidePort === 'discharge' && (meteringDevice === 'txv' || meteringDevice === 'eev');
+
+/** In heating, and where the refrigerant is metered outdoors, the charge is not judged by readings anyway. */
+export const asksChargeMode = ({ mode, kind }: DraftSetup): boolean =>
+  mode !== 'heating' && kind !== 'mini-split' && kind !== 'multi-split';
 
 export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsRequest {
   const entries = new Map<FieldKey, Entry>();
@@ -64,13 +71,17 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
     else faults.push({ code: 'wrong-unit', figures: {}, path: pathOf(key) });
   }
 
-  const { refrigerant, meteringDevice } = draft.setup;
+  const { refrigerant, meteringDevice, chargeMode, targetSubcoolingPort, ...choices } = draft.setup;
   if (refrigerant === undefined || meteringDevice === undefined) return { request: null, problems, faults };
 
   const setup: SetupInput = {
-    ...draft.setup,
+    ...choices,
     refrigerant,
     meteringDevice,
+    ...(targetSubcoolingPort && asksTargetPort(draft.setup) && { targetSubcoolingPort }),
+    ...(chargeMode &&
+      chargeMode !== 'no-inverter' &&
+      asksChargeMode(draft.setup) && { chargeMode: chargeMode === 'on' }),
     ...amounts(entries, [
       'elevation',
       'targetSubcooling',

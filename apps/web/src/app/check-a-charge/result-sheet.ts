@@ -41,7 +41,7 @@ export class ResultSheet {
   readonly brief = input(false);
   /** Name of the reading that comes next; none when all are there. */
   readonly nextReading = input<string>();
-  /** In place of the next reading, while the setup is open. */
+  /** In place of the next reading, while something else comes first. */
   readonly mainButton = input<string>();
 
   readonly goNext = output<void>();

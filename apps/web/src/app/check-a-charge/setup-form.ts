@@ -1,26 +1,25 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
 import { HIGH_SIDE_PORTS, METERING_DEVICES, MODES, STAGES, SYSTEM_KINDS, type SetupField } from '@chargewright/engine';
 import { checkPageWords, setupWords, type SetupFieldWords } from '@chargewright/wording';
-import type { CheckDraft, DraftSetup, FieldKey, TypedValue } from '../loose-checks/check-draft';
-import { ChoiceGroup, type Choice } from './choice-group';
+import {
+  CHARGE_MODES,
+  type CheckDraft,
+  type DraftSetup,
+  type FieldKey,
+  type TypedValue,
+} from '../loose-checks/check-draft';
+import { ChoiceGroup } from './choice-group';
+import { choicesOf } from './choices';
 import { ReadingRow } from './reading-row';
 import type { FieldView } from './reading-rows';
 import { RefrigerantChoice } from './refrigerant-choice';
+import { asksChargeMode, asksTargetPort } from './request-from-draft';
+import { TargetPort } from './target-port';
 
 export interface FieldTyped {
   readonly key: FieldKey;
   readonly value: TypedValue;
 }
-
-const choicesOf = <Option extends string>(
-  options: readonly Option[],
-  words: SetupFieldWords<Option>,
-  hinted: boolean,
-): readonly Choice<Option>[] =>
-  options.map((value) => {
-    const { label, hint } = words.options[value];
-    return { value, label, ...(hinted && hint !== '' && { hint }) };
-  });
 
 /** The engine's own assumptions when nothing is stated (design.md 4). */
 const ASSUMED = { kind: 'split', mode: 'cooling', stage: 'full', highSidePort: 'liquid' } as const satisfies Required<
@@ -28,16 +27,16 @@ const ASSUMED = { kind: 'split', mode: 'cooling', stage: 'full', highSidePort: '
 >;
 
 const SYSTEM_FIELDS = [
-  { field: 'kind', choices: choicesOf(SYSTEM_KINDS, setupWords.kind, false) },
-  { field: 'mode', choices: choicesOf(MODES, setupWords.mode, false) },
-  { field: 'stage', choices: choicesOf(STAGES, setupWords.stage, false) },
-  { field: 'highSidePort', choices: choicesOf(HIGH_SIDE_PORTS, setupWords.highSidePort, false) },
+  { field: 'kind', choices: choicesOf(SYSTEM_KINDS, setupWords.kind) },
+  { field: 'mode', choices: choicesOf(MODES, setupWords.mode) },
+  { field: 'stage', choices: choicesOf(STAGES, setupWords.stage) },
+  { field: 'highSidePort', choices: choicesOf(HIGH_SIDE_PORTS, setupWords.highSidePort) },
 ] as const;
 
 /** What must be right before any reading. */
 @Component({
   selector: 'app-setup-form',
-  imports: [ChoiceGroup, ReadingRow, RefrigerantChoice],
+  imports: [ChoiceGroup, ReadingRow, RefrigerantChoice, TargetPort],
   templateUrl: './setup-form.html',
   styleUrl: './setup-form.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -54,8 +53,12 @@ export class SetupForm {
 
   protected readonly words = checkPageWords.setup;
   protected readonly metering = setupWords.meteringDevice;
-  protected readonly meteringChoices = choicesOf(METERING_DEVICES, setupWords.meteringDevice, true);
+  protected readonly meteringChoices = choicesOf(METERING_DEVICES, setupWords.meteringDevice, 'hinted');
+  protected readonly chargeMode = setupWords.chargeMode;
+  protected readonly chargeModes = choicesOf(CHARGE_MODES, setupWords.chargeMode);
   protected readonly setup = computed(() => this.draft().setup);
+  protected readonly asksTargetPort = computed(() => asksTargetPort(this.setup()));
+  protected readonly asksChargeMode = computed(() => asksChargeMode(this.setup()));
   protected readonly unconfirmed = computed(() =>
     SYSTEM_FIELDS.filter(({ field }) => this.setup()[field] === undefined),
   );

@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, input, output } from '@an
 import type { HighSidePort } from '@chargewright/engine';
 import { checkPageWords, listWords, setupWords, unitLabel } from '@chargewright/wording';
 import type { CheckDraft } from '../loose-checks/check-draft';
+import { flammabilityOf } from './flammability';
 
 const words = checkPageWords.setup;
 
@@ -16,7 +17,12 @@ const words = checkPageWords.setup;
       </button>
     </div>
     <div class="details">
-      <span>{{ details() }}</span>
+      <span>
+        @if (flammable(); as text) {
+          <b>{{ text }}</b> ·
+        }
+        {{ details() }}
+      </span>
       @if (assumptions(); as text) {
         <span class="assumed">{{ text }}</span>
       }
@@ -32,6 +38,7 @@ export class SetupPlate {
 
   protected readonly words = words;
   protected readonly title = computed(() => plateTitle(this.draft()));
+  protected readonly flammable = computed(() => plateFlammability(this.draft()));
   protected readonly details = computed(() => plateDetails(this.draft()));
   protected readonly assumptions = computed(() => plateAssumptions(this.draft()));
 }
@@ -56,6 +63,12 @@ export function plateDetails({ setup, typed }: CheckDraft): string {
     elevation ? `${elevation.text} ${unitLabel(elevation.unit)}` : words.seaLevel,
     words.rules,
   ].join(' · ');
+}
+
+/** "A2L: burns"; empty for a refrigerant that does not. */
+export function plateFlammability({ setup: { refrigerant } }: CheckDraft): string {
+  const safetyClass = refrigerant === undefined ? null : flammabilityOf(refrigerant);
+  return safetyClass === null ? '' : words.burns(safetyClass);
 }
 
 const portText = (port: HighSidePort): string =>

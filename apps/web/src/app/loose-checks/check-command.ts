@@ -17,7 +17,11 @@ export type CheckCommand = Told &
     | { readonly do: 'visit'; readonly patch: Partial<DraftVisit> }
     | { readonly do: 'fill'; readonly example: ExampleCheck; readonly readingIds: readonly string[] }
     | { readonly do: 'retake' }
-    | { readonly do: 'take-back-retake'; readonly retired: readonly string[]; readonly runningSince: string | undefined }
+    | {
+        readonly do: 'take-back-retake';
+        readonly retired: readonly string[];
+        readonly runningSince: string | undefined;
+      }
     | { readonly do: 'remove' }
     | { readonly do: 'restore' }
   );

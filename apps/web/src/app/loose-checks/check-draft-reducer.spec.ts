@@ -7,10 +7,10 @@ import { TYPED_FIELDS, type FieldKey } from './check-draft';
 import { applyCommand, draftOf, isEmpty, summaryOf } from './check-draft-reducer';
 import { rowChanges, stateFromRows } from './check-rows';
 
-/** Deterministic ids and times: one of each per step. */
+/** Deterministic ids and times: one of each per step, ids in the order of their steps. */
 const idAt = (step: number, lane = 0) =>
-  `01900000-0000-7000-8${lane.toString(16).padStart(3, '0')}-${step.toString(16).padStart(12, '0')}`;
-const CHECK = idAt(0, 9);
+  `0190${step.toString(16).padStart(4, '0')}-0000-7000-8${lane.toString(16).padStart(3, '0')}-000000000000`;
+const CHECK = '0189ffff-0000-7000-8000-000000000009';
 const timeAt = (step: number) => new Date(Date.UTC(2026, 5, 1, 12, 0, step)).toISOString();
 
 const fieldArbitrary = fc.oneof(
@@ -72,6 +72,12 @@ const stepArbitrary: fc.Arbitrary<Step> = fc.oneof(
     arbitrary: fc
       .constantFrom('open', 'retake', 'remove', 'restore')
       .map((deed): Step => (n) => ({ ...told(n), do: deed })),
+  },
+  {
+    weight: 1,
+    arbitrary: fc
+      .constantFrom(undefined, timeAt(0))
+      .map((runningSince): Step => (n) => ({ ...told(n), do: 'take-back-retake', retired: [], runningSince })),
   },
 );
 const commandsArbitrary = fc
@@ -151,7 +157,7 @@ describe('a check and its rows', () => {
         const expected = new Map<FieldKey, string>();
         for (const command of commands) {
           if (command.do === 'type') expected.set(command.field, command.value.text);
-          if (command.do === 'fill' || command.do === 'retake') {
+          if (command.do === 'fill' || command.do === 'retake' || command.do === 'take-back-retake') {
             for (const field of [...expected.keys()]) if (field.startsWith('reading:')) expected.delete(field);
           }
         }
@@ -182,7 +188,7 @@ describe('readings', () => {
       { text: '95', supersedes: undefined },
       { text: '92', supersedes: idAt(2) },
     ]);
-    expect(readings[1]).toMatchObject({ place: 'outdoor-unit', takenAt: timeAt(4), source: 'typed', checkId: CHECK });
+    expect(readings[1]).toMatchObject({ place: 'outdoor-unit', takenAt: timeAt(3), source: 'typed', checkId: CHECK });
   });
 
   it('are taken away by a blank text and can be given again', () => {
@@ -199,7 +205,14 @@ describe('readings', () => {
 
   it('typed again with the same text are new readings: they are fresher', () => {
     const state = play([typing(FIELD, '95', 1), committing(FIELD, 2), typing(FIELD, '95', 3), committing(FIELD, 4)]);
-    expect(draftOf(state).readings.outdoorDryBulb?.takenAt).toBe(timeAt(4));
+    expect(draftOf(state).readings.outdoorDryBulb?.takenAt).toBe(timeAt(3));
+  });
+
+  it('are as old as their last keystroke, however late they are committed', () => {
+    const left = play([typing(FIELD, '9', 1), typing(FIELD, '95', 2)]);
+    expect(draftOf(left).edits[FIELD]?.editedAt).toBe(timeAt(2));
+    const committed = applyCommand(left, committing(FIELD, 3000));
+    expect(draftOf(committed).readings.outdoorDryBulb?.takenAt).toBe(timeAt(2));
   });
 
   it('are asked again after an adjustment and stay in the history', () => {
@@ -215,6 +228,28 @@ describe('readings', () => {
     ]);
     expect(draftOf(again).readings.outdoorDryBulb?.text).toBe('94');
     expect(again.readings[1]?.supersedes).toBeUndefined();
+  });
+
+  it('stand again, with the clock, when the adjustment is taken back; what was read since stays', () => {
+    const SUCTION = 'reading:suctionPressure';
+    const runningSince = timeAt(0);
+    const before = play([
+      typing(FIELD, '95', 1),
+      committing(FIELD, 2),
+      typing(SUCTION, '118', 3),
+      committing(SUCTION, 4),
+    ]);
+    const after = [
+      { ...told(5), do: 'retake' },
+      { ...told(6), do: 'visit', patch: { runningSince: timeAt(6) } },
+      typing(FIELD, '94', 7),
+      committing(FIELD, 8),
+      { ...told(9), do: 'take-back-retake', retired: before.retired, runningSince },
+    ] as const satisfies readonly CheckCommand[];
+    const { readings, visit } = draftOf(after.reduce<CheckState>(applyCommand, before));
+    expect(readings.suctionPressure?.text).toBe('118');
+    expect(readings.outdoorDryBulb?.text).toBe('94');
+    expect(visit.runningSince).toBe(runningSince);
   });
 
   it('survive the loss of the row of their check', () => {

@@ -94,7 +94,7 @@ describe('LooseChecks', () => {
   it('shows a keystroke at once and stores it within a second, also while keys keep coming', async () => {
     const checks = await openPage();
     checks.type(outdoor, degF('9'));
-    expect(checks.current().edits[outdoor]).toEqual(degF('9'));
+    expect(checks.current().edits[outdoor]).toMatchObject(degF('9'));
     for (let ms = 0; ms < 900; ms += 100) {
       await vi.advanceTimersByTimeAsync(100);
       checks.type(outdoor, degF(`9${ms}`));
@@ -135,7 +135,7 @@ describe('LooseChecks', () => {
     expect(checks.state()).toBe('loading');
     TestBed.tick();
     await vi.advanceTimersByTimeAsync(1000);
-    expect(checks.current().edits[outdoor]).toEqual(degF('95'));
+    expect(checks.current().edits[outdoor]).toMatchObject(degF('95'));
     expect(phone.kept.size).toBe(2);
     expect(checks.list()).toHaveLength(2);
   });
@@ -179,7 +179,7 @@ describe('LooseChecks', () => {
     ]);
     await settled();
     expect(checks.current().setup).toEqual({ refrigerant: 'R-32', meteringDevice: 'txv' });
-    expect(checks.current().edits[outdoor]).toEqual(degF('95'));
+    expect(checks.current().edits[outdoor]).toMatchObject(degF('95'));
     await vi.advanceTimersByTimeAsync(1000);
     expect(phone.kept.get(id)).toMatchObject({
       setup: { meteringDevice: 'txv' },
@@ -254,5 +254,24 @@ describe('LooseChecks', () => {
     expect(Object.keys(checks.current().edits)).toEqual(['typed:elevation']);
     await checks.stored();
     expect(phone.kept.get(checks.current().id)?.readings).toMatchObject([{ text: '95' }]);
+  });
+
+  it('brings readings and clock back when there was no adjustment', async () => {
+    const checks = await openPage();
+    const runningSince = '2026-06-01T11:30:00.000Z';
+    checks.visit({ runningSince });
+    checks.type(outdoor, degF('95'));
+    checks.commit(outdoor);
+    checks.retakeAll();
+    expect(checks.retaken()).toBe(true);
+    expect(checks.current().visit.runningSince).not.toBe(runningSince);
+    checks.undoRetake();
+    expect(checks.retaken()).toBe(false);
+    expect(checks.current()).toMatchObject({
+      readings: { outdoorDryBulb: degF('95') },
+      visit: { runningSince },
+    });
+    await checks.stored();
+    expect(phone.kept.get(checks.current().id)?.retired).toEqual([]);
   });
 });

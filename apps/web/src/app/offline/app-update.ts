@@ -1,7 +1,7 @@
 import { DestroyRef, DOCUMENT, inject, Injectable, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
-import { SwUpdate } from '@angular/service-worker';
 import { LooseChecks } from '../loose-checks/loose-checks';
+import { WorkerClient } from './worker-client';
 
 /** A page that stays open for days asks for a newer version at most this often, when it comes back into view. */
 const ASK_EVERY_MS = 60 * 60 * 1000;
@@ -9,7 +9,7 @@ const ASK_EVERY_MS = 60 * 60 * 1000;
 /** Newer versions of the app: fetched in the background, taken only when the person says so. */
 @Injectable({ providedIn: 'root' })
 export class AppUpdate {
-  readonly #updates = inject(SwUpdate);
+  readonly #updates = inject(WorkerClient).updates;
   readonly #page = inject(DOCUMENT);
   readonly #checks = inject(LooseChecks);
   readonly #fetched = signal(false);

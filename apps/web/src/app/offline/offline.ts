@@ -1,6 +1,6 @@
 import { DestroyRef, DOCUMENT, inject, Injectable, signal } from '@angular/core';
-import { SwUpdate } from '@angular/service-worker';
 import { isAppKept } from './kept-app';
+import { WorkerClient } from './worker-client';
 
 /** The worker fetches the app while the page is at rest, which takes some seconds. */
 const LOOK_AFTER_MS = [500, 2_000, 5_000, 10_000, 20_000, 40_000];
@@ -26,7 +26,7 @@ export class Offline {
       this.#window.removeEventListener('offline', look);
       clearTimeout(this.#timer);
     });
-    if (inject(SwUpdate).isEnabled) {
+    if (inject(WorkerClient).updates.isEnabled) {
       void this.#window.navigator.serviceWorker.ready.then(() => this.#lookLater(LOOK_AFTER_MS));
     }
   }

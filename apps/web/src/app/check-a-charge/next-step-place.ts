@@ -1,0 +1,36 @@
+/** Where on the page a next step can be done, so that its button leads there. */
+import type { NextStepCode, Reason } from '@chargewright/engine';
+
+export interface StepPlace {
+  readonly view: 'setup' | 'readings';
+  /** Selects the control on the page; the first that it finds is meant. */
+  readonly control: string;
+}
+
+const choice = (view: StepPlace['view'], name: string): StepPlace => ({ view, control: `input[name="${name}"]` });
+
+/** Steps that are not here are done at the unit. */
+const PLACES: Readonly<Partial<Record<NextStepCode, StepPlace>>> = {
+  'bring-to-full-stage': choice('setup', 'stage'),
+  'bring-to-charge-mode': choice('setup', 'chargeMode'),
+  'state-the-port': choice('setup', 'highSidePort'),
+  'find-nameplate-target': { view: 'readings', control: '#typed-targetSubcooling' },
+  'record-conditions': { view: 'readings', control: 'app-visit-clock button' },
+  'leak-first': choice('readings', 'leakSearch'),
+};
+
+/** Nothing read here can judge such a system, so no reading is asked for. */
+const REFUSALS: ReadonlySet<NextStepCode> = new Set(['cooling-season-or-weigh-in', 'weigh-in']);
+
+export const isRefusal = (code: NextStepCode): boolean => REFUSALS.has(code);
+
+/** `reason`: why the deciding criterion is not judged. A target for another port is not sought anew before its port is stated. */
+export const placeOfStep = (code: NextStepCode, reason: Reason | null): StepPlace | null =>
+  reason?.code === 'target-for-other-port' ? choice('readings', 'targetSubcoolingPort') : (PLACES[code] ?? null);
+
+/** Brings a control into sight and gives it the focus, whatever it is folded into. */
+export function goToControl(page: HTMLElement, control: string): void {
+  const found = page.querySelector<HTMLElement>(control);
+  for (let fold = found?.closest('details'); fold; fold = fold.parentElement?.closest('details')) fold.open = true;
+  found?.focus();
+}
