@@ -8,7 +8,7 @@ import type { UsedReadingId } from './assumed-uncertainty';
 import type { Caution, CautionCode, Figure } from './codes';
 import { LIMIT_SLACK_K } from './conformance';
 import { conditionsRecorded, nearLimitCautions } from './criteria/conditions';
-import type { AirflowEvidence } from './criteria/air';
+import type { AirflowEvidence } from './procedure';
 import type { DerivedQuantities } from './derived-quantities';
 import { plausibilityCautions } from './plausibility';
 import type { CheckInput } from './input';
@@ -208,7 +208,7 @@ function visitCautions(input: CheckInput): readonly Caution[] {
   if (gaugeZeroed === 'not-ok' || gaugeZeroed === 'not-checked') found.push(plain('gauge-not-zeroed'));
   if (filterAndCoil === 'not-ok') found.push(plain('filter-or-coil-dirty'));
   const days = visit.instrumentsCheckedDaysAgo;
-  if (days !== undefined && days > procedure.instruments.cautionAfterDays.value) {
+  if (days !== undefined && days > procedure.instruments.mostDays.value) {
     found.push({ code: 'instruments-old', figures: { days: { kind: 'days', value: days } } });
   }
   return found;

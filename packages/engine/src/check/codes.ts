@@ -69,6 +69,9 @@ export interface ReasonFigures {
   'no-target-here': never;
   'target-may-not-exist': 'probability';
   'airflow-too-low': never;
+  'airflow-not-proven': never;
+  'outdoor-too-hot': 'actual' | 'most';
+  'access-hole-missing': never;
   'split-above': never;
   freezing: never;
   /** The measured subcooling is negative: it is about zero, and nothing that rests on it is called *within*. */
@@ -150,6 +153,9 @@ export interface NextStepFigures {
   'run-longer': 'minutes';
   'warm-the-house': never;
   'wait-for-warmer-weather': never;
+  'wait-for-cooler-weather': never;
+  'check-instruments': never;
+  'make-access-hole': never;
   'reach-a-target': never;
   'record-conditions': never;
   // readings and targets
@@ -158,6 +164,7 @@ export interface NextStepFigures {
   'find-nameplate-target': never;
   // airflow
   'raise-airflow': never;
+  'measure-airflow': never;
   'suspect-probes': never;
   // data quality
   'confirm-refrigerant': never;

@@ -7,7 +7,7 @@ import type { Caution, OverallFinding, Reason, Stop } from './codes';
 import { airflowEvidence, airflowGate, airflowNearLimit, judgeAirflow, judgeSplit, splitTarget } from './criteria/air';
 import type { ChargeJudgement } from './criteria/charge';
 import { judgeSubcooling, judgeSuperheat, judgeSuperheatWindow, superheatTarget } from './criteria/charge';
-import { conditionsGate, judgeConditions, judgeInstruments } from './criteria/conditions';
+import { conditionsGate, judgeConditions, judgeInstruments, recordGate } from './criteria/conditions';
 import type { DerivedQuantities } from './derived-quantities';
 import { deriveQuantities } from './derived-quantities';
 import { engineVersion } from './engine-version';
@@ -43,8 +43,9 @@ export function evaluateCheck(input: CheckInput): CheckResult {
         impossible?.reason ?? null,
         frozen(stops),
         conditionsGate(input),
+        recordGate(input),
         staleReason(input, from),
-        airflowGate(evidence),
+        airflowGate(procedure, evidence),
       ],
     },
     target,

@@ -15,32 +15,102 @@ export interface Rule {
   readonly source: string;
 }
 
+/** How a deviation becomes a finding (JCGM 106:2012, 8.2 and 8.3). */
+export type Decision =
+  /** By the rule alone; a certainty below `clearFrom` is called only just. */
+  | { readonly type: 'simple'; readonly clearFrom: Rule }
+  /** Clear only at a probability of `clearFrom` or more; between that and its complement too close to call. */
+  | { readonly type: 'guarded'; readonly clearFrom: Rule };
+
+/** What a procedure does with something that is not as it should be, or not recorded. */
+export type Consequence = 'gate' | 'caution';
+
+/** What is known about the airflow when the charge is to be judged. */
+export type AirflowEvidence =
+  | 'measured-low'
+  | 'measured-enough'
+  | 'permitted-path'
+  | 'split-above'
+  | 'split-within'
+  | 'split-too-close'
+  | 'split-below'
+  | 'nothing';
+
+export interface AirflowRules {
+  /** Least airflow per nominal capacity, m³/s per W: of a new system, of an alteration, of a small-duct high-velocity system. */
+  readonly leastM3PerSPerW: Rule;
+  readonly leastOfAlterationM3PerSPerW: Rule | null;
+  readonly leastOfHighVelocityM3PerSPerW: Rule | null;
+  /** Part of the design airflow that is enough where one was entered. */
+  readonly leastDesignFraction: Rule | null;
+  /** Whether the limit itself is enough. */
+  readonly limitPasses: boolean;
+  /** Which evidence shuts the charge criteria. */
+  readonly gates: readonly AirflowEvidence[];
+  /** Whether the temperature split is evidence at all. */
+  readonly splitCounts: boolean;
+  /** A split that is open stands in for a measured airflow that is low. */
+  readonly eitherSuffices: boolean;
+  /** A duct table or the best that can be done stands in for a measurement. */
+  readonly otherPaths: boolean;
+}
+
 export interface Procedure {
-  readonly id: string;
+  readonly id: ProcedureId;
   readonly version: number;
-  /** Guarded decision rule: outside `p` and `1 − p` the finding is clear (JCGM 106:2012, 8.3). */
-  readonly guardProbability: Rule;
-  readonly superheat: { readonly toleranceK: Rule; readonly floorK: Rule };
+  readonly decision: Decision;
+  readonly superheat: {
+    readonly toleranceK: Rule;
+    readonly floorK: Rule | null;
+    readonly enteredTarget: boolean;
+    /** The table that gives the target where none is entered. */
+    readonly chart: SuperheatChartId | null;
+  };
   readonly subcooling: {
     readonly toleranceK: Rule;
+    /** The measured subcooling itself must reach this. */
+    readonly leastK: Rule | null;
+    /** Guidance without a target: low, clear, high. */
     readonly lowBelowK: Rule;
     readonly clearFromK: Rule;
     readonly highAboveK: Rule;
   };
   readonly temperatureSplit: { readonly toleranceK: Rule };
-  readonly superheatWindow: { readonly lowK: Rule; readonly highK: Rule };
-  readonly airflow: { readonly leastM3PerSPerW: Rule; readonly leastDesignFraction: Rule };
+  readonly superheatWindow: {
+    readonly lowK: Rule;
+    readonly highK: Rule;
+    /** The maker's range for the valve takes the window's place, must hold as well, or is not looked at. */
+    readonly makersRange: 'replaces' | 'also' | 'not-used';
+  };
+  readonly airflow: AirflowRules;
   readonly conditions: {
     readonly leastOutdoorK: Rule;
+    /** Warmest outdoor air for a superheat test. */
+    readonly mostOutdoorForSuperheatK: Rule | null;
     readonly coolBelowK: Rule;
     readonly leastReturnK: Rule;
     readonly leastRunningMinutes: Rule;
+    /** Running time, return and outdoor air, pre-flight: what happens when they are not recorded. */
+    readonly unrecorded: Consequence;
+    /** A marked access hole beside the coil is part of the test. */
+    readonly accessHole: boolean;
   };
-  readonly instruments: { readonly cautionAfterDays: Rule };
+  readonly instruments: { readonly mostDays: Rule; readonly beyond: Consequence };
   readonly mostReadingAgeSeconds: Rule;
   /** Above this probability that no target exists, the criterion is not verifiable. */
   readonly mostProbabilityOfNoTarget: Rule;
 }
+
+export const PROCEDURE_IDS = [
+  'general-rules',
+  'cec-ra3.2-2008-installer',
+  'cec-ra3.2-2008-rater',
+  'cec-ra3.2-2019-installer',
+  'cec-ra3.2-2019-rater',
+] as const;
+export type ProcedureId = (typeof PROCEDURE_IDS)[number];
+
+export type SuperheatChartId = 'makers-chart-a' | 'finer-table';
 
 type Basis = readonly [standing: Standing, source: string];
 

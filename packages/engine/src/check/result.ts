@@ -19,6 +19,7 @@ export type DerivedId = (typeof DERIVED_IDS)[number];
 export type TargetSource =
   | 'entered'
   | 'makers-chart-a'
+  | 'finer-table'
   | 'split-table'
   | 'procedure-window'
   | 'entered-range'
@@ -45,6 +46,8 @@ export interface CriterionResult {
   readonly byRule: 'passes' | 'fails' | null;
   /** Probability that the true deviation lies inside the tolerance and a target exists (JCGM 106:2012). */
   readonly probabilityWithin: number | null;
+  /** The rule decided, and the certainty of its answer is below what the procedure calls clear. */
+  readonly onlyJust: boolean;
   readonly finding: Finding;
   readonly reason: Reason | null;
 }

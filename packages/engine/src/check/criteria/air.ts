@@ -9,14 +9,11 @@ import type { Caution, Figure, Reason, ReasonCode } from '../codes';
 import { LIMIT_SLACK_K } from '../conformance';
 import { staleReason } from '../evidence';
 import type { DerivedQuantities } from '../derived-quantities';
-import type { CheckInput } from '../input';
+import type { CheckInput, CheckSetup } from '../input';
+import type { AirflowEvidence, AirflowRules, Procedure } from '../procedure';
 import type { CriterionResult, TargetSource } from '../result';
 import { conditionsGate } from './conditions';
 import { judgeCriterion, unjudged } from './criterion';
-
-/** What is known about the airflow; only the first two and `split-above` change what may be judged. */
-export type AirflowEvidence =
-  'measured-low' | 'measured-enough' | 'split-above' | 'split-within' | 'split-too-close' | 'split-below' | 'nothing';
 
 /** Target of the split, for its criterion and for the gate. */
 export function splitTarget({ readings }: CheckInput, { returnWetBulb }: DerivedQuantities): Quantity {
@@ -41,7 +38,7 @@ export function judgeSplit(
     target,
     targetSource: 'split-table',
     tolerance: () => ({ low: -tolerance, high: tolerance, floored: false }),
-    guard: procedure.guardProbability.value,
+    decision: procedure.decision,
     probabilityOfNoTarget: isKnown(target) ? noSplitTarget(input, derived) : 0,
     mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
     gates: (evidence) => [conditionsGate(input), staleReason(input, evidence)],
@@ -74,22 +71,34 @@ export function judgeAirflow(input: CheckInput): CriterionResult | null {
     actual: measured.quantity,
     target: least.target,
     targetSource: least.source,
-    tolerance: () => ({ low: 0, high: null, floored: false }),
-    guard: procedure.guardProbability.value,
+    tolerance: () => ({ low: procedure.airflow.limitPasses ? 0 : LEAST_EXCESS_M3_PER_S, high: null, floored: false }),
+    decision: procedure.decision,
     gates: (evidence) => [staleReason(input, evidence)],
   });
 }
 
+/** A limit that must be exceeded: by more than the slack of the comparison, far less than any instrument shows. */
+const LEAST_EXCESS_M3_PER_S = 2 * LIMIT_SLACK_K;
+
 function leastAirflow({ procedure, setup }: CheckInput): { target: Known; source: TargetSource } | null {
-  const { leastDesignFraction, leastM3PerSPerW } = procedure.airflow;
+  const { leastDesignFraction } = procedure.airflow;
   const entered = (value: number): Known => leaf({ id: 'leastAirflow', kind: 'flowM3PerS', value, origin: 'entered' });
-  if (setup.designAirflowM3PerS !== undefined) {
+  if (setup.designAirflowM3PerS !== undefined && leastDesignFraction !== null) {
     return { target: entered(leastDesignFraction.value * setup.designAirflowM3PerS), source: 'design-airflow' };
   }
   if (setup.nominalCapacityW !== undefined) {
-    return { target: entered(leastM3PerSPerW.value * setup.nominalCapacityW), source: 'airflow-per-capacity' };
+    const target = entered(leastPerCapacity(procedure.airflow, setup) * setup.nominalCapacityW);
+    return { target, source: 'airflow-per-capacity' };
   }
   return null;
+}
+
+/** The limit of an alteration or a high-velocity system where the procedure has one; of the two the lower. */
+function leastPerCapacity(rules: AirflowRules, { alteration, highVelocity }: CheckSetup): number {
+  const limits = [rules.leastM3PerSPerW];
+  if (alteration && rules.leastOfAlterationM3PerSPerW !== null) limits.push(rules.leastOfAlterationM3PerSPerW);
+  if (highVelocity && rules.leastOfHighVelocityM3PerSPerW !== null) limits.push(rules.leastOfHighVelocityM3PerSPerW);
+  return Math.min(...limits.map(({ value }) => value));
 }
 
 /**
@@ -102,7 +111,20 @@ export function airflowEvidence(
   judgements: { readonly airflow: CriterionResult | null; readonly split: CriterionResult; readonly target: Quantity },
 ): AirflowEvidence {
   const { airflow, split, target } = judgements;
-  if (airflow !== null && judged(airflow)) return airflow.byRule === 'fails' ? 'measured-low' : 'measured-enough';
+  const { gates, splitCounts, eitherSuffices, otherPaths } = input.procedure.airflow;
+  const fromSplit = splitCounts ? splitEvidence(input, derived, { split, target }) : 'nothing';
+  if (airflow !== null && judged(airflow)) {
+    if (airflow.byRule === 'passes') return 'measured-enough';
+    return eitherSuffices && !gates.includes(fromSplit) ? fromSplit : 'measured-low';
+  }
+  return otherPaths && input.setup.airflowPath !== undefined ? 'permitted-path' : fromSplit;
+}
+
+function splitEvidence(
+  input: CheckInput,
+  derived: DerivedQuantities,
+  { split, target }: { readonly split: CriterionResult; readonly target: Quantity },
+): AirflowEvidence {
   if (counts(split) && isAboveBand(input, derived, target)) return 'split-above';
   if (!judged(split)) return 'nothing';
   if (split.finding === 'too-close-to-call') return 'split-too-close';
@@ -123,9 +145,10 @@ const counts = (split: CriterionResult): boolean => judged(split) || DOUBTS.incl
 
 const judged = ({ finding }: CriterionResult): boolean => finding !== 'not-judged' && finding !== 'not-verifiable';
 
-export function airflowGate(evidence: AirflowEvidence): Reason | null {
+export function airflowGate({ airflow }: Procedure, evidence: AirflowEvidence): Reason | null {
+  if (!airflow.gates.includes(evidence)) return null;
   if (evidence === 'measured-low') return { code: 'airflow-too-low', figures: {} };
-  return evidence === 'split-above' ? { code: 'split-above', figures: {} } : null;
+  return { code: evidence === 'split-above' ? 'split-above' : 'airflow-not-proven', figures: {} };
 }
 
 /** A caution for an airflow gate whose limit lies inside the uncertainty of what is held against it; a split that is clear of it is said to be. */

@@ -4,6 +4,7 @@ import { expandedUncertainty } from '../../derivation/quantity';
 import type { Caution, Reason } from '../codes';
 import { LIMIT_SLACK_K } from '../conformance';
 import type { CheckInput } from '../input';
+import { isFixedOrifice } from '../input';
 import type { CriterionResult } from '../result';
 import { unjudged } from './criterion';
 
@@ -48,7 +49,32 @@ export function conditionsGate(input: CheckInput): Reason | null {
       return { code, figures: { actual: temperature(actual.value), least: temperature(leastK) } };
     }
   }
-  return null;
+  return tooHotOutdoors(input);
+}
+
+function tooHotOutdoors({ procedure, setup, readings }: CheckInput): Reason | null {
+  const most = procedure.conditions.mostOutdoorForSuperheatK;
+  const outdoor = readings.outdoorDryBulb?.quantity;
+  if (most === null || outdoor === undefined || !isFixedOrifice(setup)) return null;
+  if (outdoor.value <= most.value + LIMIT_SLACK_K) return null;
+  return { code: 'outdoor-too-hot', figures: { actual: temperature(outdoor.value), most: temperature(most.value) } };
+}
+
+/** What the procedure wants on record before it judges: conditions, the access hole, instruments in date. `null` when nothing is lacking. */
+export function recordGate(input: CheckInput): Reason | null {
+  const { procedure, visit } = input;
+  const { unrecorded, accessHole } = procedure.conditions;
+  if (unrecorded === 'gate' && !conditionsRecorded(input)) return { code: 'conditions-not-recorded', figures: {} };
+  if (accessHole && visit.preflight.accessHole !== 'ok') return { code: 'access-hole-missing', figures: {} };
+  return procedure.instruments.beyond === 'gate' ? instrumentsReason(input) : null;
+}
+
+function instrumentsReason({ visit, procedure }: CheckInput): Reason | null {
+  const days = visit.instrumentsCheckedDaysAgo;
+  const most = procedure.instruments.mostDays.value;
+  if (days === undefined) return { code: 'instruments-not-recorded', figures: {} };
+  if (days <= most) return null;
+  return { code: 'instruments-old', figures: { days: { kind: 'days', value: days } } };
 }
 
 /** A caution for each condition whose limit lies inside the reading's uncertainty, on either side. */
@@ -82,17 +108,14 @@ export function judgeConditions(input: CheckInput): CriterionResult {
   return conditionsRecorded(input) ? { ...unrecorded, byRule: 'passes', finding: 'within', reason: null } : unrecorded;
 }
 
-export function judgeInstruments({ visit, procedure }: CheckInput): CriterionResult {
-  const days = visit.instrumentsCheckedDaysAgo;
-  if (days === undefined) {
-    return unjudged('instruments', false, 'not-judged', { code: 'instruments-not-recorded', figures: {} });
-  }
-  const old = unjudged('instruments', false, 'not-judged', {
-    code: 'instruments-old',
-    figures: { days: { kind: 'days', value: days } },
-  });
-  if (days > procedure.instruments.cautionAfterDays.value) return { ...old, byRule: 'fails' };
-  return { ...old, byRule: 'passes', finding: 'within', reason: null };
+export function judgeInstruments(input: CheckInput): CriterionResult {
+  const reason = instrumentsReason(input);
+  if (reason === null)
+    return { ...unjudged('instruments', false, 'not-judged', null), byRule: 'passes', finding: 'within' };
+  const judged = unjudged('instruments', false, 'not-judged', reason);
+  if (reason.code === 'instruments-not-recorded') return judged;
+  const gate = input.procedure.instruments.beyond === 'gate';
+  return { ...judged, byRule: 'fails', finding: gate ? 'not-verifiable' : 'not-judged' };
 }
 
 const temperature = (value: number) => ({ kind: 'temperatureK', value }) as const;

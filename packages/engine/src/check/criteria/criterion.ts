@@ -7,6 +7,7 @@ import type { CriterionId, Finding, Reason } from '../codes';
 import type { Conformance } from '../conformance';
 import { judgeConformance } from '../conformance';
 import { absenceReason } from '../evidence';
+import type { Decision } from '../procedure';
 import type { CriterionResult, TargetSource, Tolerance } from '../result';
 
 export interface NumericCriterion {
@@ -16,7 +17,7 @@ export interface NumericCriterion {
   readonly target: Quantity;
   readonly targetSource: TargetSource;
   readonly tolerance: (target: Known) => Tolerance;
-  readonly guard: number;
+  readonly decision: Decision;
   readonly probabilityOfNoTarget?: number;
   readonly mostProbabilityOfNoTarget?: number;
   /** First match shuts the criterion; `null` entries are open. Looked at only when there is something to judge. */
@@ -30,7 +31,7 @@ export const unjudged = (
   criterion: CriterionId,
   required: boolean,
   finding: Extract<Finding, 'not-judged' | 'not-verifiable'>,
-  reason: Reason,
+  reason: Reason | null,
   actual: Quantity | null = null,
 ): CriterionResult => ({
   criterion,
@@ -42,6 +43,7 @@ export const unjudged = (
   tolerance: null,
   byRule: null,
   probabilityWithin: null,
+  onlyJust: false,
   finding,
   reason,
 });
@@ -65,6 +67,7 @@ export function judgeCriterion(input: NumericCriterion): CriterionResult {
     tolerance,
     byRule: conformance?.byRule ?? null,
     probabilityWithin: conformance?.probabilityWithin ?? null,
+    onlyJust: conformance?.onlyJust ?? false,
   };
   return { ...numbers, ...findingOf(input, conformance) };
 }
@@ -85,17 +88,18 @@ export function judgeWindow(
     tolerance,
     byRule: conformance?.byRule ?? null,
     probabilityWithin: conformance?.probabilityWithin ?? null,
+    onlyJust: conformance?.onlyJust ?? false,
   };
   return { ...numbers, ...findingOf({ ...input, target: actual }, conformance) };
 }
 
 function conformanceOf(
-  input: Pick<NumericCriterion, 'guard' | 'probabilityOfNoTarget'>,
+  input: Pick<NumericCriterion, 'decision' | 'probabilityOfNoTarget'>,
   measured: Known,
   tolerance: Tolerance,
 ): Conformance {
-  const { guard, probabilityOfNoTarget = 0 } = input;
-  return judgeConformance({ measured, tolerance, guard, probabilityOfNoTarget });
+  const { decision, probabilityOfNoTarget = 0 } = input;
+  return judgeConformance({ measured, tolerance, decision, probabilityOfNoTarget });
 }
 
 type FindingAndReason = Pick<CriterionResult, 'finding' | 'reason'>;

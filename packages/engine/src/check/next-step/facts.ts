@@ -5,8 +5,9 @@ import type { RefrigerantId } from '../../refrigerants/catalogue';
 import { differenceToK } from '../../units';
 import { isCoolWeather, lowHead } from '../cautions';
 import type { Caution, OverallFinding, Reason, ReasonCode, Stop, StopCode } from '../codes';
-import { conditionsGate } from '../criteria/conditions';
-import type { AirflowEvidence } from '../criteria/air';
+import { conditionsGate, recordGate } from '../criteria/conditions';
+import { airflowGate } from '../criteria/air';
+import type { AirflowEvidence } from '../procedure';
 import type { SuperheatTarget } from '../criteria/charge';
 import { LIMIT_SLACK_K } from '../conformance';
 import type { DerivedQuantities } from '../derived-quantities';
@@ -20,7 +21,11 @@ export interface Facts {
   readonly impossible: 'none' | 'ports-swapped' | 'saturation-impossible';
   readonly stop: StopCode | 'none';
   readonly shutDown: 'yes' | 'no';
-  readonly condition: 'open' | 'running-time' | 'return-too-cool' | 'outdoor-too-cold';
+  readonly condition: 'open' | 'running-time' | 'return-too-cool' | 'outdoor-too-cold' | 'outdoor-too-hot';
+  /** What the procedure wants on record and is not. */
+  readonly record: 'open' | 'conditions' | 'access-hole' | 'instruments';
+  /** Whether the procedure shuts the test for want of proof. */
+  readonly airflowProof: 'enough' | 'wanted';
   readonly runningTime: 'recorded' | 'unrecorded';
   /** Why a required criterion has no number, or `none`. */
   readonly lacking:
@@ -80,7 +85,9 @@ export function gatherFacts(evidence: Evidence): Facts {
     impossible: impossibility(evidence.impossible),
     stop: evidence.stops[0]?.code ?? 'none',
     shutDown: evidence.stops.some((stop) => mustShutDown(stop, derived)) ? 'yes' : 'no',
-    condition: gate === 'running-time' || gate === 'return-too-cool' || gate === 'outdoor-too-cold' ? gate : 'open',
+    condition: conditionFact(gate),
+    record: recordFact(input),
+    airflowProof: airflowGate(input.procedure, airflow)?.code === 'airflow-not-proven' ? 'wanted' : 'enough',
     runningTime: visit.runningMinutes === undefined ? 'unrecorded' : 'recorded',
     lacking: whatIsLacking(criteria),
     superheatTarget: superheatTargetFact(evidence),
@@ -97,6 +104,19 @@ export function gatherFacts(evidence: Evidence): Facts {
     leak: leakFact(input),
     head: isHeadHigh(input, derived) ? 'high' : 'usual',
   };
+}
+
+function conditionFact(code: ReasonCode | undefined): Facts['condition'] {
+  const shut =
+    code === 'running-time' || code === 'return-too-cool' || code === 'outdoor-too-cold' || code === 'outdoor-too-hot';
+  return shut ? code : 'open';
+}
+
+function recordFact(input: CheckInput): Facts['record'] {
+  const code = recordGate(input)?.code;
+  if (code === undefined) return 'open';
+  if (code === 'access-hole-missing') return 'access-hole';
+  return code === 'conditions-not-recorded' ? 'conditions' : 'instruments';
 }
 
 const impossibility = (reason: Reason | null): Facts['impossible'] =>
@@ -116,7 +136,7 @@ function whatIsLacking(criteria: readonly CriterionResult[]): Facts['lacking'] {
 function superheatTargetFact({ input, target, criteria }: Evidence): Facts['superheatTarget'] {
   if (!isFixedOrifice(input.setup)) return 'not-used';
   const reason = criteria.find(({ criterion }) => criterion === 'superheat')?.reason?.code;
-  if (target.quantity.state === 'refused' && target.source === 'makers-chart-a') return 'none-here';
+  if (target.quantity.state === 'refused' && target.source !== 'entered') return 'none-here';
   if (reason === 'no-target-here' || reason === 'target-may-not-exist') return 'none-here';
   const nearFloor = isKnown(target.quantity) && target.quantity.value <= NEAR_FLOOR_TARGET_K + LIMIT_SLACK_K;
   return nearFloor ? 'near-floor' : 'clear';
@@ -132,7 +152,7 @@ function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
 
 /** Whether these instruments could ever call the criterion within: at the middle of its band, at these conditions. */
 function canSettle({ criteria, input, target }: Evidence): boolean {
-  const guard = input.procedure.guardProbability.value;
+  const guard = input.procedure.decision.clearFrom.value;
   return criteria
     .filter(({ required, finding }) => required && finding === 'too-close-to-call')
     .every(({ criterion, tolerance, deviation, actual }) => {

@@ -86,6 +86,7 @@ const stops: readonly NextStepRow[] = [
 const conditions: readonly NextStepRow[] = [
   { when: { condition: ['running-time'] }, step: 'run-longer', notYet: ['do-not-judge-yet'] },
   { when: { condition: ['outdoor-too-cold'] }, step: 'wait-for-warmer-weather', notYet: MOVE_NOTHING },
+  { when: { condition: ['outdoor-too-hot'] }, step: 'wait-for-cooler-weather', notYet: MOVE_NOTHING },
   { when: { condition: ['return-too-cool'] }, step: 'warm-the-house', notYet: MOVE_NOTHING },
   { when: { superheatTarget: ['none-here'] }, step: 'reach-a-target', notYet: MOVE_NOTHING },
 ];
@@ -97,6 +98,9 @@ const lacking: readonly NextStepRow[] = [
   { when: { lacking: ['port'] }, step: 'read-discharge-pressure', notYet: MOVE_NOTHING },
   { when: { lacking: ['suction-line-table'] }, step: 'find-suction-line-table', notYet: MOVE_NOTHING },
   { when: { lacking: ['outside-tables'] }, step: 'check-refrigerant-and-probes', notYet: MOVE_NOTHING },
+  { when: { record: ['conditions'] }, step: 'record-conditions', notYet: MOVE_NOTHING },
+  { when: { record: ['access-hole'] }, step: 'make-access-hole', notYet: MOVE_NOTHING },
+  { when: { record: ['instruments'] }, step: 'check-instruments', notYet: MOVE_NOTHING },
   { when: { runningTime: ['unrecorded'] }, step: 'record-conditions', notYet: MOVE_NOTHING },
 ];
 
@@ -108,6 +112,7 @@ const airflow: readonly NextStepRow[] = [
     notYet: MOVE_NOTHING,
   },
   { when: { airflow: ['split-above'] }, step: 'reread-wet-bulb-then-airflow', notYet: MOVE_NOTHING },
+  { when: { airflowProof: ['wanted'] }, step: 'measure-airflow', notYet: MOVE_NOTHING },
 ];
 
 const quality: readonly NextStepRow[] = [

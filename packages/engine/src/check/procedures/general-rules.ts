@@ -14,13 +14,16 @@ const PRACTICE = 'Common practice, no source';
 export const GENERAL_RULES: Procedure = {
   id: 'general-rules',
   version: 1,
-  guardProbability: plainRule(0.8, '0.80', ['choice', CHOICE]),
+  decision: { type: 'guarded', clearFrom: plainRule(0.8, '0.80', ['choice', CHOICE]) },
   superheat: {
     toleranceK: differenceRule(5, 'deltaF', ['read', `${CHART_A}; ${NEW_HOMES_CHECKLIST}`]),
     floorK: differenceRule(5, 'deltaF', ['read', CHART_A]),
+    enteredTarget: true,
+    chart: 'makers-chart-a',
   },
   subcooling: {
     toleranceK: differenceRule(3, 'deltaF', ['read', NEW_HOMES_CHECKLIST]),
+    leastK: null,
     lowBelowK: differenceRule(5, 'deltaF', ['choice', CHOICE]),
     clearFromK: differenceRule(8, 'deltaF', ['choice', CHOICE]),
     highAboveK: differenceRule(14, 'deltaF', ['choice', CHOICE]),
@@ -29,18 +32,29 @@ export const GENERAL_RULES: Procedure = {
   superheatWindow: {
     lowK: differenceRule(4, 'deltaF', ['read', CEC_2008]),
     highK: differenceRule(25, 'deltaF', ['read', CEC_2008]),
+    makersRange: 'replaces',
   },
   airflow: {
     leastM3PerSPerW: plainRule(flowToM3PerS(350, 'cfm') / powerToW(1, 'ton'), '350 cfm/ton', ['read', CEC_2019]),
+    leastOfAlterationM3PerSPerW: null,
+    leastOfHighVelocityM3PerSPerW: null,
     leastDesignFraction: plainRule(0.85, '−15 % of design', ['memory', 'ANSI/ACCA 5 QI']),
+    limitPasses: true,
+    gates: ['measured-low', 'split-above'],
+    splitCounts: true,
+    eitherSuffices: false,
+    otherPaths: false,
   },
   conditions: {
     leastOutdoorK: temperatureRule(55, 'degF', ['read', CEC_2008]),
+    mostOutdoorForSuperheatK: null,
     coolBelowK: temperatureRule(70, 'degF', ['choice', CHOICE]),
     leastReturnK: temperatureRule(70, 'degF', ['read', CEC_2019]),
     leastRunningMinutes: plainRule(15, '15 min', ['read', CEC_2008]),
+    unrecorded: 'caution',
+    accessHole: false,
   },
-  instruments: { cautionAfterDays: plainRule(365, '12 months', ['choice', CHOICE]) },
+  instruments: { mostDays: plainRule(365, '12 months', ['choice', CHOICE]), beyond: 'caution' },
   mostReadingAgeSeconds: plainRule(600, '10 min', ['practice', PRACTICE]),
   mostProbabilityOfNoTarget: plainRule(0.2, '0.20', ['choice', CHOICE]),
 };
