@@ -55,6 +55,7 @@ export interface ReasonFigures {
   // not verifiable: the system or the conditions do not allow the test
   'heating-mode': never;
   'metered-outdoors': never;
+  'not-in-scope': never;
   'part-stage': never;
   'not-in-charge-mode': never;
   'port-not-stated': never;
@@ -107,6 +108,8 @@ export interface CautionFigures {
   'gauge-not-zeroed': never;
   'instruments-old': 'days';
   'airflow-not-proven': never;
+  'split-above': never;
+  'split-below': never;
   'setup-assumed': 'fields';
   'conditions-not-recorded': never;
   'faults-may-hide': never;
@@ -129,6 +132,7 @@ export interface NextStepFigures {
   // not fit for the test: the method that is valid
   'cooling-season-or-weigh-in': never;
   'weigh-in': never;
+  'choose-other-rules': never;
   'bring-to-full-stage': never;
   'bring-to-charge-mode': never;
   'state-the-port': never;

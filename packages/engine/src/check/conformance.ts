@@ -11,14 +11,15 @@ export const LIMIT_SLACK_K = 1e-9;
 export interface Conformance {
   readonly byRule: 'passes' | 'fails';
   readonly probabilityWithin: number;
+  /** A simple decision whose certainty is below `clearFrom`. */
   readonly onlyJust: boolean;
   readonly finding: Extract<Finding, 'within' | 'above' | 'below' | 'too-close-to-call'>;
 }
 
 /**
- * By the rule alone where the procedure decides simply: the certainty stands beside it. Guarded decision: *within* at probability `guard` or more, outside at `1 − guard` or less, between them too close to call. Outside also needs
- * the other side to be as improbable: an instrument too poor to tell the sides apart finds neither.
- * `probabilityOfNoTarget` counts as not within.
+ * Simple decision: by the rule, with the certainty beside it. Guarded decision: *within* at the probability `clearFrom` or more, outside at its
+ * complement or less, between them too close to call; outside also needs the other side to be as improbable, so that an instrument too poor to tell
+ * the sides apart finds neither. `probabilityOfNoTarget` counts as not within, and never as outside.
  */
 export function judgeConformance(input: {
   readonly measured: Known;
@@ -38,9 +39,9 @@ export function judgeConformance(input: {
   const probabilityWithin = inside * (1 - probabilityOfNoTarget);
   const byRule = passes ? 'passes' : 'fails';
   if (decision.type === 'simple') {
-    const side = value > to ? 'above' : 'below';
+    const outside = value > to ? 'above' : 'below';
     const certainty = passes ? probabilityWithin : 1 - inside;
-    return { byRule, probabilityWithin, onlyJust: certainty < guard, finding: passes ? 'within' : side };
+    return { byRule, probabilityWithin, onlyJust: certainty < guard, finding: passes ? 'within' : outside };
   }
   const numbers = { byRule, probabilityWithin, onlyJust: false } as const;
   // a kink may move the mean inwards as the uncertainty grows: what only that brings inside is not called within

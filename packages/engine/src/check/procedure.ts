@@ -3,6 +3,7 @@
  */
 import type { DifferenceUnit, TemperatureUnit } from '../units';
 import { differenceToK, temperatureToK } from '../units';
+import type { AirflowPath } from './request';
 
 /** `read` in the named source, recalled from `memory`, common `practice` without a source, or our own `choice`, open to better evidence. */
 export type Standing = 'read' | 'memory' | 'practice' | 'choice';
@@ -16,25 +17,29 @@ export interface Rule {
 }
 
 /** How a deviation becomes a finding (JCGM 106:2012, 8.2 and 8.3). */
-export type Decision =
-  /** By the rule alone; a certainty below `clearFrom` is called only just. */
-  | { readonly type: 'simple'; readonly clearFrom: Rule }
-  /** Clear only at a probability of `clearFrom` or more; between that and its complement too close to call. */
-  | { readonly type: 'guarded'; readonly clearFrom: Rule };
+export interface Decision {
+  /** `simple`: by the rule alone. `guarded`: clear only at a probability of `clearFrom` or more; between that and its complement too close to call. */
+  readonly type: 'simple' | 'guarded';
+  /** Under `simple` a certainty below this is called only just. */
+  readonly clearFrom: Rule;
+}
 
 /** What a procedure does with something that is not as it should be, or not recorded. */
 export type Consequence = 'gate' | 'caution';
 
+/** What the temperature split says of the airflow. */
+export type SplitEvidence = 'split-above' | 'split-within' | 'split-too-close' | 'split-below' | 'nothing';
+
 /** What is known about the airflow when the charge is to be judged. */
-export type AirflowEvidence =
-  | 'measured-low'
-  | 'measured-enough'
-  | 'permitted-path'
-  | 'split-above'
-  | 'split-within'
-  | 'split-too-close'
-  | 'split-below'
-  | 'nothing';
+export type AirflowEvidence = 'measured-low' | 'measured-enough' | 'permitted-path' | SplitEvidence;
+
+/** A way to show the airflow other than measuring enough of it. */
+export interface PermittedPath {
+  readonly path: AirflowPath;
+  readonly alterationOnly: boolean;
+  /** Whether it holds although a measurement stayed below the limit. */
+  readonly despiteLowMeasurement: boolean;
+}
 
 export interface AirflowRules {
   /** Least airflow per nominal capacity, m³/s per W: of a new system, of an alteration, of a small-duct high-velocity system. */
@@ -49,22 +54,25 @@ export interface AirflowRules {
   readonly gates: readonly AirflowEvidence[];
   /** Whether the temperature split is evidence at all. */
   readonly splitCounts: boolean;
+  /** Which splits are worth a caution although the test stays open. */
+  readonly splitCautions: readonly ('split-above' | 'split-below')[];
   /** A split that is open stands in for a measured airflow that is low. */
   readonly eitherSuffices: boolean;
-  /** A duct table or the best that can be done stands in for a measurement. */
-  readonly otherPaths: boolean;
+  readonly permittedPaths: readonly PermittedPath[];
 }
 
 export interface Procedure {
   readonly id: ProcedureId;
   readonly version: number;
+  /** Whether packaged units are in its scope. */
+  readonly packaged: boolean;
   readonly decision: Decision;
   readonly superheat: {
     readonly toleranceK: Rule;
     readonly floorK: Rule | null;
     readonly enteredTarget: boolean;
     /** The table that gives the target where none is entered. */
-    readonly chart: SuperheatChartId | null;
+    readonly chart: SuperheatChartId;
   };
   readonly subcooling: {
     readonly toleranceK: Rule;
@@ -79,8 +87,8 @@ export interface Procedure {
   readonly superheatWindow: {
     readonly lowK: Rule;
     readonly highK: Rule;
-    /** The maker's range for the valve takes the window's place, must hold as well, or is not looked at. */
-    readonly makersRange: 'replaces' | 'also' | 'not-used';
+    /** The maker's range for the valve takes the window's place, or must hold as well. */
+    readonly makersRange: 'replaces' | 'also';
   };
   readonly airflow: AirflowRules;
   readonly conditions: {
@@ -90,7 +98,7 @@ export interface Procedure {
     readonly coolBelowK: Rule;
     readonly leastReturnK: Rule;
     readonly leastRunningMinutes: Rule;
-    /** Running time, return and outdoor air, pre-flight: what happens when they are not recorded. */
+    /** Running time, lowest return air, outdoor air, pre-flight: what happens when they are not recorded. */
     readonly unrecorded: Consequence;
     /** A marked access hole beside the coil is part of the test. */
     readonly accessHole: boolean;

@@ -23,6 +23,7 @@ export type TargetSource =
   | 'split-table'
   | 'procedure-window'
   | 'entered-range'
+  | 'window-and-range'
   | 'design-airflow'
   | 'airflow-per-capacity';
 
@@ -30,7 +31,7 @@ export type TargetSource =
 export interface Tolerance {
   readonly low: number | null;
   readonly high: number | null;
-  /** The lower limit is the superheat floor, not the tolerance of the target. */
+  /** The lower limit is the least the measured value may be, not the tolerance of the target. */
   readonly floored: boolean;
 }
 
@@ -46,7 +47,7 @@ export interface CriterionResult {
   readonly byRule: 'passes' | 'fails' | null;
   /** Probability that the true deviation lies inside the tolerance and a target exists (JCGM 106:2012). */
   readonly probabilityWithin: number | null;
-  /** The rule decided, and the certainty of its answer is below what the procedure calls clear. */
+  /** The finding is by the rule alone, and its certainty is below what the procedure calls clear. */
   readonly onlyJust: boolean;
   readonly finding: Finding;
   readonly reason: Reason | null;

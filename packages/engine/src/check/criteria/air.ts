@@ -10,7 +10,7 @@ import { LIMIT_SLACK_K } from '../conformance';
 import { staleReason } from '../evidence';
 import type { DerivedQuantities } from '../derived-quantities';
 import type { CheckInput, CheckSetup } from '../input';
-import type { AirflowEvidence, AirflowRules, Procedure } from '../procedure';
+import type { AirflowEvidence, AirflowRules, Procedure, SplitEvidence } from '../procedure';
 import type { CriterionResult, TargetSource } from '../result';
 import { conditionsGate } from './conditions';
 import { judgeCriterion, unjudged } from './criterion';
@@ -102,29 +102,34 @@ function leastPerCapacity(rules: AirflowRules, { alteration, highVelocity }: Che
 }
 
 /**
- * Measured airflow outranks the split. Both gate by the rule on the bare values, so that a poorer instrument never opens a gate: a split above
- * its band shuts it also where its target or its finding is in doubt. Readings that do not count today (conditions, age) prove nothing.
+ * What the charge is judged on: a measured airflow outranks a permitted path, and that the split. All gate by the rule on the bare values, so that
+ * a poorer instrument never opens a gate. Readings that do not count today (conditions, age) prove nothing.
  */
 export function airflowEvidence(
   input: CheckInput,
-  derived: DerivedQuantities,
-  judgements: { readonly airflow: CriterionResult | null; readonly split: CriterionResult; readonly target: Quantity },
+  { airflow, split }: { readonly airflow: CriterionResult | null; readonly split: SplitEvidence },
 ): AirflowEvidence {
-  const { airflow, split, target } = judgements;
-  const { gates, splitCounts, eitherSuffices, otherPaths } = input.procedure.airflow;
-  const fromSplit = splitCounts ? splitEvidence(input, derived, { split, target }) : 'nothing';
-  if (airflow !== null && judged(airflow)) {
-    if (airflow.byRule === 'passes') return 'measured-enough';
-    return eitherSuffices && !gates.includes(fromSplit) ? fromSplit : 'measured-low';
-  }
-  return otherPaths && input.setup.airflowPath !== undefined ? 'permitted-path' : fromSplit;
+  const { gates, splitCounts, eitherSuffices } = input.procedure.airflow;
+  const measured = airflow !== null && judged(airflow) ? airflow.byRule : null;
+  if (measured === 'passes') return 'measured-enough';
+  if (isPathPermitted(input, measured === 'fails')) return 'permitted-path';
+  const fromSplit = splitCounts ? split : 'nothing';
+  if (measured === null) return fromSplit;
+  return eitherSuffices && !gates.includes(fromSplit) ? fromSplit : 'measured-low';
 }
 
-function splitEvidence(
+const isPathPermitted = ({ procedure, setup }: CheckInput, measuredLow: boolean): boolean =>
+  procedure.airflow.permittedPaths.some(
+    ({ path, alterationOnly, despiteLowMeasurement }) =>
+      path === setup.airflowPath && (!alterationOnly || setup.alteration) && (!measuredLow || despiteLowMeasurement),
+  );
+
+/** A split above its band counts also where its target or its finding is in doubt. */
+export function splitEvidence(
   input: CheckInput,
   derived: DerivedQuantities,
   { split, target }: { readonly split: CriterionResult; readonly target: Quantity },
-): AirflowEvidence {
+): SplitEvidence {
   if (counts(split) && isAboveBand(input, derived, target)) return 'split-above';
   if (!judged(split)) return 'nothing';
   if (split.finding === 'too-close-to-call') return 'split-too-close';
@@ -151,10 +156,34 @@ export function airflowGate({ airflow }: Procedure, evidence: AirflowEvidence): 
   return { code: evidence === 'split-above' ? 'split-above' : 'airflow-not-proven', figures: {} };
 }
 
+/**
+ * The airflow among the criteria. Where the procedure wants it proved, the overall finding waits for the measurement, or for something that stands in
+ * for it.
+ */
+export function airflowCriterion(
+  { procedure }: CheckInput,
+  measured: CriterionResult | null,
+  evidence: AirflowEvidence,
+): CriterionResult | null {
+  if (!procedure.airflow.gates.includes('nothing')) return measured;
+  const unproven = evidence === 'nothing';
+  const required = unproven || evidence === 'measured-low' || evidence === 'measured-enough';
+  if (measured !== null) return { ...measured, required };
+  return unproven ? unjudged('airflow', true, 'not-judged', { code: 'airflow-not-proven', figures: {} }) : null;
+}
+
+export const splitCautions = ({ procedure }: CheckInput, split: SplitEvidence): readonly Caution[] =>
+  procedure.airflow.splitCautions.filter((code) => code === split).map((code) => ({ code, figures: {} }));
+
 /** A caution for an airflow gate whose limit lies inside the uncertainty of what is held against it; a split that is clear of it is said to be. */
-export function airflowNearLimit(airflow: CriterionResult | null, split: CriterionResult): readonly Caution[] {
+export function airflowNearLimit(
+  { procedure }: CheckInput,
+  airflow: CriterionResult | null,
+  split: CriterionResult,
+): readonly Caution[] {
   if (airflow !== null && judged(airflow)) return nearLimit(airflow, 0);
-  return split.finding === 'too-close-to-call' ? nearLimit(split, split.tolerance?.high ?? 0) : [];
+  const doubtful = split.finding === 'too-close-to-call' || split.onlyJust;
+  return procedure.airflow.splitCounts && doubtful ? nearLimit(split, split.tolerance?.high ?? 0) : [];
 }
 
 function nearLimit({ actual, target, deviation }: CriterionResult, allowed: number): readonly Caution[] {

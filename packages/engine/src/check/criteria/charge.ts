@@ -47,14 +47,14 @@ const SUPERHEAT_CHARTS: Readonly<Record<SuperheatChartId, Chart>> = {
 /** Entered, where the procedure takes that; else its table, which is for split systems: a packaged unit needs its maker's own. */
 export function superheatTarget(input: CheckInput, derived: DerivedQuantities): SuperheatTarget {
   const { procedure, setup, readings } = input;
-  const { chart: chartId, enteredTarget } = procedure.superheat;
+  const { chart: source, enteredTarget } = procedure.superheat;
   if (setup.targetSuperheat !== undefined && enteredTarget) {
     return { quantity: setup.targetSuperheat, source: 'entered', probabilityOfNoTarget: 0 };
   }
-  if (setup.kind === 'packaged' || chartId === null) {
+  if (setup.kind === 'packaged') {
     return { quantity: missing(), source: 'entered', probabilityOfNoTarget: 0 };
   }
-  const chart = SUPERHEAT_CHARTS[chartId];
+  const chart = SUPERHEAT_CHARTS[source];
   const outdoorK: Quantity = readings.outdoorDryBulb?.quantity ?? missing('outdoorDryBulb');
   const wetBulbK = derived.returnWetBulb;
   const quantity = derive(targetSuperheat(chart), { wetBulbK, outdoorK }, [chartRounding(chart)]);
@@ -67,7 +67,7 @@ export function superheatTarget(input: CheckInput, derived: DerivedQuantities): 
           columnUK: wetBulbK.u,
         })
       : 0;
-  return { quantity, source: chartId, probabilityOfNoTarget: probability };
+  return { quantity, source, probabilityOfNoTarget: probability };
 }
 
 export function judgeSuperheat(
@@ -152,7 +152,7 @@ export function judgeSuperheatWindow({ input, derived, unfit, gates }: ChargeJud
 interface SuperheatWindow {
   readonly lowK: number;
   readonly highK: number;
-  readonly source: 'procedure-window' | 'entered-range';
+  readonly source: 'procedure-window' | 'entered-range' | 'window-and-range';
 }
 
 /** The procedure's window, the maker's range in its place, or what both allow. */
@@ -161,8 +161,8 @@ function windowOf(
   entered: CheckSetup['superheatRange'],
 ): SuperheatWindow {
   const own = { lowK: lowK.value, highK: highK.value };
-  if (entered === undefined || makersRange === 'not-used') return { ...own, source: 'procedure-window' };
+  if (entered === undefined) return { ...own, source: 'procedure-window' };
   if (makersRange === 'replaces') return { ...entered, source: 'entered-range' };
   const both = { lowK: Math.max(own.lowK, entered.lowK), highK: Math.min(own.highK, entered.highK) };
-  return { ...both, source: 'entered-range' };
+  return { ...both, source: 'window-and-range' };
 }

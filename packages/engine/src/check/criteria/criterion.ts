@@ -67,7 +67,6 @@ export function judgeCriterion(input: NumericCriterion): CriterionResult {
     tolerance,
     byRule: conformance?.byRule ?? null,
     probabilityWithin: conformance?.probabilityWithin ?? null,
-    onlyJust: conformance?.onlyJust ?? false,
   };
   return { ...numbers, ...findingOf(input, conformance) };
 }
@@ -88,7 +87,6 @@ export function judgeWindow(
     tolerance,
     byRule: conformance?.byRule ?? null,
     probabilityWithin: conformance?.probabilityWithin ?? null,
-    onlyJust: conformance?.onlyJust ?? false,
   };
   return { ...numbers, ...findingOf({ ...input, target: actual }, conformance) };
 }
@@ -102,7 +100,7 @@ function conformanceOf(
   return judgeConformance({ measured, tolerance, decision, probabilityOfNoTarget });
 }
 
-type FindingAndReason = Pick<CriterionResult, 'finding' | 'reason'>;
+type FindingAndReason = Pick<CriterionResult, 'finding' | 'reason' | 'onlyJust'>;
 type FindingInput = Pick<
   NumericCriterion,
   'actual' | 'target' | 'gates' | 'neverWithin' | 'probabilityOfNoTarget' | 'mostProbabilityOfNoTarget'
@@ -110,22 +108,23 @@ type FindingInput = Pick<
 
 function findingOf(input: FindingInput, conformance: Conformance | null): FindingAndReason {
   const { actual, target, probabilityOfNoTarget = 0, mostProbabilityOfNoTarget = 1, neverWithin = null } = input;
+  const without = (finding: Finding, reason: Reason): FindingAndReason => ({ finding, reason, onlyJust: false });
   const lacking = lackingInputs(actual, target);
-  if (lacking !== null) return { finding: 'not-judged', reason: lacking };
+  if (lacking !== null) return without('not-judged', lacking);
   const evidence = [actual, target].filter(isKnown);
   const shut = input.gates(evidence).find((reason) => reason !== null);
-  if (shut !== undefined) return { finding: 'not-verifiable', reason: shut };
+  if (shut !== undefined) return without('not-verifiable', shut);
   // what is left without a number is a table that has no value at this point
-  if (!isKnown(target)) return { finding: 'not-verifiable', reason: absenceReason(target) };
-  if (conformance === null) return { finding: 'not-judged', reason: { code: 'outside-range', figures: {} } };
+  if (!isKnown(target)) return without('not-verifiable', absenceReason(target));
+  if (conformance === null) return without('not-judged', { code: 'outside-range', figures: {} });
   if (probabilityOfNoTarget > mostProbabilityOfNoTarget) {
     const probability = { kind: 'fraction', value: probabilityOfNoTarget } as const;
-    return { finding: 'not-verifiable', reason: { code: 'target-may-not-exist', figures: { probability } } };
+    return without('not-verifiable', { code: 'target-may-not-exist', figures: { probability } });
   }
   if (conformance.finding === 'within' && neverWithin !== null) {
-    return { finding: 'too-close-to-call', reason: neverWithin };
+    return without('too-close-to-call', neverWithin);
   }
-  return { finding: conformance.finding, reason: null };
+  return { finding: conformance.finding, reason: null, onlyJust: conformance.onlyJust };
 }
 
 /** Missing readings of both sides together; else why the actual value, or the target's inputs, cannot be had. */

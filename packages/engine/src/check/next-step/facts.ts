@@ -7,7 +7,7 @@ import { isCoolWeather, lowHead } from '../cautions';
 import type { Caution, OverallFinding, Reason, ReasonCode, Stop, StopCode } from '../codes';
 import { conditionsGate, recordGate } from '../criteria/conditions';
 import { airflowGate } from '../criteria/air';
-import type { AirflowEvidence } from '../procedure';
+import type { AirflowEvidence, SplitEvidence } from '../procedure';
 import type { SuperheatTarget } from '../criteria/charge';
 import { LIMIT_SLACK_K } from '../conformance';
 import type { DerivedQuantities } from '../derived-quantities';
@@ -32,6 +32,7 @@ export interface Facts {
     'none' | 'readings' | 'stale' | 'nameplate-target' | 'port' | 'outside-tables' | 'suction-line-table';
   readonly superheatTarget: 'clear' | 'near-floor' | 'none-here' | 'not-used';
   readonly metering: 'orifice' | 'valve';
+  /** Where nothing counts, what the split shows: it may still tell the cause of a stop. */
   readonly airflow: AirflowEvidence;
   readonly airSeen: 'yes' | 'no';
   readonly quality: 'good' | 'wrong-refrigerant' | 'dry-wick' | 'liquid-colder-than-air' | 'pull-down';
@@ -59,6 +60,7 @@ export interface Evidence {
   readonly stops: readonly Stop[];
   readonly cautions: readonly Caution[];
   readonly airflow: AirflowEvidence;
+  readonly split: SplitEvidence;
   readonly overall: OverallFinding;
 }
 
@@ -79,20 +81,19 @@ const HIGH_HEAD_OTHERS_K = differenceToK(30, 'deltaF');
 export function gatherFacts(evidence: Evidence): Facts {
   const { input, derived, criteria, overall, airflow } = evidence;
   const { setup, visit, readings } = input;
-  const gate = conditionsGate(input)?.code;
   return {
     unfit: evidence.unfit?.code ?? 'none',
     impossible: impossibility(evidence.impossible),
     stop: evidence.stops[0]?.code ?? 'none',
     shutDown: evidence.stops.some((stop) => mustShutDown(stop, derived)) ? 'yes' : 'no',
-    condition: conditionFact(gate),
+    condition: conditionFact(conditionsGate(input)?.code),
     record: recordFact(input),
     airflowProof: airflowGate(input.procedure, airflow)?.code === 'airflow-not-proven' ? 'wanted' : 'enough',
     runningTime: visit.runningMinutes === undefined ? 'unrecorded' : 'recorded',
     lacking: whatIsLacking(criteria),
     superheatTarget: superheatTargetFact(evidence),
     metering: isFixedOrifice(setup) ? 'orifice' : 'valve',
-    airflow,
+    airflow: airflow === 'nothing' ? evidence.split : airflow,
     airSeen: readings.supplyDryBulb !== undefined || readings.airflow !== undefined ? 'yes' : 'no',
     quality: readingQuality(evidence.cautions),
     overall,

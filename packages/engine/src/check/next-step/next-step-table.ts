@@ -28,6 +28,7 @@ const shutDownFirst = (rows: readonly NextStepRow[]): readonly NextStepRow[] =>
 const fit: readonly NextStepRow[] = [
   { when: { unfit: ['heating-mode'] }, step: 'cooling-season-or-weigh-in', notYet: MOVE_NOTHING },
   { when: { unfit: ['metered-outdoors'] }, step: 'weigh-in', notYet: MOVE_NOTHING },
+  { when: { unfit: ['not-in-scope'] }, step: 'choose-other-rules', notYet: MOVE_NOTHING },
   { when: { unfit: ['part-stage'] }, step: 'bring-to-full-stage', notYet: MOVE_NOTHING },
   { when: { unfit: ['not-in-charge-mode'] }, step: 'bring-to-charge-mode', notYet: MOVE_NOTHING },
   { when: { unfit: ['not-ready'] }, step: 'mend-before-test', notYet: MOVE_NOTHING },
@@ -106,13 +107,13 @@ const lacking: readonly NextStepRow[] = [
 
 const airflow: readonly NextStepRow[] = [
   { when: { airflow: ['measured-low'] }, step: 'raise-airflow', notYet: MOVE_NOTHING },
+  { when: { airflowProof: ['wanted'] }, step: 'measure-airflow', notYet: MOVE_NOTHING },
   {
     when: { airflow: ['split-above'], metering: ['orifice'], superheat: ['above'] },
     step: 'suspect-probes',
     notYet: MOVE_NOTHING,
   },
   { when: { airflow: ['split-above'] }, step: 'reread-wet-bulb-then-airflow', notYet: MOVE_NOTHING },
-  { when: { airflowProof: ['wanted'] }, step: 'measure-airflow', notYet: MOVE_NOTHING },
 ];
 
 const quality: readonly NextStepRow[] = [

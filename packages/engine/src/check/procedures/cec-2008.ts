@@ -14,6 +14,7 @@ const PRACTICE = 'Common practice, no source';
 export const CEC_2008_INSTALLER: Procedure = {
   id: 'cec-ra3.2-2008-installer',
   version: 1,
+  packaged: false,
   decision: { type: 'simple', clearFrom: plainRule(0.8, '0.80', ['choice', CHOICE]) },
   superheat: {
     toleranceK: differenceRule(5, 'deltaF', ['read', RA_2008]),
@@ -42,8 +43,9 @@ export const CEC_2008_INSTALLER: Procedure = {
     limitPasses: false,
     gates: ['measured-low', 'split-above', 'nothing'],
     splitCounts: true,
+    splitCautions: ['split-below'],
     eitherSuffices: true,
-    otherPaths: false,
+    permittedPaths: [],
   },
   conditions: {
     leastOutdoorK: temperatureRule(55, 'degF', ['read', RA_2008]),

@@ -17,6 +17,7 @@ const cfmPerTon = (value: number): Rule =>
 export const CEC_2019_INSTALLER: Procedure = {
   id: 'cec-ra3.2-2019-installer',
   version: 1,
+  packaged: true,
   decision: { type: 'simple', clearFrom: plainRule(0.8, '0.80', ['choice', CHOICE]) },
   superheat: {
     toleranceK: differenceRule(5, 'deltaF', ['read', FORMS_2019]),
@@ -46,8 +47,12 @@ export const CEC_2019_INSTALLER: Procedure = {
     limitPasses: true,
     gates: ['measured-low', 'nothing'],
     splitCounts: false,
+    splitCautions: ['split-above', 'split-below'],
     eitherSuffices: false,
-    otherPaths: true,
+    permittedPaths: [
+      { path: 'duct-table', alterationOnly: false, despiteLowMeasurement: false },
+      { path: 'best-possible', alterationOnly: true, despiteLowMeasurement: true },
+    ],
   },
   conditions: {
     leastOutdoorK: temperatureRule(55, 'degF', ['read', FORMS_2019]),

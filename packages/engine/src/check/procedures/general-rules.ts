@@ -14,6 +14,7 @@ const PRACTICE = 'Common practice, no source';
 export const GENERAL_RULES: Procedure = {
   id: 'general-rules',
   version: 1,
+  packaged: true,
   decision: { type: 'guarded', clearFrom: plainRule(0.8, '0.80', ['choice', CHOICE]) },
   superheat: {
     toleranceK: differenceRule(5, 'deltaF', ['read', `${CHART_A}; ${NEW_HOMES_CHECKLIST}`]),
@@ -42,8 +43,9 @@ export const GENERAL_RULES: Procedure = {
     limitPasses: true,
     gates: ['measured-low', 'split-above'],
     splitCounts: true,
+    splitCautions: [],
     eitherSuffices: false,
-    otherPaths: false,
+    permittedPaths: [],
   },
   conditions: {
     leastOutdoorK: temperatureRule(55, 'degF', ['read', CEC_2008]),
