@@ -8,6 +8,7 @@ import { looseChecksWords } from './english/loose-checks';
 import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { offlineWords } from './english/offline';
+import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
 import { reasonTexts } from './english/reasons';
 import * as safetyWords from './english/safety';
@@ -29,6 +30,7 @@ const english: Language = {
   structureFaults: structureFaultWords,
   readings: readingWords,
   setup: setupWords,
+  procedures: procedureWords,
   safety: safetyWords,
   checkPage: checkPageWords,
   looseChecks: looseChecksWords,

@@ -17,6 +17,7 @@ import type { CriterionParts } from './criterion-parts';
 import type { checkPageWords } from './english/check-page';
 import type { looseChecksWords } from './english/loose-checks';
 import type { offlineWords } from './english/offline';
+import type { procedureWords } from './english/procedures';
 import type { readingWords } from './english/readings';
 import type * as safetyWords from './english/safety';
 import type { setupWords } from './english/setup';
@@ -83,6 +84,7 @@ export interface Language {
   readonly structureFaults: StructureFaultWords;
   readonly readings: typeof readingWords;
   readonly setup: typeof setupWords;
+  readonly procedures: typeof procedureWords;
   readonly safety: typeof safetyWords;
   readonly checkPage: typeof checkPageWords;
   readonly looseChecks: typeof looseChecksWords;

@@ -1,5 +1,6 @@
 /** The setup and the visit: labels, choices and short explanations. */
 import type {
+  AirflowPath,
   HighSidePort,
   LeakSearch,
   MeteringDevice,
@@ -70,6 +71,14 @@ const leakSearch: SetupFieldWords<LeakSearch> = {
   },
 };
 
+const airflowPath: SetupFieldWords<AirflowPath> = {
+  ...field('Instead of measured airflow', 'way in place of measured airflow', 'Where the rules permit one.'),
+  options: {
+    'duct-table': option('Ducts by the table', 'Return duct and filter grille sized by the table of the rules.'),
+    'best-possible': option('Best that can be done', 'Alterations only: every listed remedy has been tried.'),
+  },
+};
+
 /** Numbers of the setup and the visit, by their names in the contract. */
 const numbers = {
   elevation: field('Elevation', 'elevation', 'Of the site. Gauge pressures count from the air around you.'),
@@ -97,6 +106,8 @@ const numbers = {
   additionsOnEarlierVisits: field('Earlier additions', 'number of earlier additions'),
   hoursOff: field('Off for', 'hours the system was off', 'Before this start.'),
   lift: field('Lift', 'lift of the line set'),
+  alteration: field('Alteration', 'alteration', 'An older system that was altered: some rules ask less airflow of it.'),
+  highVelocity: field('Small-duct, high velocity', 'small-duct high-velocity system'),
   length: field('Line length', 'length of the line set'),
   included: field('Length in the factory charge', 'line length covered by the factory charge'),
 };
@@ -115,6 +126,7 @@ const preflight: Readonly<Record<PreflightItem, ChoiceWords & { readonly name: s
 export const setupWords = {
   refrigerant: field('Refrigerant', 'refrigerant', 'From the nameplate. Look for a retrofit label too.'),
   procedure: field('Rules', 'procedure', 'General rules, not those of one maker.'),
+  airflowPath,
   meteringDevice,
   mode,
   kind,

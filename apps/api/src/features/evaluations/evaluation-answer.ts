@@ -67,6 +67,7 @@ function criterionAnswer(criterion: CriterionResult, system: UnitSystem): Criter
     tolerance: deviation && tolerance && toleranceAnswer(tolerance, deviation, system),
     byRule: criterion.byRule,
     probabilityWithin: criterion.probabilityWithin,
+    onlyJust: criterion.onlyJust,
     finding: criterion.finding,
     reason: reason && reason.code,
     reasonText: reason && reasonText(reason, system),
