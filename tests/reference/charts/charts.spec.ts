@@ -114,7 +114,7 @@ describe('against other prints', () => {
 
   it('the finer table prints no value under 5 °F and its dashes reach from each column’s first to its end', () => {
     FINER.columnsF.forEach((_, c) => {
-      const column = FINER.cellsF.map((row) => row[c]!);
+      const column = FINER.cellsF.map((row): number | null => row[c] ?? null);
       const first = column.indexOf(null);
       expect(column.slice(0, first < 0 ? undefined : first).every((cell) => cell !== null && cell >= 5)).toBe(true);
       if (first >= 0) expect(column.slice(first).every((cell) => cell === null)).toBe(true);
