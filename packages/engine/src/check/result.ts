@@ -1,6 +1,7 @@
 import type { Known } from '../derivation/quantity';
 import type { DerivationStep } from '../derivation/steps';
 import type { Caution, CriterionId, Finding, NextStepMessage, NotYetCode, OverallFinding, Reason, Stop } from './codes';
+import type { ProcedureId } from './procedure';
 
 export const DERIVED_IDS = [
   'evaporatingDewTemperature',
@@ -60,7 +61,7 @@ export type NextStep = NextStepMessage & {
 
 export interface CheckResult {
   readonly engineVersion: string;
-  readonly procedure: { readonly id: string; readonly version: number };
+  readonly procedure: { readonly id: ProcedureId; readonly version: number };
   /** Holds only what could be computed. */
   readonly derived: Readonly<Partial<Record<DerivedId, Known>>>;
   readonly criteria: readonly CriterionResult[];

@@ -27,6 +27,8 @@ const faults: FaultWords['faults'] = {
 const {
   numbers,
   preflight,
+  alteration,
+  highVelocity,
   airflowPath,
   meteringDevice,
   mode,
@@ -43,6 +45,8 @@ const naming: FaultWords['naming'] = {
     ...readingWords,
     ...numbers,
     ...preflight,
+    alteration,
+    highVelocity,
     airflowPath,
     meteringDevice,
     mode,

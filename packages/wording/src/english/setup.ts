@@ -106,8 +106,6 @@ const numbers = {
   additionsOnEarlierVisits: field('Earlier additions', 'number of earlier additions'),
   hoursOff: field('Off for', 'hours the system was off', 'Before this start.'),
   lift: field('Lift', 'lift of the line set'),
-  alteration: field('Alteration', 'alteration', 'An older system that was altered: some rules ask less airflow of it.'),
-  highVelocity: field('Small-duct, high velocity', 'small-duct high-velocity system'),
   length: field('Line length', 'length of the line set'),
   included: field('Length in the factory charge', 'line length covered by the factory charge'),
 };
@@ -126,6 +124,8 @@ const preflight: Readonly<Record<PreflightItem, ChoiceWords & { readonly name: s
 export const setupWords = {
   refrigerant: field('Refrigerant', 'refrigerant', 'From the nameplate. Look for a retrofit label too.'),
   procedure: field('Rules', 'procedure', 'General rules, not those of one maker.'),
+  alteration: field('Alteration', 'alteration', 'An older system that was altered: some rules ask less airflow of it.'),
+  highVelocity: field('Small-duct, high velocity', 'small-duct high-velocity system'),
   airflowPath,
   meteringDevice,
   mode,

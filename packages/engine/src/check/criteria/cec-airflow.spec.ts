@@ -154,6 +154,11 @@ describe('2019: measured airflow', () => {
     expect(criterionOf(evaluate(best), 'airflow')).toMatchObject({ required: false, finding: 'below' });
   });
 
+  it('unproved is said once: by the gate, not by a caution as well', () => {
+    const cautions = cautionCodes(evaluate(of2019({ readings: { ...unmeasured, ...NO_SPLIT } })));
+    expect(cautions).not.toContain('airflow-not-proven');
+  });
+
   it('too old a measurement is taken again, the gate says why', () => {
     const airflow = { value: 1100, unit: 'cfm', ageSeconds: 601 } as const;
     const { criteria, overall } = evaluate(of2019({ readings: { airflow } }));
