@@ -3,8 +3,9 @@
  * Most draws are usual, so that every finding is met; the rest reach past every limit of judgement.
  */
 import fc from 'fast-check';
-import type { RefrigerantId } from '@chargewright/engine';
+import type { ProcedureId, RefrigerantId } from '@chargewright/engine';
 import {
+  AIRFLOW_PATHS,
   COMMON_REFRIGERANT_IDS,
   HIGH_SIDE_PORTS,
   LEAK_SEARCHES,
@@ -12,6 +13,7 @@ import {
   MODES,
   PREFLIGHT_ITEMS,
   PREFLIGHT_STATES,
+  PROCEDURES,
   READING_IDS,
   REFRIGERANT_IDS,
   STAGES,
@@ -79,6 +81,7 @@ const preflight = fc.dictionary(
 
 /** Every drive by name; a scenario replaces some of them to reach what chance alone would not. */
 export const DRIVES = {
+  procedure: mixed<ProcedureId | undefined>([6, fc.constant(undefined)], [5, oneOf(PROCEDURES.map(({ id }) => id))]),
   refrigerant,
   meteringDevice: mixed([2, oneOf(['fixed-orifice'] as const)], [2, oneOf(METERING_DEVICES)]),
   mode: defaulted('cooling', MODES),
@@ -107,6 +110,9 @@ export const DRIVES = {
   nominalCapacityTon: sometimes(60, between(1.5, 5)),
   designAirflowPerTon: sometimes(10, between(330, 450)),
   airflowPerTon: sometimes(15, usual(between(380, 460), between(200, 380))),
+  alteration: sometimes(10, fc.boolean()),
+  highVelocity: sometimes(6, fc.boolean()),
+  airflowPath: sometimes(8, oneOf(AIRFLOW_PATHS)),
   factoryChargeLb: sometimes(40, between(4, 14)),
   maxHighPressurePsi: sometimes(10, between(300, 650)),
   chargeMode: sometimes(6, fc.boolean()),

@@ -17,6 +17,7 @@ import {
 import { chartValueK } from '../../packages/engine/src/methods/chart';
 import { SPLIT_TABLE } from '../../packages/engine/src/methods/data/split-table';
 import { SUPERHEAT_CHART_A } from '../../packages/engine/src/methods/data/superheat-chart-a';
+import { SUPERHEAT_TABLE_FINER } from '../../packages/engine/src/methods/data/superheat-table-finer';
 import { attempt } from '../../packages/engine/src/result';
 import type { Drives } from './drives';
 
@@ -157,15 +158,16 @@ function refrigerantSide(
 const highSideId = (port: HighSidePort | undefined, right: boolean): ReadingId =>
   port === 'discharge' && right ? 'dischargePressure' : 'liquidPressure';
 
-/** What the superheat of a good charge would be: entered, from the chart, or a valve's usual one. */
+/** What the superheat of a good charge would be: entered, from the procedure's chart, or a valve's usual one. */
 function wantedSuperheatK(
-  { meteringDevice }: Drives,
+  { meteringDevice, procedure }: Drives,
   entered: number | undefined,
   { wetBulbK, outdoorK }: { wetBulbK: number; outdoorK: number },
 ): number {
   if (meteringDevice !== 'fixed-orifice') return USUAL_SUPERHEAT_K;
   if (entered !== undefined) return entered;
-  const target = attempt(() => chartValueK(SUPERHEAT_CHART_A, { rowK: outdoorK, columnK: wetBulbK }));
+  const chart = procedure?.startsWith('cec') ? SUPERHEAT_TABLE_FINER : SUPERHEAT_CHART_A;
+  const target = attempt(() => chartValueK(chart, { rowK: outdoorK, columnK: wetBulbK }));
   return target.ok ? target.value : USUAL_SUPERHEAT_K;
 }
 

@@ -61,6 +61,7 @@ export function requestOfSystem(system: PlausibleSystem, unitSystem: UnitSystem)
   const { readings, earlierReadings, drives } = system;
   const toReadings = (si: SiReadings) => readingsIn(si, unitSystem, system.atmospherePa);
   return {
+    ...defined({ procedure: drives.procedure }),
     setup: setupIn(system, unitSystem),
     visit: {
       ...visitIn(system, unitSystem),
@@ -107,6 +108,9 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
         unit: unit.power,
       })),
       designAirflow: mapped(drives.designAirflowPerTon, (perTon) => flow(perTon * (tons ?? 3))),
+      alteration: drives.alteration,
+      highVelocity: drives.highVelocity,
+      airflowPath: drives.airflowPath,
       factoryCharge: mapped(drives.factoryChargeLb, (pounds) => mass(pounds, unitSystem)),
       maxHighPressure: mapped(drives.maxHighPressurePsi, (psi) => ({
         value: pressureDifferenceFromPa(pressureDifferenceToPa(psi, 'psi'), unit.pressureDifference),

@@ -35,6 +35,17 @@ const CLEAR: Overrides = {
   earlier: always(undefined),
 };
 
+/** All that the certificates of 2019 ask for. */
+const PROVED: Overrides = {
+  procedure: fc.constantFrom('cec-ra3.2-2019-installer' as const, 'cec-ra3.2-2019-rater' as const),
+  instrumentsCheckedDaysAgo: between(0, 31),
+  lowestReturnF: between(70.5, 74),
+  preflight: always({ panelsOn: 'ok', accessHole: 'ok' } as const),
+  nominalCapacityTon: between(2, 4),
+  airflowPerTon: between(360, 450),
+  designAirflowPerTon: always(undefined),
+};
+
 const VALVE: Overrides = { ...CLEAR, meteringDevice: always('txv' as const), targetSubcoolingF: between(9, 12) };
 const ORIFICE: Overrides = {
   ...CLEAR,
@@ -73,6 +84,20 @@ const SCENARIOS: readonly Overrides[] = [
     superheatMarginF: between(8, 12),
     targetSubcoolingF: always(undefined),
     subcoolingMarginF: between(-4.6, -2.4),
+  },
+  // the certificates of 2019 complete, and short of one thing each
+  { ...VALVE, ...PROVED },
+  { ...ORIFICE, ...PROVED },
+  { ...VALVE, ...PROVED, splitMarginF: fc.oneof(between(-9, -5), between(5, 9)) },
+  { ...VALVE, ...PROVED, preflight: always({ panelsOn: 'ok' } as const) },
+  { ...VALVE, ...PROVED, instrumentsCheckedDaysAgo: between(32, 90) },
+  { ...VALVE, ...PROVED, airflowPerTon: always(undefined), airflowPath: always(undefined) },
+  { ...ORIFICE, ...PROVED, outdoorF: between(115.5, 122), targetSuperheatF: between(8, 20) },
+  // rules for split systems on a packaged unit
+  {
+    ...VALVE,
+    procedure: fc.constantFrom('cec-ra3.2-2008-installer' as const, 'cec-ra3.2-2008-rater' as const),
+    kind: always('packaged' as const),
   },
   // a packaged unit whose port nobody stated
   { ...CLEAR, kind: always('packaged' as const), highSidePort: always(undefined) },

@@ -1,4 +1,5 @@
 /** `POST /api/v1/evaluations`: what is asked and what is answered. */
+import { PROCEDURES } from '@chargewright/engine';
 import type { EvaluationRequest, ReadingsInput, SetupInput, VisitInput } from '@chargewright/engine';
 import * as z from 'zod';
 import { evaluationAnswer } from './evaluation/answer';
@@ -15,7 +16,12 @@ export type { AnswerUnit } from './amounts/answer-amounts';
 export { evaluationAnswer };
 
 const others = {
-  procedure: z.exactOptional(z.string().max(LONGEST_TEXT).meta({ description: 'Left out: general-rules.' })),
+  procedure: z.exactOptional(
+    z
+      .string()
+      .max(LONGEST_TEXT)
+      .meta({ description: `One of ${PROCEDURES.map(({ id }) => id).join(', ')}. Left out: general-rules.` }),
+  ),
   visit: z.exactOptional(visit),
   readings: readings.default({}),
 };

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import * as engine from './index';
 import * as airSide from './methods/air-side';
 import * as cyclePoints from './methods/cycle-points';
+import { SUPERHEAT_CHART_A } from './methods/data/superheat-chart-a';
 import * as targets from './methods/targets';
 
 const text = readFileSync(new URL('../NOMENCLATURE.md', import.meta.url), 'utf8');
@@ -54,6 +55,7 @@ describe('NOMENCLATURE.md', () => {
       ...Object.values(cyclePoints),
       cyclePoints.absolutePressure('suctionPressure'),
       cyclePoints.evaporatingDewTemperature('R-22'),
+      targets.targetSuperheat(SUPERHEAT_CHART_A),
       targets.deviation('superheat', 'differenceK'),
     ].filter((value) => typeof value === 'object' && 'symbols' in value);
     const shown = new Set(formulas.flatMap(({ symbols }) => Object.values<string>(symbols)));

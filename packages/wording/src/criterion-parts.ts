@@ -38,6 +38,8 @@ export interface CriterionParts {
   readonly byRule: 'passes' | 'fails' | null;
   readonly probabilityWithin: string | null;
   readonly probabilityOutside: string | null;
+  /** The rule decided, without much certainty. */
+  readonly onlyJust: boolean;
   /** Readings that are missing, when that is the reason. */
   readonly missing: readonly ReadingId[];
 }
@@ -94,6 +96,7 @@ export function criterionParts(result: CriterionResult, system: UnitSystem): Cri
     byRule,
     probabilityWithin: probabilityWithin === null ? null : formatProbability(probabilityWithin),
     probabilityOutside: probabilityWithin === null ? null : formatProbability(1 - probabilityWithin),
+    onlyJust: result.onlyJust,
     missing: missingOf(result),
   };
 }

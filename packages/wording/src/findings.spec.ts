@@ -53,6 +53,7 @@ const superheat: CriterionResult = {
   tolerance: { low: -3.8 * K_PER_F, high: 5 * K_PER_F, floored: true },
   byRule: 'fails',
   probabilityWithin: 0.01,
+  onlyJust: false,
   finding: 'above',
   reason: null,
 };
@@ -67,6 +68,7 @@ const unjudged = (reason: Reason, more: Partial<CriterionResult> = {}): Criterio
   tolerance: null,
   byRule: null,
   probabilityWithin: null,
+  onlyJust: false,
   finding: 'not-judged',
   reason,
   ...more,
@@ -164,6 +166,34 @@ describe('criterionDetail', () => {
     );
     expect(criterionDetail({ ...airflow, probabilityWithin: 0.02 }, 'C-bar')).toBe(
       'At least 500 L/s from the nominal capacity · 98 % sure it is below the band',
+    );
+  });
+
+  it('says only just, and what would settle it, where the rule alone decided', () => {
+    const passes = {
+      ...superheat,
+      finding: 'within',
+      byRule: 'passes',
+      probabilityWithin: 0.62,
+      onlyJust: true,
+    } as const;
+    expect(criterionDetail(passes, 'F-psi')).toMatch(
+      / · only just: 62 % sure it is inside the band; a better instrument .+ would settle it$/,
+    );
+    const fails = { ...passes, finding: 'above', byRule: 'fails', probabilityWithin: 0.4 } as const;
+    expect(criterionDetail(fails, 'F-psi')).toContain('only just: 60 % sure it is above the band');
+    expect(criterionDetail({ ...passes, onlyJust: false }, 'F-psi')).not.toContain('only just');
+  });
+
+  it('says of the finer table that it is from memory', () => {
+    expect(criterionDetail({ ...superheat, targetSource: 'finer-table' }, 'F-psi')).toContain(
+      'Target 8.8 °F from the published table, from memory, at 64.5 °F wet bulb, 92 °F outdoors',
+    );
+  });
+
+  it('names the window and the maker’s range where both must hold', () => {
+    expect(criterionDetail({ ...window, targetSource: 'window-and-range' }, 'F-psi')).toContain(
+      '4 to 25 °F by these rules and the maker’s range together',
     );
   });
 

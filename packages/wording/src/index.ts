@@ -14,6 +14,8 @@ export type { ReadingHelp } from './english/reading-help';
 export type { ReadingWords } from './english/readings';
 export type { ChoiceWords, SetupFieldWords } from './english/setup';
 export { readingWords } from './english/readings';
+export type { ProcedureWords } from './english/procedures';
+export { procedureWords } from './english/procedures';
 export { listWords, setupWords } from './english/setup';
 export * as safetyWords from './english/safety';
 export { checkPageWords } from './english/check-page';

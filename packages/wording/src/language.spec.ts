@@ -9,6 +9,7 @@ import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { offlineWords } from './english/offline';
 import { readingHelp } from './english/reading-help';
+import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
 import { reasonTexts } from './english/reasons';
 import * as safetyWords from './english/safety';
@@ -31,6 +32,7 @@ const english: Language = {
   readings: readingWords,
   readingHelp,
   setup: setupWords,
+  procedures: procedureWords,
   safety: safetyWords,
   checkPage: checkPageWords,
   looseChecks: looseChecksWords,

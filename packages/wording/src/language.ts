@@ -18,6 +18,7 @@ import type { checkPageWords } from './english/check-page';
 import type { looseChecksWords } from './english/loose-checks';
 import type { offlineWords } from './english/offline';
 import type { readingHelp } from './english/reading-help';
+import type { procedureWords } from './english/procedures';
 import type { readingWords } from './english/readings';
 import type * as safetyWords from './english/safety';
 import type { setupWords } from './english/setup';
@@ -85,6 +86,7 @@ export interface Language {
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;
+  readonly procedures: typeof procedureWords;
   readonly safety: typeof safetyWords;
   readonly checkPage: typeof checkPageWords;
   readonly looseChecks: typeof looseChecksWords;

@@ -1,9 +1,10 @@
-import { PREFLIGHT_ITEMS, READING_IDS } from '@chargewright/engine';
+import { PREFLIGHT_ITEMS, PROCEDURES, READING_IDS } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
 import { checkPageWords } from './english/check-page';
 import { looseChecksWords } from './english/loose-checks';
 import { offlineWords } from './english/offline';
 import { readingHelp } from './english/reading-help';
+import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
 import * as safetyWords from './english/safety';
 import { listWords, setupWords } from './english/setup';
@@ -27,6 +28,7 @@ const roots = Object.entries({
   readingHelp,
   safety: { ...safetyWords },
   setup: setupWords,
+  procedures: procedureWords,
 });
 
 describe('words of the page', () => {
@@ -51,6 +53,18 @@ describe('words of the page', () => {
 
   it('name each item of the look-over', () => {
     for (const item of PREFLIGHT_ITEMS) expect(setupWords.preflight[item].label).toBeTruthy();
+  });
+
+  it('say of every procedure whose tables were not read that they are from memory', () => {
+    const shorts = PROCEDURES.map(({ id, superheat }) => {
+      const { name, short, note } = procedureWords[id];
+      for (const text of [name, note]) expect(text, id).toMatch(/^[A-Z]/);
+      expect(short.length, id).toBeLessThanOrEqual(name.length);
+      expect(note, id).toMatch(superheat.chart === 'finer-table' ? /tables .+ from memory/ : /from memory/);
+      return short;
+    });
+    expect(new Set(shorts).size).toBe(PROCEDURES.length);
+    expect(Object.keys(procedureWords).sort()).toEqual(PROCEDURES.map(({ id }) => id).sort());
   });
 
   it('count in the singular too', () => {

@@ -4,7 +4,10 @@ import { describe, expect, it } from 'vitest';
 import type { Chart } from '../../../packages/engine/src/methods/chart';
 import { chartValueK } from '../../../packages/engine/src/methods/chart';
 import { SPLIT_TABLE } from '../../../packages/engine/src/methods/data/split-table';
+import { SPLIT_CHART } from '../../../packages/engine/src/methods/data/split-chart';
 import { SUPERHEAT_CHART_A } from '../../../packages/engine/src/methods/data/superheat-chart-a';
+import { SUPERHEAT_CHART_B } from '../../../packages/engine/src/methods/data/superheat-chart-b';
+import { SUPERHEAT_TABLE_FINER } from '../../../packages/engine/src/methods/data/superheat-table-finer';
 import { temperatureToK } from '../../../packages/engine/src/units';
 
 interface PrintedChart {
@@ -38,6 +41,7 @@ function number(text: string | undefined): number {
 const COPY_A = printed('target-superheat-maker-chart.csv', 'A');
 const COPY_B = printed('target-superheat-maker-chart.csv', 'B');
 const SPLIT = printed('target-temperature-split.csv');
+const FINER = printed('target-superheat.csv');
 const MAKERS_SPLIT = printed('target-temperature-split-maker-chart.csv');
 
 const valueF = (chart: Chart, rowF: number, columnF: number): number =>
@@ -49,7 +53,10 @@ const cellsOf = ({ rowsF, columnsF, cellsF }: PrintedChart) =>
 
 describe.each([
   ['superheat chart, copy A', SUPERHEAT_CHART_A, COPY_A, 16 * 14],
+  ['superheat chart, copy B', SUPERHEAT_CHART_B, COPY_B, 13 * 14],
+  ['finer superheat table', SUPERHEAT_TABLE_FINER, FINER, 61 * 27],
   ['split table', SPLIT_TABLE, SPLIT, 15 * 27],
+  ['maker’s split chart', SPLIT_CHART, MAKERS_SPLIT, 6 * 14],
 ] as const)('%s', (_, chart, table, size) => {
   it('is the transcription, cell by cell', () => {
     expect(cellsOf(table)).toHaveLength(size);
@@ -78,6 +85,40 @@ describe('against other prints', () => {
     }
     expect(differences).toHaveLength(12);
     for (const difference of differences) expect(difference).toBeCloseTo(1, 6);
+  });
+
+  it('the finer table agrees with copies A and B within 1.5 and 1 °F; they print 5 where it prints three more dashes', () => {
+    const differences: number[] = [];
+    const dashes: string[] = [];
+    for (const [copy, most] of [
+      [COPY_A, 1.5],
+      [COPY_B, 1],
+    ] as const) {
+      for (const { rowF, columnF, cell } of cellsOf(copy)) {
+        const r = FINER.rowsF.indexOf(rowF);
+        const finer = r < 0 ? null : FINER.cellsF[r]![FINER.columnsF.indexOf(columnF)]!;
+        if (r >= 0 && cell !== null && finer === null) {
+          expect(cell).toBe(5);
+          dashes.push(`${rowF}/${columnF}`);
+        }
+        if (cell === null || finer === null) continue;
+        expect(Math.abs(finer - cell), `${rowF}/${columnF}`).toBeLessThanOrEqual(most + 1e-9);
+        differences.push(finer - cell);
+      }
+    }
+    expect(new Set(dashes)).toEqual(new Set(['80/58', '90/62', '105/66']));
+    expect(differences).toHaveLength(2 * 115);
+    const rms = Math.sqrt(differences.reduce((sum, x) => sum + x * x, 0) / differences.length);
+    expect(rms).toBeLessThan(0.45);
+  });
+
+  it('the finer table prints no value under 5 °F and its dashes reach from each column’s first to its end', () => {
+    FINER.columnsF.forEach((_, c) => {
+      const column = FINER.cellsF.map((row): number | null => row[c] ?? null);
+      const first = column.indexOf(null);
+      expect(column.slice(0, first < 0 ? undefined : first).every((cell) => cell !== null && cell >= 5)).toBe(true);
+      if (first >= 0) expect(column.slice(first).every((cell) => cell === null)).toBe(true);
+    });
   });
 
   it('the split table follows one smooth expression within 0.063 °F: none of its 356 cells is a slip', () => {

@@ -77,7 +77,7 @@ const FORMULAS: readonly Formula[] = [
   airSide.returnHumidityRatio,
   airSide.returnRelativeHumidity,
   airSide.returnEnthalpy,
-  targets.targetSuperheat,
+  targets.targetSuperheat(SUPERHEAT_CHART_A),
   targets.targetTemperatureSplit,
   targets.deviation('superheat', 'differenceK'),
 ];

@@ -7,9 +7,11 @@ import { ANSWER_UNITS, codedText, orNull, toleranceAmount, uncertainAmount } fro
 const TARGET_SOURCES = [
   'entered',
   'makers-chart-a',
+  'finer-table',
   'split-table',
   'procedure-window',
   'entered-range',
+  'window-and-range',
   'design-airflow',
   'airflow-per-capacity',
 ] as const satisfies readonly TargetSource[];
@@ -27,6 +29,9 @@ const criterion = object({
     .number()
     .nullable()
     .meta({ description: 'Probability that the true deviation lies inside the tolerance (JCGM 106:2012).' }),
+  onlyJust: z.boolean().meta({
+    description: 'The finding is by the rule alone, and less certain than the procedure calls clear.',
+  }),
   finding: z.enum(FINDINGS),
   reason: z.string().nullable().meta({ description: 'Code of why it is not-verifiable or not-judged.' }),
   reasonText: z.string().nullable(),

@@ -1,4 +1,4 @@
-import { HIGH_SIDE_PORTS, METERING_DEVICES, MODES, STAGES, SYSTEM_KINDS } from '@chargewright/engine';
+import { AIRFLOW_PATHS, HIGH_SIDE_PORTS, METERING_DEVICES, MODES, STAGES, SYSTEM_KINDS } from '@chargewright/engine';
 import type { SetupInput } from '@chargewright/engine';
 import * as z from 'zod';
 import { object } from '../parsing/object';
@@ -33,6 +33,11 @@ const optional = {
   superheatRange: z.exactOptional(object({ low: z.number(), high: z.number(), unit: z.enum(DIFFERENCE_UNITS_GIVEN) })),
   nominalCapacity: z.exactOptional(power),
   designAirflow: z.exactOptional(flow),
+  alteration: z.exactOptional(z.boolean().meta({ description: 'An alteration of an older system. Left out: no.' })),
+  highVelocity: z.exactOptional(z.boolean().meta({ description: 'A small-duct high-velocity system. Left out: no.' })),
+  airflowPath: z.exactOptional(
+    z.enum(AIRFLOW_PATHS).meta({ description: 'A way that some procedures permit in place of measured airflow.' }),
+  ),
   factoryCharge: z.exactOptional(mass),
   maxHighPressure: z.exactOptional(pressure),
   chargeMode: z.exactOptional(z.boolean()),

@@ -7,12 +7,13 @@ import { differenceToK, lengthToM, pressureDifferenceToPa } from '../units';
 import type { UsedReadingId } from './assumed-uncertainty';
 import type { Caution, CautionCode, Figure } from './codes';
 import { LIMIT_SLACK_K } from './conformance';
+import { airflowGate } from './criteria/air';
 import { conditionsRecorded, nearLimitCautions } from './criteria/conditions';
-import type { AirflowEvidence } from './criteria/air';
 import type { DerivedQuantities } from './derived-quantities';
 import { plausibilityCautions } from './plausibility';
 import type { CheckInput } from './input';
 import { isFixedOrifice } from './input';
+import type { AirflowEvidence } from './procedure';
 import { isPullDown } from './pull-down';
 import { freezeRisk } from './stops';
 
@@ -83,7 +84,7 @@ function coolingCautions(input: CheckInput, derived: DerivedQuantities, airflow:
     isPullDown(input, derived) ? plain('pull-down') : null,
     coolWeather(input),
     lowHead(input),
-    airflow === 'nothing' ? plain('airflow-not-proven') : null,
+    airflow === 'nothing' && airflowGate(input.procedure, airflow) === null ? plain('airflow-not-proven') : null,
   ];
   return [
     ...found.filter((caution) => caution !== null),
@@ -208,7 +209,7 @@ function visitCautions(input: CheckInput): readonly Caution[] {
   if (gaugeZeroed === 'not-ok' || gaugeZeroed === 'not-checked') found.push(plain('gauge-not-zeroed'));
   if (filterAndCoil === 'not-ok') found.push(plain('filter-or-coil-dirty'));
   const days = visit.instrumentsCheckedDaysAgo;
-  if (days !== undefined && days > procedure.instruments.cautionAfterDays.value) {
+  if (days !== undefined && days > procedure.instruments.mostDays.value) {
     found.push({ code: 'instruments-old', figures: { days: { kind: 'days', value: days } } });
   }
   return found;

@@ -55,6 +55,7 @@ export interface ReasonFigures {
   // not verifiable: the system or the conditions do not allow the test
   'heating-mode': never;
   'metered-outdoors': never;
+  'not-in-scope': never;
   'part-stage': never;
   'not-in-charge-mode': never;
   'port-not-stated': never;
@@ -69,6 +70,9 @@ export interface ReasonFigures {
   'no-target-here': never;
   'target-may-not-exist': 'probability';
   'airflow-too-low': never;
+  'airflow-not-proven': never;
+  'outdoor-too-hot': 'actual' | 'most';
+  'access-hole-missing': never;
   'split-above': never;
   freezing: never;
   /** The measured subcooling is negative: it is about zero, and nothing that rests on it is called *within*. */
@@ -104,6 +108,8 @@ export interface CautionFigures {
   'gauge-not-zeroed': never;
   'instruments-old': 'days';
   'airflow-not-proven': never;
+  'split-above': never;
+  'split-below': never;
   'setup-assumed': 'fields';
   'conditions-not-recorded': never;
   'faults-may-hide': never;
@@ -126,6 +132,7 @@ export interface NextStepFigures {
   // not fit for the test: the method that is valid
   'cooling-season-or-weigh-in': never;
   'weigh-in': never;
+  'choose-other-rules': never;
   'bring-to-full-stage': never;
   'bring-to-charge-mode': never;
   'state-the-port': never;
@@ -150,6 +157,9 @@ export interface NextStepFigures {
   'run-longer': 'minutes';
   'warm-the-house': never;
   'wait-for-warmer-weather': never;
+  'wait-for-cooler-weather': never;
+  'check-instruments': never;
+  'make-access-hole': never;
   'reach-a-target': never;
   'record-conditions': never;
   // readings and targets
@@ -158,6 +168,7 @@ export interface NextStepFigures {
   'find-nameplate-target': never;
   // airflow
   'raise-airflow': never;
+  'measure-airflow': never;
   'suspect-probes': never;
   // data quality
   'confirm-refrigerant': never;

@@ -2,8 +2,19 @@ import { describe, expect, it } from 'vitest';
 import { leaf } from '../derivation/quantity';
 import { differenceToK } from '../units';
 import { judgeConformance, LIMIT_SLACK_K } from './conformance';
+import type { Decision } from './procedure';
+import { plainRule } from './procedure';
 
-const judge = (value: number, u: number, low: number | null = -3, high: number | null = 3, noTarget = 0) =>
+type JudgeArguments = [value: number, u: number, low?: number | null, high?: number | null, noTarget?: number];
+
+const judgeBy = (
+  type: Decision['type'],
+  value: number,
+  u: number,
+  low: number | null = -3,
+  high: number | null = 3,
+  noTarget = 0,
+) =>
   judgeConformance({
     measured: leaf({
       id: 'deviation',
@@ -13,9 +24,13 @@ const judge = (value: number, u: number, low: number | null = -3, high: number |
       parts: u === 0 ? [] : [{ key: 'deviation', u, shape: 'normal' }],
     }),
     tolerance: { low, high, floored: false },
-    guard: 0.8,
+    decision: { type, clearFrom: plainRule(0.8, '0.80', ['choice', 'the specs']) },
     probabilityOfNoTarget: noTarget,
   });
+
+const judge = (...[value, u, low, high, noTarget]: JudgeArguments) => judgeBy('guarded', value, u, low, high, noTarget);
+const judgeSimply = (...[value, u, low, high, noTarget]: JudgeArguments) =>
+  judgeBy('simple', value, u, low, high, noTarget);
 
 describe('by the rule', () => {
   it('limits pass, and what lies beyond them by more than the slack fails', () => {
@@ -57,8 +72,18 @@ describe('probability', () => {
   });
 
   it('of an exact deviation is 0 or 1', () => {
-    expect(judge(2.9, 0)).toEqual({ byRule: 'passes', probabilityWithin: 1, finding: 'within' });
-    expect(judge(3.1, 0)).toEqual({ byRule: 'fails', probabilityWithin: 0, finding: 'above' });
+    expect(judge(2.9, 0)).toEqual({
+      byRule: 'passes',
+      probabilityWithin: 1,
+      onlyJust: false,
+      finding: 'within',
+    });
+    expect(judge(3.1, 0)).toEqual({
+      byRule: 'fails',
+      probabilityWithin: 0,
+      onlyJust: false,
+      finding: 'above',
+    });
     expect(judge(-3.1, 0).finding).toBe('below');
   });
 
@@ -125,6 +150,49 @@ describe('guarded finding', () => {
   });
 });
 
+describe('simple finding', () => {
+  // the certainty of either answer is 0.80 at 0.8416 u from the limit
+  it.each([
+    [0, 'within', false],
+    [3 - 0.85, 'within', false],
+    [3 - 0.83, 'within', true],
+    [3, 'within', true],
+    [3 + 0.01, 'above', true],
+    [3 + 0.83, 'above', true],
+    [3 + 0.85, 'above', false],
+    [-3 + 0.83, 'within', true],
+    [-3, 'within', true],
+    [-3 - 0.01, 'below', true],
+    [-3 - 0.85, 'below', false],
+  ])('of %d with u = 1 in a band of ±3 is %s, only just: %s', (value, finding, onlyJust) => {
+    expect(judgeSimply(value, 1)).toMatchObject({ finding, onlyJust });
+  });
+
+  it('follows the rule whatever the uncertainty and the doubt about the target', () => {
+    for (const u of [0, 0.01, 1, 10, 100])
+      for (const noTarget of [0, 0.19, 0.9])
+        for (let value = -8; value <= 8; value += 0.25) {
+          const { byRule, finding, onlyJust } = judgeSimply(value, u, -3, 3, noTarget);
+          expect(byRule).toBe(Math.abs(value) <= 3 ? 'passes' : 'fails');
+          expect(finding).toBe(value > 3 ? 'above' : value < -3 ? 'below' : 'within');
+          if (u === 0 && noTarget < 0.2) expect(onlyJust).toBe(false);
+        }
+  });
+
+  it('is the surer of a pass the less a target is in doubt; of a fail the doubt takes nothing', () => {
+    expect(judgeSimply(0, 0.1, -3, 3, 0.19).onlyJust).toBe(false);
+    expect(judgeSimply(0, 0.1, -3, 3, 0.21).onlyJust).toBe(true);
+    expect(judgeSimply(9, 0.1, -3, 3, 0.9).onlyJust).toBe(false);
+  });
+
+  it('within limits that contradict each other nothing passes', () => {
+    for (const value of [25.2, 24, 27]) {
+      expect(judgeSimply(value, 1, 26, 25)).toMatchObject({ byRule: 'fails', probabilityWithin: 0, onlyJust: false });
+      expect(judge(value, 1, 26, 25).finding).not.toBe('within');
+    }
+  });
+});
+
 describe('a mean shifted by a kink', () => {
   const shifted = (value: number, u: number, meanShift: number) => {
     const measured = leaf({
@@ -137,7 +205,7 @@ describe('a mean shifted by a kink', () => {
     return judgeConformance({
       measured: { ...measured, meanShift },
       tolerance: { low: -3, high: 3, floored: false },
-      guard: 0.8,
+      decision: { type: 'guarded', clearFrom: plainRule(0.8, '0.80', ['choice', 'the specs']) },
     });
   };
 

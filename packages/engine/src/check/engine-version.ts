@@ -1,6 +1,7 @@
-/** Which rules and tables gave a result: the package's version and a hash of every table, of the procedures and of the next steps. */
+/** Which rules and tables gave a result: the package's version and a hash of every table it is judged by, of the procedures and of the next steps. */
 import { SPLIT_TABLE } from '../methods/data/split-table';
 import { SUPERHEAT_CHART_A } from '../methods/data/superheat-chart-a';
+import { SUPERHEAT_TABLE_FINER } from '../methods/data/superheat-table-finer';
 import { INPUT_HASH } from '../refrigerants/generated/saturation-curves';
 import { NEXT_STEP_TABLE } from './next-step/next-step-table';
 import { PROCEDURES } from './procedure-catalogue';
@@ -21,7 +22,7 @@ let version: string | undefined;
 
 /** `0.1.0+1a2b3c4d`: two results with the same version came from the same rules and tables. Computed once, when first asked for. */
 export function engineVersion(): string {
-  const data = [INPUT_HASH, SUPERHEAT_CHART_A, SPLIT_TABLE, PROCEDURES, NEXT_STEP_TABLE];
+  const data = [INPUT_HASH, SUPERHEAT_CHART_A, SUPERHEAT_TABLE_FINER, SPLIT_TABLE, PROCEDURES, NEXT_STEP_TABLE];
   version ??= `${VERSION}+${fnv1a(JSON.stringify(data))}`;
   return version;
 }

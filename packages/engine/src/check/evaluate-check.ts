@@ -4,10 +4,20 @@ import { isKnown } from '../derivation/quantity';
 import { derivationSteps } from '../derivation/steps';
 import { findCautions } from './cautions';
 import type { Caution, OverallFinding, Reason, Stop } from './codes';
-import { airflowEvidence, airflowGate, airflowNearLimit, judgeAirflow, judgeSplit, splitTarget } from './criteria/air';
+import {
+  airflowCriterion,
+  airflowEvidence,
+  airflowGate,
+  airflowNearLimit,
+  judgeAirflow,
+  judgeSplit,
+  splitCautions,
+  splitEvidence,
+  splitTarget,
+} from './criteria/air';
 import type { ChargeJudgement } from './criteria/charge';
 import { judgeSubcooling, judgeSuperheat, judgeSuperheatWindow, superheatTarget } from './criteria/charge';
-import { conditionsGate, judgeConditions, judgeInstruments } from './criteria/conditions';
+import { conditionsGate, judgeConditions, judgeInstruments, recordGate } from './criteria/conditions';
 import type { DerivedQuantities } from './derived-quantities';
 import { deriveQuantities } from './derived-quantities';
 import { engineVersion } from './engine-version';
@@ -31,8 +41,10 @@ export function evaluateCheck(input: CheckInput): CheckResult {
   const cooling = setup.mode === 'cooling';
   const targetSplit = splitTarget(input, derived);
   const split = judgeSplit(input, derived, targetSplit, unfit);
-  const airflow = judgeAirflow(input);
-  const evidence = airflowEvidence(input, derived, { airflow, split, target: targetSplit });
+  const measured = judgeAirflow(input);
+  const splitShows = splitEvidence(input, derived, { split, target: targetSplit });
+  const evidence = airflowEvidence(input, { airflow: measured, split: splitShows });
+  const airflow = airflowCriterion(input, measured, evidence);
   const target = superheatTarget(input, derived);
   const charge = judgeCharge(
     {
@@ -43,8 +55,9 @@ export function evaluateCheck(input: CheckInput): CheckResult {
         impossible?.reason ?? null,
         frozen(stops),
         conditionsGate(input),
+        recordGate(input),
         staleReason(input, from),
-        airflowGate(evidence),
+        airflowGate(procedure, evidence),
       ],
     },
     target,
@@ -61,7 +74,7 @@ export function evaluateCheck(input: CheckInput): CheckResult {
   const cautions = [
     ...(impossible === null ? [] : [impossible.caution]),
     ...findCautions(input, derived, evidence),
-    ...(cooling ? airflowNearLimit(airflow, split) : []),
+    ...(cooling ? [...splitCautions(input, splitShows), ...airflowNearLimit(input, measured, split)] : []),
     ...hiddenFaults(input, derived, finding),
   ];
   const nextStep = findNextStep({
@@ -74,6 +87,7 @@ export function evaluateCheck(input: CheckInput): CheckResult {
     stops,
     cautions,
     airflow: evidence,
+    split: splitShows,
     overall: finding,
   });
 

@@ -16,9 +16,10 @@ const MENDED_FIRST: readonly PreflightItem[] = [
 ];
 
 /** Why no charge criterion can be judged, or `null` when the system is fit for the test. */
-export function unfitReason({ setup, visit }: Pick<CheckInput, 'setup' | 'visit'>): Reason | null {
+export function unfitReason({ procedure, setup, visit }: CheckInput): Reason | null {
   if (setup.mode === 'heating') return { code: 'heating-mode', figures: {} };
   if (setup.kind === 'mini-split' || setup.kind === 'multi-split') return { code: 'metered-outdoors', figures: {} };
+  if (setup.kind === 'packaged' && !procedure.packaged) return { code: 'not-in-scope', figures: {} };
   if (setup.stage === 'part') return { code: 'part-stage', figures: {} };
   if (setup.chargeMode === false) return { code: 'not-in-charge-mode', figures: {} };
   const items = unreadyItems(visit);

@@ -5,6 +5,7 @@ import type { UsedReadingId } from './assumed-uncertainty';
 import type { SetupField } from './codes';
 import type { Procedure } from './procedure';
 import type {
+  AirflowPath,
   HighSidePort,
   LeakSearch,
   MeteringDevice,
@@ -42,6 +43,9 @@ export interface CheckSetup {
   readonly superheatRange?: { readonly lowK: number; readonly highK: number };
   readonly nominalCapacityW?: number;
   readonly designAirflowM3PerS?: number;
+  readonly alteration: boolean;
+  readonly highVelocity: boolean;
+  readonly airflowPath?: AirflowPath;
   readonly factoryChargeKg?: number;
   /** Absolute. */
   readonly maxHighPressurePa?: number;

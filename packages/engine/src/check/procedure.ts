@@ -3,6 +3,7 @@
  */
 import type { DifferenceUnit, TemperatureUnit } from '../units';
 import { differenceToK, temperatureToK } from '../units';
+import type { AirflowPath } from './request';
 
 /** `read` in the named source, recalled from `memory`, common `practice` without a source, or our own `choice`, open to better evidence. */
 export type Standing = 'read' | 'memory' | 'practice' | 'choice';
@@ -15,32 +16,109 @@ export interface Rule {
   readonly source: string;
 }
 
+/** How a deviation becomes a finding (JCGM 106:2012, 8.2 and 8.3). */
+export interface Decision {
+  /** `simple`: by the rule alone. `guarded`: clear only at a probability of `clearFrom` or more; between that and its complement too close to call. */
+  readonly type: 'simple' | 'guarded';
+  /** Under `simple` a certainty below this is called only just. */
+  readonly clearFrom: Rule;
+}
+
+/** What a procedure does with something that is not as it should be, or not recorded. */
+export type Consequence = 'gate' | 'caution';
+
+/** What the temperature split says of the airflow. */
+export type SplitEvidence = 'split-above' | 'split-within' | 'split-too-close' | 'split-below' | 'nothing';
+
+/** What is known about the airflow when the charge is to be judged. */
+export type AirflowEvidence = 'measured-low' | 'measured-enough' | 'permitted-path' | SplitEvidence;
+
+/** A way to show the airflow other than measuring enough of it. */
+export interface PermittedPath {
+  readonly path: AirflowPath;
+  readonly alterationOnly: boolean;
+  /** Whether it holds although a measurement stayed below the limit. */
+  readonly despiteLowMeasurement: boolean;
+}
+
+export interface AirflowRules {
+  /** Least airflow per nominal capacity, m³/s per W: of a new system, of an alteration, of a small-duct high-velocity system. */
+  readonly leastM3PerSPerW: Rule;
+  readonly leastOfAlterationM3PerSPerW: Rule | null;
+  readonly leastOfHighVelocityM3PerSPerW: Rule | null;
+  /** Part of the design airflow that is enough where one was entered. */
+  readonly leastDesignFraction: Rule | null;
+  /** Whether the limit itself is enough. */
+  readonly limitPasses: boolean;
+  /** Which evidence shuts the charge criteria. */
+  readonly gates: readonly AirflowEvidence[];
+  /** Whether the temperature split is evidence at all. */
+  readonly splitCounts: boolean;
+  /** Which splits are worth a caution although the test stays open. */
+  readonly splitCautions: readonly ('split-above' | 'split-below')[];
+  /** A split that is open stands in for a measured airflow that is low. */
+  readonly eitherSuffices: boolean;
+  readonly permittedPaths: readonly PermittedPath[];
+}
+
 export interface Procedure {
-  readonly id: string;
+  readonly id: ProcedureId;
   readonly version: number;
-  /** Guarded decision rule: outside `p` and `1 − p` the finding is clear (JCGM 106:2012, 8.3). */
-  readonly guardProbability: Rule;
-  readonly superheat: { readonly toleranceK: Rule; readonly floorK: Rule };
+  /** Whether packaged units are in its scope. */
+  readonly packaged: boolean;
+  readonly decision: Decision;
+  readonly superheat: {
+    readonly toleranceK: Rule;
+    readonly floorK: Rule | null;
+    readonly enteredTarget: boolean;
+    /** The table that gives the target where none is entered. */
+    readonly chart: SuperheatChartId;
+  };
   readonly subcooling: {
     readonly toleranceK: Rule;
+    /** The measured subcooling itself must reach this. */
+    readonly leastK: Rule | null;
+    /** Guidance without a target: low, clear, high. */
     readonly lowBelowK: Rule;
     readonly clearFromK: Rule;
     readonly highAboveK: Rule;
   };
   readonly temperatureSplit: { readonly toleranceK: Rule };
-  readonly superheatWindow: { readonly lowK: Rule; readonly highK: Rule };
-  readonly airflow: { readonly leastM3PerSPerW: Rule; readonly leastDesignFraction: Rule };
+  readonly superheatWindow: {
+    readonly lowK: Rule;
+    readonly highK: Rule;
+    /** The maker's range for the valve takes the window's place, or must hold as well. */
+    readonly makersRange: 'replaces' | 'also';
+  };
+  readonly airflow: AirflowRules;
   readonly conditions: {
     readonly leastOutdoorK: Rule;
+    /** Warmest outdoor air for a superheat test. */
+    readonly mostOutdoorForSuperheatK: Rule | null;
     readonly coolBelowK: Rule;
     readonly leastReturnK: Rule;
     readonly leastRunningMinutes: Rule;
+    /** Running time, lowest return air, outdoor air, pre-flight: what happens when they are not recorded. */
+    readonly unrecorded: Consequence;
+    /** A marked access hole beside the coil is part of the test. */
+    readonly accessHole: boolean;
   };
-  readonly instruments: { readonly cautionAfterDays: Rule };
+  readonly instruments: { readonly mostDays: Rule; readonly beyond: Consequence };
   readonly mostReadingAgeSeconds: Rule;
   /** Above this probability that no target exists, the criterion is not verifiable. */
   readonly mostProbabilityOfNoTarget: Rule;
 }
+
+export const PROCEDURE_IDS = [
+  'general-rules',
+  'cec-ra3.2-2008-installer',
+  'cec-ra3.2-2008-rater',
+  'cec-ra3.2-2019-installer',
+  'cec-ra3.2-2019-rater',
+] as const;
+export type ProcedureId = (typeof PROCEDURE_IDS)[number];
+
+export type SuperheatChartId = 'makers-chart-a' | 'finer-table';
 
 type Basis = readonly [standing: Standing, source: string];
 

@@ -217,8 +217,20 @@ describe('setup and visit', () => {
     expect(setup.maxHighPressurePa).toBeCloseTo(4e6 + 101_325, 6);
     expect(setup.liftM).toBeCloseTo(3.048, 12);
     expect(setup.chargeMode).toBe(true);
+    expect([setup.alteration, setup.highVelocity, setup.airflowPath]).toEqual([false, false, undefined]);
     expect(visit.addedThisVisitKg).toBeCloseTo(0.45359237, 12);
     expect(visit.lowestReturn?.value).toBeCloseTo(295.15, 10);
+  });
+
+  it('takes the procedure by its id, and what the procedures ask of a system', () => {
+    const { procedure, setup } = inputOf(
+      valveRequest({
+        procedure: 'cec-ra3.2-2019-rater',
+        setup: { alteration: true, highVelocity: true, airflowPath: 'best-possible' },
+      }),
+    );
+    expect(procedure.id).toBe('cec-ra3.2-2019-rater');
+    expect(setup).toMatchObject({ alteration: true, highVelocity: true, airflowPath: 'best-possible' });
   });
 
   it('an amount added before stands for an addition on an earlier visit where none was counted', () => {

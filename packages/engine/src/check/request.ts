@@ -25,6 +25,8 @@ export const STAGES = ['full', 'part', 'unknown'] as const;
 export type Stage = (typeof STAGES)[number];
 export const HIGH_SIDE_PORTS = ['liquid', 'discharge', 'none'] as const;
 export type HighSidePort = (typeof HIGH_SIDE_PORTS)[number];
+export const AIRFLOW_PATHS = ['duct-table', 'best-possible'] as const;
+export type AirflowPath = (typeof AIRFLOW_PATHS)[number];
 export const PREFLIGHT_ITEMS = [
   'filterAndCoil',
   'panelsOn',
@@ -91,6 +93,11 @@ export interface SetupInput {
   };
   readonly nominalCapacity?: Amount<PowerUnit>;
   readonly designAirflow?: Amount<FlowUnit>;
+  /** The system is an alteration of an older one, or a small-duct high-velocity one: some procedures ask less airflow of it. */
+  readonly alteration?: boolean;
+  readonly highVelocity?: boolean;
+  /** A way that some procedures permit in place of measuring the airflow. */
+  readonly airflowPath?: AirflowPath;
   readonly factoryCharge?: Amount<MassUnit>;
   readonly maxHighPressure?: Amount<PressureUnit>;
   /** Whether an inverter runs in the maker's charge mode; leave out for a single-speed unit. */

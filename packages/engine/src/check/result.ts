@@ -1,6 +1,7 @@
 import type { Known } from '../derivation/quantity';
 import type { DerivationStep } from '../derivation/steps';
 import type { Caution, CriterionId, Finding, NextStepMessage, NotYetCode, OverallFinding, Reason, Stop } from './codes';
+import type { ProcedureId } from './procedure';
 
 export const DERIVED_IDS = [
   'evaporatingDewTemperature',
@@ -19,9 +20,11 @@ export type DerivedId = (typeof DERIVED_IDS)[number];
 export type TargetSource =
   | 'entered'
   | 'makers-chart-a'
+  | 'finer-table'
   | 'split-table'
   | 'procedure-window'
   | 'entered-range'
+  | 'window-and-range'
   | 'design-airflow'
   | 'airflow-per-capacity';
 
@@ -29,7 +32,7 @@ export type TargetSource =
 export interface Tolerance {
   readonly low: number | null;
   readonly high: number | null;
-  /** The lower limit is the superheat floor, not the tolerance of the target. */
+  /** The lower limit is the least the measured value may be, not the tolerance of the target. */
   readonly floored: boolean;
 }
 
@@ -45,6 +48,8 @@ export interface CriterionResult {
   readonly byRule: 'passes' | 'fails' | null;
   /** Probability that the true deviation lies inside the tolerance and a target exists (JCGM 106:2012). */
   readonly probabilityWithin: number | null;
+  /** The finding is by the rule alone, and its certainty is below what the procedure calls clear. */
+  readonly onlyJust: boolean;
   readonly finding: Finding;
   readonly reason: Reason | null;
 }
@@ -56,7 +61,7 @@ export type NextStep = NextStepMessage & {
 
 export interface CheckResult {
   readonly engineVersion: string;
-  readonly procedure: { readonly id: string; readonly version: number };
+  readonly procedure: { readonly id: ProcedureId; readonly version: number };
   /** Holds only what could be computed. */
   readonly derived: Readonly<Partial<Record<DerivedId, Known>>>;
   readonly criteria: readonly CriterionResult[];

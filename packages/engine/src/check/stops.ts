@@ -14,6 +14,8 @@ const FREEZING_STOP_K = temperatureToK(28, 'degF');
 const FREEZING_K = temperatureToK(32, 'degF');
 /** Fall of the suction pressure from one set of readings to the next that is more than its needle's unrest (choice). */
 const FALL_PA = pressureDifferenceToPa(2, 'psi');
+/** Least superheat at the suction port of a fixed orifice (makers' chart, copy A), whatever the procedure. */
+const FLOOR_K = differenceToK(5, 'deltaF');
 /** Condensing over outdoor air (choice). */
 const MOST_CONDENSING_OVER_AIR_K = differenceToK(45, 'deltaF');
 /** Discharge line (common practice, no source). */
@@ -51,7 +53,7 @@ function liquidReturn(input: CheckInput, { superheat }: DerivedQuantities): Stop
   const uncertainty = expandedUncertainty(superheat);
   // far below zero the readings contradict each other: `saturation-impossible` says so
   if (superheat.value < -uncertainty) return null;
-  const floor = isFixedOrifice(input.setup) ? input.procedure.superheat.floorK.value : 0;
+  const floor = isFixedOrifice(input.setup) ? FLOOR_K : 0;
   if (superheat.value - uncertainty > 0 && superheat.value >= floor - LIMIT_SLACK_K) return null;
   return {
     code: 'liquid-return',

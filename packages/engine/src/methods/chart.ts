@@ -6,7 +6,7 @@ import { EngineError } from '../errors';
 import { differenceToK, temperatureFromK } from '../units';
 
 export interface Chart {
-  readonly id: 'makers-chart-a' | 'split-table';
+  readonly id: 'makers-chart-a' | 'makers-chart-b' | 'finer-table' | 'split-table' | 'split-chart';
   readonly standing: 'read' | 'memory';
   readonly source: string;
   /** Half of the last printed digit, in °F. */

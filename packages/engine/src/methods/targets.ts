@@ -6,7 +6,6 @@ import { differenceToK } from '../units';
 import type { Chart } from './chart';
 import { chartValueK } from './chart';
 import { SPLIT_TABLE } from './data/split-table';
-import { SUPERHEAT_CHART_A } from './data/superheat-chart-a';
 
 /** The chart is printed in whole or tenth degrees: half of the last digit as a limit. */
 export const chartRounding = (chart: Chart): ErrorPart => ({
@@ -15,15 +14,16 @@ export const chartRounding = (chart: Chart): ErrorPart => ({
   shape: 'rectangular',
 });
 
-/** Target superheat of a fixed-orifice system from the printed makers' chart. */
-export const targetSuperheat = formula({
-  id: 'targetSuperheat',
-  gives: 'differenceK',
-  text: 'chart(T_wb, T_outdoor)',
-  symbols: { wetBulbK: 'T_wb', outdoorK: 'T_outdoor' },
-  source: SUPERHEAT_CHART_A.source,
-  of: ({ wetBulbK, outdoorK }) => chartValueK(SUPERHEAT_CHART_A, { rowK: outdoorK, columnK: wetBulbK }),
-});
+/** Target superheat of a fixed-orifice system from a printed chart of outdoor air by indoor wet bulb. */
+export const targetSuperheat = (chart: Chart): Formula<'wetBulbK' | 'outdoorK'> =>
+  formula({
+    id: 'targetSuperheat',
+    gives: 'differenceK',
+    text: 'chart(T_wb, T_outdoor)',
+    symbols: { wetBulbK: 'T_wb', outdoorK: 'T_outdoor' },
+    source: chart.source,
+    of: ({ wetBulbK, outdoorK }) => chartValueK(chart, { rowK: outdoorK, columnK: wetBulbK }),
+  });
 
 /** Target temperature split at about the rated airflow and charge. */
 export const targetTemperatureSplit = formula({

@@ -33,6 +33,10 @@ export const cautionTexts: MessageTexts<CautionFigures> = {
   'gauge-not-zeroed': 'The gauges are not known to be zeroed. Zero them in the open air.',
   'instruments-old': (f) => `The instruments were last checked ${f.days} ago. Hold them against a reference.`,
   'airflow-not-proven': 'Nothing shows the airflow yet. Read the supply dry bulb, or measure the airflow.',
+  'split-above':
+    'The temperature split is above its band: re-read the wet bulb; a dry wick looks exactly like low airflow.',
+  'split-below':
+    'The temperature split is below its band: measure the supply air again at several places of the duct. If it stays low, the capacity is probably low; that alone does not say why.',
   'setup-assumed': (f) => `Assumed, because not stated: ${f.fields}.`,
   'conditions-not-recorded':
     'Running time, lowest return air or the look-over are not recorded. The result holds only if the system was ready.',

@@ -24,14 +24,30 @@ const faults: FaultWords['faults'] = {
   'low-above-high': (f) => `${f.field}: the low end is above the high end.`,
 };
 
-const { numbers, preflight, meteringDevice, mode, kind, stage, highSidePort, leakSearch, refrigerant, procedure } =
-  setupWords;
+const {
+  numbers,
+  preflight,
+  alteration,
+  highVelocity,
+  airflowPath,
+  meteringDevice,
+  mode,
+  kind,
+  stage,
+  highSidePort,
+  leakSearch,
+  refrigerant,
+  procedure,
+} = setupWords;
 
 const naming: FaultWords['naming'] = {
   fields: {
     ...readingWords,
     ...numbers,
     ...preflight,
+    alteration,
+    highVelocity,
+    airflowPath,
     meteringDevice,
     mode,
     kind,

@@ -55,9 +55,11 @@ const stopHeadlines: FindingPhrases['stops'] = {
 const SOURCES: Readonly<Record<TargetSource, string>> = {
   entered: 'as entered',
   'makers-chart-a': 'from the makers’ chart',
+  'finer-table': 'from the published table, from memory,',
   'split-table': 'from the published split table (see sources)',
   'procedure-window': 'by these rules',
   'entered-range': 'by the maker’s range as entered',
+  'window-and-range': 'by these rules and the maker’s range together',
   'design-airflow': 'from the design airflow',
   'airflow-per-capacity': 'from the nominal capacity',
 };
@@ -144,11 +146,14 @@ function targetText(parts: CriterionParts): string {
   return `Target ${target}${source}${at.length === 0 ? '' : ` at ${at.join(', ')}`}`;
 }
 
-function certaintyText({ finding, probabilityWithin, probabilityOutside }: CriterionParts): string {
+/** With "only just" goes what would settle it. */
+function certaintyText({ finding, probabilityWithin, probabilityOutside, onlyJust }: CriterionParts): string {
   if (probabilityWithin === null) return '';
-  return finding === 'above' || finding === 'below'
-    ? `${probabilityOutside} sure it is ${finding} the band`
-    : `${probabilityWithin} sure it is inside the band`;
+  const sure =
+    finding === 'above' || finding === 'below'
+      ? `${probabilityOutside} sure it is ${finding} the band`
+      : `${probabilityWithin} sure it is inside the band`;
+  return onlyJust ? `only just: ${sure}; a better instrument or a careful second reading would settle it` : sure;
 }
 
 const ruleText = ({ criterion, byRule, finding }: CriterionParts): string => {

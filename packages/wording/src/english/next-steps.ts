@@ -41,6 +41,10 @@ const steps: NextStepWords['steps'] = {
     `Weigh the charge in, or use the maker’s test mode. To weigh in: ${WEIGH_IN}.`,
     'The liquid is metered outdoors: subcooling cannot be read at this unit.',
   ],
+  'choose-other-rules': [
+    'Choose other rules for this unit: the maker’s, or the general ones.',
+    'The rules chosen are for split systems.',
+  ],
   'bring-to-full-stage': [`Bring the system to full stage, ${THEN_READ}.`, 'Targets hold at full stage only.'],
   'bring-to-charge-mode': [
     `Put the inverter into the maker’s charge mode, ${THEN_READ}.`,
@@ -123,6 +127,18 @@ const steps: NextStepWords['steps'] = {
     (_, say) => `Come back when it is at least ${say.degF(55)} outdoors, or weigh the charge in.`,
     'In the cold the pressures do not show the charge.',
   ],
+  'wait-for-cooler-weather': [
+    (_, say) => `Come back when it is ${say.degF(115)} outdoors or less; early morning is coolest.`,
+    'In hotter air these rules allow no superheat test.',
+  ],
+  'check-instruments': [
+    'Hold gauges and thermometers against a reference, and record the day.',
+    'These rules count only instruments that were checked within a month.',
+  ],
+  'make-access-hole': [
+    'Make the access hole beside the coil, read the air there, and record it. Cut nowhere near the coil, its wiring or its drain; close the hole after the test.',
+    'These rules want the air read in the plenum beside the coil, not at a grille.',
+  ],
   'reach-a-target': [
     'Wait for conditions that have a target, or come back. A house that is more humid or weather that is less hot raises the target. Heating may warm the house if the occupant agrees; mind people and animals.',
     'The chart prints none here: the superheat would be too small to trust.',
@@ -144,6 +160,10 @@ const steps: NextStepWords['steps'] = {
   'raise-airflow': [
     `Raise the airflow first: filter, coil, blower speed, registers, ducts, ${THEN_READ}. With gas appliances in the house make sure no flue back-drafts.`,
     'At low airflow a charge reads wrong; adjusting it would hide the cause.',
+  ],
+  'measure-airflow': [
+    'Prove the airflow first: measure it over the coil with the filter in place (flow grid, fan flowmeter or capture hood), and enter the nominal capacity. Some rules take a temperature split within its band instead: then read return and supply air and the wet bulb.',
+    'These rules judge no charge before the airflow is known to be enough.',
   ],
   'suspect-probes': [
     'Check the probes before anything else. Wet the wick, warm or cool the clamps in your hand to see them answer, clamp again on clean metal.',

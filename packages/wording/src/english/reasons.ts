@@ -16,6 +16,7 @@ export const reasonTexts: MessageTexts<ReasonFigures> = {
   'heating-mode': 'In heating no cooling target holds.',
   'metered-outdoors':
     'This kind meters the liquid outdoors: the small pipe carries liquid and vapor, so subcooling cannot be read there.',
+  'not-in-scope': 'These rules do not cover packaged units.',
   'part-stage': 'The system is not known to run at full stage: targets hold at full stage only.',
   'not-in-charge-mode': 'The inverter is not in its charge mode: its speed moves the readings, not the charge.',
   'port-not-stated': 'It is not stated which high-side port this unit has.',
@@ -25,6 +26,9 @@ export const reasonTexts: MessageTexts<ReasonFigures> = {
   'running-time': (f) => `The system has run ${f.minutes}; it takes ${f.least}.`,
   'return-too-cool': (f) => `The return air was down to ${f.actual}; the test needs at least ${f.least}.`,
   'outdoor-too-cold': (f) => `It is ${f.actual} outdoors; the test needs at least ${f.least}.`,
+  'outdoor-too-hot': (f) => `It is ${f.actual} outdoors; a superheat test is allowed up to ${f.most}.`,
+  'access-hole-missing':
+    'An access hole beside the coil for the air sensors is part of this test: it is not recorded as there.',
   stale: (f) => `Too old to count: ${f.readings}.`,
   'ports-swapped': 'Suction reads as high as the high side: hoses swapped, or the compressor is not running.',
   'saturation-impossible': 'These readings cannot belong together in a running system.',
@@ -32,6 +36,8 @@ export const reasonTexts: MessageTexts<ReasonFigures> = {
   'target-may-not-exist': (f) =>
     `These conditions lie so near a dash of the chart that there may be no target (${f.probability} likely).`,
   'airflow-too-low': 'The airflow is too low: raise it first, the charge is judged after.',
+  'airflow-not-proven':
+    'These rules want the airflow proved before the charge is judged, and nothing counts as proof yet.',
   'split-above': 'The split is above its band: re-read the wet bulb, then look at the airflow, then judge the charge.',
   freezing: 'The coil is freezing: no charge is judged on ice.',
   flash:

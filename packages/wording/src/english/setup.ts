@@ -1,5 +1,6 @@
 /** The setup and the visit: labels, choices and short explanations. */
 import type {
+  AirflowPath,
   HighSidePort,
   LeakSearch,
   MeteringDevice,
@@ -85,6 +86,14 @@ const leakSearch: SetupFieldWords<LeakSearch> = {
   },
 };
 
+const airflowPath: SetupFieldWords<AirflowPath> = {
+  ...field('Instead of measured airflow', 'way in place of measured airflow', 'Where the rules permit one.'),
+  options: {
+    'duct-table': option('Ducts by the table', 'Return duct and filter grille sized by the table of the rules.'),
+    'best-possible': option('Best that can be done', 'Alterations only: every listed remedy has been tried.'),
+  },
+};
+
 /** Numbers of the setup and the visit, by their names in the contract. */
 const numbers = {
   elevation: field('Elevation', 'elevation', 'Of the site. Gauge pressures count from the air around you.'),
@@ -130,6 +139,9 @@ const preflight: Readonly<Record<PreflightItem, ChoiceWords & { readonly name: s
 export const setupWords = {
   refrigerant: field('Refrigerant', 'refrigerant', 'From the nameplate. Look for a retrofit label too.'),
   procedure: field('Rules', 'procedure', 'General rules, not those of one maker.'),
+  alteration: field('Alteration', 'alteration', 'An older system that was altered: some rules ask less airflow of it.'),
+  highVelocity: field('Small-duct, high velocity', 'small-duct high-velocity system'),
+  airflowPath,
   meteringDevice,
   mode,
   kind,

@@ -75,6 +75,7 @@ function criterionAnswer(criterion: CriterionResult, system: UnitSystem): Criter
     tolerance: tolerance && toleranceAnswer(tolerance, KIND_OF_TOLERANCE[criterion.criterion] ?? 'differenceK', system),
     byRule: criterion.byRule,
     probabilityWithin: criterion.probabilityWithin,
+    onlyJust: criterion.onlyJust,
     finding: criterion.finding,
     reason: reason && reason.code,
     reasonText: reason && reasonText(reason, system),

@@ -72,6 +72,27 @@ describe('a check that can be judged', () => {
     expect(diagnosis).toEqual([]);
   });
 
+  it('is judged by the procedure that is asked for, only just where the rule alone decides', async () => {
+    const { criteria, overall, procedure } = await evaluated({
+      ...EVALUATION_EXAMPLE,
+      procedure: 'cec-ra3.2-2019-installer',
+      setup: { ...EVALUATION_EXAMPLE.setup, alteration: true, highVelocity: false },
+      visit: { ...EVALUATION_EXAMPLE.visit, preflight: { accessHole: 'ok' } },
+      readings: { ...EVALUATION_EXAMPLE.readings, airflow: { value: 950, unit: 'cfm' } },
+    });
+    expect(procedure).toEqual({ id: 'cec-ra3.2-2019-installer', version: 1 });
+    const superheat = criteria.find(({ criterion }) => criterion === 'superheat');
+    // the table prints 8.1 °F at 95 °F outdoors and 65 °F wet bulb; the readings give less than 5 more
+    expect(superheat?.target?.value).toBeCloseTo(8.1, 9);
+    expect(superheat).toMatchObject({ targetSource: 'finer-table', byRule: 'passes', onlyJust: true });
+    expect(superheat?.tolerance?.low).toBeCloseTo(-5, 9);
+    expect(criteria.find(({ criterion }) => criterion === 'airflow')).toMatchObject({
+      required: true,
+      finding: 'within',
+    });
+    expect(overall.finding).toBe(superheat?.finding);
+  });
+
   it('says the enthalpy on the datum of its unit', async () => {
     const { derived } = await evaluated(EVALUATION_EXAMPLE);
     const humidityRatio = derived.returnHumidityRatio?.value ?? NaN;

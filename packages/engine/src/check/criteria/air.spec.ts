@@ -5,15 +5,19 @@ import { deriveQuantities } from '../derived-quantities';
 import type { EvaluationRequest } from '../request';
 import type { Changes } from '../testing/healthy-systems';
 import { criterionOf, evaluate, inputOf, orificeRequest, valveRequest } from '../testing/healthy-systems';
-import type { AirflowEvidence } from './air';
-import { airflowEvidence, airflowGate, judgeAirflow, judgeSplit, splitTarget } from './air';
+import type { AirflowEvidence } from '../procedure';
+import { GENERAL_RULES } from '../procedures/general-rules';
+import { airflowEvidence, airflowGate, judgeAirflow, judgeSplit, splitEvidence, splitTarget } from './air';
 
 function evidenceOf(request: EvaluationRequest): AirflowEvidence {
   const input = inputOf(request);
   const derived = deriveQuantities(input.setup, input.readings);
   const target = splitTarget(input, derived);
   const split = judgeSplit(input, derived, target, null);
-  return airflowEvidence(input, derived, { airflow: judgeAirflow(input), split, target });
+  return airflowEvidence(input, {
+    airflow: judgeAirflow(input),
+    split: splitEvidence(input, derived, { split, target }),
+  });
 }
 
 /** Target 16.9 °F at 76 °F and 66 °F wet bulb. */
@@ -54,7 +58,7 @@ describe('the airflow table', () => {
   ])('%s', (_, changes, evidence, reason) => {
     const request = valveRequest(changes);
     expect(evidenceOf(request)).toBe(evidence);
-    expect(airflowGate(evidence)?.code ?? null).toBe(reason);
+    expect(airflowGate(GENERAL_RULES, evidence)?.code ?? null).toBe(reason);
     const { finding, reason: found } = criterionOf(evaluate(request), 'subcooling');
     if (reason !== null) expect([finding, found?.code]).toEqual(['not-verifiable', reason]);
     else expect(found?.code ?? '').not.toMatch(/airflow|split/);
@@ -68,7 +72,7 @@ describe('the airflow table', () => {
     const old = { ...request.readings[reading]!, ageSeconds: 601 };
     const stale = { ...request, readings: { ...request.readings, [reading]: old } };
     expect(evidenceOf(request)).not.toBe(evidenceOf(stale));
-    expect(airflowGate(evidenceOf(stale))).toBeNull();
+    expect(airflowGate(GENERAL_RULES, evidenceOf(stale))).toBeNull();
   });
 });
 

@@ -9,14 +9,11 @@ import type { Caution, Figure, Reason, ReasonCode } from '../codes';
 import { LIMIT_SLACK_K } from '../conformance';
 import { staleReason } from '../evidence';
 import type { DerivedQuantities } from '../derived-quantities';
-import type { CheckInput } from '../input';
+import type { CheckInput, CheckSetup } from '../input';
+import type { AirflowEvidence, AirflowRules, Procedure, SplitEvidence } from '../procedure';
 import type { CriterionResult, TargetSource } from '../result';
 import { conditionsGate } from './conditions';
 import { judgeCriterion, unjudged } from './criterion';
-
-/** What is known about the airflow; only the first two and `split-above` change what may be judged. */
-export type AirflowEvidence =
-  'measured-low' | 'measured-enough' | 'split-above' | 'split-within' | 'split-too-close' | 'split-below' | 'nothing';
 
 /** Target of the split, for its criterion and for the gate. */
 export function splitTarget({ readings }: CheckInput, { returnWetBulb }: DerivedQuantities): Quantity {
@@ -41,7 +38,7 @@ export function judgeSplit(
     target,
     targetSource: 'split-table',
     tolerance: () => ({ low: -tolerance, high: tolerance, floored: false }),
-    guard: procedure.guardProbability.value,
+    decision: procedure.decision,
     probabilityOfNoTarget: isKnown(target) ? noSplitTarget(input, derived) : 0,
     mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
     gates: (evidence) => [conditionsGate(input), staleReason(input, evidence)],
@@ -74,35 +71,65 @@ export function judgeAirflow(input: CheckInput): CriterionResult | null {
     actual: measured.quantity,
     target: least.target,
     targetSource: least.source,
-    tolerance: () => ({ low: 0, high: null, floored: false }),
-    guard: procedure.guardProbability.value,
+    tolerance: () => ({ low: procedure.airflow.limitPasses ? 0 : LEAST_EXCESS_M3_PER_S, high: null, floored: false }),
+    decision: procedure.decision,
     gates: (evidence) => [staleReason(input, evidence)],
   });
 }
 
+/** A limit that must be exceeded: by more than the slack of the comparison, far less than any instrument shows. */
+const LEAST_EXCESS_M3_PER_S = 2 * LIMIT_SLACK_K;
+
 function leastAirflow({ procedure, setup }: CheckInput): { target: Known; source: TargetSource } | null {
-  const { leastDesignFraction, leastM3PerSPerW } = procedure.airflow;
+  const { leastDesignFraction } = procedure.airflow;
   const entered = (value: number): Known => leaf({ id: 'leastAirflow', kind: 'flowM3PerS', value, origin: 'entered' });
-  if (setup.designAirflowM3PerS !== undefined) {
+  if (setup.designAirflowM3PerS !== undefined && leastDesignFraction !== null) {
     return { target: entered(leastDesignFraction.value * setup.designAirflowM3PerS), source: 'design-airflow' };
   }
   if (setup.nominalCapacityW !== undefined) {
-    return { target: entered(leastM3PerSPerW.value * setup.nominalCapacityW), source: 'airflow-per-capacity' };
+    const target = entered(leastPerCapacity(procedure.airflow, setup) * setup.nominalCapacityW);
+    return { target, source: 'airflow-per-capacity' };
   }
   return null;
 }
 
+/** The limit of an alteration or a high-velocity system where the procedure has one; of the two the lower. */
+function leastPerCapacity(rules: AirflowRules, { alteration, highVelocity }: CheckSetup): number {
+  const limits = [rules.leastM3PerSPerW];
+  if (alteration && rules.leastOfAlterationM3PerSPerW !== null) limits.push(rules.leastOfAlterationM3PerSPerW);
+  if (highVelocity && rules.leastOfHighVelocityM3PerSPerW !== null) limits.push(rules.leastOfHighVelocityM3PerSPerW);
+  return Math.min(...limits.map(({ value }) => value));
+}
+
 /**
- * Measured airflow outranks the split. Both gate by the rule on the bare values, so that a poorer instrument never opens a gate: a split above
- * its band shuts it also where its target or its finding is in doubt. Readings that do not count today (conditions, age) prove nothing.
+ * What the charge is judged on: a measured airflow outranks a permitted path, and that the split. All gate by the rule on the bare values, so that
+ * a poorer instrument never opens a gate. Readings that do not count today (conditions, age) prove nothing.
  */
 export function airflowEvidence(
   input: CheckInput,
-  derived: DerivedQuantities,
-  judgements: { readonly airflow: CriterionResult | null; readonly split: CriterionResult; readonly target: Quantity },
+  { airflow, split }: { readonly airflow: CriterionResult | null; readonly split: SplitEvidence },
 ): AirflowEvidence {
-  const { airflow, split, target } = judgements;
-  if (airflow !== null && judged(airflow)) return airflow.byRule === 'fails' ? 'measured-low' : 'measured-enough';
+  const { gates, splitCounts, eitherSuffices } = input.procedure.airflow;
+  const measured = airflow !== null && judged(airflow) ? airflow.byRule : null;
+  if (measured === 'passes') return 'measured-enough';
+  if (isPathPermitted(input, measured === 'fails')) return 'permitted-path';
+  const fromSplit = splitCounts ? split : 'nothing';
+  if (measured === null) return fromSplit;
+  return eitherSuffices && !gates.includes(fromSplit) ? fromSplit : 'measured-low';
+}
+
+const isPathPermitted = ({ procedure, setup }: CheckInput, measuredLow: boolean): boolean =>
+  procedure.airflow.permittedPaths.some(
+    ({ path, alterationOnly, despiteLowMeasurement }) =>
+      path === setup.airflowPath && (!alterationOnly || setup.alteration) && (!measuredLow || despiteLowMeasurement),
+  );
+
+/** A split above its band counts also where its target or its finding is in doubt. */
+export function splitEvidence(
+  input: CheckInput,
+  derived: DerivedQuantities,
+  { split, target }: { readonly split: CriterionResult; readonly target: Quantity },
+): SplitEvidence {
   if (counts(split) && isAboveBand(input, derived, target)) return 'split-above';
   if (!judged(split)) return 'nothing';
   if (split.finding === 'too-close-to-call') return 'split-too-close';
@@ -123,15 +150,40 @@ const counts = (split: CriterionResult): boolean => judged(split) || DOUBTS.incl
 
 const judged = ({ finding }: CriterionResult): boolean => finding !== 'not-judged' && finding !== 'not-verifiable';
 
-export function airflowGate(evidence: AirflowEvidence): Reason | null {
+export function airflowGate({ airflow }: Procedure, evidence: AirflowEvidence): Reason | null {
+  if (!airflow.gates.includes(evidence)) return null;
   if (evidence === 'measured-low') return { code: 'airflow-too-low', figures: {} };
-  return evidence === 'split-above' ? { code: 'split-above', figures: {} } : null;
+  return { code: evidence === 'split-above' ? 'split-above' : 'airflow-not-proven', figures: {} };
 }
 
+/**
+ * The airflow among the criteria. Where the procedure wants it proved, the overall finding waits for the measurement, or for something that stands in
+ * for it.
+ */
+export function airflowCriterion(
+  { procedure }: CheckInput,
+  measured: CriterionResult | null,
+  evidence: AirflowEvidence,
+): CriterionResult | null {
+  if (!procedure.airflow.gates.includes('nothing')) return measured;
+  const unproven = evidence === 'nothing';
+  const required = unproven || evidence === 'measured-low' || evidence === 'measured-enough';
+  if (measured !== null) return { ...measured, required };
+  return unproven ? unjudged('airflow', true, 'not-judged', { code: 'airflow-not-proven', figures: {} }) : null;
+}
+
+export const splitCautions = ({ procedure }: CheckInput, split: SplitEvidence): readonly Caution[] =>
+  procedure.airflow.splitCautions.filter((code) => code === split).map((code) => ({ code, figures: {} }));
+
 /** A caution for an airflow gate whose limit lies inside the uncertainty of what is held against it; a split that is clear of it is said to be. */
-export function airflowNearLimit(airflow: CriterionResult | null, split: CriterionResult): readonly Caution[] {
+export function airflowNearLimit(
+  { procedure }: CheckInput,
+  airflow: CriterionResult | null,
+  split: CriterionResult,
+): readonly Caution[] {
   if (airflow !== null && judged(airflow)) return nearLimit(airflow, 0);
-  return split.finding === 'too-close-to-call' ? nearLimit(split, split.tolerance?.high ?? 0) : [];
+  const doubtful = split.finding === 'too-close-to-call' || split.onlyJust;
+  return procedure.airflow.splitCounts && doubtful ? nearLimit(split, split.tolerance?.high ?? 0) : [];
 }
 
 function nearLimit({ actual, target, deviation }: CriterionResult, allowed: number): readonly Caution[] {

@@ -1,39 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import { bubblePressurePa, dewPressurePa } from '../../refrigerants/saturation';
-import { differenceFromK, PA_PER_PSI, temperatureToK } from '../../units';
+import { differenceFromK } from '../../units';
 import type { CriterionId, Finding, ReasonCode } from '../codes';
-import type { EvaluationRequest, ReadingInput } from '../request';
+import type { EvaluationRequest } from '../request';
+import { exactOrifice, exactValve } from '../testing/exact-systems';
 import type { Changes, ReadingChanges } from '../testing/healthy-systems';
-import { criterionOf, evaluate, orificeRequest, valveRequest, withPlusMinus } from '../testing/healthy-systems';
+import { criterionOf, evaluate, orificeRequest, withPlusMinus } from '../testing/healthy-systems';
 
-const at = (refrigerant: 'R-22' | 'R-410A', degF: number) => ({
-  refrigerant,
-  temperatureK: temperatureToK(degF, 'degF'),
-});
-const psia = (pa: number): ReadingInput => ({ value: pa / PA_PER_PSI, unit: 'psia' });
-
-/** Evaporating at 40 °F and condensing at 105 °F to the last digit, so that a deviation is what its readings say. */
-const orifice = (superheatF: number, changes: Changes = {}): EvaluationRequest =>
-  orificeRequest({
-    ...changes,
-    readings: {
-      suctionPressure: psia(dewPressurePa(at('R-22', 40))),
-      suctionLineTemperature: 40 + superheatF,
-      liquidPressure: psia(bubblePressurePa(at('R-22', 105))),
-      ...changes.readings,
-    },
-  });
-const valve = (subcoolingF: number, superheatF = 12, changes: Changes = {}): EvaluationRequest =>
-  valveRequest({
-    ...changes,
-    readings: {
-      suctionPressure: psia(dewPressurePa(at('R-410A', 40))),
-      suctionLineTemperature: 40 + superheatF,
-      liquidPressure: psia(bubblePressurePa(at('R-410A', 105))),
-      liquidLineTemperature: 105 - subcoolingF,
-      ...changes.readings,
-    },
-  });
+const orifice = exactOrifice;
+const valve = exactValve;
 const precise = (request: EvaluationRequest): EvaluationRequest =>
   withPlusMinus(request, { temperatureF: 0.1, pressurePsi: 0.2 });
 

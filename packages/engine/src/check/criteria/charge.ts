@@ -4,12 +4,15 @@ import type { Known, Quantity } from '../../derivation/quantity';
 import { bareValue, isKnown, missing } from '../../derivation/quantity';
 import { SUPERHEAT_CHART_A } from '../../methods/data/superheat-chart-a';
 import { probabilityOfNoTarget } from '../../methods/target-existence';
+import { SUPERHEAT_TABLE_FINER } from '../../methods/data/superheat-table-finer';
+import type { Chart } from '../../methods/chart';
 import { chartRounding, targetSuperheat } from '../../methods/targets';
 import type { Reason } from '../codes';
 import type { DerivedQuantities } from '../derived-quantities';
 import { unfitPortReason } from '../fit-for-test';
-import type { CheckInput } from '../input';
+import type { CheckInput, CheckSetup } from '../input';
 import { isFixedOrifice } from '../input';
+import type { Procedure, SuperheatChartId } from '../procedure';
 import type { CriterionResult, Tolerance } from '../result';
 import { judgeCriterion, judgeWindow, unjudged } from './criterion';
 
@@ -32,29 +35,39 @@ function negativeDifference({ subcooling, superheat }: DerivedQuantities): Reaso
 
 export interface SuperheatTarget {
   readonly quantity: Quantity;
-  readonly source: 'entered' | 'makers-chart-a';
+  readonly source: 'entered' | SuperheatChartId;
   readonly probabilityOfNoTarget: number;
 }
 
-/** Entered; else the printed makers' chart, which is for split systems: a packaged unit needs its maker's own. */
-export function superheatTarget({ setup, readings }: CheckInput, derived: DerivedQuantities): SuperheatTarget {
-  if (setup.targetSuperheat !== undefined) {
+const SUPERHEAT_CHARTS: Readonly<Record<SuperheatChartId, Chart>> = {
+  'makers-chart-a': SUPERHEAT_CHART_A,
+  'finer-table': SUPERHEAT_TABLE_FINER,
+};
+
+/** Entered, where the procedure takes that; else its table, which is for split systems: a packaged unit needs its maker's own. */
+export function superheatTarget(input: CheckInput, derived: DerivedQuantities): SuperheatTarget {
+  const { procedure, setup, readings } = input;
+  const { chart: source, enteredTarget } = procedure.superheat;
+  if (setup.targetSuperheat !== undefined && enteredTarget) {
     return { quantity: setup.targetSuperheat, source: 'entered', probabilityOfNoTarget: 0 };
   }
-  if (setup.kind === 'packaged') return { quantity: missing(), source: 'entered', probabilityOfNoTarget: 0 };
+  if (setup.kind === 'packaged') {
+    return { quantity: missing(), source: 'entered', probabilityOfNoTarget: 0 };
+  }
+  const chart = SUPERHEAT_CHARTS[source];
   const outdoorK: Quantity = readings.outdoorDryBulb?.quantity ?? missing('outdoorDryBulb');
   const wetBulbK = derived.returnWetBulb;
-  const quantity = derive(targetSuperheat, { wetBulbK, outdoorK }, [chartRounding(SUPERHEAT_CHART_A)]);
+  const quantity = derive(targetSuperheat(chart), { wetBulbK, outdoorK }, [chartRounding(chart)]);
   const probability =
     isKnown(quantity) && isKnown(outdoorK) && isKnown(wetBulbK)
-      ? probabilityOfNoTarget(SUPERHEAT_CHART_A, {
+      ? probabilityOfNoTarget(chart, {
           rowK: outdoorK.value,
           rowUK: outdoorK.u,
           columnK: wetBulbK.value,
           columnUK: wetBulbK.u,
         })
       : 0;
-  return { quantity, source: 'makers-chart-a', probabilityOfNoTarget: probability };
+  return { quantity, source, probabilityOfNoTarget: probability };
 }
 
 export function judgeSuperheat(
@@ -68,7 +81,7 @@ export function judgeSuperheat(
   }
   const { procedure } = input;
   const toleranceK = procedure.superheat.toleranceK.value;
-  const floorK = procedure.superheat.floorK.value;
+  const floorK = procedure.superheat.floorK?.value ?? null;
   return judgeCriterion({
     criterion: 'superheat',
     required: true,
@@ -76,7 +89,7 @@ export function judgeSuperheat(
     target: target.quantity,
     targetSource: target.source,
     tolerance: (known) => flooredTolerance(known.value, toleranceK, floorK),
-    guard: procedure.guardProbability.value,
+    decision: procedure.decision,
     probabilityOfNoTarget: target.probabilityOfNoTarget,
     mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
     gates,
@@ -84,9 +97,9 @@ export function judgeSuperheat(
   });
 }
 
-/** The superheat itself must not pass under the floor, whatever the target allows. */
-function flooredTolerance(targetK: number, toleranceK: number, floorK: number): Tolerance {
-  const floored = floorK - targetK > -toleranceK;
+/** The measured value itself must not pass under the floor, whatever the target allows. */
+function flooredTolerance(targetK: number, toleranceK: number, floorK: number | null): Tolerance {
+  const floored = floorK !== null && floorK - targetK > -toleranceK;
   return { low: floored ? floorK - targetK : -toleranceK, high: toleranceK, floored };
 }
 
@@ -112,8 +125,8 @@ export function judgeSubcooling({ input, derived, unfit, gates }: ChargeJudgemen
     actual,
     target: target ?? missing(),
     targetSource: 'entered',
-    tolerance: () => ({ low: -toleranceK, high: toleranceK, floored: false }),
-    guard: procedure.guardProbability.value,
+    tolerance: (known) => flooredTolerance(known.value, toleranceK, procedure.subcooling.leastK?.value ?? null),
+    decision: procedure.decision,
     gates,
     neverWithin: negativeDifference(derived),
   });
@@ -123,16 +136,33 @@ export function judgeSuperheatWindow({ input, derived, unfit, gates }: ChargeJud
   const { procedure, setup } = input;
   const actual = derived.superheat;
   if (unfit !== null) return unjudged('superheat-window', true, 'not-verifiable', unfit, actual);
-  const { lowK, highK } = procedure.superheatWindow;
-  const range = setup.superheatRange ?? { lowK: lowK.value, highK: highK.value };
+  const range = windowOf(procedure.superheatWindow, setup.superheatRange);
   return judgeWindow({
     criterion: 'superheat-window',
     required: true,
     actual,
-    targetSource: setup.superheatRange === undefined ? 'procedure-window' : 'entered-range',
+    targetSource: range.source,
     tolerance: { low: range.lowK, high: range.highK, floored: false },
-    guard: procedure.guardProbability.value,
+    decision: procedure.decision,
     gates,
     neverWithin: negativeDifference(derived),
   });
+}
+
+interface SuperheatWindow {
+  readonly lowK: number;
+  readonly highK: number;
+  readonly source: 'procedure-window' | 'entered-range' | 'window-and-range';
+}
+
+/** The procedure's window, the maker's range in its place, or what both allow. */
+function windowOf(
+  { lowK, highK, makersRange }: Procedure['superheatWindow'],
+  entered: CheckSetup['superheatRange'],
+): SuperheatWindow {
+  const own = { lowK: lowK.value, highK: highK.value };
+  if (entered === undefined) return { ...own, source: 'procedure-window' };
+  if (makersRange === 'replaces') return { ...entered, source: 'entered-range' };
+  const both = { lowK: Math.max(own.lowK, entered.lowK), highK: Math.min(own.highK, entered.highK) };
+  return { ...both, source: 'window-and-range' };
 }

@@ -7,6 +7,7 @@ import type { CriterionId, Finding, Reason } from '../codes';
 import type { Conformance } from '../conformance';
 import { judgeConformance } from '../conformance';
 import { absenceReason } from '../evidence';
+import type { Decision } from '../procedure';
 import type { CriterionResult, TargetSource, Tolerance } from '../result';
 
 export interface NumericCriterion {
@@ -16,7 +17,7 @@ export interface NumericCriterion {
   readonly target: Quantity;
   readonly targetSource: TargetSource;
   readonly tolerance: (target: Known) => Tolerance;
-  readonly guard: number;
+  readonly decision: Decision;
   readonly probabilityOfNoTarget?: number;
   readonly mostProbabilityOfNoTarget?: number;
   /** First match shuts the criterion; `null` entries are open. Looked at only when there is something to judge. */
@@ -30,7 +31,7 @@ export const unjudged = (
   criterion: CriterionId,
   required: boolean,
   finding: Extract<Finding, 'not-judged' | 'not-verifiable'>,
-  reason: Reason,
+  reason: Reason | null,
   actual: Quantity | null = null,
 ): CriterionResult => ({
   criterion,
@@ -42,6 +43,7 @@ export const unjudged = (
   tolerance: null,
   byRule: null,
   probabilityWithin: null,
+  onlyJust: false,
   finding,
   reason,
 });
@@ -90,15 +92,15 @@ export function judgeWindow(
 }
 
 function conformanceOf(
-  input: Pick<NumericCriterion, 'guard' | 'probabilityOfNoTarget'>,
+  input: Pick<NumericCriterion, 'decision' | 'probabilityOfNoTarget'>,
   measured: Known,
   tolerance: Tolerance,
 ): Conformance {
-  const { guard, probabilityOfNoTarget = 0 } = input;
-  return judgeConformance({ measured, tolerance, guard, probabilityOfNoTarget });
+  const { decision, probabilityOfNoTarget = 0 } = input;
+  return judgeConformance({ measured, tolerance, decision, probabilityOfNoTarget });
 }
 
-type FindingAndReason = Pick<CriterionResult, 'finding' | 'reason'>;
+type FindingAndReason = Pick<CriterionResult, 'finding' | 'reason' | 'onlyJust'>;
 type FindingInput = Pick<
   NumericCriterion,
   'actual' | 'target' | 'gates' | 'neverWithin' | 'probabilityOfNoTarget' | 'mostProbabilityOfNoTarget'
@@ -106,22 +108,23 @@ type FindingInput = Pick<
 
 function findingOf(input: FindingInput, conformance: Conformance | null): FindingAndReason {
   const { actual, target, probabilityOfNoTarget = 0, mostProbabilityOfNoTarget = 1, neverWithin = null } = input;
+  const without = (finding: Finding, reason: Reason): FindingAndReason => ({ finding, reason, onlyJust: false });
   const lacking = lackingInputs(actual, target);
-  if (lacking !== null) return { finding: 'not-judged', reason: lacking };
+  if (lacking !== null) return without('not-judged', lacking);
   const evidence = [actual, target].filter(isKnown);
   const shut = input.gates(evidence).find((reason) => reason !== null);
-  if (shut !== undefined) return { finding: 'not-verifiable', reason: shut };
+  if (shut !== undefined) return without('not-verifiable', shut);
   // what is left without a number is a table that has no value at this point
-  if (!isKnown(target)) return { finding: 'not-verifiable', reason: absenceReason(target) };
-  if (conformance === null) return { finding: 'not-judged', reason: { code: 'outside-range', figures: {} } };
+  if (!isKnown(target)) return without('not-verifiable', absenceReason(target));
+  if (conformance === null) return without('not-judged', { code: 'outside-range', figures: {} });
   if (probabilityOfNoTarget > mostProbabilityOfNoTarget) {
     const probability = { kind: 'fraction', value: probabilityOfNoTarget } as const;
-    return { finding: 'not-verifiable', reason: { code: 'target-may-not-exist', figures: { probability } } };
+    return without('not-verifiable', { code: 'target-may-not-exist', figures: { probability } });
   }
   if (conformance.finding === 'within' && neverWithin !== null) {
-    return { finding: 'too-close-to-call', reason: neverWithin };
+    return without('too-close-to-call', neverWithin);
   }
-  return { finding: conformance.finding, reason: null };
+  return { finding: conformance.finding, reason: null, onlyJust: conformance.onlyJust };
 }
 
 /** Missing readings of both sides together; else why the actual value, or the target's inputs, cannot be had. */

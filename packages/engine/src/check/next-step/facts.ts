@@ -5,8 +5,9 @@ import type { RefrigerantId } from '../../refrigerants/catalogue';
 import { differenceToK } from '../../units';
 import { isCoolWeather, lowHead } from '../cautions';
 import type { Caution, OverallFinding, Reason, ReasonCode, Stop, StopCode } from '../codes';
-import { conditionsGate } from '../criteria/conditions';
-import type { AirflowEvidence } from '../criteria/air';
+import { conditionsGate, recordGate } from '../criteria/conditions';
+import { airflowGate } from '../criteria/air';
+import type { AirflowEvidence, SplitEvidence } from '../procedure';
 import type { SuperheatTarget } from '../criteria/charge';
 import { LIMIT_SLACK_K } from '../conformance';
 import type { DerivedQuantities } from '../derived-quantities';
@@ -20,13 +21,18 @@ export interface Facts {
   readonly impossible: 'none' | 'ports-swapped' | 'saturation-impossible';
   readonly stop: StopCode | 'none';
   readonly shutDown: 'yes' | 'no';
-  readonly condition: 'open' | 'running-time' | 'return-too-cool' | 'outdoor-too-cold';
+  readonly condition: 'open' | 'running-time' | 'return-too-cool' | 'outdoor-too-cold' | 'outdoor-too-hot';
+  /** What the procedure wants on record and is not. */
+  readonly record: 'open' | 'conditions' | 'access-hole' | 'instruments';
+  /** Whether the procedure shuts the test for want of proof. */
+  readonly airflowProof: 'enough' | 'wanted';
   readonly runningTime: 'recorded' | 'unrecorded';
   /** Why a required criterion has no number, or `none`. */
   readonly lacking:
     'none' | 'readings' | 'stale' | 'nameplate-target' | 'port' | 'outside-tables' | 'suction-line-table';
   readonly superheatTarget: 'clear' | 'near-floor' | 'none-here' | 'not-used';
   readonly metering: 'orifice' | 'valve';
+  /** Where nothing counts, what the split shows: it may still tell the cause of a stop. */
   readonly airflow: AirflowEvidence;
   readonly airSeen: 'yes' | 'no';
   readonly quality: 'good' | 'wrong-refrigerant' | 'dry-wick' | 'liquid-colder-than-air' | 'pull-down';
@@ -54,6 +60,7 @@ export interface Evidence {
   readonly stops: readonly Stop[];
   readonly cautions: readonly Caution[];
   readonly airflow: AirflowEvidence;
+  readonly split: SplitEvidence;
   readonly overall: OverallFinding;
 }
 
@@ -74,18 +81,19 @@ const HIGH_HEAD_OTHERS_K = differenceToK(30, 'deltaF');
 export function gatherFacts(evidence: Evidence): Facts {
   const { input, derived, criteria, overall, airflow } = evidence;
   const { setup, visit, readings } = input;
-  const gate = conditionsGate(input)?.code;
   return {
     unfit: evidence.unfit?.code ?? 'none',
     impossible: impossibility(evidence.impossible),
     stop: evidence.stops[0]?.code ?? 'none',
     shutDown: evidence.stops.some((stop) => mustShutDown(stop, derived)) ? 'yes' : 'no',
-    condition: gate === 'running-time' || gate === 'return-too-cool' || gate === 'outdoor-too-cold' ? gate : 'open',
+    condition: conditionFact(conditionsGate(input)?.code),
+    record: recordFact(input),
+    airflowProof: airflowGate(input.procedure, airflow)?.code === 'airflow-not-proven' ? 'wanted' : 'enough',
     runningTime: visit.runningMinutes === undefined ? 'unrecorded' : 'recorded',
     lacking: whatIsLacking(criteria),
     superheatTarget: superheatTargetFact(evidence),
     metering: isFixedOrifice(setup) ? 'orifice' : 'valve',
-    airflow,
+    airflow: airflow === 'nothing' ? evidence.split : airflow,
     airSeen: readings.supplyDryBulb !== undefined || readings.airflow !== undefined ? 'yes' : 'no',
     quality: readingQuality(evidence.cautions),
     overall,
@@ -97,6 +105,19 @@ export function gatherFacts(evidence: Evidence): Facts {
     leak: leakFact(input),
     head: isHeadHigh(input, derived) ? 'high' : 'usual',
   };
+}
+
+function conditionFact(code: ReasonCode | undefined): Facts['condition'] {
+  const shut =
+    code === 'running-time' || code === 'return-too-cool' || code === 'outdoor-too-cold' || code === 'outdoor-too-hot';
+  return shut ? code : 'open';
+}
+
+function recordFact(input: CheckInput): Facts['record'] {
+  const code = recordGate(input)?.code;
+  if (code === undefined) return 'open';
+  if (code === 'access-hole-missing') return 'access-hole';
+  return code === 'conditions-not-recorded' ? 'conditions' : 'instruments';
 }
 
 const impossibility = (reason: Reason | null): Facts['impossible'] =>
@@ -116,7 +137,7 @@ function whatIsLacking(criteria: readonly CriterionResult[]): Facts['lacking'] {
 function superheatTargetFact({ input, target, criteria }: Evidence): Facts['superheatTarget'] {
   if (!isFixedOrifice(input.setup)) return 'not-used';
   const reason = criteria.find(({ criterion }) => criterion === 'superheat')?.reason?.code;
-  if (target.quantity.state === 'refused' && target.source === 'makers-chart-a') return 'none-here';
+  if (target.quantity.state === 'refused' && target.source !== 'entered') return 'none-here';
   if (reason === 'no-target-here' || reason === 'target-may-not-exist') return 'none-here';
   const nearFloor = isKnown(target.quantity) && target.quantity.value <= NEAR_FLOOR_TARGET_K + LIMIT_SLACK_K;
   return nearFloor ? 'near-floor' : 'clear';
@@ -132,7 +153,7 @@ function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
 
 /** Whether these instruments could ever call the criterion within: at the middle of its band, at these conditions. */
 function canSettle({ criteria, input, target }: Evidence): boolean {
-  const guard = input.procedure.guardProbability.value;
+  const guard = input.procedure.decision.clearFrom.value;
   return criteria
     .filter(({ required, finding }) => required && finding === 'too-close-to-call')
     .every(({ criterion, tolerance, deviation, actual }) => {

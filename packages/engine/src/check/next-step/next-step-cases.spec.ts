@@ -2,7 +2,7 @@
 import { describe, expect, it } from 'vitest';
 import { dewPressurePa } from '../../refrigerants/saturation';
 import { PA_PER_PSI, temperatureToK } from '../../units';
-import { airflowEvidence, judgeAirflow, judgeSplit, splitTarget } from '../criteria/air';
+import { airflowEvidence, judgeAirflow, judgeSplit, splitEvidence, splitTarget } from '../criteria/air';
 import { superheatTarget } from '../criteria/charge';
 import type { NextStepCode, NotYetCode } from '../codes';
 import { deriveQuantities } from '../derived-quantities';
@@ -46,6 +46,15 @@ const LOW_VALVE = valveSubcooling(3.6);
 const charged = { factoryCharge: { value: 6, unit: 'lb' } } as const;
 const added = (lb: number) => ({ leakSearch: 'none-found', addedThisVisit: { value: lb, unit: 'lb' } }) as const;
 
+/** Everything the certificates of 2019 ask for. */
+const CEC_2019 = {
+  procedure: 'cec-ra3.2-2019-installer',
+  setup: { nominalCapacity: { value: 3, unit: 'ton' } },
+  visit: { preflight: { panelsOn: 'ok', accessHole: 'ok' } },
+  readings: { airflow: 1100 },
+} as const;
+const NO_LIQUID_PAIR = { liquidPressure: null, liquidLineTemperature: null } as const;
+
 const FIT: readonly Case[] = [
   ['heating', valve({ setup: { mode: 'heating' } }), 'cooling-season-or-weigh-in', 'move-no-refrigerant'],
   [
@@ -81,6 +90,19 @@ const FIT: readonly Case[] = [
     'inverter not in its charge mode, hot discharge',
     valve({ setup: { chargeMode: false }, readings: HOT }),
     'bring-to-charge-mode',
+    'shut-down',
+    'move-no-refrigerant',
+  ],
+  [
+    'packaged, under rules for split systems',
+    valve({ procedure: 'cec-ra3.2-2008-installer', setup: { kind: 'packaged' } }),
+    'choose-other-rules',
+    'move-no-refrigerant',
+  ],
+  [
+    'packaged, under rules for split systems, hot discharge',
+    valve({ procedure: 'cec-ra3.2-2008-rater', setup: { kind: 'packaged' }, readings: HOT }),
+    'choose-other-rules',
     'shut-down',
     'move-no-refrigerant',
   ],
@@ -250,6 +272,12 @@ const STOPS: readonly Case[] = [
     'shut-down',
     'add-nothing',
   ],
+  [
+    'frozen, split above, no airflow measured where the split is no proof',
+    orifice({ ...CEC_2019, readings: { ...icy('R-22'), ...SPLIT_ABOVE, airflow: null } }),
+    'thaw-then-airflow',
+    'add-nothing',
+  ],
   ['hot discharge line', valve({ readings: HOT }), 'shut-down-hot-discharge', 'shut-down'],
 ];
 
@@ -265,6 +293,12 @@ const CONDITIONS: readonly Case[] = [
     'cool house',
     valve({ visit: { lowestReturnDryBulb: { value: 68, unit: 'degF' } } }),
     'warm-the-house',
+    'move-no-refrigerant',
+  ],
+  [
+    'too hot for a superheat test',
+    orifice({ ...CEC_2019, readings: { outdoorDryBulb: 116, returnWetBulb: 74, ...NO_LIQUID_PAIR } }),
+    'wait-for-cooler-weather',
     'move-no-refrigerant',
   ],
   [
@@ -328,6 +362,30 @@ const LACKING: readonly Case[] = [
     'move-no-refrigerant',
   ],
   [
+    'the lowest return air not recorded, where the rules gate on it',
+    valve({ ...CEC_2019, visit: { ...CEC_2019.visit, lowestReturnDryBulb: null } }),
+    'record-conditions',
+    'move-no-refrigerant',
+  ],
+  [
+    'no access hole, where it is part of the test',
+    valve({ ...CEC_2019, visit: { preflight: { panelsOn: 'ok' } } }),
+    'make-access-hole',
+    'move-no-refrigerant',
+  ],
+  [
+    'instruments checked 32 days ago, where the rules gate on it',
+    valve({ ...CEC_2019, visit: { ...CEC_2019.visit, instrumentsCheckedDaysAgo: 32 } }),
+    'check-instruments',
+    'move-no-refrigerant',
+  ],
+  [
+    'instruments not recorded, where the rules gate on it',
+    valve({ ...CEC_2019, visit: { ...CEC_2019.visit, instrumentsCheckedDaysAgo: null } }),
+    'check-instruments',
+    'move-no-refrigerant',
+  ],
+  [
     'the running time not recorded',
     valve({ visit: { runningMinutes: null } }),
     'record-conditions',
@@ -336,6 +394,30 @@ const LACKING: readonly Case[] = [
 ];
 
 const AIRFLOW: readonly Case[] = [
+  [
+    'airflow not proved, where the rules want it measured',
+    valve({ ...CEC_2019, readings: { airflow: null } }),
+    'measure-airflow',
+    'move-no-refrigerant',
+  ],
+  [
+    'airflow not proved and the split above: the measurement comes first',
+    orifice({ ...CEC_2019, readings: { airflow: null, ...SPLIT_ABOVE } }),
+    'measure-airflow',
+    'move-no-refrigerant',
+  ],
+  [
+    'neither split nor airflow, where either would do',
+    valve({ procedure: 'cec-ra3.2-2008-installer', readings: { supplyDryBulb: null } }),
+    'measure-airflow',
+    'move-no-refrigerant',
+  ],
+  [
+    'airflow measured at 290 cfm/ton of an alteration',
+    valve({ ...CEC_2019, setup: { ...CEC_2019.setup, alteration: true }, readings: { airflow: 870 } }),
+    'raise-airflow',
+    'move-no-refrigerant',
+  ],
   ['airflow measured low', valve(lowAirflow), 'raise-airflow', 'move-no-refrigerant'],
   ['split above', valve({ readings: SPLIT_ABOVE }), 'reread-wet-bulb-then-airflow', 'move-no-refrigerant'],
   [
@@ -643,6 +725,16 @@ const VALVE: readonly Case[] = [
 const WITHIN: readonly Case[] = [
   ['healthy orifice', orifice(), 'record'],
   ['healthy valve', valve(), 'record'],
+  ['healthy valve under the rules of 2019', valve(CEC_2019), 'record'],
+  [
+    'an alteration after every remedy, still short of air, under the rules of 2019',
+    valve({
+      ...CEC_2019,
+      setup: { ...CEC_2019.setup, alteration: true, airflowPath: 'best-possible' },
+      readings: { airflow: 870 },
+    }),
+    'record',
+  ],
   [
     'healthy valve in cool weather',
     valve({ readings: { outdoorDryBulb: 65, liquidPressure: 300, liquidLineTemperature: 86.5 } }),
@@ -676,7 +768,10 @@ function factsOf(request: EvaluationRequest): Facts {
   const derived = deriveQuantities(input.setup, input.readings);
   const unfit = unfitReason(input);
   const targetSplit = splitTarget(input, derived);
-  const split = judgeSplit(input, derived, targetSplit, unfit);
+  const split = splitEvidence(input, derived, {
+    split: judgeSplit(input, derived, targetSplit, unfit),
+    target: targetSplit,
+  });
   return gatherFacts({
     input,
     derived,
@@ -686,7 +781,8 @@ function factsOf(request: EvaluationRequest): Facts {
     impossible: impossibleReadings(input, derived)?.reason ?? null,
     stops: overall.stops,
     cautions: overall.cautions,
-    airflow: airflowEvidence(input, derived, { airflow: judgeAirflow(input), split, target: targetSplit }),
+    airflow: airflowEvidence(input, { airflow: judgeAirflow(input), split }),
+    split,
     overall: overall.finding,
   });
 }

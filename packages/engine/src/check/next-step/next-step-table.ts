@@ -28,6 +28,7 @@ const shutDownFirst = (rows: readonly NextStepRow[]): readonly NextStepRow[] =>
 const fit: readonly NextStepRow[] = [
   { when: { unfit: ['heating-mode'] }, step: 'cooling-season-or-weigh-in', notYet: MOVE_NOTHING },
   { when: { unfit: ['metered-outdoors'] }, step: 'weigh-in', notYet: MOVE_NOTHING },
+  { when: { unfit: ['not-in-scope'] }, step: 'choose-other-rules', notYet: MOVE_NOTHING },
   { when: { unfit: ['part-stage'] }, step: 'bring-to-full-stage', notYet: MOVE_NOTHING },
   { when: { unfit: ['not-in-charge-mode'] }, step: 'bring-to-charge-mode', notYet: MOVE_NOTHING },
   { when: { unfit: ['not-ready'] }, step: 'mend-before-test', notYet: MOVE_NOTHING },
@@ -86,6 +87,7 @@ const stops: readonly NextStepRow[] = [
 const conditions: readonly NextStepRow[] = [
   { when: { condition: ['running-time'] }, step: 'run-longer', notYet: ['do-not-judge-yet'] },
   { when: { condition: ['outdoor-too-cold'] }, step: 'wait-for-warmer-weather', notYet: MOVE_NOTHING },
+  { when: { condition: ['outdoor-too-hot'] }, step: 'wait-for-cooler-weather', notYet: MOVE_NOTHING },
   { when: { condition: ['return-too-cool'] }, step: 'warm-the-house', notYet: MOVE_NOTHING },
   { when: { superheatTarget: ['none-here'] }, step: 'reach-a-target', notYet: MOVE_NOTHING },
 ];
@@ -97,11 +99,15 @@ const lacking: readonly NextStepRow[] = [
   { when: { lacking: ['port'] }, step: 'read-discharge-pressure', notYet: MOVE_NOTHING },
   { when: { lacking: ['suction-line-table'] }, step: 'find-suction-line-table', notYet: MOVE_NOTHING },
   { when: { lacking: ['outside-tables'] }, step: 'check-refrigerant-and-probes', notYet: MOVE_NOTHING },
+  { when: { record: ['conditions'] }, step: 'record-conditions', notYet: MOVE_NOTHING },
+  { when: { record: ['access-hole'] }, step: 'make-access-hole', notYet: MOVE_NOTHING },
+  { when: { record: ['instruments'] }, step: 'check-instruments', notYet: MOVE_NOTHING },
   { when: { runningTime: ['unrecorded'] }, step: 'record-conditions', notYet: MOVE_NOTHING },
 ];
 
 const airflow: readonly NextStepRow[] = [
   { when: { airflow: ['measured-low'] }, step: 'raise-airflow', notYet: MOVE_NOTHING },
+  { when: { airflowProof: ['wanted'] }, step: 'measure-airflow', notYet: MOVE_NOTHING },
   {
     when: { airflow: ['split-above'], metering: ['orifice'], superheat: ['above'] },
     step: 'suspect-probes',

@@ -1,6 +1,7 @@
 /** For specs: two healthy systems as a technician would type them, each changed only in what a case is about. */
 import { evaluateCheck } from '../evaluate-check';
 import type { CheckInput } from '../input';
+import type { ProcedureId } from '../procedure';
 import type { EvaluationRequest, ReadingInput, ReadingsInput, ReadingUnit, SetupInput, VisitInput } from '../request';
 import type { ReadingId } from '../readings';
 import { readRequest } from '../read-request';
@@ -8,6 +9,7 @@ import type { CheckResult } from '../result';
 
 /** A number keeps the unit of the healthy system; `null` leaves the field out. */
 export interface Changes {
+  readonly procedure?: ProcedureId;
   readonly setup?: { readonly [Key in keyof SetupInput]?: SetupInput[Key] | null };
   readonly visit?: { readonly [Key in keyof VisitInput]?: VisitInput[Key] | null };
   readonly readings?: ReadingChanges;
@@ -126,8 +128,12 @@ export function withPlusMinus(
   return { ...request, readings: Object.fromEntries(entries) };
 }
 
-function changed(request: EvaluationRequest, { setup = {}, visit = {}, readings = {} }: Changes): EvaluationRequest {
+function changed(
+  request: EvaluationRequest,
+  { procedure, setup = {}, visit = {}, readings = {} }: Changes,
+): EvaluationRequest {
   return {
+    ...(procedure && { procedure }),
     setup: merged<SetupInput>(request.setup, setup),
     visit: merged(request.visit ?? {}, visit),
     readings: merged(request.readings, typed(readings)),

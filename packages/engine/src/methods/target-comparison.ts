@@ -1,0 +1,66 @@
+/**
+ * One target superheat by several sources side by side: how far they agree. No check is judged by this.
+ */
+import type { Result } from '../result';
+import { attempt } from '../result';
+import { differenceToK, temperatureFromK } from '../units';
+import type { Chart } from './chart';
+import { chartValueK } from './chart';
+import { SUPERHEAT_CHART_A } from './data/superheat-chart-a';
+import { SUPERHEAT_CHART_B } from './data/superheat-chart-b';
+import { SUPERHEAT_TABLE_FINER } from './data/superheat-table-finer';
+
+export const TARGET_COMPARISON_IDS = ['makers-chart-a', 'makers-chart-b', 'finer-table', 'short-formula'] as const;
+export type TargetComparisonId = (typeof TARGET_COMPARISON_IDS)[number];
+
+export interface ComparedTarget {
+  readonly id: TargetComparisonId;
+  /** `read` in the source, from `memory`, or common `practice` without a source. */
+  readonly standing: 'read' | 'memory' | 'practice';
+  readonly source: string;
+  /** Target superheat in K, or why the source has none: reason `dash` or `outside-chart`. */
+  readonly target: Result<number>;
+}
+
+export interface TargetConditions {
+  /** Wet bulb of the return air. */
+  readonly wetBulbK: number;
+  /** Dry bulb of the air entering the outdoor coil. */
+  readonly outdoorK: number;
+}
+
+/**
+ * Target superheat of a fixed orifice at these conditions by each source, in the order of `TARGET_COMPARISON_IDS`. The short formula
+ * (3·WB − 80 − DB)/2 in °F knows no dash of its own: where the finer table has no value it is refused with the table's refusal. Total for finite
+ * temperatures.
+ */
+export const compareTargets = (at: TargetConditions): readonly ComparedTarget[] => [
+  fromChart('makers-chart-a', SUPERHEAT_CHART_A, at),
+  fromChart('makers-chart-b', SUPERHEAT_CHART_B, at),
+  fromChart('finer-table', SUPERHEAT_TABLE_FINER, at),
+  {
+    id: 'short-formula',
+    standing: 'practice',
+    source: 'Common practice, no source',
+    target: attempt(() => {
+      valueAt(SUPERHEAT_TABLE_FINER, at);
+      return shortFormulaK(at);
+    }),
+  },
+];
+
+const fromChart = (id: TargetComparisonId, chart: Chart, at: TargetConditions): ComparedTarget => ({
+  id,
+  standing: chart.standing,
+  source: chart.source,
+  target: attempt(() => valueAt(chart, at)),
+});
+
+const valueAt = (chart: Chart, { wetBulbK, outdoorK }: TargetConditions): number =>
+  chartValueK(chart, { rowK: outdoorK, columnK: wetBulbK });
+
+function shortFormulaK({ wetBulbK, outdoorK }: TargetConditions): number {
+  const wetBulbF = temperatureFromK(wetBulbK, 'degF');
+  const outdoorF = temperatureFromK(outdoorK, 'degF');
+  return differenceToK((3 * wetBulbF - 80 - outdoorF) / 2, 'deltaF');
+}
