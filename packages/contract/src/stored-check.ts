@@ -9,6 +9,7 @@ import {
   MODES,
   PREFLIGHT_ITEMS,
   PREFLIGHT_STATES,
+  PROCEDURE_IDS,
   READING_IDS,
   STAGES,
   SYSTEM_KINDS,
@@ -56,6 +57,7 @@ const setup = z.object({
   highSidePort: z.exactOptional(z.enum(HIGH_SIDE_PORTS)),
   targetSubcoolingPort: z.exactOptional(z.enum(['liquid', 'discharge'])),
   chargeMode: z.exactOptional(z.enum(['on', 'off', 'no-inverter'])),
+  procedure: z.exactOptional(z.enum(PROCEDURE_IDS)),
 });
 
 const visit = z.object({

@@ -11,6 +11,7 @@ export * from './check/readings';
 export * from './check/request';
 export * from './check/result';
 export { PROCEDURES } from './check/procedure-catalogue';
+export { PROCEDURE_IDS } from './check/procedure';
 export type { Procedure, ProcedureId, Rule, Standing } from './check/procedure';
 export { crossCheck } from './check/cross-check';
 export type { PartialRequest } from './check/cross-check';

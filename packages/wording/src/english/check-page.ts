@@ -34,7 +34,6 @@ export const checkPageWords = {
     missingRefrigerant: 'Choose the refrigerant. It stands on the nameplate; look for a retrofit label too.',
     missingMetering: 'Choose the metering device of the indoor coil.',
     plateEmpty: 'No system set up yet',
-    rules: 'general rules',
     burns: (safetyClass: string) => `${safetyClass}: burns`,
     seaLevel: 'sea level assumed',
     system: 'The system',

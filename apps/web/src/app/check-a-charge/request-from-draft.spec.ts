@@ -49,6 +49,16 @@ describe('requestFromDraft', () => {
     expect(portOf({ ...asked, highSidePort: 'discharge', meteringDevice: 'fixed-orifice' })).toBeUndefined();
   });
 
+  it('names the rules that were chosen, and leaves the general ones to the engine', () => {
+    const procedureOf = (procedure?: CheckDraft['setup']['procedure']) => {
+      const system = { refrigerant: 'R-22', meteringDevice: 'txv' } as const;
+      return requestFromDraft(draft({ setup: { ...system, ...(procedure && { procedure }) } }), NOW).request;
+    };
+    expect(procedureOf('cec-ra3.2-2019-rater')?.procedure).toBe('cec-ra3.2-2019-rater');
+    expect(procedureOf('cec-ra3.2-2019-rater')?.setup).toEqual(procedureOf()?.setup);
+    expect(procedureOf()).not.toHaveProperty('procedure');
+  });
+
   it('says of an inverter whether it is in its charge mode, and nothing of another unit', () => {
     const modeOf = (chargeMode: CheckDraft['setup']['chargeMode'] & string, mode: 'cooling' | 'heating' = 'cooling') =>
       requestFromDraft(draft({ setup: { refrigerant: 'R-32', meteringDevice: 'eev', mode, chargeMode } }), NOW).request

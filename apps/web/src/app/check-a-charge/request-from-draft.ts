@@ -71,7 +71,7 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
     else faults.push({ code: 'wrong-unit', figures: {}, path: pathOf(key) });
   }
 
-  const { refrigerant, meteringDevice, chargeMode, targetSubcoolingPort, ...choices } = draft.setup;
+  const { refrigerant, meteringDevice, chargeMode, targetSubcoolingPort, procedure, ...choices } = draft.setup;
   if (refrigerant === undefined || meteringDevice === undefined) return { request: null, problems, faults };
 
   const setup: SetupInput = {
@@ -92,7 +92,12 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
       'maxHighPressure',
     ]),
   };
-  const request = { setup, visit: visitOf(draft, entries, nowMs), readings: readingsOf(draft, entries, nowMs) };
+  const request = {
+    ...(procedure && { procedure }),
+    setup,
+    visit: visitOf(draft, entries, nowMs),
+    readings: readingsOf(draft, entries, nowMs),
+  };
   return { request, problems, faults };
 }
 

@@ -1,6 +1,14 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
-import { HIGH_SIDE_PORTS, METERING_DEVICES, MODES, STAGES, SYSTEM_KINDS, type SetupField } from '@chargewright/engine';
-import { checkPageWords, setupWords, type SetupFieldWords } from '@chargewright/wording';
+import {
+  HIGH_SIDE_PORTS,
+  METERING_DEVICES,
+  MODES,
+  PROCEDURE_IDS,
+  STAGES,
+  SYSTEM_KINDS,
+  type SetupField,
+} from '@chargewright/engine';
+import { checkPageWords, procedureWords, setupWords, type SetupFieldWords } from '@chargewright/wording';
 import {
   CHARGE_MODES,
   type CheckDraft,
@@ -56,7 +64,11 @@ export class SetupForm {
   protected readonly meteringChoices = choicesOf(METERING_DEVICES, setupWords.meteringDevice, 'hinted');
   protected readonly chargeMode = setupWords.chargeMode;
   protected readonly chargeModes = choicesOf(CHARGE_MODES, setupWords.chargeMode);
+  protected readonly procedureField = setupWords.procedure;
+  protected readonly procedures = PROCEDURE_IDS.map((value) => ({ value, label: procedureWords[value].name }));
   protected readonly setup = computed(() => this.draft().setup);
+  /** What is to be known about the chosen rules: which of their figures rest on memory. */
+  protected readonly procedureHint = computed(() => procedureWords[this.setup().procedure ?? 'general-rules'].note);
   protected readonly asksTargetPort = computed(() => asksTargetPort(this.setup()));
   protected readonly asksChargeMode = computed(() => asksChargeMode(this.setup()));
   protected readonly unconfirmed = computed(() =>

@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
-import type { HighSidePort } from '@chargewright/engine';
-import { checkPageWords, listWords, setupWords, unitLabel } from '@chargewright/wording';
+import type { HighSidePort, ProcedureId } from '@chargewright/engine';
+import { checkPageWords, listWords, procedureWords, setupWords, unitLabel } from '@chargewright/wording';
 import type { CheckDraft } from '../loose-checks/check-draft';
 import { flammabilityOf } from './flammability';
 
@@ -61,7 +61,7 @@ export function plateDetails({ setup, typed }: CheckDraft): string {
     [first, ...others.map(inSentence)].join(', '),
     ...(highSidePort === 'liquid' ? [] : [portText(highSidePort)]),
     elevation ? `${elevation.text} ${unitLabel(elevation.unit)}` : words.seaLevel,
-    words.rules,
+    rulesText(setup.procedure),
   ].join(' · ');
 }
 
@@ -70,6 +70,8 @@ export function plateFlammability({ setup: { refrigerant } }: CheckDraft): strin
   const safetyClass = refrigerant === undefined ? null : flammabilityOf(refrigerant);
   return safetyClass === null ? '' : words.burns(safetyClass);
 }
+
+const rulesText = (procedure: ProcedureId = 'general-rules'): string => inSentence(procedureWords[procedure].short);
 
 const portText = (port: HighSidePort): string =>
   `${inSentence(setupWords.highSidePort.label)}: ${inSentence(setupWords.highSidePort.options[port].label)}`;

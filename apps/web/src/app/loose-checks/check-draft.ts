@@ -9,6 +9,7 @@ import type {
   Mode,
   PreflightItem,
   PreflightState,
+  ProcedureId,
   ReadingId,
   Stage,
   SystemKind,
@@ -62,6 +63,8 @@ export interface DraftSetup {
   readonly highSidePort?: HighSidePort;
   readonly targetSubcoolingPort?: TargetPort;
   readonly chargeMode?: ChargeMode;
+  /** The rules the check is judged by; general rules where nothing is chosen. */
+  readonly procedure?: ProcedureId;
 }
 
 export interface DraftVisit {
