@@ -26,17 +26,11 @@ export function standardNormalCdf(z: number): number {
 }
 
 /**
- * Probability that a normal variable lies in [low, high] (JCGM 106:2012, 7.2). A zero standard uncertainty gives 0 or 1, limits inclusive
- * with the slack `edge`; limits may be ±∞.
+ * Probability that a normal variable lies in [low, high] (JCGM 106:2012, 7.2). A zero standard uncertainty gives 0 or 1, limits inclusive;
+ * limits may be ±∞.
  */
-export function probabilityBetween(
-  mean: number,
-  standardUncertainty: number,
-  low: number,
-  high: number,
-  edge = 0,
-): number {
-  if (standardUncertainty === 0) return mean >= low - edge && mean <= high + edge ? 1 : 0;
+export function probabilityBetween(mean: number, standardUncertainty: number, low: number, high: number): number {
+  if (standardUncertainty === 0) return mean >= low && mean <= high ? 1 : 0;
   const above = standardNormalCdf((low - mean) / standardUncertainty);
   const below = standardNormalCdf((high - mean) / standardUncertainty);
   return Math.min(Math.max(below - above, 0), 1);

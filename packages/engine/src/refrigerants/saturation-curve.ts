@@ -92,8 +92,7 @@ export function curveTemperatureK(curve: SaturationCurve, pressurePa: number): n
 }
 
 /**
- * 1/T at which ln p is `wanted`, by Newton. `bracketedNewton` would evaluate both ends afresh at every call, several times this whole cost;
- * here the curve is known to rise and to be nearly straight in 1/T, which the generator checks densely.
+ * 1/T at which ln p is `wanted`, by Newton without the bracket and its options, which would cost as much again at every call; here the curve is known to rise and to be nearly straight in 1/T, which the generator checks densely.
  */
 function reciprocalTemperature(
   series: ChebyshevSeries,
