@@ -117,6 +117,7 @@ export const DRIVES = {
   maxHighPressurePsi: sometimes(10, between(300, 650)),
   chargeMode: sometimes(6, fc.boolean()),
   liftFt: sometimes(15, between(-30, 60)),
+  makersChart: sometimes(4, fc.constant({ kind: 'superheat' })),
 
   humidityBy: mixed<HumidityBy>(
     [10, fc.constant('wet-bulb')],

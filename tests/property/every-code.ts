@@ -97,6 +97,7 @@ export const CAUTIONS = namesOf<CautionCode>({
   'cool-weather': 'reached',
   'low-head': 'reached',
   'long-lines': 'reached',
+  'makers-chart-not-used': 'reached',
   'elevation-assumed': 'reached',
   'gauge-not-zeroed': 'reached',
   'instruments-old': 'reached',

@@ -117,6 +117,7 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
         unit: unit.pressure,
       })),
       chargeMode: drives.chargeMode,
+      makersChart: drives.makersChart,
       lineSet: mapped(drives.liftFt, (feet) => ({
         lift: { value: lengthFromM(lengthToM(feet, 'ft'), unit.length), unit: unit.length },
       })),

@@ -41,6 +41,11 @@ const optional = {
   factoryCharge: z.exactOptional(mass),
   maxHighPressure: z.exactOptional(pressure),
   chargeMode: z.exactOptional(z.boolean()),
+  makersChart: z.exactOptional(
+    object({ kind: z.string().max(LONGEST_TEXT) }).meta({
+      description: 'Accepted, not judged by yet: the answer then carries the caution makers-chart-not-used.',
+    }),
+  ),
   lineSet: z.exactOptional(lineSet),
 };
 

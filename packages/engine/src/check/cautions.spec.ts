@@ -231,6 +231,11 @@ describe('setup', () => {
     expect(has(valveRequest({ setup: { stage: 'unknown' } }), 'setup-assumed')).toBe(true);
   });
 
+  it('makers-chart-not-used: a table was given, and nothing is judged by it', () => {
+    expect(has(valveRequest({ setup: { makersChart: { kind: 'superheat' } } }), 'makers-chart-not-used')).toBe(true);
+    expect(has(valveRequest(), 'makers-chart-not-used')).toBe(false);
+  });
+
   it('long-lines: above 20 ft of lift', () => {
     const lift = (feet: number) => valveRequest({ setup: { lineSet: { lift: { value: feet, unit: 'ft' } } } });
     expect(has(lift(20), 'long-lines')).toBe(false);

@@ -37,6 +37,7 @@ type PlainCautionCode = Extract<
   CautionCode,
   | 'pull-down'
   | 'elevation-assumed'
+  | 'makers-chart-not-used'
   | 'gauge-not-zeroed'
   | 'airflow-not-proven'
   | 'conditions-not-recorded'
@@ -191,6 +192,7 @@ export function lowHead(input: CheckInput): Caution | null {
 
 function setupCautions({ setup }: CheckInput): readonly Caution[] {
   const found: Caution[] = [];
+  if (setup.makersChartGiven) found.push(plain('makers-chart-not-used'));
   if (setup.elevationAssumed) found.push(plain('elevation-assumed'));
   if (setup.assumed.length > 0) {
     found.push({ code: 'setup-assumed', figures: { fields: { kind: 'setup', value: setup.assumed } } });

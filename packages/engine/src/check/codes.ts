@@ -104,6 +104,7 @@ export interface CautionFigures {
   'cool-weather': 'outdoor';
   'low-head': 'difference' | 'least';
   'long-lines': 'lift';
+  'makers-chart-not-used': never;
   'elevation-assumed': never;
   'gauge-not-zeroed': never;
   'instruments-old': 'days';

@@ -51,6 +51,8 @@ export interface CheckSetup {
   readonly maxHighPressurePa?: number;
   readonly chargeMode?: boolean;
   readonly liftM?: number;
+  /** A maker's table was given, by which nothing is judged yet. */
+  readonly makersChartGiven: boolean;
 }
 
 export interface CheckVisit {

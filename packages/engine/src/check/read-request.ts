@@ -70,6 +70,7 @@ function readSetup(setup: SetupInput): CheckSetup {
     assumed,
     atmosphere,
     elevationAssumed: setup.elevation === undefined && setup.stationPressure === undefined,
+    makersChartGiven: setup.makersChart !== undefined,
     alteration: setup.alteration ?? false,
     highVelocity: setup.highVelocity ?? false,
     ...present('airflowPath', setup.airflowPath),

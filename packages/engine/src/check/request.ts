@@ -102,6 +102,8 @@ export interface SetupInput {
   readonly maxHighPressure?: Amount<PressureUnit>;
   /** Whether an inverter runs in the maker's charge mode; leave out for a single-speed unit. */
   readonly chargeMode?: boolean;
+  /** A maker's own table. It is not judged by yet, and the result says so: enter its target instead. */
+  readonly makersChart?: { readonly kind: string };
   readonly lineSet?: {
     readonly length?: Amount<LengthUnit>;
     readonly lift?: Amount<LengthUnit>;
