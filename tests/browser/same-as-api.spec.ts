@@ -142,9 +142,11 @@ describe('the same system by the API and on the page', () => {
     const [deciding] = judged;
     if (!deciding) throw new Error('nothing was judged');
     await check.button(checkPageWords.result.showMathOf(criterionName(deciding.criterion))).click();
-    const math = (await check.card(criterionName(deciding.criterion))).replace(/\s+/g, ' ');
     const step = answer.derivation.find(({ id }) => id === deciding.criterion);
     expect(step).toBeDefined();
-    expect(math).toContain(step?.substitution.replace(/\s+/g, ' '));
+    // the math is loaded when it is first opened
+    await expect
+      .poll(async () => (await check.card(criterionName(deciding.criterion))).replace(/\s+/g, ' '))
+      .toContain(step?.substitution.replace(/\s+/g, ' '));
   });
 });
