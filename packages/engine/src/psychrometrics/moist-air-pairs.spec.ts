@@ -281,9 +281,9 @@ describe('moistAirFromPair', () => {
     expectTypeOf(one).not.toExtend<MoistAirPair>();
     expectTypeOf(three).not.toExtend<MoistAirPair>();
     expectTypeOf<{ dryBulbK: number; enthalpyJPerKg: number }>().toExtend<MoistAirPair>();
-    // @ts-expect-error one reading
+    // @ts-expect-error one reading: the type refuses it, and so must the function where types are not checked
     expect(() => moistAirFromPair(one)).toThrow(TypeError);
-    // @ts-expect-error three readings
+    // @ts-expect-error three readings: as above
     expect(() => moistAirFromPair(three)).toThrow(
       'two readings of moist air are needed, given: dryBulbK, wetBulbK, dewPointK',
     );
