@@ -2,18 +2,17 @@
  * What cannot be, in the values of a request whose shape is right: every fault at once, each at the path of its field. What is possible but odd
  * is a caution of the result instead.
  */
-import { ELEVATION_LIMITS, standardAtmospherePressurePa } from '../psychrometrics/standard-atmosphere';
-import { PRESSURE_LIMITS } from '../psychrometrics/moist-air-limits';
 import { isRefrigerantId, refrigerantFacts } from '../refrigerants/catalogue';
-import { isGaugeUnit, lengthToM, pressureAsReadToPa, pressureToPa, temperatureToK } from '../units';
-import type { LengthUnit, PressureUnit, TemperatureUnit } from '../units';
-import { atmosphereOf, MOST_WEATHER_PA } from './atmosphere';
-import type { Fault, FaultMessage } from './codes';
+import { isGaugeUnit, pressureToPa } from '../units';
+import type { PressureUnit, TemperatureUnit } from '../units';
+import { atmosphereOf } from './atmosphere';
+import type { Fault } from './codes';
 import { findProcedure } from './procedure-catalogue';
 import type { Amount, ReadingInput, ReadingsInput, SetupInput, VisitInput } from './request';
 import type { ReadingId } from './readings';
 import { READING_DIMENSIONS, READING_IDS } from './readings';
 import { UNITS_OF_DIMENSION } from './reading-units';
+import { Faults } from './value-faults';
 
 /** A request of which some fields may be left out because their own shape was at fault. */
 export interface PartialRequest {
@@ -21,35 +20,6 @@ export interface PartialRequest {
   readonly setup?: Partial<SetupInput>;
   readonly visit?: VisitInput;
   readonly readings?: ReadingsInput;
-}
-
-/** Slack of comparisons in kelvin: rounding of the conversions. */
-const SLACK_K = 1e-9;
-/** Far past any reading; from here on the conversions and squares of SI numbers would leave the range of a double. */
-const LARGEST_NUMBER = 1e12;
-
-class Faults {
-  readonly list: Fault[] = [];
-
-  add(path: string, message: FaultMessage): void {
-    this.list.push({ ...message, path });
-  }
-
-  finite(path: string, value: number): boolean {
-    if (Math.abs(value) <= LARGEST_NUMBER) return true;
-    this.add(path, { code: 'not-a-finite-number', figures: {} });
-    return false;
-  }
-
-  positive(path: string, amount: Amount<string> | undefined): void {
-    if (amount === undefined || !this.finite(path, amount.value)) return;
-    if (amount.value <= 0) this.add(path, { code: 'must-be-positive', figures: {} });
-  }
-
-  notNegative(path: string, value: number | undefined): void {
-    if (value === undefined || !this.finite(path, value)) return;
-    if (value < 0) this.add(path, { code: 'must-not-be-negative', figures: {} });
-  }
 }
 
 /** Every fault of the values; an empty list means that the request can be judged. Total: never throws for a well-typed request. */
@@ -78,7 +48,7 @@ function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext
     if (isRefrigerantId(refrigerant)) context.criticalPa = refrigerantFacts(refrigerant).criticalPressurePa;
     else faults.add('setup.refrigerant', { code: 'unknown-refrigerant', figures: {} });
   }
-  if (checkAtmosphere(faults, setup)) context.atmospherePa = atmosphereOf(setup).value;
+  if (faults.atmosphere('setup.', setup)) context.atmospherePa = atmosphereOf(setup).value;
   faults.notNegative('setup.targetSuperheat', setup.targetSuperheat?.value);
   faults.notNegative('setup.targetSubcooling', setup.targetSubcooling?.value);
   faults.positive('setup.nominalCapacity', setup.nominalCapacity);
@@ -99,47 +69,6 @@ function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext
   return context;
 }
 
-function checkAtmosphere(faults: Faults, { elevation, stationPressure }: Partial<SetupInput>): boolean {
-  const elevationM = elevation === undefined ? undefined : checkElevation(faults, elevation);
-  const stationPa = stationPressure === undefined ? undefined : checkBarometer(faults, stationPressure);
-  if (elevationM === null || stationPa === null) return false;
-  if (elevationM === undefined || stationPa === undefined) return true;
-  const expected = standardAtmospherePressurePa(elevationM);
-  if (Math.abs(stationPa - expected) <= MOST_WEATHER_PA) return true;
-  const figures = {
-    stated: { kind: 'pressurePa', value: stationPa },
-    expected: { kind: 'pressurePa', value: expected },
-  } as const;
-  faults.add('setup.stationPressure', { code: 'barometer-contradicts-elevation', figures });
-  return false;
-}
-
-function checkElevation(faults: Faults, elevation: Amount<LengthUnit>): number | null {
-  const path = 'setup.elevation';
-  if (!faults.finite(path, elevation.value)) return null;
-  const { min, max } = ELEVATION_LIMITS;
-  const metres = lengthToM(elevation.value, elevation.unit);
-  if (metres >= min && metres <= max) return metres;
-  const figures = { least: { kind: 'lengthM', value: min }, most: { kind: 'lengthM', value: max } } as const;
-  faults.add(path, { code: 'elevation-outside-range', figures });
-  return null;
-}
-
-function checkBarometer(faults: Faults, pressure: Amount<PressureUnit>): number | null {
-  const path = 'setup.stationPressure';
-  if (!faults.finite(path, pressure.value)) return null;
-  if (isGaugeUnit(pressure.unit)) {
-    faults.add(path, { code: 'gauge-unit-on-absolute', figures: {} });
-    return null;
-  }
-  const { min, max } = PRESSURE_LIMITS;
-  const pa = pressureAsReadToPa(pressure.value, pressure.unit);
-  if (pa >= min && pa <= max) return pa;
-  const figures = { least: { kind: 'pressurePa', value: min }, most: { kind: 'pressurePa', value: max } } as const;
-  faults.add(path, { code: 'barometer-outside-range', figures });
-  return null;
-}
-
 function checkVisit(faults: Faults, visit: VisitInput, pressures: PressureContext): void {
   faults.notNegative('visit.runningMinutes', visit.runningMinutes);
   faults.notNegative('visit.instrumentsCheckedDaysAgo', visit.instrumentsCheckedDaysAgo);
@@ -148,7 +77,7 @@ function checkVisit(faults: Faults, visit: VisitInput, pressures: PressureContex
   faults.notNegative('visit.additionsOnEarlierVisits', visit.additionsOnEarlierVisits);
   faults.notNegative('visit.hoursOff', visit.hoursOff);
   if (visit.lowestReturnDryBulb !== undefined) {
-    checkTemperature(faults, 'visit.lowestReturnDryBulb', visit.lowestReturnDryBulb);
+    faults.temperature('visit.lowestReturnDryBulb', visit.lowestReturnDryBulb);
   }
   if (visit.earlier !== undefined) {
     faults.notNegative('visit.earlier.minutesAgo', visit.earlier.minutesAgo);
@@ -161,8 +90,9 @@ function checkReadings(faults: Faults, readings: ReadingsInput, root: string, pr
     const reading = readings[id];
     if (reading !== undefined) checkReading(faults, `${root}.${id}`, id, reading, pressures);
   }
-  checkWetBulb(faults, readings, root, 'returnDryBulb', 'returnWetBulb');
-  checkWetBulb(faults, readings, root, 'supplyDryBulb', 'supplyWetBulb');
+  const bulb = (id: ReadingId) => readings[id] as Amount<TemperatureUnit> | undefined;
+  faults.wetBulb(`${root}.returnWetBulb`, bulb('returnDryBulb'), bulb('returnWetBulb'));
+  faults.wetBulb(`${root}.supplyWetBulb`, bulb('supplyDryBulb'), bulb('supplyWetBulb'));
 }
 
 function checkReading(
@@ -186,15 +116,13 @@ function checkReading(
   }
   switch (dimension) {
     case 'temperature':
-      checkTemperature(faults, path, reading as Amount<TemperatureUnit>);
+      faults.temperature(path, reading as Amount<TemperatureUnit>);
       break;
     case 'pressure':
       checkPressure(faults, path, reading as Amount<PressureUnit>, pressures);
       break;
     case 'humidity':
-      if (faults.finite(path, reading.value) && !(reading.value >= 0 && reading.value <= 100)) {
-        faults.add(path, { code: 'humidity-outside-range', figures: {} });
-      }
+      faults.humidity(path, reading.value);
       break;
     case 'airflow':
     case 'current':
@@ -205,13 +133,6 @@ function checkReading(
       faults.finite(path, reading.value);
       break;
   }
-}
-
-function checkTemperature(faults: Faults, path: string, { value, unit }: Amount<TemperatureUnit>): void {
-  if (!faults.finite(path, value)) return;
-  const kelvin = temperatureToK(value, unit);
-  if (kelvin >= 0) return;
-  faults.add(path, { code: 'below-absolute-zero', figures: { actual: { kind: 'temperatureK', value: kelvin } } });
 }
 
 function checkPressure(faults: Faults, path: string, amount: Amount<PressureUnit>, context: PressureContext): void {
@@ -228,19 +149,4 @@ function checkPressure(faults: Faults, path: string, amount: Amount<PressureUnit
     } as const;
     faults.add(path, { code: 'above-critical-pressure', figures });
   }
-}
-
-function checkWetBulb(faults: Faults, readings: ReadingsInput, root: string, dry: ReadingId, wet: ReadingId): void {
-  const dryBulb = readings[dry] as Amount<TemperatureUnit> | undefined;
-  const wetBulb = readings[wet] as Amount<TemperatureUnit> | undefined;
-  if (dryBulb === undefined || wetBulb === undefined) return;
-  const dryBulbK = temperatureToK(dryBulb.value, dryBulb.unit);
-  const wetBulbK = temperatureToK(wetBulb.value, wetBulb.unit);
-  // what is not a number, or not a temperature, has its own fault
-  if (!(wetBulbK > dryBulbK + SLACK_K && Number.isFinite(wetBulbK - dryBulbK))) return;
-  const figures = {
-    wetBulb: { kind: 'temperatureK', value: wetBulbK },
-    dryBulb: { kind: 'temperatureK', value: dryBulbK },
-  } as const;
-  faults.add(`${root}.${wet}`, { code: 'wet-bulb-above-dry-bulb', figures });
 }

@@ -135,7 +135,8 @@ const isUsed = (id: (typeof READING_IDS)[number]): id is UsedReadingId => {
   return dimension !== 'staticPressure' && dimension !== 'current' && dimension !== 'voltage';
 };
 
-function readReading(id: UsedReadingId, reading: ReadingInput, atmosphere: Known, prefix: string): CheckReading {
+/** One reading in SI with its uncertainty, absolute where it is a pressure. Its unit fits its dimension. */
+export function readReading(id: UsedReadingId, reading: ReadingInput, atmosphere: Known, prefix: string): CheckReading {
   const dimension = READING_DIMENSIONS[id];
   const valueSi = toSi(dimension, reading.value, reading);
   // the step of an affine scale is the difference of two of its values
