@@ -42,13 +42,13 @@ function parseRest<Rest>(schema: z.ZodType<Rest>, input: unknown): Rest {
 function holds(input: unknown, path: readonly PropertyKey[]): boolean {
   const parent = valueAt(input, path.slice(0, -1));
   const last = path.at(-1);
-  return last !== undefined && isRecord(parent) && Object.hasOwn(parent, last);
+  return last !== undefined && typeof parent === 'object' && parent !== null && Object.hasOwn(parent, last);
 }
 
-/** The input without the value at `path`. Copies only along the path. */
+/** The input without the value at `path`. Copies only along the path. A table without one of its rows is another table: it goes as a whole. */
 function without(input: unknown, path: readonly PropertyKey[]): unknown {
   const [key, ...below] = path;
-  if (key === undefined) return undefined;
+  if (key === undefined || Array.isArray(input)) return undefined;
   if (!isRecord(input) || !Object.hasOwn(input, key)) return input;
   const { [key]: held, ...others } = input;
   const value = without(held, below);

@@ -2,7 +2,7 @@ import { TEMPERATURE_UNITS } from '@chargewright/engine';
 import type * as z from 'zod';
 
 /** What kind of value a field takes. */
-export type ExpectedType = 'number' | 'text' | 'true-or-false' | 'object';
+export type ExpectedType = 'number' | 'text' | 'true-or-false' | 'object' | 'list';
 
 /** A fault of the request's shape, found before anything is computed. */
 export interface StructureFault {
@@ -33,6 +33,7 @@ const EXPECTED_TYPES: Readonly<Record<string, ExpectedType>> = {
   string: 'text',
   boolean: 'true-or-false',
   object: 'object',
+  array: 'list',
 };
 
 /** The fault a person is told for an issue of zod. */
@@ -63,12 +64,15 @@ function wrongUnit(given: unknown, allowed: readonly string[]): StructureFault['
   return isTemperature && allowed.includes('deltaF') ? 'temperature-unit-on-difference' : 'wrong-unit';
 }
 
-/** The value at a path, undefined where there is none. */
+/** The value at a path, also through the rows of a table; undefined where there is none. */
 export function valueAt(input: unknown, path: readonly PropertyKey[]): unknown {
   let value = input;
-  for (const key of path) value = isRecord(value) && Object.hasOwn(value, key) ? value[key] : undefined;
+  for (const key of path) value = hasKey(value, key) ? value[key] : undefined;
   return value;
 }
+
+const hasKey = (value: unknown, key: PropertyKey): value is Record<PropertyKey, unknown> =>
+  typeof value === 'object' && value !== null && Object.hasOwn(value, key);
 
 export const isRecord = (value: unknown): value is Record<PropertyKey, unknown> =>
   typeof value === 'object' && value !== null && !Array.isArray(value);

@@ -24,6 +24,7 @@ export const typeNames = {
   text: 'a text',
   'true-or-false': 'true or false',
   object: 'an object',
+  list: 'a list',
 } as const;
 
 export const parameterTexts = {
