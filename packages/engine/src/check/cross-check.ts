@@ -3,15 +3,14 @@
  * is a caution of the result instead.
  */
 import { isRefrigerantId, refrigerantFacts } from '../refrigerants/catalogue';
-import { isGaugeUnit, pressureToPa } from '../units';
-import type { PressureUnit, TemperatureUnit } from '../units';
+import type { TemperatureUnit } from '../units';
 import { atmosphereOf } from './atmosphere';
 import type { Fault } from './codes';
 import { findProcedure } from './procedure-catalogue';
-import type { Amount, ReadingInput, ReadingsInput, SetupInput, VisitInput } from './request';
+import type { Amount, ReadingsInput, SetupInput, VisitInput } from './request';
 import type { ReadingId } from './readings';
 import { READING_DIMENSIONS, READING_IDS } from './readings';
-import { UNITS_OF_DIMENSION } from './reading-units';
+import type { PressureContext } from './value-faults';
 import { Faults } from './value-faults';
 
 /** A request of which some fields may be left out because their own shape was at fault. */
@@ -35,12 +34,6 @@ export function crossCheck(request: PartialRequest): readonly Fault[] {
   return faults.list;
 }
 
-/** What turns a pressure as read into an absolute one and says where it ends; unknown while the setup is at fault. */
-interface PressureContext {
-  readonly atmospherePa?: number;
-  readonly criticalPa?: number;
-}
-
 function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext {
   const { refrigerant, superheatRange, lineSet } = setup;
   const context: { atmospherePa?: number; criticalPa?: number } = {};
@@ -55,7 +48,7 @@ function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext
   faults.positive('setup.designAirflow', setup.designAirflow);
   faults.positive('setup.factoryCharge', setup.factoryCharge);
   if (setup.maxHighPressure !== undefined) {
-    checkPressure(faults, 'setup.maxHighPressure', setup.maxHighPressure, { ...context, criticalPa: Infinity });
+    faults.pressure('setup.maxHighPressure', setup.maxHighPressure, { ...context, criticalPa: Infinity });
   }
   if (superheatRange !== undefined) {
     const path = 'setup.superheatRange';
@@ -88,65 +81,9 @@ function checkVisit(faults: Faults, visit: VisitInput, pressures: PressureContex
 function checkReadings(faults: Faults, readings: ReadingsInput, root: string, pressures: PressureContext): void {
   for (const id of READING_IDS) {
     const reading = readings[id];
-    if (reading !== undefined) checkReading(faults, `${root}.${id}`, id, reading, pressures);
+    if (reading !== undefined) faults.reading(`${root}.${id}`, READING_DIMENSIONS[id], reading, pressures);
   }
   const bulb = (id: ReadingId) => readings[id] as Amount<TemperatureUnit> | undefined;
   faults.wetBulb(`${root}.returnWetBulb`, bulb('returnDryBulb'), bulb('returnWetBulb'));
   faults.wetBulb(`${root}.supplyWetBulb`, bulb('supplyDryBulb'), bulb('supplyWetBulb'));
-}
-
-function checkReading(
-  faults: Faults,
-  path: string,
-  id: ReadingId,
-  reading: ReadingInput,
-  pressures: PressureContext,
-): void {
-  const dimension = READING_DIMENSIONS[id];
-  const units = UNITS_OF_DIMENSION[dimension];
-  faults.notNegative(`${path}.plusMinus`, reading.plusMinus?.value);
-  if (reading.plusMinus !== undefined && !units.plusMinus.includes(reading.plusMinus.unit)) {
-    faults.add(`${path}.plusMinus`, { code: 'wrong-unit', figures: {} });
-  }
-  faults.notNegative(`${path}.ageSeconds`, reading.ageSeconds);
-  faults.notNegative(`${path}.resolution`, reading.resolution);
-  if (!units.reading.includes(reading.unit)) {
-    faults.add(path, { code: 'wrong-unit', figures: {} });
-    return;
-  }
-  switch (dimension) {
-    case 'temperature':
-      faults.temperature(path, reading as Amount<TemperatureUnit>);
-      break;
-    case 'pressure':
-      checkPressure(faults, path, reading as Amount<PressureUnit>, pressures);
-      break;
-    case 'humidity':
-      faults.humidity(path, reading.value);
-      break;
-    case 'airflow':
-    case 'current':
-    case 'voltage':
-      faults.notNegative(path, reading.value);
-      break;
-    case 'staticPressure':
-      faults.finite(path, reading.value);
-      break;
-  }
-}
-
-function checkPressure(faults: Faults, path: string, amount: Amount<PressureUnit>, context: PressureContext): void {
-  const { value, unit } = amount;
-  const { atmospherePa, criticalPa = Infinity } = context;
-  if (!faults.finite(path, value)) return;
-  if (atmospherePa === undefined && isGaugeUnit(unit)) return;
-  const pa = pressureToPa(value, unit, atmospherePa ?? 0);
-  if (pa <= 0) faults.add(path, { code: 'not-above-vacuum', figures: {} });
-  if (pa > criticalPa) {
-    const figures = {
-      actual: { kind: 'pressurePa', value: pa },
-      critical: { kind: 'pressurePa', value: criticalPa },
-    } as const;
-    faults.add(path, { code: 'above-critical-pressure', figures });
-  }
 }

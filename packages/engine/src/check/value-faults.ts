@@ -1,17 +1,25 @@
 /** What cannot be in one value, whichever request it belongs to: each fault at the path of its field. */
 import { PRESSURE_LIMITS } from '../psychrometrics/moist-air-limits';
 import { ELEVATION_LIMITS, standardAtmospherePressurePa } from '../psychrometrics/standard-atmosphere';
-import { isGaugeUnit, lengthToM, pressureAsReadToPa, temperatureToK } from '../units';
+import { isGaugeUnit, lengthToM, pressureAsReadToPa, pressureToPa, temperatureToK } from '../units';
 import type { LengthUnit, PressureUnit, TemperatureUnit } from '../units';
 import type { AtmosphereInput } from './atmosphere';
 import { MOST_WEATHER_PA } from './atmosphere';
 import type { FaultMessage } from './codes';
-import type { Amount } from './request';
+import type { Amount, ReadingInput } from './request';
+import type { Dimension } from './readings';
+import { UNITS_OF_DIMENSION } from './reading-units';
 
 /** Slack of comparisons in kelvin: rounding of the conversions. */
 const SLACK_K = 1e-9;
 /** Far past any reading; from here on the conversions and squares of SI numbers would leave the range of a double. */
 const LARGEST_NUMBER = 1e12;
+
+/** What turns a pressure as read into an absolute one and says where it ends; unknown while the setup is at fault. */
+export interface PressureContext {
+  readonly atmospherePa?: number;
+  readonly criticalPa?: number;
+}
 
 /** Collects faults; `More` are messages of requests other than a check's. */
 export class Faults<More = never> {
@@ -35,6 +43,56 @@ export class Faults<More = never> {
   notNegative(path: string, value: number | undefined): void {
     if (value === undefined || !this.finite(path, value)) return;
     if (value < 0) this.add(path, { code: 'must-not-be-negative', figures: {} });
+  }
+
+  /** A reading with its ±, in the units of what it measures. */
+  reading(path: string, dimension: Dimension, reading: ReadingInput, pressures: PressureContext = {}): void {
+    const units = UNITS_OF_DIMENSION[dimension];
+    this.notNegative(`${path}.plusMinus`, reading.plusMinus?.value);
+    if (reading.plusMinus !== undefined && !units.plusMinus.includes(reading.plusMinus.unit)) {
+      this.add(`${path}.plusMinus`, { code: 'wrong-unit', figures: {} });
+    }
+    this.notNegative(`${path}.ageSeconds`, reading.ageSeconds);
+    this.notNegative(`${path}.resolution`, reading.resolution);
+    if (!units.reading.includes(reading.unit)) {
+      this.add(path, { code: 'wrong-unit', figures: {} });
+      return;
+    }
+    switch (dimension) {
+      case 'temperature':
+        this.temperature(path, reading as Amount<TemperatureUnit>);
+        break;
+      case 'pressure':
+        this.pressure(path, reading as Amount<PressureUnit>, pressures);
+        break;
+      case 'humidity':
+        this.humidity(path, reading.value);
+        break;
+      case 'airflow':
+      case 'current':
+      case 'voltage':
+        this.notNegative(path, reading.value);
+        break;
+      case 'staticPressure':
+        this.finite(path, reading.value);
+        break;
+    }
+  }
+
+  pressure(path: string, amount: Amount<PressureUnit>, context: PressureContext): void {
+    const { value, unit } = amount;
+    const { atmospherePa, criticalPa = Infinity } = context;
+    if (!this.finite(path, value)) return;
+    if (atmospherePa === undefined && isGaugeUnit(unit)) return;
+    const pa = pressureToPa(value, unit, atmospherePa ?? 0);
+    if (pa <= 0) this.add(path, { code: 'not-above-vacuum', figures: {} });
+    if (pa > criticalPa) {
+      const figures = {
+        actual: { kind: 'pressurePa', value: pa },
+        critical: { kind: 'pressurePa', value: criticalPa },
+      } as const;
+      this.add(path, { code: 'above-critical-pressure', figures });
+    }
   }
 
   temperature(path: string, { value, unit }: Amount<TemperatureUnit>): void {
