@@ -8,11 +8,12 @@ import { looseChecksWords } from './english/loose-checks';
 import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { offlineWords } from './english/offline';
+import { pageMenuWords } from './english/page-menu';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
 import { reasonTexts } from './english/reasons';
-import * as safetyWords from './english/safety';
+import { safetyWords } from './english/safety';
 import { setupWords } from './english/setup';
 import { stopTexts } from './english/stops';
 import { structureFaultWords } from './english/structure-faults';
@@ -37,6 +38,7 @@ const english: Language = {
   checkPage: checkPageWords,
   looseChecks: looseChecksWords,
   offline: offlineWords,
+  pageMenu: pageMenuWords,
 };
 
 describe('a language', () => {

@@ -17,10 +17,11 @@ import type { CriterionParts } from './criterion-parts';
 import type { checkPageWords } from './english/check-page';
 import type { looseChecksWords } from './english/loose-checks';
 import type { offlineWords } from './english/offline';
+import type { pageMenuWords } from './english/page-menu';
 import type { readingHelp } from './english/reading-help';
 import type { procedureWords } from './english/procedures';
 import type { readingWords } from './english/readings';
-import type * as safetyWords from './english/safety';
+import type { safetyWords } from './english/safety';
 import type { setupWords } from './english/setup';
 import type { FigureNames, MessageTexts, Say } from './message-texts';
 import type { StructureFaultKind } from './structure-fault';
@@ -91,4 +92,5 @@ export interface Language {
   readonly checkPage: typeof checkPageWords;
   readonly looseChecks: typeof looseChecksWords;
   readonly offline: typeof offlineWords;
+  readonly pageMenu: typeof pageMenuWords;
 }

@@ -17,16 +17,8 @@ import { faultWords } from './english/faults';
 import { nextStepWords } from './english/next-steps';
 import { reasonTexts } from './english/reasons';
 import { stopTexts } from './english/stops';
-import {
-  cautionText,
-  faultText,
-  nextStepLines,
-  nextStepText,
-  notYetText,
-  reasonText,
-  stopText,
-  structureFaultText,
-} from './sentences';
+import { cautionText, nextStepLines, nextStepText, notYetText, reasonText, stopText } from './sentences';
+import { faultText, structureFaultText } from './fault-sentences';
 import type { StructureFaultKind } from './structure-fault';
 import { UNIT_SYSTEMS, type UnitSystem } from './unit-system';
 

@@ -4,7 +4,6 @@ import type {
   CheckResult,
   CriterionId,
   CriterionResult,
-  Fault,
   NextStep,
   NotYetCode,
   OverallFinding,
@@ -13,18 +12,13 @@ import type {
 } from '@chargewright/engine';
 import { criterionParts } from './criterion-parts';
 import { cautionTexts } from './english/cautions';
-import { faultWords } from './english/faults';
 import { findingPhrases } from './english/findings';
 import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { reasonTexts } from './english/reasons';
 import { stopTexts } from './english/stops';
-import { structureFaultWords } from './english/structure-faults';
-import { fieldName } from './field-name';
-import { formatStated } from './format-value';
 import type { Language } from './language';
 import { messageText, sayIn } from './message-texts';
-import type { StructureFault } from './structure-fault';
 import type { UnitSystem } from './unit-system';
 
 type Saying<Section extends keyof Language> = Pick<Language, Section>;
@@ -78,26 +72,6 @@ export function nextStepText(
 ): string {
   const lines = nextStepLines(step, system, language);
   return [...lines.notYet, lines.step, lines.why].join(' ');
-}
-
-export function faultText(
-  fault: Fault,
-  system: UnitSystem,
-  language: Saying<'faults' | 'names'> = { faults: faultWords, names },
-): string {
-  const { faults, naming } = language.faults;
-  const field = fieldName(fault.path, naming);
-  const counterpart = fieldName(fault.path.replace('WetBulb', 'DryBulb'), naming);
-  const extra = { field, counterpart: counterpart.charAt(0).toLowerCase() + counterpart.slice(1) };
-  return messageText(faults, fault, { system, names: language.names, print: formatStated, extra });
-}
-
-export function structureFaultText(
-  { kind, field, allowed = [] }: StructureFault,
-  language: Saying<'faults' | 'structureFaults'> = { faults: faultWords, structureFaults: structureFaultWords },
-): string {
-  const { structure, alternatives } = language.structureFaults;
-  return structure[kind]({ field: fieldName(field, language.faults.naming), allowed: alternatives(allowed) });
 }
 
 export const findingWord = (

@@ -3,10 +3,11 @@ import { describe, expect, it } from 'vitest';
 import { checkPageWords } from './english/check-page';
 import { looseChecksWords } from './english/loose-checks';
 import { offlineWords } from './english/offline';
+import { pageMenuWords } from './english/page-menu';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
-import * as safetyWords from './english/safety';
+import { safetyWords } from './english/safety';
 import { listWords, setupWords } from './english/setup';
 
 /** Every text of a tree of words; those that take figures get 2 and 8. */
@@ -24,9 +25,10 @@ const roots = Object.entries({
   checkPage: checkPageWords,
   looseChecks: looseChecksWords,
   offline: offlineWords,
+  pageMenu: pageMenuWords,
   readings: readingWords,
   readingHelp,
-  safety: { ...safetyWords },
+  safety: safetyWords,
   setup: setupWords,
   procedures: procedureWords,
 });

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { differenceFromK, temperatureFromK } from '../units';
 import type { Rule } from './procedure';
-import { PROCEDURE_IDS } from './procedure';
+import { PROCEDURE_IDS } from './procedure-ids';
 import { DEFAULT_PROCEDURE, findProcedure, PROCEDURES } from './procedure-catalogue';
 
 /** Every rule of a procedure, at any depth. */

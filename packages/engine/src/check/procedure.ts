@@ -3,6 +3,7 @@
  */
 import type { DifferenceUnit, TemperatureUnit } from '../units';
 import { differenceToK, temperatureToK } from '../units';
+import type { ProcedureId } from './procedure-ids';
 import type { AirflowPath } from './request';
 
 /** `read` in the named source, recalled from `memory`, common `practice` without a source, or our own `choice`, open to better evidence. */
@@ -108,15 +109,6 @@ export interface Procedure {
   /** Above this probability that no target exists, the criterion is not verifiable. */
   readonly mostProbabilityOfNoTarget: Rule;
 }
-
-export const PROCEDURE_IDS = [
-  'general-rules',
-  'cec-ra3.2-2008-installer',
-  'cec-ra3.2-2008-rater',
-  'cec-ra3.2-2019-installer',
-  'cec-ra3.2-2019-rater',
-] as const;
-export type ProcedureId = (typeof PROCEDURE_IDS)[number];
 
 export type SuperheatChartId = 'makers-chart-a' | 'finer-table';
 

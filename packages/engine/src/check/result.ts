@@ -1,7 +1,7 @@
 import type { Known } from '../derivation/quantity';
 import type { DerivationStep } from '../derivation/steps';
 import type { Caution, CriterionId, Finding, NextStepMessage, NotYetCode, OverallFinding, Reason, Stop } from './codes';
-import type { ProcedureId } from './procedure';
+import type { ProcedureId } from './procedure-ids';
 
 export const DERIVED_IDS = [
   'evaporatingDewTemperature',

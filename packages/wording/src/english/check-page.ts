@@ -122,6 +122,9 @@ export const checkPageWords = {
     noReadingsNote: 'The result grows with each reading. New to this? Fill in an example first.',
     needsMending: (count: number) =>
       count === 1 ? 'One entry needs mending before it counts.' : `${count} entries need mending before they count.`,
+    loading: 'Getting ready to judge',
+    notLoaded:
+      'The part that works out the result could not be fetched. Your readings are kept; it is tried again with your next reading.',
     failed: 'This result could not be worked out. Your readings are kept.',
     sources: 'Sources',
     announce: (headline: string) => `Result: ${headline}`,

@@ -18,12 +18,13 @@ import { NOW } from '../loose-checks/time-and-ids';
 import { InstallButton } from '../offline/install-button';
 import { NetworkNote } from '../offline/network-note';
 import { UnitPreference } from '../quantities/unit-preference';
-import { evaluateDraft } from './evaluate-draft';
 import { exampleCheck } from './example-check';
 import { readingKey, typedKey } from './field-key';
 import { afterPaint } from '../loose-checks/after-paint';
 import { FindingAnnouncer } from './finding-announcer';
 import { goToControl } from './next-step-place';
+import { Judge } from './judge';
+import { loadLaterParts } from './later-parts';
 import { PageClock } from './page-clock';
 import { Preflight } from './preflight';
 import { ReadingHelpTexts } from './reading-help-texts';
@@ -34,7 +35,7 @@ import { RememberedElevation } from './remembered-elevation';
 import { asksTargetPort, runningMinutes } from './request-from-draft';
 import { ResultColumn } from './result-column';
 import { ResultSheet } from './result-sheet';
-import { bareSummary, summarise } from './result-summary';
+import { bareSummary } from './result-summary';
 import { settledDraft } from './settled-draft';
 import { SetupForm, type FieldTyped } from './setup-form';
 import { plateTitle, SetupPlate } from './setup-plate';
@@ -97,6 +98,7 @@ export class CheckAChargePage {
   private readonly checks = inject(LooseChecks);
   private readonly units = inject(UnitPreference);
   private readonly elevation = inject(RememberedElevation);
+  private readonly judge = inject(Judge);
   private readonly clock = inject(PageClock);
   private readonly now = inject(NOW);
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
@@ -144,7 +146,7 @@ export class CheckAChargePage {
     return meteringDevice === undefined ? words.missingMetering : '';
   });
 
-  protected readonly evaluation = computed(() => evaluateDraft(this.settled(), this.clock.nowMs()));
+  protected readonly evaluation = computed(() => this.judge.evaluate(this.settled(), this.clock.nowMs()));
   private readonly pageState = computed<PageState>(() => ({
     draft: this.draft(),
     evaluation: this.evaluation(),
@@ -174,7 +176,13 @@ export class CheckAChargePage {
       Object.keys(this.draft().readings).length > 0 ||
       Object.keys(this.settled().edits).some((key) => key.startsWith('reading:')),
   );
-  protected readonly summary = computed(() => summarise(this.evaluation(), this.hasReadings(), this.system()));
+  protected readonly summary = computed(() => {
+    const words = this.words.result;
+    return (
+      this.judge.part()?.summarise(this.evaluation(), this.hasReadings(), this.system()) ??
+      bareSummary(this.judge.isMissing() ? words.notLoaded : words.loading)
+    );
+  });
   protected readonly sheetSummary = computed(() =>
     this.setupOpen() ? bareSummary(this.setupMissing() || plateTitle(this.draft())) : this.summary(),
   );
@@ -198,7 +206,13 @@ export class CheckAChargePage {
 
   constructor() {
     const help = inject(ReadingHelpTexts);
-    afterNextRender(() => afterPaint(this.host.nativeElement.ownerDocument, () => void help.load()));
+    afterNextRender(() =>
+      afterPaint(this.host.nativeElement.ownerDocument, () => {
+        void this.judge.load();
+        void loadLaterParts();
+        void help.load();
+      }),
+    );
   }
 
   protected choose(setup: Partial<DraftSetup>): void {
@@ -216,6 +230,7 @@ export class CheckAChargePage {
 
   protected commit(key: FieldKey): void {
     this.checks.commit(key);
+    void this.judge.load();
     this.clock.tick();
     const { elevation } = this.draft().typed;
     if (key === 'typed:elevation' && elevation) this.elevation.remember(elevation);

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { NextStep } from '@chargewright/engine';
 import { checkPageWords, nextStepLines, type UnitSystem } from '@chargewright/wording';
+import { firstSentence } from './first-sentence';
 
 /** What not to do yet, then what to do, then why. */
 @Component({
@@ -26,10 +27,4 @@ export class NextStepNote {
   protected readonly lines = computed(() => nextStepLines(this.step(), this.system()));
   protected readonly title = computed(() => firstSentence(this.lines().step));
   protected readonly rest = computed(() => this.lines().step.slice(this.title().length).trim());
-}
-
-/** The first sentence of a step serves as its title. */
-export function firstSentence(text: string): string {
-  const end = text.search(/[.!?](\s|$)/);
-  return end < 0 ? text : text.slice(0, end + 1);
 }

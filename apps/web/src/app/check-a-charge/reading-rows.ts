@@ -8,7 +8,7 @@ import type { Evaluation } from './evaluate-draft';
 import { pathOf, valueIn } from './field-key';
 import { ageSeconds } from './request-from-draft';
 
-/** judgement.md 9: a reading older than this is stale. */
+/** As the procedures have it: a reading older than this is stale. */
 const STALE_AFTER_SECONDS = 600;
 
 export interface FieldView {

@@ -11,7 +11,7 @@ import {
   signal,
 } from '@angular/core';
 import type { CheckResult } from '@chargewright/engine';
-import { checkPageWords, criterionDetail, type UnitSystem } from '@chargewright/wording';
+import { checkPageWords, type UnitSystem } from '@chargewright/wording';
 import { Glyph } from '../layout/glyph';
 import { MathLines } from './math-lines';
 import type { ResultSummary } from './result-summary';
@@ -51,10 +51,6 @@ export class ResultSheet {
 
   protected readonly words = checkPageWords.result;
   protected readonly hasMath = computed(() => this.result() !== null && this.summary().leading !== null);
-  protected readonly detail = computed(() => {
-    const { leading } = this.summary();
-    return leading ? criterionDetail(leading, this.system()) : '';
-  });
 
   constructor() {
     const destroyRef = inject(DestroyRef);

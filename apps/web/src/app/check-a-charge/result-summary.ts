@@ -1,16 +1,6 @@
 /** What the result says at a glance: one sentence, what to do and where, and the criterion that decides. */
-import type { CheckResult, CriterionResult, Reason, ReasonCode } from '@chargewright/engine';
-import {
-  checkPageWords,
-  criterionName,
-  nextStepLines,
-  overallHeadline,
-  reasonText,
-  type UnitSystem,
-} from '@chargewright/wording';
-import type { Evaluation } from './evaluate-draft';
-import { firstSentence } from './next-step-note';
-import { isRefusal, placeOfStep, type StepPlace } from './next-step-place';
+import type { CriterionResult } from '@chargewright/engine';
+import type { StepPlace } from './next-step-place';
 
 export interface ResultSummary {
   readonly headline: string;
@@ -27,9 +17,9 @@ export interface ResultSummary {
   readonly leading: CriterionResult | null;
   /** Its name, where the headline does not say it. */
   readonly leadingName: string;
+  /** Why it was found so, against which target, how sure. */
+  readonly leadingDetail: string;
 }
-
-const words = checkPageWords.result;
 
 export const bareSummary = (headline: string): ResultSummary => ({
   headline,
@@ -41,75 +31,5 @@ export const bareSummary = (headline: string): ResultSummary => ({
   isStop: false,
   leading: null,
   leadingName: '',
+  leadingDetail: '',
 });
-
-const decides = ({ overall }: CheckResult, { required, finding }: CriterionResult): boolean =>
-  required && finding === overall.finding;
-
-/** The criterion the overall finding comes from; else the first with a number. */
-function leadingCriterion(result: CheckResult): CriterionResult | null {
-  const withNumber = result.criteria.filter(({ actual }) => actual !== null);
-  return (
-    withNumber.find((criterion) => decides(result, criterion)) ??
-    withNumber.find(({ required }) => required) ??
-    withNumber[0] ??
-    null
-  );
-}
-
-/** The step of these repeats the reason. */
-const SAID_BY_STEP: ReadonlySet<ReasonCode> = new Set([
-  'port-not-stated',
-  'part-stage',
-  'not-in-charge-mode',
-  'not-ready',
-  'running-time',
-  'stale',
-]);
-
-/** Why nothing is judged, where headline and step do not say it already. */
-function reasonToSay(reason: Reason | null, { overall }: CheckResult, system: UnitSystem): string {
-  if (reason === null) return '';
-  const isNews = overall.finding === 'not-verifiable' && !SAID_BY_STEP.has(reason.code);
-  return isNews || reason.code === 'target-for-other-port' ? reasonText(reason, system) : '';
-}
-
-const decidingReason = (result: CheckResult): Reason | null =>
-  result.criteria.find((criterion) => decides(result, criterion))?.reason ?? null;
-
-/** Before the first reading there is nothing to report: what comes first is the headline. */
-function beforeReadings(result: CheckResult, system: UnitSystem): ResultSummary {
-  const { nextStep } = result.overall;
-  const reason = decidingReason(result);
-  if (nextStep.code === 'take-readings') return bareSummary(words.noReadings);
-  return {
-    ...bareSummary(firstSentence(nextStepLines(nextStep, system).step)),
-    reason: reasonToSay(reason, result, system),
-    place: placeOfStep(nextStep.code, reason),
-    isRefused: isRefusal(nextStep.code),
-  };
-}
-
-export function summarise(evaluation: Evaluation, hasReadings: boolean, system: UnitSystem): ResultSummary {
-  const { result, failed, faults } = evaluation;
-  if (failed) return bareSummary(words.failed);
-  if (!result) return bareSummary(faults.length > 0 ? words.needsMending(faults.length) : words.noSetup);
-  if (!hasReadings) return beforeReadings(result, system);
-  const { nextStep } = result.overall;
-  const { notYet, step } = nextStepLines(nextStep, system);
-  const reason = decidingReason(result);
-  const headline = overallHeadline(result, system);
-  const leading = leadingCriterion(result);
-  const leadingName = leading ? criterionName(leading.criterion) : '';
-  return {
-    headline,
-    notYet,
-    step: firstSentence(step),
-    reason: reasonToSay(reason, result, system),
-    place: placeOfStep(nextStep.code, reason),
-    isRefused: isRefusal(nextStep.code),
-    isStop: result.overall.finding === 'stop',
-    leading,
-    leadingName: headline.startsWith(leadingName) ? '' : leadingName,
-  };
-}

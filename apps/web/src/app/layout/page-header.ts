@@ -4,12 +4,13 @@ import { checkPageWords, looseChecksWords } from '@chargewright/wording';
 import { LooseChecks } from '../loose-checks/loose-checks';
 import { BrandMark } from './brand-mark';
 import { Glyph } from './glyph';
+import { PageMenu } from './page-menu';
 import { UnitsChoice } from './units-choice';
 
 /** The frame's upper edge: where one is, the checks on this phone, the units. */
 @Component({
   selector: 'app-page-header',
-  imports: [BrandMark, Glyph, RouterLink, UnitsChoice],
+  imports: [BrandMark, Glyph, PageMenu, RouterLink, UnitsChoice],
   template: `
     <a class="home" routerLink="/" [attr.aria-label]="words.home">
       <app-brand-mark />
@@ -22,6 +23,11 @@ import { UnitsChoice } from './units-choice';
       }
     </a>
     <app-units-choice />
+    @defer (on idle) {
+      <app-page-menu />
+    } @placeholder {
+      <span class="menu-room"></span>
+    }
   `,
   styleUrl: './page-header.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,7 +1,7 @@
 /** Airflow before charge, per edition: every cell of the table, and its limits. */
 import { describe, expect, it } from 'vitest';
 import type { ReasonCode } from '../codes';
-import type { ProcedureId } from '../procedure';
+import type { ProcedureId } from '../procedure-ids';
 import type { EvaluationRequest } from '../request';
 import { provedFor2019 } from '../testing/exact-systems';
 import type { Changes, ReadingChanges } from '../testing/healthy-systems';

@@ -1,7 +1,7 @@
 /** For specs: two healthy systems as a technician would type them, each changed only in what a case is about. */
 import { evaluateCheck } from '../evaluate-check';
 import type { CheckInput } from '../input';
-import type { ProcedureId } from '../procedure';
+import type { ProcedureId } from '../procedure-ids';
 import type { EvaluationRequest, ReadingInput, ReadingsInput, ReadingUnit, SetupInput, VisitInput } from '../request';
 import type { ReadingId } from '../readings';
 import { readRequest } from '../read-request';
