@@ -1,6 +1,7 @@
 import { computed, Injectable, signal } from '@angular/core';
 import type { CheckDraft } from '../loose-checks/check-draft';
-import type { evaluateDraft, Evaluation } from './evaluate-draft';
+import type { evaluateDraft } from './evaluate-draft';
+import { NOTHING, type Evaluation } from './evaluation';
 import type { summarise } from './summarise';
 
 /** What `judging.ts` passes on. */
@@ -8,9 +9,6 @@ interface Judging {
   readonly evaluateDraft: typeof evaluateDraft;
   readonly summarise: typeof summarise;
 }
-
-/** Before the judging part has come, or where it could not. */
-const NOTHING: Evaluation = { problems: new Map(), faults: [], result: null, failed: false };
 
 /** The engine's judgement and its sentences: half of the page's weight, and wanted only once a system is set up, so fetched after the first paint. */
 @Injectable({ providedIn: 'root' })

@@ -4,7 +4,7 @@ import { checkPageWords, faultText, readingWords, setupWords, type UnitSystem } 
 import type { CheckDraft, FieldKey, TypedField, TypedValue } from '../loose-checks/check-draft';
 import { canBeNegative, systemOfUnit, unitsOf } from '../quantities/field-units';
 import type { NumberProblem } from '../quantities/parse-number';
-import type { Evaluation } from './evaluate-draft';
+import type { Evaluation } from './evaluation';
 import { pathOf, valueIn } from './field-key';
 import { ageSeconds } from './request-from-draft';
 

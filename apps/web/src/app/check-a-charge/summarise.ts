@@ -9,7 +9,7 @@ import {
   reasonText,
   type UnitSystem,
 } from '@chargewright/wording';
-import type { Evaluation } from './evaluate-draft';
+import type { Evaluation } from './evaluation';
 import { firstSentence } from './first-sentence';
 import { isRefusal, placeOfStep } from './next-step-place';
 import { bareSummary, type ResultSummary } from './result-summary';
