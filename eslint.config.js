@@ -25,7 +25,7 @@ const ENGINE_LAYERS = [
   ['methods'],
   ['steadiness', 'diagnosis'],
   ['check'],
-  ['worked-examples'],
+  ['training'],
 ];
 
 const layer = (name) => `engine-${name}`;
@@ -46,7 +46,7 @@ const elements = [
 ];
 
 const files = [
-  { category: 'engine-door', pattern: 'packages/engine/src/index.ts' },
+  { category: 'engine-door', pattern: 'packages/engine/src/{index,training/index}.ts' },
   { category: 'engine-errors', pattern: 'packages/engine/src/{errors,result}.ts' },
   { category: 'wording-door', pattern: 'packages/wording/src/index.ts' },
   { category: 'contract-door', pattern: 'packages/contract/src/*.ts' },

@@ -5,6 +5,7 @@ import * as airSide from './methods/air-side';
 import * as cyclePoints from './methods/cycle-points';
 import { SUPERHEAT_CHART_A } from './methods/data/superheat-chart-a';
 import * as targets from './methods/targets';
+import * as training from './training/index';
 
 const text = readFileSync(new URL('../NOMENCLATURE.md', import.meta.url), 'utf8');
 
@@ -40,6 +41,11 @@ describe('NOMENCLATURE.md', () => {
     const exported = Object.keys(engine).sort();
     expect(exported.length).toBeGreaterThan(50);
     expect([...named((section) => section.startsWith('Exports'))].sort()).toEqual(exported);
+  });
+
+  it('lists what the door of teaching exports', () => {
+    const listed = named((section) => section.startsWith('Teaching'));
+    expect([...listed].sort()).toEqual(Object.keys(training).sort());
   });
 
   it('lists every reading and every derived quantity', () => {

@@ -3,12 +3,12 @@
  */
 import type { Result } from '../result';
 import { attempt } from '../result';
-import { differenceToK, temperatureFromK } from '../units';
 import type { Chart } from './chart';
 import { chartValueK } from './chart';
 import { SUPERHEAT_CHART_A } from './data/superheat-chart-a';
 import { SUPERHEAT_CHART_B } from './data/superheat-chart-b';
 import { SUPERHEAT_TABLE_FINER } from './data/superheat-table-finer';
+import { shortFormulaK } from './short-formula';
 
 export const TARGET_COMPARISON_IDS = ['makers-chart-a', 'makers-chart-b', 'finer-table', 'short-formula'] as const;
 export type TargetComparisonId = (typeof TARGET_COMPARISON_IDS)[number];
@@ -58,9 +58,3 @@ const fromChart = (id: TargetComparisonId, chart: Chart, at: TargetConditions): 
 
 const valueAt = (chart: Chart, { wetBulbK, outdoorK }: TargetConditions): number =>
   chartValueK(chart, { rowK: outdoorK, columnK: wetBulbK });
-
-function shortFormulaK({ wetBulbK, outdoorK }: TargetConditions): number {
-  const wetBulbF = temperatureFromK(wetBulbK, 'degF');
-  const outdoorF = temperatureFromK(outdoorK, 'degF');
-  return differenceToK((3 * wetBulbF - 80 - outdoorF) / 2, 'deltaF');
-}

@@ -1,0 +1,22 @@
+import { deriveQuantities } from '../../check/derived-quantities';
+import type { DerivedQuantities } from '../../check/derived-quantities';
+import { evaluateCheck } from '../../check/evaluate-check';
+import type { CheckInput } from '../../check/input';
+import { readRequest } from '../../check/read-request';
+import type { EvaluationRequest } from '../../check/request';
+import type { CheckResult } from '../../check/result';
+
+/** A request with all that comes of it, also what a result leaves out. */
+export interface JudgedRequest {
+  readonly input: CheckInput;
+  readonly derived: DerivedQuantities;
+  readonly result: CheckResult;
+}
+
+/** Requests of the catalogue can be read: a fault is a mistake in it. */
+export function judgeRequest(request: EvaluationRequest): JudgedRequest {
+  const read = readRequest(request);
+  if (!read.ok) throw new RangeError(`an example cannot be read: ${JSON.stringify(read.faults)}`);
+  const { input } = read;
+  return { input, derived: deriveQuantities(input.setup, input.readings), result: evaluateCheck(input) };
+}
