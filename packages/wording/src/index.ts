@@ -23,3 +23,7 @@ export * from './english/check-page';
 export * from './english/loose-checks';
 export * from './english/offline';
 export * from './english/page-menu';
+export * from './english/glance';
+export * from './english/owner';
+export * from './english/target-comparison';
+export * from './owners-text';

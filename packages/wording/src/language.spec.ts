@@ -7,7 +7,10 @@ import { findingPhrases } from './english/findings';
 import { looseChecksWords } from './english/loose-checks';
 import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
+import { glanceWords } from './english/glance';
 import { offlineWords } from './english/offline';
+import { ownerWords } from './english/owner';
+import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
@@ -39,6 +42,9 @@ const english: Language = {
   looseChecks: looseChecksWords,
   offline: offlineWords,
   pageMenu: pageMenuWords,
+  glance: glanceWords,
+  owner: ownerWords,
+  targetComparison: targetComparisonWords,
 };
 
 describe('a language', () => {

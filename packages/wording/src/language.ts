@@ -18,6 +18,9 @@ import type { checkPageWords } from './english/check-page';
 import type { looseChecksWords } from './english/loose-checks';
 import type { offlineWords } from './english/offline';
 import type { pageMenuWords } from './english/page-menu';
+import type { glanceWords } from './english/glance';
+import type { ownerWords } from './english/owner';
+import type { targetComparisonWords } from './english/target-comparison';
 import type { readingHelp } from './english/reading-help';
 import type { procedureWords } from './english/procedures';
 import type { readingWords } from './english/readings';
@@ -93,4 +96,7 @@ export interface Language {
   readonly looseChecks: typeof looseChecksWords;
   readonly offline: typeof offlineWords;
   readonly pageMenu: typeof pageMenuWords;
+  readonly glance: typeof glanceWords;
+  readonly owner: typeof ownerWords;
+  readonly targetComparison: typeof targetComparisonWords;
 }

@@ -2,7 +2,9 @@ import { PREFLIGHT_ITEMS, PROCEDURES, READING_IDS } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
 import { checkPageWords } from './english/check-page';
 import { looseChecksWords } from './english/loose-checks';
+import { glanceWords } from './english/glance';
 import { offlineWords } from './english/offline';
+import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
@@ -26,6 +28,8 @@ const roots = Object.entries({
   looseChecks: looseChecksWords,
   offline: offlineWords,
   pageMenu: pageMenuWords,
+  glance: glanceWords,
+  targetComparison: targetComparisonWords,
   readings: readingWords,
   readingHelp,
   safety: safetyWords,

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { differenceFromK, temperatureToK } from '../units';
-import { compareTargets, TARGET_COMPARISON_IDS } from './target-comparison';
+import { compareSplitTargets, compareTargets, SPLIT_COMPARISON_IDS, TARGET_COMPARISON_IDS } from './target-comparison';
 
 const at = (outdoorF: number, wetBulbF: number) =>
   compareTargets({ outdoorK: temperatureToK(outdoorF, 'degF'), wetBulbK: temperatureToK(wetBulbF, 'degF') });
@@ -30,5 +30,28 @@ describe('targets side by side', () => {
     expect(compared.at(-1)?.source).toBe('Common practice, no source');
     expect(compared[2]?.source).toContain('from memory');
     expect(new Set(compared.map(({ source }) => source)).size).toBe(4);
+  });
+});
+
+describe('target splits side by side', () => {
+  const splits = (dryBulbF: number, wetBulbF: number) =>
+    compareSplitTargets({ dryBulbK: temperatureToK(dryBulbF, 'degF'), wetBulbK: temperatureToK(wetBulbF, 'degF') });
+  const print = ({ target }: ReturnType<typeof splits>[number]): number | string =>
+    target.ok ? Math.round(differenceFromK(target.value, 'deltaF') * 1e6) / 1e6 : String(target.error.details.reason);
+
+  // the table's cells are from memory, the chart's printed in figure 18 of the maker's instructions
+  it.each([
+    [76, 63, 19.2, 19],
+    [80, 67, 18.3, 18],
+    [75, 62, 19.3, 19.5],
+    [82, 67, 19.3, 'outside-chart'],
+  ])('at %i °F and %i °F wet bulb', (dryBulbF, wetBulbF, table, chart) => {
+    expect(splits(dryBulbF, wetBulbF).map(print)).toEqual([table, chart]);
+  });
+
+  it('say which was read and which is from memory', () => {
+    const compared = splits(76, 63);
+    expect(compared.map(({ id }) => id)).toEqual([...SPLIT_COMPARISON_IDS]);
+    expect(compared.map(({ standing }) => standing)).toEqual(['memory', 'read']);
   });
 });

@@ -23,6 +23,7 @@ import { readingKey, typedKey } from './field-key';
 import { afterPaint } from '../loose-checks/after-paint';
 import { FindingAnnouncer } from './finding-announcer';
 import { goToControl } from './next-step-place';
+import { Glance } from './glance';
 import { Judge } from './judge';
 import { loadLaterParts } from './later-parts';
 import { PageClock } from './page-clock';
@@ -76,6 +77,7 @@ const isTextField = (target: EventTarget | null): boolean =>
   selector: 'app-check-a-charge-page',
   imports: [
     FindingAnnouncer,
+    Glance,
     InstallButton,
     NetworkNote,
     Preflight,
@@ -122,6 +124,8 @@ export class CheckAChargePage {
     computation: () => !untracked(this.isSetUp),
   });
   protected readonly fieldInUse = signal(false);
+  /** One number fills the screen. */
+  protected readonly glancing = signal(false);
   private readonly exampleCleared = linkedSignal<string, string | undefined>({
     source: this.checkId,
     computation: () => undefined,
@@ -147,6 +151,11 @@ export class CheckAChargePage {
   });
 
   protected readonly evaluation = computed(() => this.judge.evaluate(this.settled(), this.clock.nowMs()));
+  /** Input and result of one judgement, together or not at all. */
+  protected readonly judged = computed(() => {
+    const { input, result } = this.evaluation();
+    return input && result && { input, result };
+  });
   private readonly pageState = computed<PageState>(() => ({
     draft: this.draft(),
     evaluation: this.evaluation(),

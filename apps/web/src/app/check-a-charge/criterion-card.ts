@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
-import type { CheckResult, CriterionResult } from '@chargewright/engine';
+import type { CheckInput, CheckResult, CriterionResult } from '@chargewright/engine';
 import {
   checkPageWords,
   criterionDetail,
@@ -7,25 +7,29 @@ import {
   criterionParts,
   findingWord,
   formatFigure,
+  targetComparisonWords,
   type UnitSystem,
 } from '@chargewright/wording';
 import { MathLines } from './math-lines';
+import { comparedTargets, SourceComparison } from './source-comparison';
 import { ToleranceRuler } from './tolerance-ruler';
 
 /** One thing judged: a sentence, the picture, the numbers. */
 @Component({
   selector: 'app-criterion-card',
-  imports: [MathLines, ToleranceRuler],
+  imports: [MathLines, SourceComparison, ToleranceRuler],
   templateUrl: './criterion-card.html',
   styleUrl: './criterion-card.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class CriterionCard {
+  readonly input = input.required<CheckInput>();
   readonly result = input.required<CheckResult>();
   readonly criterion = input.required<CriterionResult>();
   readonly system = input.required<UnitSystem>();
 
   protected readonly open = signal(false);
+  protected readonly comparing = signal(false);
 
   protected readonly words = checkPageWords.result;
   protected readonly ruler = checkPageWords.ruler;
@@ -40,6 +44,16 @@ export class CriterionCard {
   protected readonly plusMinus = computed(() => criterionParts(this.criterion(), this.system()).plusMinus);
   protected readonly hasMath = computed(() => this.criterion().actual !== null || this.criterion().target !== null);
   protected readonly mathId = computed(() => `math-${this.criterion().criterion}`);
+
+  protected readonly comparison = targetComparisonWords;
+  protected readonly canCompare = computed(
+    () => comparedTargets(this.criterion(), this.input(), this.result()).length > 0,
+  );
+  protected readonly comparisonId = computed(() => `comparison-${this.criterion().criterion}`);
+
+  protected toggleComparison(): void {
+    this.comparing.update((comparing) => !comparing);
+  }
 
   protected toggleMath(): void {
     this.open.update((open) => !open);

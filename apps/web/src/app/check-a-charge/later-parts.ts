@@ -4,6 +4,7 @@
  */
 export const loadLaterParts = (): Promise<unknown> =>
   Promise.allSettled([
+    import('./glance'),
     import('./preflight'),
     import('./result-column'),
     import('./tolerance-ruler'),

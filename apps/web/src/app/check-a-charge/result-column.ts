@@ -1,26 +1,38 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import type { CheckResult } from '@chargewright/engine';
-import { cautionText, checkPageWords, safetyWords, stopText, type UnitSystem } from '@chargewright/wording';
+import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import type { CheckInput, CheckResult } from '@chargewright/engine';
+import {
+  cautionText,
+  checkPageWords,
+  glanceWords,
+  safetyWords,
+  stopText,
+  type UnitSystem,
+} from '@chargewright/wording';
 import { Glyph } from '../layout/glyph';
 import { CriterionCard } from './criterion-card';
 import { NextStepNote } from './next-step-note';
+import { OwnersNote } from './owners-note';
 import type { ResultSummary } from './result-summary';
 
 /** The whole result: stops, the sentence, the next step, what to keep in mind, and each criterion. */
 @Component({
   selector: 'app-result-column',
-  imports: [CriterionCard, Glyph, NextStepNote],
+  imports: [CriterionCard, Glyph, NextStepNote, OwnersNote],
   templateUrl: './result-column.html',
   styleUrl: './result-column.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ResultColumn {
+  readonly input = input.required<CheckInput>();
   readonly summary = input.required<ResultSummary>();
   readonly result = input.required<CheckResult>();
   readonly system = input.required<UnitSystem>();
   readonly hasReadings = input.required<boolean>();
 
+  readonly glanced = output<void>();
+
   protected readonly words = checkPageWords.result;
+  protected readonly glance = glanceWords;
   protected readonly limits = safetyWords.limits;
   protected readonly stops = computed(() =>
     this.result().overall.stops.map((stop) => ({ code: stop.code, text: stopText(stop, this.system()) })),

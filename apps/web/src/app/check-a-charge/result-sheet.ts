@@ -11,7 +11,7 @@ import {
   signal,
 } from '@angular/core';
 import type { CheckResult } from '@chargewright/engine';
-import { checkPageWords, type UnitSystem } from '@chargewright/wording';
+import { checkPageWords, glanceWords, type UnitSystem } from '@chargewright/wording';
 import { Glyph } from '../layout/glyph';
 import { MathLines } from './math-lines';
 import type { ResultSummary } from './result-summary';
@@ -46,10 +46,12 @@ export class ResultSheet {
 
   readonly goNext = output<void>();
   readonly mainPressed = output<void>();
+  readonly glanced = output<void>();
 
   protected readonly open = signal(false);
 
   protected readonly words = checkPageWords.result;
+  protected readonly glance = glanceWords;
   protected readonly hasMath = computed(() => this.result() !== null && this.summary().leading !== null);
 
   constructor() {

@@ -9,22 +9,11 @@ import {
   input,
   signal,
 } from '@angular/core';
-import type { CriterionResult, Finding } from '@chargewright/engine';
+import type { CriterionResult } from '@chargewright/engine';
 import { checkPageWords, criterionParts, formatFigure, rulerText, type UnitSystem } from '@chargewright/wording';
 import { isClear, placePair, rulerGeometry, type RulerLabel } from './ruler-geometry';
+import { markOf } from './ruler-mark';
 import { rulerValues } from './ruler-scale';
-
-export type RulerMark = 'diamond' | 'circle' | 'hollow' | 'dash';
-
-/** Shape carries the finding; colour only supports it. */
-const MARKS: Readonly<Record<Finding, RulerMark>> = {
-  above: 'diamond',
-  below: 'diamond',
-  within: 'circle',
-  'too-close-to-call': 'hollow',
-  'not-verifiable': 'dash',
-  'not-judged': 'dash',
-};
 
 const VALUE_PX = 16;
 const LABEL_PX = 13;
@@ -46,7 +35,7 @@ export class ToleranceRuler {
 
   protected readonly words = checkPageWords.ruler;
   protected readonly text = computed(() => rulerText(this.result(), this.system()));
-  protected readonly mark = computed(() => MARKS[this.result().finding]);
+  protected readonly mark = computed(() => markOf(this.result().finding));
   protected readonly geometry = computed(() => {
     const values = rulerValues(this.result());
     return values && rulerGeometry(values, this.width());
