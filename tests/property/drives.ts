@@ -6,6 +6,7 @@ import fc from 'fast-check';
 import type { ProcedureId, RefrigerantId } from '@chargewright/engine';
 import {
   AIRFLOW_PATHS,
+  BULB_STATES,
   COMMON_REFRIGERANT_IDS,
   HIGH_SIDE_PORTS,
   LEAK_SEARCHES,
@@ -18,6 +19,7 @@ import {
   REFRIGERANT_IDS,
   STAGES,
   SYSTEM_KINDS,
+  VALVE_MOVES,
 } from '@chargewright/engine';
 
 const STEPS = 1_000_000;
@@ -44,6 +46,13 @@ const defaulted = <T>(common: T, others: readonly T[]): fc.Arbitrary<T | undefin
 
 export type HumidityBy = 'wet-bulb' | 'humidity' | 'both' | 'contradicting' | 'damp-wick' | 'nothing';
 export type Written = 'right' | 'other-column' | 'far';
+/** Outdoor coil over the air, indoor coil over the outdoor one, and saturation over the outdoor coil of the standing system. */
+export interface Standing {
+  readonly outdoorCoilOverAirF: number;
+  readonly coilsApartF: number;
+  readonly excessF: number;
+  readonly shutIn: boolean | undefined;
+}
 export type Earlier = 'steady' | 'moved' | 'falling' | 'drifting';
 export type Accuracy = 'assumed' | 'stated' | 'tight' | 'poor' | 'coverage-2' | 'exact';
 
@@ -78,6 +87,13 @@ const preflight = fc.dictionary(
     noNullPrototype: true,
   },
 );
+
+const standing: fc.Arbitrary<Standing> = fc.record({
+  outdoorCoilOverAirF: between(-1, 1),
+  coilsApartF: mixed([2, between(-2.5, 2.5)], [1, between(-20, 5)]),
+  excessF: mixed([2, between(-1, 1)], [2, between(3.5, 15)], [1, between(-15, 15)]),
+  shutIn: oneOf([true, false, undefined]),
+});
 
 /** Every drive by name; a scenario replaces some of them to reach what chance alone would not. */
 export const DRIVES = {
@@ -130,6 +146,12 @@ export const DRIVES = {
   writtenEvaporating: sometimes(12, oneOf<Written>(['right', 'other-column', 'far'])),
   writtenCondensing: sometimes(12, oneOf<Written>(['right', 'other-column', 'far'])),
   electrical: sometimes(5, between(1, 20)),
+  expectedCurrentA: sometimes(5, between(4, 20)),
+  wetBulbBeforeF: sometimes(10, usual(between(-0.9, 0.9), between(-4, 4))),
+  drierDropF: sometimes(10, mixed([2, between(-1, 1.5)], [1, between(1.5, 4.5)], [2, between(4.5, 20)])),
+  standing: sometimes(10, standing),
+  bulb: sometimes(10, oneOf(BULB_STATES)),
+  valve: sometimes(5, oneOf(VALVE_MOVES)),
   staticPressureInH2O: sometimes(5, between(-1, 1)),
 
   accuracy: mixed<Accuracy>([6, fc.constant('assumed')], [4, oneOf(['tight', 'poor', 'coverage-2', 'exact'] as const)]),

@@ -80,6 +80,7 @@ function readingsOf(drives: Drives, site: Site): SiReadings {
     ...airSide(drives, wetBulbK),
     ...refrigerantSide(drives, site, wetBulbK),
     ...otherReadings(drives),
+    ...testReadings(drives, wetBulbK),
   };
   for (const id of drives.leftOut) delete values[id];
   const readings: SiReadings = {};
@@ -122,6 +123,29 @@ function otherReadings(drives: Drives): Partial<Record<ReadingId, number>> {
     returnStaticPressure: staticPressureInH2O,
     supplyStaticPressure: mapped(staticPressureInH2O, (inches) => -inches),
     dischargeLineTemperature: mapped(dischargeLineF, kelvin),
+  });
+}
+
+/** What the separating tests measure. */
+function testReadings(drives: Drives, wetBulbK: number): Partial<Record<ReadingId, number>> {
+  const { refrigerant, wetBulbBeforeF, drierDropF, standing } = drives;
+  const outdoorK = kelvin(drives.outdoorF);
+  const outdoorCoilK = standing && outdoorK + difference(standing.outdoorCoilOverAirF);
+  const drierInletK = outdoorK + difference(8);
+  return defined({
+    returnWetBulbBefore: mapped(wetBulbBeforeF, (before) => wetBulbK + difference(before)),
+    drierInletTemperature: mapped(drierDropF, () => drierInletK),
+    drierOutletTemperature: mapped(drierDropF, (drop) => drierInletK - difference(drop)),
+    standingPressure: mapped(standing, ({ excessF }) =>
+      bubblePressurePa({
+        refrigerant,
+        temperatureK: onCurve(refrigerant, (outdoorCoilK ?? outdoorK) + difference(excessF)),
+      }),
+    ),
+    standingOutdoorCoilTemperature: outdoorCoilK,
+    standingIndoorCoilTemperature: mapped(standing, ({ coilsApartF }) =>
+      outdoorCoilK === undefined ? outdoorK : outdoorCoilK + difference(coilsApartF),
+    ),
   });
 }
 

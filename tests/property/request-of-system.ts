@@ -112,6 +112,7 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
       highVelocity: drives.highVelocity,
       airflowPath: drives.airflowPath,
       factoryCharge: mapped(drives.factoryChargeLb, (pounds) => mass(pounds, unitSystem)),
+      expectedCompressorCurrent: mapped(drives.expectedCurrentA, (value) => ({ value, unit: 'A' as const })),
       maxHighPressure: mapped(drives.maxHighPressurePsi, (psi) => ({
         value: pressureDifferenceFromPa(pressureDifferenceToPa(psi, 'psi'), unit.pressureDifference),
         unit: unit.pressure,
@@ -142,6 +143,7 @@ function visitIn({ drives }: PlausibleSystem, unitSystem: UnitSystem): VisitInpu
     hoursOff: drives.hoursOff,
     headRaised: drives.headRaised,
     iceSeen: drives.iceSeen,
+    tests: defined({ liquidShutIn: drives.standing?.shutIn, bulb: drives.bulb, valve: drives.valve }),
   });
 }
 

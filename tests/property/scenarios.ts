@@ -33,6 +33,10 @@ const CLEAR: Overrides = {
   targetSubcoolingPort: always(undefined),
   superheatRangeF: always(undefined),
   earlier: always(undefined),
+  wetBulbBeforeF: always(undefined),
+  drierDropF: always(undefined),
+  standing: always(undefined),
+  bulb: always(undefined),
 };
 
 /** All that the certificates of 2019 ask for. */
@@ -84,6 +88,15 @@ const SCENARIOS: readonly Overrides[] = [
     superheatMarginF: between(8, 12),
     targetSubcoolingF: always(undefined),
     subcoolingMarginF: between(-4.6, -2.4),
+  },
+  // the same with a separating test made: nothing over the drier, then a valve that starves or floods with its bulb in order
+  { ...ORIFICE, superheatMarginF: between(8, 12), subcoolingMarginF: between(2, 8), drierDropF: between(-0.5, 0.5) },
+  { ...VALVE, superheatMarginF: between(16, 22), subcoolingMarginF: between(-1, 1), drierDropF: between(-0.5, 0.5) },
+  {
+    ...VALVE,
+    superheatMarginF: between(-9.6, -8.9),
+    subcoolingMarginF: between(-8, 1),
+    bulb: always('right' as const),
   },
   // the certificates of 2019 complete, and short of one thing each
   { ...VALVE, ...PROVED },

@@ -4,6 +4,7 @@ import * as engine from './index';
 import * as airSide from './methods/air-side';
 import * as cyclePoints from './methods/cycle-points';
 import { SUPERHEAT_CHART_A } from './methods/data/superheat-chart-a';
+import * as separatingTests from './methods/separating-tests';
 import * as targets from './methods/targets';
 import * as training from './training/index';
 
@@ -59,6 +60,8 @@ describe('NOMENCLATURE.md', () => {
       ...Object.values(airSide),
       ...Object.values(targets),
       ...Object.values(cyclePoints),
+      ...Object.values(separatingTests),
+      separatingTests.standingSaturation('R-22'),
       cyclePoints.absolutePressure('suctionPressure'),
       cyclePoints.evaporatingDewTemperature('R-22'),
       targets.targetSuperheat(SUPERHEAT_CHART_A),

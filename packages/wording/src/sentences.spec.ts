@@ -45,6 +45,8 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   evaporating: temperature(27),
   condensing: temperature(150),
   discharge: temperature(230),
+  before: temperature(64),
+  after: temperature(67),
   written: temperature(45),
   computed: temperature(40),
   suction: { kind: 'pressurePa', value: 1e6 },

@@ -7,6 +7,7 @@ import { chartValueK } from '../../../packages/engine/src/methods/chart';
 import * as cyclePoints from '../../../packages/engine/src/methods/cycle-points';
 import { SPLIT_TABLE } from '../../../packages/engine/src/methods/data/split-table';
 import { SUPERHEAT_CHART_A } from '../../../packages/engine/src/methods/data/superheat-chart-a';
+import * as separatingTests from '../../../packages/engine/src/methods/separating-tests';
 import * as targets from '../../../packages/engine/src/methods/targets';
 import {
   moistAirFromDryBulbAndRelativeHumidity,
@@ -60,6 +61,11 @@ const RANGES: Readonly<Record<string, readonly [low: number, high: number]>> = {
   T_wb: [291, 294],
   RH: [0.1, 1],
   W: [0.004, 0.01],
+  T_before: [300, 310],
+  T_after: [295, 310],
+  p_standing: [8e5, 1.6e6],
+  T_standing: [295, 310],
+  T_coil: [295, 310],
   actual: [0, 20],
   target: [0, 20],
 };
@@ -77,6 +83,10 @@ const FORMULAS: readonly Formula[] = [
   airSide.returnHumidityRatio,
   airSide.returnRelativeHumidity,
   airSide.returnEnthalpy,
+  separatingTests.drierDrop,
+  separatingTests.standingSaturation(REFRIGERANT),
+  separatingTests.standingExcess,
+  separatingTests.bracketedWetBulb,
   targets.targetSuperheat(SUPERHEAT_CHART_A),
   targets.targetTemperatureSplit,
   targets.deviation('superheat', 'differenceK'),
@@ -90,7 +100,7 @@ describe('the list', () => {
     const refrigerant = (value: unknown): unknown =>
       // a formula of one refrigerant, reading or criterion is a function of it
       typeof value === 'function' ? attempt(() => (value as (x: string) => unknown)(REFRIGERANT)) : value;
-    const ids = [cyclePoints, airSide, targets]
+    const ids = [cyclePoints, airSide, separatingTests, targets]
       .flatMap((module) => Object.values(module).map(refrigerant))
       .filter(isFormula)
       .map(({ text }) => text);

@@ -32,4 +32,5 @@ export const pressure = amount(PRESSURE_UNITS).meta({
 export const length = amount(LENGTH_UNITS).meta({ id: 'Length' });
 export const flow = amount(FLOW_UNITS).meta({ id: 'Airflow' });
 export const power = amount(POWER_UNITS).meta({ id: 'Capacity' });
+export const current = amount(['A']);
 export const mass = amount(MASS_UNITS).meta({ id: 'Mass' });

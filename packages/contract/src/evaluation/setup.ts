@@ -2,7 +2,7 @@ import { AIRFLOW_PATHS, HIGH_SIDE_PORTS, METERING_DEVICES, MODES, STAGES, SYSTEM
 import type { SetupInput } from '@chargewright/engine';
 import * as z from 'zod';
 import { object } from '../parsing/object';
-import { DIFFERENCE_UNITS_GIVEN, difference, flow, length, mass, power, pressure } from '../amounts/amounts';
+import { current, DIFFERENCE_UNITS_GIVEN, difference, flow, length, mass, power, pressure } from '../amounts/amounts';
 import { LONGEST_TEXT } from './readings';
 
 const required = {
@@ -39,6 +39,9 @@ const optional = {
     z.enum(AIRFLOW_PATHS).meta({ description: 'A way that some procedures permit in place of measured airflow.' }),
   ),
   factoryCharge: z.exactOptional(mass),
+  expectedCompressorCurrent: z.exactOptional(
+    current.meta({ description: 'By the maker’s data at these conditions, or of this unit when it was right.' }),
+  ),
   maxHighPressure: z.exactOptional(pressure),
   chargeMode: z.exactOptional(z.boolean()),
   makersChart: z.exactOptional(

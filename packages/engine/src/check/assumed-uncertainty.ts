@@ -13,17 +13,16 @@ const SUCTION_LIMIT_PA = pressureDifferenceToPa(2, 'psi');
 const LIQUID_LIMIT_PA = pressureDifferenceToPa(4, 'psi');
 const HUMIDITY_LIMIT = 0.03;
 const AIRFLOW_LIMIT_FRACTION = 0.07;
+const CURRENT_LIMIT_FRACTION = 0.03;
 
 /** Readings that enter a computation. The others are kept with the check. */
-export type UsedReadingId = Exclude<
-  ReadingId,
-  'returnStaticPressure' | 'supplyStaticPressure' | 'compressorCurrent' | 'lineVoltage'
->;
+export type UsedReadingId = Exclude<ReadingId, 'returnStaticPressure' | 'supplyStaticPressure' | 'lineVoltage'>;
 
 function assumedLimit(id: UsedReadingId, value: number): number {
   switch (id) {
     case 'returnDryBulb':
     case 'returnWetBulb':
+    case 'returnWetBulbBefore':
     case 'supplyDryBulb':
     case 'supplyWetBulb':
     case 'outdoorDryBulb':
@@ -31,6 +30,10 @@ function assumedLimit(id: UsedReadingId, value: number): number {
     case 'suctionLineTemperature':
     case 'liquidLineTemperature':
     case 'dischargeLineTemperature':
+    case 'drierInletTemperature':
+    case 'drierOutletTemperature':
+    case 'standingOutdoorCoilTemperature':
+    case 'standingIndoorCoilTemperature':
       return PIPE_LIMIT_K;
     case 'writtenEvaporatingTemperature':
     case 'writtenCondensingTemperature':
@@ -39,12 +42,15 @@ function assumedLimit(id: UsedReadingId, value: number): number {
       return SUCTION_LIMIT_PA;
     case 'liquidPressure':
     case 'dischargePressure':
+    case 'standingPressure':
       return LIQUID_LIMIT_PA;
     case 'returnRelativeHumidity':
     case 'supplyRelativeHumidity':
       return HUMIDITY_LIMIT;
     case 'airflow':
       return AIRFLOW_LIMIT_FRACTION * Math.abs(value);
+    case 'compressorCurrent':
+      return CURRENT_LIMIT_FRACTION * value;
   }
 }
 
@@ -64,9 +70,10 @@ function statedHalfWidth({ value, unit }: PlusMinus, id: UsedReadingId, reading:
     case 'm3/h':
     case 'L/s':
       return flowToM3PerS(value, unit);
+    case 'A':
+      return value;
     case 'inH2O':
     case 'Pa':
-    case 'A':
     case 'V':
       throw new RangeError(`a ± in ${unit} does not belong to ${id}`);
   }
@@ -87,7 +94,9 @@ export function readingErrorParts(input: {
   const { plusMinus, instrumentId } = reading;
   const half = plusMinus === undefined ? assumedLimit(id, valueSi) : statedHalfWidth(plusMinus, id, valueSi);
   const normal = plusMinus?.kind === 'k2';
-  const key = instrumentId === undefined ? `reading:${id}` : `instrument:${dimension}:${instrumentId}`;
+  // the wet bulb before and the one after are read with one instrument: its error does not average out
+  const own = id === 'returnWetBulbBefore' ? 'returnWetBulb' : id;
+  const key = instrumentId === undefined ? `reading:${own}` : `instrument:${dimension}:${instrumentId}`;
   const parts: ErrorPart[] = [];
   if (half > 0) {
     parts.push({ key, u: normal ? half / 2 : half / Math.sqrt(3), shape: normal ? 'normal' : 'rectangular' });

@@ -1,6 +1,7 @@
 /** What the person should know beside the finding: doubtful readings, assumptions, conditions at the edge. Thresholds: common practice or choice. */
 import type { Quantity } from '../derivation/quantity';
 import { expandedUncertainty, isKnown } from '../derivation/quantity';
+import { bracketWetBulb } from '../methods/separating-tests';
 import { refrigerantFacts } from '../refrigerants/catalogue';
 import type { RefrigerantId } from '../refrigerants/catalogue';
 import { differenceToK, lengthToM, pressureDifferenceToPa } from '../units';
@@ -80,6 +81,7 @@ function coolingCautions(input: CheckInput, derived: DerivedQuantities, airflow:
     ),
     flash(derived),
     dryWick(input, derived),
+    wetBulbMoved(input),
     humidityContradiction(input, derived),
     liquidColderThanAir(input),
     isPullDown(input, derived) ? plain('pull-down') : null,
@@ -135,6 +137,14 @@ function dryWick({ readings }: CheckInput, { returnRelativeHumidity }: DerivedQu
   const damp = readings.returnWetBulb && isKnown(returnRelativeHumidity) && returnRelativeHumidity.value > DAMP_INDOORS;
   const wicks = damp && !equal.includes('returnWetBulb') ? (['returnWetBulb', ...equal] as const) : equal;
   return wicks.length === 0 ? null : { code: 'dry-wick', figures: { readings: { kind: 'readings', value: wicks } } };
+}
+
+/** The wet bulb before and after the readings outdoors: too far apart for a mean. */
+function wetBulbMoved({ readings }: CheckInput): Caution | null {
+  const beforeK = readings.returnWetBulbBefore?.quantity;
+  const afterK = readings.returnWetBulb?.quantity;
+  if (beforeK === undefined || afterK === undefined || bracketWetBulb({ beforeK, afterK }) !== null) return null;
+  return { code: 'wet-bulb-moved', figures: { before: temperature(beforeK.value), after: temperature(afterK.value) } };
 }
 
 /** Both a wet bulb and a relative humidity were given and they disagree by more than their uncertainty; the wet bulb is used. */

@@ -98,6 +98,7 @@ export interface CautionFigures {
   'wrong-column': 'written' | 'computed';
   flash: 'subcooling';
   'dry-wick': 'readings';
+  'wet-bulb-moved': 'before' | 'after';
   'humidity-contradiction': 'measured' | 'fromHumidity';
   'liquid-colder-than-air': 'liquid' | 'outdoor';
   'pull-down': never;
@@ -174,8 +175,12 @@ export interface NextStepFigures {
   // data quality
   'confirm-refrigerant': never;
   'wet-the-wick': never;
+  'bracket-wet-bulb-again': never;
   'place-liquid-probe-again': never;
   'read-twice': never;
+  // shown by a separating test
+  'recover-air-weigh-in': never;
+  'mend-bulb': never;
   // too close
   'settle-with-another-reading': never;
   'settle-with-better-instrument': never;
@@ -192,8 +197,11 @@ export interface NextStepFigures {
   'find-restriction': never;
   'air-test-then-recover': never;
   'recover-in-steps': never;
+  'check-orifice': never;
   'check-orifice-compressor-condenser': never;
   'check-bulb-and-valve': never;
+  'check-valve': never;
+  'check-bulb-and-screen': never;
   'check-bulb-screen-drier': never;
   'check-bulb-and-airflow': never;
   'find-restriction-recover-nothing': never;

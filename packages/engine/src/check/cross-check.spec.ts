@@ -330,4 +330,5 @@ const UNIT_OF: Readonly<Partial<Record<(typeof READING_IDS)[number], ReadingInpu
   supplyStaticPressure: 'Pa',
   compressorCurrent: 'A',
   lineVoltage: 'V',
+  standingPressure: 'psig',
 };

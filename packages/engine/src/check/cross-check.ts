@@ -47,6 +47,7 @@ function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext
   faults.positive('setup.nominalCapacity', setup.nominalCapacity);
   faults.positive('setup.designAirflow', setup.designAirflow);
   faults.positive('setup.factoryCharge', setup.factoryCharge);
+  faults.positive('setup.expectedCompressorCurrent', setup.expectedCompressorCurrent);
   if (setup.maxHighPressure !== undefined) {
     faults.pressure('setup.maxHighPressure', setup.maxHighPressure, { ...context, criticalPa: Infinity });
   }

@@ -20,6 +20,7 @@ import {
   superheat,
 } from '../methods/cycle-points';
 import type { UsedReadingId } from './assumed-uncertainty';
+import { bracketWetBulb } from '../methods/separating-tests';
 import type { CheckReadings, CheckSetup } from './input';
 
 export interface DerivedQuantities {
@@ -32,7 +33,7 @@ export interface DerivedQuantities {
   readonly subcooling: Quantity;
   readonly temperatureSplit: Quantity;
   readonly condensingOverAmbient: Quantity;
-  /** Measured, else from dry bulb and relative humidity. */
+  /** Measured, once or before and after; else from dry bulb and relative humidity. */
   readonly returnWetBulb: Quantity;
   /** From relative humidity, whether or not a wet bulb was measured too. */
   readonly returnWetBulbFromHumidity: Quantity;
@@ -63,8 +64,7 @@ export function deriveQuantities(setup: CheckSetup, readings: CheckReadings): De
     relativeHumidityRatio: read('returnRelativeHumidity'),
     pressurePa: atmosphere,
   });
-  const wetBulbK =
-    readings.returnWetBulb !== undefined ? read('returnWetBulb') : withoutWetBulb(fromHumidity, readings);
+  const wetBulbK = measuredWetBulb(readings) ?? withoutWetBulb(fromHumidity, readings);
   const humidityRatio = derive(returnHumidityRatio, { dryBulbK, wetBulbK, pressurePa: atmosphere });
 
   return {
@@ -85,6 +85,14 @@ export function deriveQuantities(setup: CheckSetup, readings: CheckReadings): De
     returnRelativeHumidity: derive(returnRelativeHumidity, { dryBulbK, humidityRatio, pressurePa: atmosphere }),
     returnEnthalpy: derive(returnEnthalpy, { dryBulbK, humidityRatio }),
   };
+}
+
+/** As read, or the mean of the readings before and after those outdoors; where the two disagree, the later stands. */
+function measuredWetBulb({ returnWetBulb, returnWetBulbBefore }: CheckReadings): Quantity | undefined {
+  const afterK = returnWetBulb?.quantity;
+  const beforeK = returnWetBulbBefore?.quantity;
+  if (afterK === undefined || beforeK === undefined) return afterK;
+  return bracketWetBulb({ beforeK, afterK }) ?? afterK;
 }
 
 /** Without a humidity reading the wet bulb itself is what to ask for, not the pair that could stand in for it. */

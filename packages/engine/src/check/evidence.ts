@@ -19,10 +19,11 @@ export function readingsBehind(quantities: readonly Known[]): ReadonlySet<Readin
   return found;
 }
 
-/** The readings behind the quantities that are older than the procedure allows, as a reason, or `null`. */
+/** The readings behind the quantities that are older than the procedure allows, as a reason, or `null`. A reading from before is meant to be old. */
 export function staleReason({ procedure, readings }: CheckInput, quantities: readonly Known[]): Reason | null {
   const most = procedure.mostReadingAgeSeconds.value;
   const stale = [...readingsBehind(quantities)].filter((id) => {
+    if (id === 'returnWetBulbBefore') return false;
     const age = readings[id as keyof typeof readings]?.ageSeconds;
     return age !== undefined && age > most;
   });

@@ -14,6 +14,7 @@ import type {
   PreflightState,
   Stage,
   SystemKind,
+  TestObservations,
 } from './request';
 
 export interface CheckReading {
@@ -47,6 +48,7 @@ export interface CheckSetup {
   readonly highVelocity: boolean;
   readonly airflowPath?: AirflowPath;
   readonly factoryChargeKg?: number;
+  readonly expectedCompressorCurrentA?: number;
   /** Absolute. */
   readonly maxHighPressurePa?: number;
   readonly chargeMode?: boolean;
@@ -67,6 +69,7 @@ export interface CheckVisit {
   readonly hoursOff: number;
   readonly headRaised: boolean;
   readonly iceSeen: boolean;
+  readonly tests: TestObservations;
   readonly earlier?: { readonly minutesAgo: number; readonly readings: CheckReadings };
 }
 

@@ -1,9 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import type { Known } from '../derivation/quantity';
-import { PA_PER_PSI } from '../units';
+import { isKnown } from '../derivation/quantity';
+import { PA_PER_PSI, temperatureFromK } from '../units';
 import type { UsedReadingId } from './assumed-uncertainty';
 import type { CheckInput } from './input';
 import type { PlusMinus, ReadingInput } from './request';
+import { deriveQuantities } from './derived-quantities';
 import { inputOf, orificeRequest, valveRequest } from './testing/healthy-systems';
 import type { Changes } from './testing/healthy-systems';
 
@@ -253,6 +255,38 @@ describe('setup and visit', () => {
     expect(visit.earlier?.readings.suctionPressure?.quantity.value).toBe(now.suctionPressure?.quantity.value);
   });
 
+  it('keeps what the separating tests measured and showed', () => {
+    const { readings, visit, setup } = inputOf(
+      valveRequest({
+        setup: { expectedCompressorCurrent: { value: 12, unit: 'A' } },
+        visit: { tests: { liquidShutIn: true, bulb: 'loose', valve: 'hunting' } },
+        readings: { standingPressure: 250, drierInletTemperature: 95, compressorCurrent: 10 },
+      }),
+    );
+    expect(visit.tests).toEqual({ liquidShutIn: true, bulb: 'loose', valve: 'hunting' });
+    expect(inputOf(valveRequest()).visit.tests).toEqual({});
+    expect(setup.expectedCompressorCurrentA).toBe(12);
+    expect(readings.compressorCurrent?.quantity).toMatchObject({ kind: 'currentA', value: 10 });
+    // ±3 % as a limit
+    expect(readings.compressorCurrent?.quantity.u).toBeCloseTo(0.3 / Math.sqrt(3), 12);
+    expect(readings.standingPressure?.quantity.value).toBeCloseTo(264.695948775513 * PA_PER_PSI, 3);
+    expect(readings.drierInletTemperature?.quantity.u).toBeCloseTo(5 / 9 / Math.sqrt(3), 12);
+  });
+
+  it('takes the mean of two wet bulbs that agree, as no surer than one of them, and the later of two that do not', () => {
+    const wetBulb = (before: number) => {
+      const { setup, readings } = inputOf(orificeRequest({ readings: { returnWetBulbBefore: before } }));
+      return deriveQuantities(setup, readings).returnWetBulb;
+    };
+    const [one, two, apart] = [wetBulb(66), wetBulb(66.9), wetBulb(67.1)];
+    if (!isKnown(one) || !isKnown(two) || !isKnown(apart)) throw new Error('not known');
+    expect(one.u).toBeCloseTo(5 / 9 / Math.sqrt(3), 9);
+    expect(temperatureFromK(two.value, 'degF')).toBeCloseTo(66.45, 9);
+    // one thermometer, and half of the drift as a limit
+    expect(two.u).toBeCloseTo((Math.hypot(1, 0.45) * 5) / 9 / Math.sqrt(3), 6);
+    expect(temperatureFromK(apart.value, 'degF')).toBeCloseTo(66, 9);
+  });
+
   it('keeps age and step with a reading, and leaves out what enters no computation', () => {
     const reading = { value: 52, unit: 'degF', ageSeconds: 30, resolution: 0.9 } as const;
     const { readings } = inputOf(
@@ -270,7 +304,7 @@ describe('setup and visit', () => {
       resolution: expect.closeTo(0.5, 10) as number,
     });
     expect(readings.suctionPressure).not.toHaveProperty('ageSeconds');
-    expect(Object.keys(readings)).not.toContain('compressorCurrent');
-    expect(Object.keys(readings)).toHaveLength(8);
+    expect(Object.keys(readings)).toHaveLength(9);
+    for (const id of ['lineVoltage', 'returnStaticPressure']) expect(Object.keys(readings)).not.toContain(id);
   });
 });

@@ -87,6 +87,7 @@ function readSetup(setup: SetupInput): CheckSetup {
     ...present('nominalCapacityW', convert(setup.nominalCapacity, powerToW)),
     ...present('designAirflowM3PerS', convert(setup.designAirflow, flowToM3PerS)),
     ...present('factoryChargeKg', convert(setup.factoryCharge, massToKg)),
+    ...present('expectedCompressorCurrentA', setup.expectedCompressorCurrent?.value),
     ...present(
       'maxHighPressurePa',
       convert(setup.maxHighPressure, (value, unit) => pressureToPa(value, unit, atmosphere.value)),
@@ -107,6 +108,7 @@ function readVisit(visit: VisitInput, atmosphere: Known): CheckVisit {
     hoursOff: visit.hoursOff ?? 0,
     headRaised: visit.headRaised ?? false,
     iceSeen: visit.iceSeen ?? false,
+    tests: visit.tests ?? {},
     ...present('runningMinutes', visit.runningMinutes),
     ...present(
       'lowestReturn',
@@ -132,7 +134,7 @@ function readReadings(readings: ReadingsInput, atmosphere: Known, prefix: string
 
 const isUsed = (id: (typeof READING_IDS)[number]): id is UsedReadingId => {
   const dimension = READING_DIMENSIONS[id];
-  return dimension !== 'staticPressure' && dimension !== 'current' && dimension !== 'voltage';
+  return dimension !== 'staticPressure' && dimension !== 'voltage';
 };
 
 /** One reading in SI with its uncertainty, absolute where it is a pressure. Its unit fits its dimension. */
@@ -163,8 +165,8 @@ const KIND_OF = {
   humidity: 'fraction',
   airflow: 'flowM3PerS',
   staticPressure: 'pressureDifferencePa',
-  current: 'count',
-  voltage: 'count',
+  current: 'currentA',
+  voltage: 'voltageV',
 } as const satisfies Record<Dimension, string>;
 
 /** The unit fits the dimension: the contract and the page see to it. */

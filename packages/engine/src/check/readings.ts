@@ -23,6 +23,12 @@ export const READING_IDS = [
   'supplyStaticPressure',
   'compressorCurrent',
   'lineVoltage',
+  'returnWetBulbBefore',
+  'drierInletTemperature',
+  'drierOutletTemperature',
+  'standingPressure',
+  'standingOutdoorCoilTemperature',
+  'standingIndoorCoilTemperature',
 ] as const;
 export type ReadingId = (typeof READING_IDS)[number];
 
@@ -47,4 +53,10 @@ export const READING_DIMENSIONS: Readonly<Record<ReadingId, Dimension>> = {
   supplyStaticPressure: 'staticPressure',
   compressorCurrent: 'current',
   lineVoltage: 'voltage',
+  returnWetBulbBefore: 'temperature',
+  drierInletTemperature: 'temperature',
+  drierOutletTemperature: 'temperature',
+  standingPressure: 'pressure',
+  standingOutdoorCoilTemperature: 'temperature',
+  standingIndoorCoilTemperature: 'temperature',
 };

@@ -42,6 +42,12 @@ export const PREFLIGHT_STATES = ['ok', 'not-ok', 'not-checked'] as const;
 export type PreflightState = (typeof PREFLIGHT_STATES)[number];
 export const LEAK_SEARCHES = ['none-found', 'found', 'not-done'] as const;
 export type LeakSearch = (typeof LEAK_SEARCHES)[number];
+/** `loose`: not tight on clean pipe, at the wrong place, or not wrapped. `charge-lost`: warming it in the hand moves nothing. */
+export const BULB_STATES = ['right', 'loose', 'charge-lost'] as const;
+export type BulbState = (typeof BULB_STATES)[number];
+/** `hunting`: superheat swings with a period of a minute or so. */
+export const VALVE_MOVES = ['steady', 'hunting'] as const;
+export type ValveMove = (typeof VALVE_MOVES)[number];
 
 export interface Amount<Unit extends string> {
   readonly value: number;
@@ -99,6 +105,8 @@ export interface SetupInput {
   /** A way that some procedures permit in place of measuring the airflow. */
   readonly airflowPath?: AirflowPath;
   readonly factoryCharge?: Amount<MassUnit>;
+  /** What the compressor draws at these conditions by the maker's data, or drew when this unit was right. */
+  readonly expectedCompressorCurrent?: Amount<'A'>;
   readonly maxHighPressure?: Amount<PressureUnit>;
   /** Whether an inverter runs in the maker's charge mode; leave out for a single-speed unit. */
   readonly chargeMode?: boolean;
@@ -109,6 +117,14 @@ export interface SetupInput {
     readonly lift?: Amount<LengthUnit>;
     readonly included?: Amount<LengthUnit>;
   };
+}
+
+/** What was done and seen in the separating tests; what was measured in them are readings. */
+export interface TestObservations {
+  /** For the standing pressure the liquid was shut into the outdoor coil. */
+  readonly liquidShutIn?: boolean;
+  readonly bulb?: BulbState;
+  readonly valve?: ValveMove;
 }
 
 export interface VisitInput {
@@ -124,6 +140,7 @@ export interface VisitInput {
   readonly hoursOff?: number;
   readonly headRaised?: boolean;
   readonly iceSeen?: boolean;
+  readonly tests?: TestObservations;
   readonly earlier?: { readonly minutesAgo: number; readonly readings: ReadingsInput };
 }
 

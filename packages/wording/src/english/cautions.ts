@@ -18,6 +18,8 @@ export const cautionTexts: MessageTexts<CautionFigures> = {
   flash: (f) =>
     `Subcooling reads ${f.subcooling}: it is about zero. It is below target; how much is not known while vapor runs in the liquid line.`,
   'dry-wick': (f) => `Check the ${f.readings}: as wet as this air reads, the wick may be dry or the sensor wet.`,
+  'wet-bulb-moved': (f) =>
+    `The wet bulb moved from ${f.before} to ${f.after} while you read outdoors: the later one is used. Take both again.`,
   'humidity-contradiction': (f) =>
     `Wet bulb ${f.measured} and relative humidity contradict each other (the humidity gives ${f.fromHumidity}). The wet bulb is used.`,
   'liquid-colder-than-air': (f) =>

@@ -56,6 +56,9 @@ const naming: FaultWords['naming'] = {
     leakSearch,
     refrigerant,
     procedure,
+    liquidShutIn: { name: 'liquid shut in' },
+    bulb: { name: 'bulb' },
+    valve: { name: 'valve' },
   },
   parts: {
     unit: 'unit',

@@ -177,6 +177,11 @@ const steps: NextStepWords['steps'] = {
     'Wet the wick with clean water and read again in moving air, until it stops falling.',
     'A dry wick moves the target.',
   ],
+  'bracket-wet-bulb-again': [
+    (_, say) =>
+      `Read the wet bulb before and after the readings outdoors once more. Within ${say.deltaF(1)} their mean counts.`,
+    'It moved from one to the other, and the target with it.',
+  ],
   'place-liquid-probe-again': [
     'Place the liquid-line probe again: clean metal near the valve, tight, wrapped, in the shade.',
     'The liquid line cannot be colder than the air that cools it.',
@@ -185,6 +190,14 @@ const steps: NextStepWords['steps'] = {
     (_, say) =>
       `Take a second set of readings 5 minutes later. They count when wet bulb agrees within ${say.deltaF(0.5)}, return air within ${say.deltaF(1)}, superheat and subcooling within ${say.deltaF(1)}.`,
     'The house is still cooling down, and the target moves with it.',
+  ],
+  'recover-air-weigh-in': [
+    `Weigh the charge in anew. First ${WEIGH_IN}. What was recovered holds air: it is not put back.`,
+    'The standing pressure shows air in the system: nothing read with it tells the charge.',
+  ],
+  'mend-bulb': [
+    `Put the valve’s bulb right: tight on clean pipe, at the right place, wrapped, ${THEN_READ}. If its charge is lost, the power head is replaced.`,
+    'With a bulb that does not feel the pipe no reading at this valve counts.',
   ],
   'settle-with-another-reading': [
     'Take the readings once more with care: steady system, fresh wick, clamps on clean metal and wrapped.',
@@ -223,14 +236,18 @@ const steps: NextStepWords['steps'] = {
     `Weigh the charge in: ${WEIGH_IN}.`,
     'So much has been added that the amount inside is no longer known.',
   ],
-  'measure-drier-drop': [(_, say) => drierDrop(say), 'Low charge and a restriction look alike so far.'],
+  'measure-drier-drop': [(_, say) => drierDrop(say), 'It tells a restriction from what looks like one.'],
   'find-restriction': [
     (_, say) =>
-      `Look for a restriction; leave the refrigerant as it is. ${drierDrop(say)} Then the orifice: size, dirt.`,
+      `Look for a restriction; leave the refrigerant as it is. ${drierDrop(say)} Then the metering device: size, dirt.`,
     'There is liquid enough, but too little of it gets through.',
   ],
   'air-test-then-recover': [(_, say) => airTest(say), 'Air in the system looks like overcharge.'],
   'recover-in-steps': [(_, say) => `Recover ${recover(say)}`, 'The readings point to too much refrigerant.'],
+  'check-orifice': [
+    'Check the orifice: size, seat, dirt. Recover before the line is opened.',
+    'There is liquid enough and no drop on its way: the orifice holds it back.',
+  ],
   'check-orifice-compressor-condenser': [
     'Check the orifice, the compressor and the air over the outdoor coil; leave the refrigerant as it is. Orifice size and seat; compressor current and pressures; a clean coil and a fan at speed.',
     'Superheat is low without the high subcooling of an overcharge.',
@@ -238,6 +255,14 @@ const steps: NextStepWords['steps'] = {
   'check-bulb-and-valve': [
     `Check the valve and its bulb; leave the refrigerant as it is. The ${BULB}.`,
     'The valve lets too much through; the charge is not the cause.',
+  ],
+  'check-valve': [
+    'Check the valve itself: setting, screen, equalizer line, a stuck needle. Recover before the line is opened.',
+    'Its bulb is right; the valve is not.',
+  ],
+  'check-bulb-and-screen': [
+    `Check the valve’s bulb and its screen; leave the refrigerant as it is. The ${BULB}.`,
+    'There is no drop before the valve: the valve starves the coil.',
   ],
   'check-bulb-screen-drier': [
     (_, say) =>

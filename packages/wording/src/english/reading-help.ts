@@ -83,4 +83,28 @@ export const readingHelp: Readonly<Record<ReadingId, ReadingHelp>> = {
     'With the compressor running. Live parts: only if you are qualified for it.',
     'Measuring with the compressor off.',
   ),
+  returnWetBulbBefore: help(
+    'The same wick at the same place, before you go outdoors. Read the return wet bulb again when you come back.',
+    'Another instrument for the second reading: then the two differ by more than the air did.',
+  ),
+  drierInletTemperature: help(
+    'Clamp on clean pipe within a few inches, wrapped, system running. The same clamp for both places is best.',
+    'A drier in the sun or beside the hot discharge line.',
+  ),
+  drierOutletTemperature: help(
+    'Clamp on clean pipe within a few inches, wrapped, system running. The same clamp for both places is best.',
+    'A long piece of line between the two places: it cools by itself.',
+  ),
+  standingPressure: help(
+    'Compressor off, outdoor fan on, until pressure and coil no longer change: about 10 to 15 minutes.',
+    'Reading it while the coil is still warm from running.',
+  ),
+  standingOutdoorCoilTemperature: help(
+    'Clamp on a bend in the middle of the coil, out of the sun, and compare with the air: they should agree.',
+    'The air temperature alone, while the coil is still warm.',
+  ),
+  standingIndoorCoilTemperature: help(
+    'Clamp on a bend of the indoor coil, blower on. With the liquid shut into the outdoor coil it is not needed.',
+    'A cool indoor coil that nobody measured: the charge gathers there and sets the pressure.',
+  ),
 };

@@ -52,4 +52,10 @@ export const readingWords: Readonly<Record<ReadingId, ReadingWords>> = {
   supplyStaticPressure: reading('Supply static', 'supply static pressure', 'between blower and coil'),
   compressorCurrent: reading('Compressor current', 'compressor current', 'one conductor of the compressor'),
   lineVoltage: reading('Line voltage', 'line voltage', 'at the contactor’s line side'),
+  returnWetBulbBefore: reading('Return wet bulb, before', 'return wet bulb before', 'return plenum, beside the coil'),
+  drierInletTemperature: reading('Before the drier', 'temperature before the drier', 'liquid line, towards the coil'),
+  drierOutletTemperature: reading('After the drier', 'temperature after the drier', 'liquid line, away from the coil'),
+  standingPressure: reading('Standing pressure', 'standing pressure', 'liquid service port'),
+  standingOutdoorCoilTemperature: reading('Outdoor coil', 'outdoor coil temperature', 'on a return bend of the coil'),
+  standingIndoorCoilTemperature: reading('Indoor coil', 'indoor coil temperature', 'on a return bend of the coil'),
 };

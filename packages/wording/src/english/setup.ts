@@ -107,6 +107,11 @@ const numbers = {
   superheatRange: field('Superheat range', 'superheat range', 'The maker’s range for the valve.'),
   nominalCapacity: field('Nominal capacity', 'nominal capacity', 'From the model number or the nameplate.'),
   designAirflow: field('Design airflow', 'design airflow', 'From the design or the maker’s data.'),
+  expectedCompressorCurrent: field(
+    'Expected current',
+    'expected compressor current',
+    'From the maker’s table at these conditions, or from this unit when it was right.',
+  ),
   factoryCharge: field('Factory charge', 'factory charge', 'From the nameplate.'),
   maxHighPressure: field('Highest pressure allowed', 'highest pressure allowed', 'High side, from the nameplate.'),
   lowestReturnDryBulb: field('Lowest return air', 'lowest return air', 'The coolest return air during this test.'),

@@ -24,4 +24,10 @@ export const READING_PLACES: Readonly<Record<ReadingId, ReadingPlace>> = {
   supplyStaticPressure: 'supply',
   compressorCurrent: 'outdoor-unit',
   lineVoltage: 'outdoor-unit',
+  returnWetBulbBefore: 'return',
+  drierInletTemperature: 'outdoor-unit',
+  drierOutletTemperature: 'outdoor-unit',
+  standingPressure: 'outdoor-unit',
+  standingOutdoorCoilTemperature: 'outdoor-unit',
+  standingIndoorCoilTemperature: 'air-handler',
 };

@@ -14,6 +14,7 @@ import type { DerivedQuantities } from '../derived-quantities';
 import type { CheckInput } from '../input';
 import { isFixedOrifice } from '../input';
 import type { CriterionResult } from '../result';
+import { airTest, drierTest } from '../separating-tests';
 import { mustShutDown } from '../stops';
 
 export interface Facts {
@@ -35,7 +36,8 @@ export interface Facts {
   /** Where nothing counts, what the split shows: it may still tell the cause of a stop. */
   readonly airflow: AirflowEvidence;
   readonly airSeen: 'yes' | 'no';
-  readonly quality: 'good' | 'wrong-refrigerant' | 'dry-wick' | 'liquid-colder-than-air' | 'pull-down';
+  readonly quality:
+    'good' | 'wrong-refrigerant' | 'dry-wick' | 'wet-bulb-moved' | 'liquid-colder-than-air' | 'pull-down';
   readonly overall: OverallFinding;
   readonly settling: 'possible' | 'impossible';
   readonly superheat: Side;
@@ -46,6 +48,10 @@ export interface Facts {
   readonly weather: 'warm' | 'cool' | 'low-head';
   readonly leak: 'search' | 'found' | 'add' | 'locate' | 'recover';
   readonly head: 'usual' | 'high';
+  /** What the separating tests have shown; `open` where one was not made, or cannot count. */
+  readonly drier: 'open' | 'small' | 'drop';
+  readonly air: 'open' | 'none' | 'found' | 'below';
+  readonly bulb: 'open' | 'right' | 'wrong';
 }
 
 export type Side = 'unknown' | 'within' | 'above' | 'below';
@@ -104,6 +110,9 @@ export function gatherFacts(evidence: Evidence): Facts {
     weather: weatherFact(input),
     leak: leakFact(input),
     head: isHeadHigh(input, derived) ? 'high' : 'usual',
+    drier: drierFact(input),
+    air: airFact(input),
+    bulb: bulbFact(input),
   };
 }
 
@@ -147,6 +156,7 @@ function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
   const has = (code: Caution['code']): boolean => cautions.some((caution) => caution.code === code);
   if (has('wrong-refrigerant')) return 'wrong-refrigerant';
   if (has('dry-wick')) return 'dry-wick';
+  if (has('wet-bulb-moved')) return 'wet-bulb-moved';
   if (has('liquid-colder-than-air')) return 'liquid-colder-than-air';
   return has('pull-down') ? 'pull-down' : 'good';
 }
@@ -211,4 +221,20 @@ function weatherFact(input: CheckInput): Facts['weather'] {
 function isHeadHigh({ setup }: CheckInput, { condensingOverAmbient }: DerivedQuantities): boolean {
   const limit = HIGH_HEAD_K[setup.refrigerant] ?? HIGH_HEAD_OTHERS_K;
   return isKnown(condensingOverAmbient) && condensingOverAmbient.value > limit;
+}
+
+function drierFact(input: CheckInput): Facts['drier'] {
+  const { finding } = drierTest(input);
+  return finding === 'drop' || finding === 'small' ? finding : 'open';
+}
+
+function airFact(input: CheckInput): Facts['air'] {
+  const { finding } = airTest(input);
+  return finding === 'found' || finding === 'none' || finding === 'below' ? finding : 'open';
+}
+
+function bulbFact({ visit }: CheckInput): Facts['bulb'] {
+  const { bulb } = visit.tests;
+  if (bulb === undefined) return 'open';
+  return bulb === 'right' ? 'right' : 'wrong';
 }

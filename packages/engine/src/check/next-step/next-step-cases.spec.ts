@@ -1,6 +1,6 @@
 /** What a technician is told, case by case: the review of the next-step table. Every row is reached, each by a system with a name. */
 import { describe, expect, it } from 'vitest';
-import { dewPressurePa } from '../../refrigerants/saturation';
+import { bubblePressurePa, dewPressurePa } from '../../refrigerants/saturation';
 import { PA_PER_PSI, temperatureToK } from '../../units';
 import { airflowEvidence, judgeAirflow, judgeSplit, splitEvidence, splitTarget } from '../criteria/air';
 import { superheatTarget } from '../criteria/charge';
@@ -722,6 +722,202 @@ const VALVE: readonly Case[] = [
   ],
 ];
 
+const SMALL_DROP = { drierInletTemperature: 96, drierOutletTemperature: 95.5 } as const;
+const DROP = { drierInletTemperature: 96, drierOutletTemperature: 88 } as const;
+/** Saturation of the standing system over its outdoor coil at 85 °F. */
+const standing = (refrigerant: 'R-22' | 'R-410A', excessF: number): ReadingChanges => ({
+  standingOutdoorCoilTemperature: 85,
+  standingPressure: {
+    value: bubblePressurePa({ refrigerant, temperatureK: temperatureToK(85 + excessF, 'degF') }) / PA_PER_PSI,
+    unit: 'psia',
+  },
+});
+const SHUT_IN = { tests: { liquidShutIn: true } } as const;
+const BULB_RIGHT = { tests: { bulb: 'right' } } as const;
+const STARVED_UNCLEAR = { ...superheat(25), ...subcooling(6.5) } as const;
+
+/** A separating test is recorded: what it shows leads on. */
+const TESTED: readonly Case[] = [
+  [
+    'a drop over the drier',
+    orifice({ readings: { ...STARVED_UNCLEAR, ...DROP } }),
+    'find-restriction',
+    'move-no-refrigerant',
+  ],
+  ['a drop over the drier of a healthy valve', valve({ readings: DROP }), 'find-restriction', 'move-no-refrigerant'],
+  [
+    'a drop that these clamps cannot tell',
+    orifice({ readings: { ...STARVED_UNCLEAR, drierInletTemperature: 96, drierOutletTemperature: 92.8 } }),
+    'measure-drier-drop',
+    'add-nothing',
+  ],
+  ['no drop over the drier', orifice({ readings: { ...STARVED_UNCLEAR, ...SMALL_DROP } }), 'leak-first', 'add-nothing'],
+  [
+    'no drop over the drier, leak found',
+    orifice({ visit: { leakSearch: 'found' }, readings: { ...STARVED_UNCLEAR, ...SMALL_DROP } }),
+    'mend-recover-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'no drop over the drier, none found',
+    orifice({ visit: { leakSearch: 'none-found' }, readings: { ...STARVED_UNCLEAR, ...SMALL_DROP } }),
+    'add-in-steps',
+  ],
+  [
+    'no drop over the drier, topped up on an earlier visit',
+    orifice({ visit: { additionsOnEarlierVisits: 1 }, readings: { ...STARVED_UNCLEAR, ...SMALL_DROP } }),
+    'locate-mend-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'no drop over the drier, 10 % added already',
+    orifice({ setup: charged, visit: added(0.6), readings: { ...STARVED_UNCLEAR, ...SMALL_DROP } }),
+    'recover-and-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'liquid enough and no drop over the drier',
+    orifice({ readings: { ...superheat(25), ...SMALL_DROP } }),
+    'check-orifice',
+    'move-no-refrigerant',
+  ],
+  [
+    'valve starves, no drop over the drier',
+    valve({ readings: { ...valveSuperheat(32), ...SMALL_DROP } }),
+    'check-bulb-and-screen',
+    'move-no-refrigerant',
+  ],
+  [
+    'valve starves, bulb right',
+    valve({ visit: BULB_RIGHT, readings: valveSuperheat(32) }),
+    'measure-drier-drop',
+    'move-no-refrigerant',
+  ],
+  [
+    'valve starves, bulb right and no drop over the drier',
+    valve({ visit: BULB_RIGHT, readings: { ...valveSuperheat(32), ...SMALL_DROP } }),
+    'check-valve',
+    'move-no-refrigerant',
+  ],
+  [
+    'both above, no drop over the drier',
+    valve({ readings: { ...valveSubcooling(16), ...valveSuperheat(32), ...SMALL_DROP } }),
+    'check-bulb-and-screen',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'both above, bulb right',
+    valve({ visit: BULB_RIGHT, readings: { ...valveSubcooling(16), ...valveSuperheat(32) } }),
+    'measure-drier-drop',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'both above, bulb right and no drop over the drier',
+    valve({ visit: BULB_RIGHT, readings: { ...valveSubcooling(16), ...valveSuperheat(32), ...SMALL_DROP } }),
+    'check-valve',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'valve floods, bulb right',
+    valve({ visit: BULB_RIGHT, readings: valveSuperheat(2) }),
+    'check-valve',
+    'move-no-refrigerant',
+  ],
+  [
+    'valve floods, subcooling below, bulb right',
+    valve({ visit: BULB_RIGHT, readings: { ...LOW_VALVE, ...valveSuperheat(2) } }),
+    'check-valve',
+    'move-no-refrigerant',
+  ],
+  [
+    'valve floods, subcooling above, bulb right',
+    valve({ visit: BULB_RIGHT, readings: { ...valveSubcooling(16), ...valveSuperheat(2) } }),
+    'recover-in-steps',
+    'add-nothing',
+  ],
+  ['a loose bulb', valve({ visit: { tests: { bulb: 'loose' } } }), 'mend-bulb', 'move-no-refrigerant'],
+  [
+    'a bulb that lost its charge',
+    valve({ visit: { tests: { bulb: 'charge-lost' } }, readings: valveSuperheat(32) }),
+    'mend-bulb',
+    'move-no-refrigerant',
+  ],
+  ['an orifice has no bulb', orifice({ visit: { tests: { bulb: 'loose' } } }), 'record'],
+  [
+    'air found in a valve’s system',
+    valve({ visit: SHUT_IN, readings: { ...valveSubcooling(16), outdoorDryBulb: 80, ...standing('R-410A', 8) } }),
+    'recover-air-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'no air in a valve’s system',
+    valve({ visit: SHUT_IN, readings: { ...valveSubcooling(16), outdoorDryBulb: 80, ...standing('R-410A', 0) } }),
+    'recover-in-steps',
+    'add-nothing',
+  ],
+  [
+    'an air test that does not count: the liquid was free, the indoor coil is unread',
+    valve({ readings: { ...valveSubcooling(16), outdoorDryBulb: 80, ...standing('R-410A', 8) } }),
+    'air-test-then-recover',
+    'add-nothing',
+    'recover-nothing',
+  ],
+  [
+    'both coils alike: the air test counts',
+    valve({
+      readings: {
+        ...valveSubcooling(16),
+        outdoorDryBulb: 80,
+        ...standing('R-410A', 8),
+        standingIndoorCoilTemperature: 83,
+      },
+    }),
+    'recover-air-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'standing pressure under saturation',
+    valve({ visit: SHUT_IN, readings: { ...valveSubcooling(16), ...standing('R-410A', -20) } }),
+    'check-refrigerant-and-probes',
+    'move-no-refrigerant',
+  ],
+  [
+    'no air in an orifice’s system',
+    orifice({ visit: SHUT_IN, readings: { ...superheat(8), ...subcooling(16), ...standing('R-22', 0) } }),
+    'recover-in-steps',
+    'add-nothing',
+  ],
+  [
+    'air found behind a high head',
+    orifice({ visit: SHUT_IN, readings: { liquidPressure: 300, ...standing('R-22', 12) } }),
+    'recover-air-weigh-in',
+    'shut-down',
+    'add-nothing',
+  ],
+  [
+    'air found, superheat about zero',
+    orifice({ visit: SHUT_IN, readings: { ...superheat(1), ...standing('R-22', 12) } }),
+    'recover-air-weigh-in',
+    'shut-down',
+    'add-nothing',
+  ],
+  [
+    'air found, superheat under the floor',
+    orifice({ visit: SHUT_IN, readings: { ...superheat(4), ...standing('R-22', 12) } }),
+    'recover-air-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'wet bulb moved while outdoors',
+    orifice({ readings: { returnWetBulbBefore: 68 } }),
+    'bracket-wet-bulb-again',
+    'move-no-refrigerant',
+  ],
+];
+
 const WITHIN: readonly Case[] = [
   ['healthy orifice', orifice(), 'record'],
   ['healthy valve', valve(), 'record'],
@@ -749,7 +945,20 @@ const WITHIN: readonly Case[] = [
   ['valve within, airflow unseen', valve({ readings: { supplyDryBulb: null } }), 'record'],
 ];
 
-const GROUPS = { FIT, IMPOSSIBLE, STOPS, CONDITIONS, LACKING, AIRFLOW, QUALITY, TOO_CLOSE, ORIFICE, VALVE, WITHIN };
+const GROUPS = {
+  FIT,
+  IMPOSSIBLE,
+  STOPS,
+  CONDITIONS,
+  LACKING,
+  AIRFLOW,
+  QUALITY,
+  TESTED,
+  TOO_CLOSE,
+  ORIFICE,
+  VALVE,
+  WITHIN,
+};
 const CASES: readonly Case[] = Object.values(GROUPS).flat();
 
 describe.each(Object.entries(GROUPS))('%s', (_, cases) => {

@@ -36,7 +36,7 @@ const VALUES = {
     'nothing',
   ],
   airSeen: ['yes', 'no'],
-  quality: ['good', 'wrong-refrigerant', 'dry-wick', 'liquid-colder-than-air', 'pull-down'],
+  quality: ['good', 'wrong-refrigerant', 'dry-wick', 'wet-bulb-moved', 'liquid-colder-than-air', 'pull-down'],
   overall: ['stop', 'not-verifiable', 'not-judged', 'above', 'below', 'too-close-to-call', 'within'],
   settling: ['possible', 'impossible'],
   superheat: ['unknown', 'within', 'above', 'below'],
@@ -45,6 +45,9 @@ const VALUES = {
   weather: ['warm', 'cool', 'low-head'],
   leak: ['search', 'found', 'add', 'locate', 'recover'],
   head: ['usual', 'high'],
+  drier: ['open', 'small', 'drop'],
+  air: ['open', 'none', 'found', 'below'],
+  bulb: ['open', 'right', 'wrong'],
 } as const satisfies { readonly [Name in keyof Facts]: readonly Facts[Name][] };
 
 type Overall = Facts['overall'];
@@ -71,6 +74,9 @@ const judged = (facts: Partial<Facts> & Pick<Facts, 'overall' | 'metering'>): Fa
   weather: 'warm',
   leak: 'search',
   head: 'usual',
+  drier: 'open',
+  air: 'open',
+  bulb: 'open',
   ...facts,
 });
 
@@ -121,6 +127,7 @@ describe('the next-step table', () => {
   it('has a row for every finding of an orifice', () => {
     const others = [
       ...combinations('subcooling', 'subcoolingLevel', 'weather', 'leak', 'airSeen', 'settling'),
+      ...combinations('subcoolingLevel', 'leak', 'drier', 'air', 'bulb'),
       ...combinations('superheatTarget', 'airflow', 'quality'),
     ];
     for (const overall of ['above', 'below', 'too-close-to-call', 'within'] as const)
@@ -129,7 +136,10 @@ describe('the next-step table', () => {
   });
 
   it('has a row for every finding of a valve: outside means that one of its two criteria is, by the rule', () => {
-    const others = combinations('superheat', 'subcooling', 'weather', 'leak', 'head', 'settling');
+    const others = [
+      ...combinations('superheat', 'subcooling', 'weather', 'leak', 'head', 'settling'),
+      ...combinations('superheat', 'subcooling', 'head', 'drier', 'air', 'bulb'),
+    ];
     const possible = ({ superheat, subcooling }: Partial<Facts>, overall: Overall): boolean => {
       const sides = [superheat, subcooling];
       return (

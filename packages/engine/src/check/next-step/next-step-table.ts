@@ -17,6 +17,7 @@ export interface NextStepRow {
 
 const MOVE_NOTHING = ['move-no-refrigerant'] as const;
 const ADD_NOTHING = ['add-nothing'] as const;
+const ADD_AND_RECOVER_NOTHING = ['add-nothing', 'recover-nothing'] as const;
 
 /** Whatever keeps the system from being judged, a stop still holds: the step stays what it is, and that it must not run on is said first. */
 const shutDownFirst = (rows: readonly NextStepRow[]): readonly NextStepRow[] =>
@@ -44,6 +45,7 @@ const impossible: readonly NextStepRow[] = [
 const liquidReturnCauses: readonly (Pick<NextStepRow, 'step' | 'when'> & { readonly recover: boolean })[] = [
   { when: { superheatTarget: ['none-here', 'near-floor'] }, step: 'come-back-at-higher-target', recover: false },
   { when: { airflow: ['split-above', 'measured-low'] }, step: 'reread-wet-bulb-then-airflow', recover: true },
+  { when: { air: ['found'] }, step: 'recover-air-weigh-in', recover: true },
   { when: { metering: ['orifice'], subcoolingLevel: ['high'] }, step: 'check-overcharge-or-air', recover: true },
   { when: { metering: ['valve'], subcooling: ['above'] }, step: 'check-overcharge-or-air', recover: true },
   {
@@ -80,6 +82,11 @@ const stops: readonly NextStepRow[] = [
     notYet: ADD_NOTHING,
   },
   { when: { stop: ['freezing'] }, step: 'thaw-then-diagnose', notYet: ADD_NOTHING },
+  {
+    when: { stop: ['high-pressure'], air: ['found'] },
+    step: 'recover-air-weigh-in',
+    notYet: ['shut-down', 'add-nothing'],
+  },
   { when: { stop: ['high-pressure'] }, step: 'shut-down-high-pressure', notYet: ['shut-down', 'add-nothing'] },
   { when: { stop: ['hot-discharge'] }, step: 'shut-down-hot-discharge', notYet: ['shut-down'] },
 ];
@@ -119,8 +126,17 @@ const airflow: readonly NextStepRow[] = [
 const quality: readonly NextStepRow[] = [
   { when: { quality: ['wrong-refrigerant'] }, step: 'confirm-refrigerant', notYet: MOVE_NOTHING },
   { when: { quality: ['dry-wick'] }, step: 'wet-the-wick', notYet: MOVE_NOTHING },
+  { when: { quality: ['wet-bulb-moved'] }, step: 'bracket-wet-bulb-again', notYet: MOVE_NOTHING },
   { when: { quality: ['liquid-colder-than-air'] }, step: 'place-liquid-probe-again', notYet: MOVE_NOTHING },
   { when: { quality: ['pull-down'] }, step: 'read-twice', notYet: MOVE_NOTHING },
+];
+
+/** What a separating test has shown outweighs the pattern of the readings. A loose bulb is mended before anything read at the valve counts. */
+const shown: readonly NextStepRow[] = [
+  { when: { air: ['found'] }, step: 'recover-air-weigh-in', notYet: ADD_NOTHING },
+  { when: { air: ['below'] }, step: 'check-refrigerant-and-probes', notYet: MOVE_NOTHING },
+  { when: { metering: ['valve'], bulb: ['wrong'] }, step: 'mend-bulb', notYet: MOVE_NOTHING },
+  { when: { drier: ['drop'] }, step: 'find-restriction', notYet: MOVE_NOTHING },
 ];
 
 const tooClose: readonly NextStepRow[] = [
@@ -149,39 +165,59 @@ const outside: readonly NextStepRow[] = [
 const orifice: readonly NextStepRow[] = [
   { when: { overall: ['above'], subcoolingLevel: ['unread'] }, step: 'read-liquid-pair', notYet: ADD_NOTHING },
   ...lowCharge({ overall: ['above'], subcoolingLevel: ['low'] }),
+  ...lowCharge({ overall: ['above'], subcoolingLevel: ['unclear', 'unreadable'], drier: ['small'] }),
   {
     when: { overall: ['above'], subcoolingLevel: ['unclear', 'unreadable'] },
     step: 'measure-drier-drop',
     notYet: ADD_NOTHING,
   },
+  { when: { overall: ['above'], drier: ['small'] }, step: 'check-orifice', notYet: MOVE_NOTHING },
   { when: { overall: ['above'] }, step: 'find-restriction', notYet: MOVE_NOTHING },
+  {
+    when: { overall: ['below'], subcoolingLevel: ['high'], air: ['none'] },
+    step: 'recover-in-steps',
+    notYet: ADD_NOTHING,
+  },
   {
     when: { overall: ['below'], subcoolingLevel: ['high'] },
     step: 'air-test-then-recover',
-    notYet: ['add-nothing', 'recover-nothing'],
+    notYet: ADD_AND_RECOVER_NOTHING,
   },
   { when: { overall: ['below'] }, step: 'check-orifice-compressor-condenser', notYet: MOVE_NOTHING },
 ];
 
+/** The valve's own part: which of bulb, screen and drier is looked at next, until all that is outside the valve is known to be right. */
+function starvedOrFlooded(when: Conditions, step: NextStepCode, notYet: NextStepRow['notYet']): readonly NextStepRow[] {
+  const starved = when.superheat?.includes('above') ?? false;
+  const narrowed: readonly NextStepRow[] = starved
+    ? [
+        { when: { ...when, bulb: ['right'], drier: ['small'] }, step: 'check-valve', notYet },
+        { when: { ...when, drier: ['small'] }, step: 'check-bulb-and-screen', notYet },
+        { when: { ...when, bulb: ['right'] }, step: 'measure-drier-drop', notYet },
+      ]
+    : [{ when: { ...when, bulb: ['right'] }, step: 'check-valve', notYet }];
+  return [...narrowed, { when, step, notYet }];
+}
+
 const valve: readonly NextStepRow[] = [
-  { when: { subcooling: ['below'], superheat: ['below'] }, step: 'check-bulb-and-valve', notYet: MOVE_NOTHING },
+  ...starvedOrFlooded({ subcooling: ['below'], superheat: ['below'] }, 'check-bulb-and-valve', MOVE_NOTHING),
   ...lowCharge({ subcooling: ['below'] }),
-  { when: { subcooling: ['within'], superheat: ['above'] }, step: 'check-bulb-screen-drier', notYet: MOVE_NOTHING },
-  { when: { subcooling: ['within'], superheat: ['below'] }, step: 'check-bulb-and-airflow', notYet: MOVE_NOTHING },
+  ...starvedOrFlooded({ subcooling: ['within'], superheat: ['above'] }, 'check-bulb-screen-drier', MOVE_NOTHING),
+  ...starvedOrFlooded({ subcooling: ['within'], superheat: ['below'] }, 'check-bulb-and-airflow', MOVE_NOTHING),
+  ...starvedOrFlooded(
+    { subcooling: ['above'], superheat: ['above'] },
+    'find-restriction-recover-nothing',
+    ADD_AND_RECOVER_NOTHING,
+  ),
   {
-    when: { subcooling: ['above'], superheat: ['above'] },
-    step: 'find-restriction-recover-nothing',
-    notYet: ['add-nothing', 'recover-nothing'],
-  },
-  {
-    when: { subcooling: ['above'], superheat: ['below'] },
+    when: { subcooling: ['above'], superheat: ['below'], bulb: ['open'] },
     step: 'check-bulb-then-recover',
-    notYet: ['add-nothing', 'recover-nothing'],
+    notYet: ADD_AND_RECOVER_NOTHING,
   },
   {
-    when: { subcooling: ['above'], head: ['high'] },
+    when: { subcooling: ['above'], head: ['high'], air: ['open'] },
     step: 'air-test-then-recover',
-    notYet: ['add-nothing', 'recover-nothing'],
+    notYet: ADD_AND_RECOVER_NOTHING,
   },
   { when: { subcooling: ['above'] }, step: 'recover-in-steps', notYet: ADD_NOTHING },
 ];
@@ -205,6 +241,7 @@ export const NEXT_STEP_TABLE: readonly NextStepRow[] = [
   ...lacking,
   ...airflow,
   ...quality,
+  ...shown,
   ...tooClose,
   ...outside,
   ...forMetering('orifice', orifice),

@@ -37,6 +37,12 @@ const UNITS: Readonly<Record<ReadingId, ReadingUnit>> = {
   supplyStaticPressure: 'inH2O',
   compressorCurrent: 'A',
   lineVoltage: 'V',
+  returnWetBulbBefore: 'degF',
+  drierInletTemperature: 'degF',
+  drierOutletTemperature: 'degF',
+  standingPressure: 'psig',
+  standingOutdoorCoilTemperature: 'degF',
+  standingIndoorCoilTemperature: 'degF',
 };
 
 const VISIT: VisitInput = {
