@@ -9,12 +9,15 @@
  * derived one is the wet one, as wet-bulb.ts says; the state names it.
  */
 import { EngineError } from '../errors';
+import { SI_ENTHALPY } from './enthalpy';
+import type { EnthalpyEquation } from './enthalpy';
 import {
   moistAirFromDewPointAndEnthalpy,
   moistAirFromDryBulbAndEnthalpy,
   moistAirFromHumidityRatioAndEnthalpy,
   moistAirFromRelativeHumidityAndEnthalpy,
 } from './enthalpy-pairs';
+import type { WithEnthalpy } from './enthalpy-pairs';
 import {
   moistAirFromDewPointAndRelativeHumidity,
   moistAirFromDryBulbAndHumidityRatio,
@@ -100,22 +103,28 @@ const refused =
     throw new EngineError('not-supported', { quantity, value: x[quantity], reason });
   };
 
+/** The door of a pair that has an enthalpy, for the SI one. */
+const bySiEnthalpy =
+  (door: (equation: EnthalpyEquation, x: Omit<MoistAirReadings, 'enthalpyJPerKg'> & WithEnthalpy) => MoistAir): Door =>
+  ({ enthalpyJPerKg, ...x }) =>
+    door(SI_ENTHALPY, { ...x, enthalpy: enthalpyJPerKg });
+
 const DOORS: { readonly [Names in PairNames as `${Names[0]}+${Names[1]}`]: Door } = {
   'dryBulbK+wetBulbK': moistAirFromDryBulbAndWetBulb,
   'dryBulbK+dewPointK': moistAirFromDryBulbAndDewPoint,
   'dryBulbK+relativeHumidityRatio': moistAirFromDryBulbAndRelativeHumidity,
   'dryBulbK+humidityRatio': moistAirFromDryBulbAndHumidityRatio,
-  'dryBulbK+enthalpyJPerKg': moistAirFromDryBulbAndEnthalpy,
+  'dryBulbK+enthalpyJPerKg': bySiEnthalpy(moistAirFromDryBulbAndEnthalpy),
   'wetBulbK+dewPointK': moistAirFromWetBulbAndDewPoint,
   'wetBulbK+relativeHumidityRatio': moistAirFromWetBulbAndRelativeHumidity,
   'wetBulbK+humidityRatio': moistAirFromWetBulbAndHumidityRatio,
   'wetBulbK+enthalpyJPerKg': refused('enthalpyJPerKg', 'near-parallel-pair'),
   'dewPointK+relativeHumidityRatio': moistAirFromDewPointAndRelativeHumidity,
   'dewPointK+humidityRatio': refused('humidityRatio', 'dependent-pair'),
-  'dewPointK+enthalpyJPerKg': moistAirFromDewPointAndEnthalpy,
+  'dewPointK+enthalpyJPerKg': bySiEnthalpy(moistAirFromDewPointAndEnthalpy),
   'relativeHumidityRatio+humidityRatio': moistAirFromRelativeHumidityAndHumidityRatio,
-  'relativeHumidityRatio+enthalpyJPerKg': moistAirFromRelativeHumidityAndEnthalpy,
-  'humidityRatio+enthalpyJPerKg': moistAirFromHumidityRatioAndEnthalpy,
+  'relativeHumidityRatio+enthalpyJPerKg': bySiEnthalpy(moistAirFromRelativeHumidityAndEnthalpy),
+  'humidityRatio+enthalpyJPerKg': bySiEnthalpy(moistAirFromHumidityRatioAndEnthalpy),
 };
 
 /**

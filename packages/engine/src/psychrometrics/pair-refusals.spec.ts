@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { attempt } from '../result';
-import { enthalpyJPerKg } from './enthalpy';
-import { ENTHALPY_LIMITS } from './enthalpy-pairs';
+import { enthalpyJPerKg, SI_ENTHALPY } from './enthalpy';
+import { enthalpyLimits } from './enthalpy-pairs';
 import { moistAirFromDryBulbAndRelativeHumidity, type MoistAir } from './moist-air';
 import { moistAirFromPair, type MoistAirPair, type MoistAirReading } from './moist-air-pairs';
 
@@ -128,7 +128,7 @@ describe('readings out of range', () => {
   });
 
   it('enthalpy outside that of dry air at −60 °C to 1 GJ/kg', () => {
-    const { min, max } = ENTHALPY_LIMITS;
+    const { min, max } = enthalpyLimits(SI_ENTHALPY);
     expect(min).toBeCloseTo(-60_360, 6);
     expect(from({ dryBulbK: LOWEST_K, enthalpyJPerKg: min }).humidityRatio).toBe(0);
     expect(from({ relativeHumidityRatio: 0, enthalpyJPerKg: min }).dryBulbK).toBeCloseTo(LOWEST_K, 9);

@@ -7,6 +7,9 @@ import {
   flowFromM3PerS,
   flowToM3PerS,
   isGaugeUnit,
+  HUMIDITY_RATIO_UNITS,
+  humidityRatioToKgPerKg,
+  humidityRatioFromKgPerKg,
   LENGTH_UNITS,
   lengthFromM,
   lengthToM,
@@ -68,6 +71,8 @@ describe('fixed points', () => {
     expect(moistAirEnthalpyBtuPerLb(100, 0.00523)).toBeCloseTo(29.8, 1);
     expect(specificVolumeToFt3PerLb(0.8877)).toBeCloseTo(14.22, 2);
     expect(specificEnergyDifferenceToBtuPerLb(2326)).toBeCloseTo(1, 6);
+    expect(humidityRatioToKgPerKg(70, 'gr/lb')).toBeCloseTo(0.01, 15);
+    expect(humidityRatioToKgPerKg(10, 'g/kg')).toBeCloseTo(0.01, 15);
   });
 });
 
@@ -83,6 +88,9 @@ it('every unit comes back as it went', () => {
     ...FLOW_UNITS.map((unit) => [unit, flowFromM3PerS(flowToM3PerS(71.3, unit), unit)] as const),
     ...POWER_UNITS.map((unit) => [unit, powerFromW(powerToW(71.3, unit), unit)] as const),
     ...MASS_UNITS.map((unit) => [unit, massFromKg(massToKg(71.3, unit), unit)] as const),
+    ...HUMIDITY_RATIO_UNITS.map(
+      (unit) => [unit, humidityRatioFromKgPerKg(humidityRatioToKgPerKg(71.3, unit), unit)] as const,
+    ),
   ];
   expect(there.length).toBeGreaterThan(25);
   for (const [unit, back] of there) expect(back, unit).toBeCloseTo(71.3, 9);
