@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { readPsychrometricsQuery } from './psychrometrics';
+import { AIR_QUANTITIES, readPsychrometricsQuery } from './psychrometrics';
 import { readSaturationQuery } from './refrigerant';
 
 const faultPaths = (read: ReturnType<typeof readSaturationQuery> | ReturnType<typeof readPsychrometricsQuery>) =>
@@ -57,20 +57,58 @@ describe('the query of a saturation look-up', () => {
 });
 
 describe('the query of a moist-air look-up', () => {
-  it.each(['wetBulb', 'relativeHumidity', 'dewPoint'])('takes the dry bulb and %s', (by) => {
-    expect(readPsychrometricsQuery({ dryBulb: '80', [by]: '60', unit: 'degF' })).toEqual({
-      ok: true,
-      query: { dryBulb: 80, unit: 'degF', humidity: { by, value: 60 } },
-    });
+  it.each(['wetBulb', 'relativeHumidity', 'dewPoint', 'humidityRatio', 'enthalpy'])(
+    'takes the dry bulb and %s',
+    (by) => {
+      expect(readPsychrometricsQuery({ [by]: '60', dryBulb: '80', unit: 'degF' })).toEqual({
+        ok: true,
+        query: {
+          given: [
+            { by: 'dryBulb', value: 80 },
+            { by, value: 60 },
+          ],
+          unit: 'degF',
+          enthalpyUnit: 'Btu/lb',
+        },
+      });
+    },
+  );
+
+  it('takes any two, also those that determine no air: the engine says why', () => {
+    for (const one of AIR_QUANTITIES) {
+      for (const other of AIR_QUANTITIES) {
+        if (one === other) continue;
+        expect(readPsychrometricsQuery({ [one]: '1', [other]: '2', unit: 'K' }).ok).toBe(true);
+      }
+    }
+  });
+
+  it('counts an enthalpy in Btu/lb with °F and in kJ/kg with the others, unless it says otherwise', () => {
+    const unitOf = (query: Record<string, string>) => {
+      const read = readPsychrometricsQuery({ enthalpy: '30', wetBulb: '60', ...query });
+      return read.ok ? read.query.enthalpyUnit : null;
+    };
+    expect(unitOf({ unit: 'degC' })).toBe('kJ/kg');
+    expect(unitOf({ unit: 'K' })).toBe('kJ/kg');
+    expect(unitOf({ unit: 'degF', enthalpyUnit: 'kJ/kg' })).toBe('kJ/kg');
   });
 
   it.each([
-    [{}, ['dryBulb missing', 'unit missing', 'wetBulb give-one-of']],
+    [{}, ['dryBulb give-two-of', 'unit missing', 'wetBulb give-two-of']],
     [{ dryBulb: '80', unit: 'degF' }, ['wetBulb give-one-of']],
-    [{ dryBulb: '80', wetBulb: '67', dewPoint: '60', unit: 'degF' }, ['dewPoint give-only-one-of']],
+    [{ enthalpy: '30', unit: 'degF' }, ['dryBulb give-one-of']],
+    [{ dryBulb: '80', wetBulb: '67', dewPoint: '60', unit: 'degF' }, ['dewPoint give-only-two-of']],
+    [
+      { dryBulb: '80', wetBulb: '67', dewPoint: '60', enthalpy: '30', unit: 'degF' },
+      ['dewPoint give-only-two-of', 'enthalpy give-only-two-of'],
+    ],
     [
       { dryBulb: 'warm', wetBulb: 'wet', unit: 'deltaF' },
       ['dryBulb wrong-type', 'wetBulb wrong-type', 'unit wrong-unit'],
+    ],
+    [
+      { dryBulb: '80', humidityRatio: 'some', unit: 'degF', enthalpyUnit: 'kcal' },
+      ['enthalpyUnit unknown-value', 'humidityRatio wrong-type'],
     ],
     [{ dryBulb: '80', wetBulb: '67', unit: 'degF', elevation: '1' }, ['elevationUnit missing']],
   ])('tells every fault of %j', (query, faults) => {

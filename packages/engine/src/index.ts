@@ -26,7 +26,7 @@ export * from './refrigerants/saturation';
 export * from './psychrometrics/moist-air';
 export * from './psychrometrics/moist-air-pairs';
 export * from './psychrometrics/inch-pound-enthalpy';
-export { DRY_BULB_LIMITS } from './psychrometrics/moist-air-limits';
+export * from './psychrometrics/moist-air-range';
 export * from './psychrometrics/standard-atmosphere';
 export * from './methods/target-comparison';
 export * from './refrigerants/refrigerant-model';

@@ -14,6 +14,10 @@ export type LookUpMessage = MessageOf<LookUpFigures>;
 export const lookUpFaultText = (message: LookUpMessage, system: UnitSystem): string =>
   messageText(lookUpTexts, message, { system, names, print: formatStated });
 
+type ParameterFault = keyof typeof parameterTexts;
+
+export const isParameterFault = (kind: string): kind is ParameterFault => Object.hasOwn(parameterTexts, kind);
+
 /** Which of several query parameters to give. */
-export const parameterFaultText = (kind: keyof typeof parameterTexts, parameters: readonly string[]): string =>
+export const parameterFaultText = (kind: ParameterFault, parameters: readonly string[]): string =>
   parameterTexts[kind](structureFaultWords.alternatives(parameters));

@@ -94,6 +94,8 @@ const withUnit = (text: string, unit: ContractUnit): string => {
   return label === '' ? text : `${text} ${label}`;
 };
 
+export const decimalsOfUnit = (unit: ContractUnit): number => DECIMALS[unit];
+
 const decimalsOf = (kind: QuantityKind, unit: ContractUnit): number => (kind === 'count' ? 0 : DECIMALS[unit]);
 
 /** "52.0 °F": an SI value of the engine, rounded for the eye. */

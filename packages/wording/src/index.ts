@@ -11,6 +11,8 @@ export * from './sentences';
 export * from './fault-sentences';
 export * from './api-texts';
 export * from './english/api';
+export * from './air-refusal';
+export * from './format-amount';
 export type { StructureFault, StructureFaultKind } from './structure-fault';
 export type { Language } from './language';
 export * from './load-reading-help';

@@ -5,6 +5,7 @@ import { checkPageWords } from './english/check-page';
 import { faultWords } from './english/faults';
 import { findingPhrases } from './english/findings';
 import { looseChecksWords } from './english/loose-checks';
+import { airTexts } from './english/moist-air';
 import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { glanceWords } from './english/glance';
@@ -33,6 +34,7 @@ const english: Language = {
   findings: findingPhrases,
   faults: faultWords,
   structureFaults: structureFaultWords,
+  air: airTexts,
   readings: readingWords,
   readingHelp,
   setup: setupWords,

@@ -14,6 +14,7 @@ import type {
   StopFigures,
 } from '@chargewright/engine';
 import type { CriterionParts } from './criterion-parts';
+import type { AirFigures } from './english/moist-air';
 import type { checkPageWords } from './english/check-page';
 import type { looseChecksWords } from './english/loose-checks';
 import type { offlineWords } from './english/offline';
@@ -87,6 +88,7 @@ export interface Language {
   readonly findings: FindingPhrases;
   readonly faults: FaultWords;
   readonly structureFaults: StructureFaultWords;
+  readonly air: MessageTexts<AirFigures>;
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;

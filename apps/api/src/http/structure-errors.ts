@@ -1,12 +1,12 @@
 import type { ProblemError, StructureFault } from '@chargewright/contract/problem';
-import { parameterFaultText, structureFaultText, typeNames } from '@chargewright/wording';
+import { isParameterFault, parameterFaultText, structureFaultText, typeNames } from '@chargewright/wording';
 
 /** Faults of a request's shape as the API answers them. */
 export const structureErrors = (faults: readonly StructureFault[]): readonly ProblemError[] =>
   faults.map((fault) => ({ path: fault.path, message: structureMessage(fault) }));
 
 function structureMessage({ kind, path, part, expected, allowed = [] }: StructureFault): string {
-  if (kind === 'give-one-of' || kind === 'give-only-one-of') return parameterFaultText(kind, allowed);
+  if (isParameterFault(kind)) return parameterFaultText(kind, allowed);
   const right = expected === undefined ? allowed : [typeNames[expected]];
   // what is wrong with an amount's unit names it in the sentence; that it is not there does not
   const field = kind === 'missing' || kind === 'null' ? part : path;

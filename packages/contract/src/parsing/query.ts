@@ -51,6 +51,14 @@ export function exactlyOneOf(names: readonly string[], given: readonly string[])
   return given.slice(1).map((name) => fault('give-only-one-of', name, names));
 }
 
+/** The same where exactly two have to be given; `names` has the two most usual first. */
+export function exactlyTwoOf(names: readonly string[], given: readonly string[]): readonly StructureFault[] {
+  if (given.length === 0) return names.slice(0, 2).map((name) => fault('give-two-of', name, names));
+  const others = names.filter((name) => !given.includes(name));
+  if (given.length === 1) return exactlyOneOf(others, []);
+  return given.slice(2).map((name) => fault('give-only-two-of', name, names));
+}
+
 /** A fault of one query parameter. */
 export const fault = (kind: StructureFault['kind'], name: string, allowed?: readonly string[]): StructureFault => ({
   kind,

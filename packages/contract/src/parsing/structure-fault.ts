@@ -15,7 +15,9 @@ export interface StructureFault {
     | 'temperature-unit-on-difference'
     | 'too-long'
     | 'give-one-of'
-    | 'give-only-one-of';
+    | 'give-only-one-of'
+    | 'give-two-of'
+    | 'give-only-two-of';
   /** Dotted, down to the field: an amount answers as one. Empty for the whole body. */
   readonly path: string;
   /** Dotted, down to the very part that is at fault. */

@@ -1,5 +1,5 @@
 /** What cannot be in one value, whichever request it belongs to: each fault at the path of its field. */
-import { PRESSURE_LIMITS } from '../psychrometrics/moist-air-limits';
+import { AIR_PRESSURE_LIMITS } from '../psychrometrics/moist-air-range';
 import { ELEVATION_LIMITS, standardAtmospherePressurePa } from '../psychrometrics/standard-atmosphere';
 import { isGaugeUnit, lengthToM, pressureAsReadToPa, pressureToPa, temperatureToK } from '../units';
 import type { LengthUnit, PressureUnit, TemperatureUnit } from '../units';
@@ -159,7 +159,7 @@ export class Faults<More = never> {
       this.add(path, { code: 'gauge-unit-on-absolute', figures: {} });
       return null;
     }
-    const { min, max } = PRESSURE_LIMITS;
+    const { min, max } = AIR_PRESSURE_LIMITS;
     const pa = pressureAsReadToPa(pressure.value, pressure.unit);
     if (pa >= min && pa <= max) return pa;
     const figures = { least: { kind: 'pressurePa', value: min }, most: { kind: 'pressurePa', value: max } } as const;

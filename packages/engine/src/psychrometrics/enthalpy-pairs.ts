@@ -14,13 +14,8 @@ import {
   humidityRatioFromVapourPressure,
   vapourPressurePaFromHumidityRatio,
 } from './humidity-ratio';
-import {
-  assertMoistAirRange,
-  DRY_BULB_LIMITS,
-  PRESSURE_LIMITS,
-  RELATIVE_HUMIDITY_LIMITS,
-  SOLVED_K,
-} from './moist-air-limits';
+import { assertMoistAirRange, RELATIVE_HUMIDITY_LIMITS, SOLVED_K } from './moist-air-limits';
+import { AIR_PRESSURE_LIMITS, DRY_BULB_LIMITS } from './moist-air-range';
 import { dewPointKOrNull, moistAir, type MoistAir } from './moist-air-state';
 import { TRIPLE_POINT_K, waterVapourSaturationPressurePa } from './saturation-pressure';
 
@@ -94,7 +89,7 @@ export function moistAirFromDewPointAndEnthalpy(
   x: WithEnthalpy & { readonly dewPointK: number },
 ): MoistAir {
   const { dewPointK, enthalpy, pressurePa } = x;
-  assertInRange(pressurePa, PRESSURE_LIMITS);
+  assertInRange(pressurePa, AIR_PRESSURE_LIMITS);
   assertInRange(dewPointK, DEW_POINT_LIMITS);
   assertInRange(enthalpy, enthalpyLimits(equation));
   const vapourPressurePa = waterVapourSaturationPressurePa(dewPointK);
@@ -114,7 +109,7 @@ export function moistAirFromHumidityRatioAndEnthalpy(
   x: WithEnthalpy & { readonly humidityRatio: number },
 ): MoistAir {
   const { humidityRatio, enthalpy, pressurePa } = x;
-  assertInRange(pressurePa, PRESSURE_LIMITS);
+  assertInRange(pressurePa, AIR_PRESSURE_LIMITS);
   assertInRange(humidityRatio, PAIR_HUMIDITY_RATIO_LIMITS);
   assertInRange(enthalpy, enthalpyLimits(equation));
   const vapourPressurePa = vapourPressurePaFromHumidityRatio(x);
@@ -156,7 +151,7 @@ export function moistAirFromRelativeHumidityAndEnthalpy(
   x: WithEnthalpy & { readonly relativeHumidityRatio: number },
 ): MoistAir {
   const { relativeHumidityRatio, enthalpy, pressurePa } = x;
-  assertInRange(pressurePa, PRESSURE_LIMITS);
+  assertInRange(pressurePa, AIR_PRESSURE_LIMITS);
   assertInRange(relativeHumidityRatio, RELATIVE_HUMIDITY_LIMITS);
   assertInRange(enthalpy, { ...enthalpyLimits(equation), ...enthalpySpan(equation, x) });
   // split where saturation has a kink that would slow Newton

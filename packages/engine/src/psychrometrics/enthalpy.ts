@@ -4,7 +4,8 @@
  */
 import { assertInRange } from '../errors';
 import { MOLAR_MASS_RATIO } from './humidity-ratio';
-import { DRY_BULB_LIMITS, HUMIDITY_RATIO_LIMITS } from './moist-air-limits';
+import { HUMIDITY_RATIO_LIMITS } from './moist-air-limits';
+import { DRY_BULB_LIMITS } from './moist-air-range';
 import { FREEZING_K } from './psychrometric-equation';
 import { saturationPressureAndSlope } from './saturation-pressure';
 

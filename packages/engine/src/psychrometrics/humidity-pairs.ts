@@ -6,13 +6,8 @@
 import { assertInRange, EngineError } from '../errors';
 import { dewPointKFromVapourPressure } from './dew-point';
 import { humidityRatioFromVapourPressure, vapourPressurePaFromHumidityRatio } from './humidity-ratio';
-import {
-  assertMoistAirRange,
-  DRY_BULB_LIMITS,
-  PRESSURE_LIMITS,
-  RELATIVE_HUMIDITY_LIMITS,
-  SOLVED_K,
-} from './moist-air-limits';
+import { assertMoistAirRange, RELATIVE_HUMIDITY_LIMITS, SOLVED_K } from './moist-air-limits';
+import { AIR_PRESSURE_LIMITS, DRY_BULB_LIMITS } from './moist-air-range';
 import { moistAir, type MoistAir } from './moist-air-state';
 import { SATURATION_LIMITS, waterVapourSaturationPressurePa } from './saturation-pressure';
 
@@ -84,7 +79,7 @@ export function moistAirFromDewPointAndRelativeHumidity(x: {
   pressurePa: number;
 }): MoistAir {
   const { dewPointK, relativeHumidityRatio, pressurePa } = x;
-  assertInRange(pressurePa, PRESSURE_LIMITS);
+  assertInRange(pressurePa, AIR_PRESSURE_LIMITS);
   assertInRange(dewPointK, DEW_POINT_LIMITS);
   assertInRange(relativeHumidityRatio, RELATIVE_HUMIDITY_LIMITS);
   const vapourPressurePa = waterVapourSaturationPressurePa(dewPointK);
@@ -107,7 +102,7 @@ export function moistAirFromRelativeHumidityAndHumidityRatio(x: {
   pressurePa: number;
 }): MoistAir {
   const { relativeHumidityRatio, humidityRatio, pressurePa } = x;
-  assertInRange(pressurePa, PRESSURE_LIMITS);
+  assertInRange(pressurePa, AIR_PRESSURE_LIMITS);
   assertInRange(humidityRatio, { ...PAIR_HUMIDITY_RATIO_LIMITS, max: mostHumidityRatio(pressurePa) });
   assertInRange(relativeHumidityRatio, RELATIVE_HUMIDITY_LIMITS);
   if (relativeHumidityRatio === 0 && humidityRatio === 0) {

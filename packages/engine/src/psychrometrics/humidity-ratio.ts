@@ -7,11 +7,11 @@ import { assertInRange, EngineError } from '../errors';
 import {
   assertBelowTotalPressure,
   assertMoistAirRange,
-  DRY_BULB_LIMITS,
   HUMIDITY_RATIO_LIMITS,
   RELATIVE_HUMIDITY_LIMITS,
   VAPOUR_PRESSURE_LIMITS,
 } from './moist-air-limits';
+import { DRY_BULB_LIMITS } from './moist-air-range';
 import { SATURATION_LIMITS, waterVapourSaturationPressurePa } from './saturation-pressure';
 
 /** Ratio of the molar masses of water and dry air (ASHRAE Fundamentals (2017) ch. 1, eq. 20). */

@@ -1,21 +1,5 @@
 import { assertInRange, EngineError } from '../errors';
-import { temperatureToK } from '../units/temperature';
-
-/** Dry bulbs this layer answers for, −60 to 90 °C: the span of Table 2 of ASHRAE Fundamentals (2017) ch. 1 (span from memory). */
-export const DRY_BULB_LIMITS = {
-  quantity: 'dryBulbK',
-  min: temperatureToK(-60, 'degC'),
-  max: temperatureToK(90, 'degC'),
-  reason: 'outside-moist-air-range',
-} as const;
-
-/** Total pressures this layer answers for, 50 to 110 kPa: elevations of about −700 to 5,500 m (our choice). */
-export const PRESSURE_LIMITS = {
-  quantity: 'pressurePa',
-  min: 50e3,
-  max: 110e3,
-  reason: 'outside-moist-air-range',
-} as const;
+import { AIR_PRESSURE_LIMITS, DRY_BULB_LIMITS } from './moist-air-range';
 
 export const RELATIVE_HUMIDITY_LIMITS = {
   quantity: 'relativeHumidityRatio',
@@ -46,7 +30,7 @@ export const SOLVED_K = 2e-9;
 /** Refuses a dry bulb or a pressure outside the range of this layer, NaN included. */
 export function assertMoistAirRange(dryBulbK: number, pressurePa: number): void {
   assertInRange(dryBulbK, DRY_BULB_LIMITS);
-  assertInRange(pressurePa, PRESSURE_LIMITS);
+  assertInRange(pressurePa, AIR_PRESSURE_LIMITS);
 }
 
 /** Refuses water vapour that would leave no dry air: its pressure must stay below the total pressure. */

@@ -10,7 +10,8 @@ import { assertInRange, EngineError } from '../errors';
 import { bracketedNewton } from '../numerics/bracketed-newton';
 import { humidityRatioFromVapourPressure } from './humidity-ratio';
 import { DEW_POINT_LIMITS, vapourPressurePaUpToSaturation } from './humidity-pairs';
-import { DRY_BULB_LIMITS, PRESSURE_LIMITS, RELATIVE_HUMIDITY_LIMITS, SOLVED_K } from './moist-air-limits';
+import { RELATIVE_HUMIDITY_LIMITS, SOLVED_K } from './moist-air-limits';
+import { AIR_PRESSURE_LIMITS, DRY_BULB_LIMITS } from './moist-air-range';
 import { moistAir, type MoistAir } from './moist-air-state';
 import {
   bulbEquation,
@@ -27,7 +28,7 @@ const TOLERANCE_K = 1e-9;
 const WET_BULB_LIMITS = { ...DRY_BULB_LIMITS, quantity: 'wetBulbK' } as const;
 
 function assertWetBulbRange({ wetBulbK, pressurePa }: { wetBulbK: number; pressurePa: number }): void {
-  assertInRange(pressurePa, PRESSURE_LIMITS);
+  assertInRange(pressurePa, AIR_PRESSURE_LIMITS);
   assertInRange(wetBulbK, WET_BULB_LIMITS);
 }
 

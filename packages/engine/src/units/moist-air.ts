@@ -6,15 +6,19 @@ const M3_PER_FT3 = 0.3048 ** 3;
 /** The ASHRAE inch-pound datum is dry air at 0 °F, the SI datum dry air at 0 °C (ASHRAE Fundamentals (2017) ch. 1, eqs. 30 SI and IP): enthalpy does not convert by the factor alone. */
 const DRY_AIR_BTU_PER_LB_F = 0.24;
 
-/** Water vapour per mass of dry air: `1` is kg/kg or lb/lb; 1 lb = 7000 gr exactly (NIST SP 811 (2008), appendix B.8). */
-export const HUMIDITY_RATIO_UNITS = ['1', 'g/kg', 'gr/lb'] as const;
+/** Water vapour per mass of dry air; 1 lb = 7000 gr exactly (NIST SP 811 (2008), appendix B.8). */
+export const HUMIDITY_RATIO_UNITS = ['kg/kg', 'g/kg', 'lb/lb', 'gr/lb'] as const;
 export type HumidityRatioUnit = (typeof HUMIDITY_RATIO_UNITS)[number];
-const PER_HUMIDITY_RATIO: Readonly<Record<HumidityRatioUnit, number>> = { '1': 1, 'g/kg': 1000, 'gr/lb': 7000 };
+const PER_KG_PER_KG: Readonly<Record<HumidityRatioUnit, number>> = {
+  'kg/kg': 1,
+  'g/kg': 1000,
+  'lb/lb': 1,
+  'gr/lb': 7000,
+};
 
-export const humidityRatioToKgPerKg = (value: number, unit: HumidityRatioUnit): number =>
-  value / PER_HUMIDITY_RATIO[unit];
+export const humidityRatioToKgPerKg = (value: number, unit: HumidityRatioUnit): number => value / PER_KG_PER_KG[unit];
 export const humidityRatioFromKgPerKg = (humidityRatio: number, unit: HumidityRatioUnit): number =>
-  humidityRatio * PER_HUMIDITY_RATIO[unit];
+  humidityRatio * PER_KG_PER_KG[unit];
 
 /** Units of a moist-air enthalpy, each with its datum. */
 export const ENTHALPY_UNITS = ['Btu/lb', 'kJ/kg'] as const;

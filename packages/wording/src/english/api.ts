@@ -30,6 +30,8 @@ export const typeNames = {
 export const parameterTexts = {
   'give-one-of': (names: string) => `Give ${names}.`,
   'give-only-one-of': (names: string) => `Give only one of ${names}.`,
+  'give-two-of': (names: string) => `Give two of ${names}.`,
+  'give-only-two-of': (names: string) => `Give only two of ${names}.`,
 } as const;
 
 /** What cannot be in a look-up, with the figures of each sentence. */
@@ -39,13 +41,6 @@ export interface LookUpFigures {
   'not-above-vacuum': never;
   'above-critical-pressure': 'actual' | 'critical';
   'above-critical-temperature': 'actual' | 'critical';
-  'dry-bulb-outside-range': 'actual' | 'least' | 'most';
-  'humidity-outside-range': never;
-  'wet-bulb-above-dry-bulb': 'actual' | 'dryBulb';
-  'wet-bulb-too-low': 'actual' | 'least';
-  'dew-point-above-dry-bulb': 'actual' | 'dryBulb';
-  'dew-point-too-low': 'actual' | 'least';
-  'water-boils': never;
 }
 
 export const lookUpTexts: MessageTexts<LookUpFigures> = {
@@ -56,11 +51,4 @@ export const lookUpTexts: MessageTexts<LookUpFigures> = {
     `Pressure ${f.actual} is above the critical pressure ${f.critical}: there is no liquid any more.`,
   'above-critical-temperature': (f) =>
     `Temperature ${f.actual} is above the critical temperature ${f.critical}: there is no liquid any more.`,
-  'dry-bulb-outside-range': (f) => `Dry bulb ${f.actual} is outside ${f.least} to ${f.most}, where moist air is known.`,
-  'humidity-outside-range': 'Relative humidity lies between 0 and 100 %.',
-  'wet-bulb-above-dry-bulb': (f) => `Wet bulb ${f.actual} is above dry bulb ${f.dryBulb}`,
-  'wet-bulb-too-low': (f) => `Wet bulb ${f.actual} is below ${f.least}, which perfectly dry air would show.`,
-  'dew-point-above-dry-bulb': (f) => `Dew point ${f.actual} is above dry bulb ${f.dryBulb}`,
-  'dew-point-too-low': (f) => `Dew point ${f.actual} is below ${f.least}, where the formula ends.`,
-  'water-boils': 'Water boils at this temperature and elevation: there would be no air left.',
 };

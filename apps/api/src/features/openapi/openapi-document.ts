@@ -105,7 +105,8 @@ const PATHS: Readonly<Record<string, JsonObject>> = {
   '/api/v1/psychrometrics': {
     get: {
       operationId: 'lookUpMoistAir',
-      summary: 'Moist air from the dry bulb and exactly one of wet bulb, relative humidity and dew point.',
+      summary:
+        'Moist air from two of dry bulb, wet bulb, relative humidity, dew point, humidity ratio and enthalpy. Dew point with humidity ratio and wet bulb with enthalpy do not determine it.',
       parameters: queryParameters(psychrometricsParameters),
       responses: {
         ...answer('Every property; inch-pound units for °F, else SI.', reference(psychrometricsAnswer)),
