@@ -133,6 +133,8 @@ export const DRIVES = {
   maxHighPressurePsi: sometimes(10, between(300, 650)),
   chargeMode: sometimes(6, fc.boolean()),
   liftFt: sometimes(15, between(-30, 60)),
+  lineLengthFt: sometimes(15, between(5, 120)),
+  mostLineLengthFt: sometimes(15, between(30, 80)),
   makersChart: sometimes(4, fc.constant({ kind: 'superheat' })),
 
   humidityBy: mixed<HumidityBy>(

@@ -98,6 +98,7 @@ export const CAUTIONS = namesOf<CautionCode>({
   'cool-weather': 'reached',
   'low-head': 'reached',
   'long-lines': 'reached',
+  'line-set-too-long': 'reached',
   'makers-chart-not-used': 'reached',
   'elevation-assumed': 'reached',
   'gauge-not-zeroed': 'reached',

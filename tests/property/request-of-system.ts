@@ -82,6 +82,7 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
     unit: unit.difference,
   });
   const flow = (cfm: number) => ({ value: flowFromM3PerS(flowToM3PerS(cfm, 'cfm'), unit.flow), unit: unit.flow });
+  const length = (feet: number) => ({ value: lengthFromM(lengthToM(feet, 'ft'), unit.length), unit: unit.length });
   const tons = drives.nominalCapacityTon;
   return {
     refrigerant: drives.refrigerant,
@@ -119,9 +120,11 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
       })),
       chargeMode: drives.chargeMode,
       makersChart: drives.makersChart,
-      lineSet: mapped(drives.liftFt, (feet) => ({
-        lift: { value: lengthFromM(lengthToM(feet, 'ft'), unit.length), unit: unit.length },
-      })),
+      lineSet: defined({
+        lift: mapped(drives.liftFt, length),
+        length: mapped(drives.lineLengthFt, length),
+        mostLength: mapped(drives.mostLineLengthFt, length),
+      }),
     }),
   };
 }

@@ -3,6 +3,7 @@
  * records. Rows are parsed whenever they are read, since the store of a browser outlives the version of the page that wrote it.
  */
 import {
+  AIRFLOW_PATHS,
   HIGH_SIDE_PORTS,
   LEAK_SEARCHES,
   METERING_DEVICES,
@@ -15,26 +16,13 @@ import {
   SYSTEM_KINDS,
 } from '@chargewright/engine';
 import * as z from 'zod';
+import { TYPED_FIELDS } from './typed-fields';
 
 // zod would try `new Function`, which the page's content security policy reports as a violation.
 z.config({ jitless: true });
 
 /** The version of the row shapes below; it rises with every change that older rows do not fulfil. */
 export const STORED_CHECK_SCHEMA = 1;
-
-/** Fields of the setup and the visit that hold a typed number. */
-export const STORED_TYPED_FIELDS = [
-  'elevation',
-  'targetSubcooling',
-  'targetSuperheat',
-  'nominalCapacity',
-  'designAirflow',
-  'factoryCharge',
-  'maxHighPressure',
-  'lowestReturnDryBulb',
-  'instrumentsCheckedDaysAgo',
-  'addedThisVisit',
-] as const;
 
 const MAX_TEXT = 200;
 const MAX_READINGS = 10_000;
@@ -45,7 +33,7 @@ const time = z.iso.datetime();
 const typedValue = { text, unit: text };
 const fieldKey = z.union([
   z.templateLiteral(['reading:', z.enum(READING_IDS)]),
-  z.templateLiteral(['typed:', z.enum(STORED_TYPED_FIELDS)]),
+  z.templateLiteral(['typed:', z.enum(TYPED_FIELDS)]),
 ]);
 
 const setup = z.object({
@@ -58,6 +46,9 @@ const setup = z.object({
   targetSubcoolingPort: z.exactOptional(z.enum(['liquid', 'discharge'])),
   chargeMode: z.exactOptional(z.enum(['on', 'off', 'no-inverter'])),
   procedure: z.exactOptional(z.enum(PROCEDURE_IDS)),
+  alteration: z.exactOptional(z.boolean()),
+  highVelocity: z.exactOptional(z.boolean()),
+  airflowPath: z.exactOptional(z.enum([...AIRFLOW_PATHS, 'measured'])),
 });
 
 const visit = z.object({
@@ -66,6 +57,10 @@ const visit = z.object({
   iceSeen: z.exactOptional(z.boolean()),
   leakSearch: z.exactOptional(z.enum(LEAK_SEARCHES)),
   commissioning: z.exactOptional(z.boolean()),
+  headRaised: z.exactOptional(z.boolean()),
+  firstSet: z.exactOptional(
+    z.object({ takenAt: time, readings: z.partialRecord(z.enum(READING_IDS), z.object(typedValue)) }),
+  ),
 });
 
 const row = <Kind extends string, Body extends z.ZodType>(kind: Kind, body: Body) =>
@@ -81,7 +76,7 @@ export const storedCheckRow = row(
     deletedAt: z.exactOptional(time),
     setup,
     visit,
-    typed: z.partialRecord(z.enum(STORED_TYPED_FIELDS), z.object(typedValue)),
+    typed: z.partialRecord(z.enum(TYPED_FIELDS), z.object(typedValue)),
     /** Readings that an adjustment of the system made void. */
     retired: z.array(id).max(MAX_READINGS),
     /** How many readings stand, kept here so that a list need not read them all. */

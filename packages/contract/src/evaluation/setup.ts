@@ -15,6 +15,7 @@ const required = {
 
 const lineSet = object({
   length: z.exactOptional(length),
+  mostLength: z.exactOptional(length.meta({ description: 'The longest the maker allows without further measures.' })),
   lift: z.exactOptional(length),
   /** Length that the factory charge allows for. */
   included: z.exactOptional(length),

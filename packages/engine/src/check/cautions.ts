@@ -26,6 +26,7 @@ const COLDER_THAN_AIR_K = differenceToK(2, 'deltaF');
 const LONG_LIFT_M = lengthToM(20, 'ft');
 /** Rounding of the conversions; far below any gauge. */
 const SLACK_PA = 1e-3;
+const SLACK_M = 1e-9;
 
 /** Liquid less suction pressure that a valve needs to work (CEC Reference Residential Appendices, RA1.2, winter setup: least of its band). */
 const LEAST_VALVE_DIFFERENCE_PA: Readonly<Partial<Record<RefrigerantId, number>>> = {
@@ -48,6 +49,7 @@ type PlainCautionCode = Extract<
   | 'filter-or-coil-dirty'
 >;
 
+const metres = (value: number) => ({ kind: 'lengthM', value }) as const satisfies Figure;
 const temperature = (value: number) => ({ kind: 'temperatureK', value }) as const satisfies Figure;
 
 export function findCautions(
@@ -208,7 +210,12 @@ function setupCautions({ setup }: CheckInput): readonly Caution[] {
     found.push({ code: 'setup-assumed', figures: { fields: { kind: 'setup', value: setup.assumed } } });
   }
   if (setup.liftM !== undefined && setup.liftM > LONG_LIFT_M) {
-    found.push({ code: 'long-lines', figures: { lift: { kind: 'lengthM', value: setup.liftM } } });
+    found.push({ code: 'long-lines', figures: { lift: metres(setup.liftM) } });
+  }
+  const { lineLengthM, mostLineLengthM } = setup;
+  if (lineLengthM !== undefined && mostLineLengthM !== undefined && lineLengthM > mostLineLengthM + SLACK_M) {
+    const figures = { length: metres(lineLengthM), most: metres(mostLineLengthM) };
+    found.push({ code: 'line-set-too-long', figures });
   }
   return found;
 }

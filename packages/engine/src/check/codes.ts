@@ -105,6 +105,7 @@ export interface CautionFigures {
   'cool-weather': 'outdoor';
   'low-head': 'difference' | 'least';
   'long-lines': 'lift';
+  'line-set-too-long': 'length' | 'most';
   'makers-chart-not-used': never;
   'elevation-assumed': never;
   'gauge-not-zeroed': never;

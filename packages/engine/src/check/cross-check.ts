@@ -58,6 +58,7 @@ function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext
     }
   }
   faults.notNegative('setup.lineSet.length', lineSet?.length?.value);
+  faults.notNegative('setup.lineSet.mostLength', lineSet?.mostLength?.value);
   faults.notNegative('setup.lineSet.included', lineSet?.included?.value);
   if (lineSet?.lift !== undefined) faults.finite('setup.lineSet.lift', lineSet.lift.value);
   return context;

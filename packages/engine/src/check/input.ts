@@ -53,6 +53,8 @@ export interface CheckSetup {
   readonly maxHighPressurePa?: number;
   readonly chargeMode?: boolean;
   readonly liftM?: number;
+  readonly lineLengthM?: number;
+  readonly mostLineLengthM?: number;
   /** A maker's table was given, by which nothing is judged yet. */
   readonly makersChartGiven: boolean;
 }

@@ -94,6 +94,8 @@ function readSetup(setup: SetupInput): CheckSetup {
     ),
     ...present('chargeMode', setup.chargeMode),
     ...present('liftM', convert(setup.lineSet?.lift, lengthToM)),
+    ...present('lineLengthM', convert(setup.lineSet?.length, lengthToM)),
+    ...present('mostLineLengthM', convert(setup.lineSet?.mostLength, lengthToM)),
   };
 }
 

@@ -114,6 +114,8 @@ export interface SetupInput {
   readonly makersChart?: { readonly kind: string };
   readonly lineSet?: {
     readonly length?: Amount<LengthUnit>;
+    /** The longest the maker allows without further measures. */
+    readonly mostLength?: Amount<LengthUnit>;
     readonly lift?: Amount<LengthUnit>;
     readonly included?: Amount<LengthUnit>;
   };

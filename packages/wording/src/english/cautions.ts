@@ -32,6 +32,8 @@ export const cautionTexts: MessageTexts<CautionFigures> = {
     `Only ${f.difference} between high and low side (at least ${f.least}): the valve may not be fed fully.`,
   'makers-chart-not-used':
     'The maker’s table that was given is not judged by yet. Read its target at these conditions and enter that.',
+  'line-set-too-long': (f) =>
+    `The line set is ${f.length} long; the maker’s limit is ${f.most}. Follow the maker’s rules for long lines: charge, oil, pipe size.`,
   'long-lines': (f) => `The line set lifts ${f.lift}. Follow the maker’s rules for long lines: charge, oil, pipe size.`,
   'elevation-assumed': 'Sea level is assumed. Enter the elevation: gauge pressures count from the air around you.',
   'gauge-not-zeroed': 'The gauges are not known to be zeroed. Zero them in the open air.',

@@ -70,6 +70,11 @@ export const checkPageWords = {
     confirmRestart: 'Restart the clock and ask every reading again?',
     iceSeen: 'Ice or frost on the coil or the suction line',
     commissioning: 'New installation: the line-set charge is still to be added',
+    headRaised: 'Head pressure raised on purpose, by the maker’s method',
+    keepFirstSet: 'Keep these as the first set, read all again',
+    firstSetNote: (minutes: number) =>
+      `First set kept ${minutes < 1 ? 'just now' : `${minutes} min ago`}. The second counts from 5 min on.`,
+    forgetFirstSet: 'Forget the first set',
   },
   preflight: {
     title: 'Before you read',

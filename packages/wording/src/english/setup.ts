@@ -94,6 +94,12 @@ const airflowPath: SetupFieldWords<AirflowPath> = {
   },
 };
 
+/** Not a code of the engine, which takes measured airflow where no path is named. */
+const airflowProof: SetupFieldWords<AirflowPath | 'measured'> = {
+  ...field('Airflow is shown by', 'proof of the airflow', 'Whatever the way, with the filter in place.'),
+  options: { measured: option('Measuring it'), ...airflowPath.options },
+};
+
 /** Numbers of the setup and the visit, by their names in the contract. */
 const numbers = {
   elevation: field('Elevation', 'elevation', 'Of the site. Gauge pressures count from the air around you.'),
@@ -105,6 +111,8 @@ const numbers = {
     'From this maker’s chart at today’s conditions. Empty: the printed makers’ chart is used.',
   ),
   superheatRange: field('Superheat range', 'superheat range', 'The maker’s range for the valve.'),
+  superheatLow: field('Least superheat', 'least superheat', 'The maker’s range for the valve; it takes both ends.'),
+  superheatHigh: field('Most superheat', 'most superheat', 'The maker’s range for the valve; it takes both ends.'),
   nominalCapacity: field('Nominal capacity', 'nominal capacity', 'From the model number or the nameplate.'),
   designAirflow: field('Design airflow', 'design airflow', 'From the design or the maker’s data.'),
   expectedCompressorCurrent: field(
@@ -123,10 +131,17 @@ const numbers = {
   runningMinutes: field('Running for', 'running time', 'Since the start or the last adjustment.'),
   addedThisVisit: field('Added on this visit', 'amount added on this visit', 'All steps together.'),
   addedBefore: field('Added before', 'amount added before'),
-  additionsOnEarlierVisits: field('Earlier additions', 'number of earlier additions'),
+  additionsOnEarlierVisits: field(
+    'Topped up before',
+    'number of earlier additions',
+    'How many times on earlier visits, by the record or the owner.',
+  ),
   hoursOff: field('Off for', 'hours the system was off', 'Before this start.'),
-  lift: field('Lift', 'lift of the line set'),
+  lift: field('Lift', 'lift of the line set', 'How far the pipes climb between the two coils.'),
   length: field('Line length', 'length of the line set'),
+  lineLength: field('Line length', 'length of the line set', 'Liquid line, one way.'),
+  mostLength: field('Longest line allowed', 'longest line allowed'),
+  mostLineLength: field('Longest line allowed', 'longest line allowed', 'By the maker, without further measures.'),
   included: field('Length in the factory charge', 'line length covered by the factory charge'),
 };
 
@@ -147,6 +162,7 @@ export const setupWords = {
   alteration: field('Alteration', 'alteration', 'An older system that was altered: some rules ask less airflow of it.'),
   highVelocity: field('Small-duct, high velocity', 'small-duct high-velocity system'),
   airflowPath,
+  airflowProof,
   meteringDevice,
   mode,
   kind,

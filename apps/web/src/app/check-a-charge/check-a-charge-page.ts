@@ -11,7 +11,8 @@ import {
   untracked,
 } from '@angular/core';
 import { checkPageWords, looseChecksWords, safetyWords } from '@chargewright/wording';
-import type { DraftSetup, DraftVisit, FieldKey, TypedField } from '../loose-checks/check-draft';
+import type { TypedField } from '@chargewright/contract/typed-fields';
+import type { DraftSetup, DraftVisit, FieldKey } from '../loose-checks/check-draft';
 import { LooseChecks } from '../loose-checks/loose-checks';
 import { StorageNote } from '../loose-checks/storage-note';
 import { NOW } from '../loose-checks/time-and-ids';
@@ -21,16 +22,18 @@ import { UnitPreference } from '../quantities/unit-preference';
 import { exampleCheck } from './example-check';
 import { readingKey, typedKey } from './field-key';
 import { afterPaint } from '../loose-checks/after-paint';
+import { FirstSet } from './first-set';
 import { FindingAnnouncer } from './finding-announcer';
 import { goToControl } from './next-step-place';
 import { Glance } from './glance';
 import { Judge } from './judge';
 import { loadLaterParts } from './later-parts';
 import { PageClock } from './page-clock';
+import { sectionWords, setupFields, setupMoreFields, VISIT_FIELDS } from './page-fields';
 import { Preflight } from './preflight';
 import { ReadingHelpTexts } from './reading-help-texts';
 import { ReadingRow } from './reading-row';
-import { humidityShown, readingSections, type SectionId } from './reading-order';
+import { humidityShown, readingSections } from './reading-order';
 import { fieldView, inputId, isOpen, type FieldView, type PageState } from './reading-rows';
 import { RememberedElevation } from './remembered-elevation';
 import { asksTargetPort, runningMinutes } from './request-from-draft';
@@ -45,29 +48,6 @@ import { VisitClock } from './visit-clock';
 
 const MS_PER_MINUTE = 60_000;
 
-const SETUP_MORE: readonly TypedField[] = [
-  'nominalCapacity',
-  'factoryCharge',
-  'designAirflow',
-  'maxHighPressure',
-  'targetSuperheat',
-];
-const VISIT_FIELDS: readonly TypedField[] = ['lowestReturnDryBulb', 'instrumentsCheckedDaysAgo', 'addedThisVisit'];
-
-const sectionWords: Readonly<Record<SectionId, { title: string; note: string; safety: string }>> = {
-  outdoors: {
-    title: checkPageWords.sections.outdoors,
-    note: checkPageWords.sections.outdoorsNote,
-    safety: safetyWords.hoses,
-  },
-  indoors: {
-    title: checkPageWords.sections.indoors,
-    note: checkPageWords.sections.indoorsNote,
-    safety: safetyWords.climbing,
-  },
-  more: { title: checkPageWords.readings.moreReadings, note: '', safety: safetyWords.discharge },
-};
-
 /** Text fields bring the keyboard up, which takes the sheet's room. */
 const isTextField = (target: EventTarget | null): boolean =>
   target instanceof HTMLInputElement && target.type === 'text';
@@ -77,6 +57,7 @@ const isTextField = (target: EventTarget | null): boolean =>
   selector: 'app-check-a-charge-page',
   imports: [
     FindingAnnouncer,
+    FirstSet,
     Glance,
     InstallButton,
     NetworkNote,
@@ -162,6 +143,10 @@ export class CheckAChargePage {
     system: this.system(),
     nowMs: this.clock.nowMs(),
   }));
+  protected readonly nowMs = computed(() => this.clock.nowMs());
+  protected readonly asksSecondSet = computed(
+    () => this.evaluation().result?.overall.nextStep.code === 'read-twice' && this.hasReadings(),
+  );
   protected readonly byHumidity = computed(() => humidityShown(this.draft(), this.humidityChosen()));
   protected readonly sections = computed(() => {
     const page = this.pageState();
@@ -173,8 +158,8 @@ export class CheckAChargePage {
   });
   protected readonly asked = computed(() => this.sections().filter(({ id }) => id !== 'more'));
   protected readonly more = computed(() => this.sections().filter(({ id }) => id === 'more'));
-  protected readonly setupFields = computed(() => this.viewsOf(this.setupTypedFields()));
-  protected readonly setupMoreFields = computed(() => this.viewsOf(SETUP_MORE));
+  protected readonly setupFields = computed(() => this.viewsOf(setupFields(this.draft().setup)));
+  protected readonly setupMoreFields = computed(() => this.viewsOf(setupMoreFields(this.draft().setup)));
   protected readonly visitFields = computed(() => this.viewsOf(VISIT_FIELDS));
   protected readonly minutes = computed(() => runningMinutes(this.draft(), this.clock.nowMs()));
   protected readonly hasExample = computed(() =>
@@ -301,6 +286,17 @@ export class CheckAChargePage {
     this.goTo('app-visit-clock button');
   }
 
+  protected keepFirstSet(): void {
+    this.checks.keepFirstSet();
+    this.clock.tick();
+    this.goTo('app-number-field input');
+  }
+
+  protected forgetFirstSet(): void {
+    this.checks.forgetFirstSet();
+    this.clock.tick();
+  }
+
   protected switchHumidity(): void {
     this.humidityChosen.set(!this.byHumidity());
     const id = this.byHumidity() ? 'returnRelativeHumidity' : 'returnWetBulb';
@@ -343,11 +339,6 @@ export class CheckAChargePage {
 
   protected notice(target: EventTarget | null): void {
     this.fieldInUse.set(isTextField(target));
-  }
-
-  private setupTypedFields(): readonly TypedField[] {
-    const { meteringDevice } = this.draft().setup;
-    return meteringDevice === 'txv' || meteringDevice === 'eev' ? ['elevation', 'targetSubcooling'] : ['elevation'];
   }
 
   private viewsOf(fields: readonly TypedField[]): readonly FieldView[] {

@@ -1,12 +1,7 @@
 import type { ReadingId } from '@chargewright/engine';
 import { READING_IDS } from '@chargewright/engine';
-import {
-  TYPED_FIELDS,
-  type CheckDraft,
-  type FieldKey,
-  type TypedField,
-  type TypedValue,
-} from '../loose-checks/check-draft';
+import { TYPED_FIELDS, type TypedField } from '@chargewright/contract/typed-fields';
+import type { CheckDraft, FieldKey, TypedValue } from '../loose-checks/check-draft';
 
 export const readingKey = (id: ReadingId): FieldKey => `reading:${id}`;
 export const typedKey = (field: TypedField): FieldKey => `typed:${field}`;
@@ -17,14 +12,22 @@ export const ALL_FIELD_KEYS: readonly FieldKey[] = [...READING_IDS.map(readingKe
 export function pathOf(key: FieldKey): string {
   const [family, name] = key.split(':') as ['reading' | 'typed', string];
   if (family === 'reading') return `readings.${name}`;
-  return VISIT_FIELDS.has(name) ? `visit.${name}` : `setup.${name}`;
+  return TYPED_PATHS[name as TypedField] ?? `setup.${name}`;
 }
 
-const VISIT_FIELDS: ReadonlySet<string> = new Set([
-  'lowestReturnDryBulb',
-  'instrumentsCheckedDaysAgo',
-  'addedThisVisit',
-] satisfies TypedField[]);
+/** Where they do not stand in the setup by their own name. */
+const TYPED_PATHS: Readonly<Partial<Record<TypedField, string>>> = {
+  superheatLow: 'setup.superheatRange.low',
+  superheatHigh: 'setup.superheatRange.high',
+  lineLength: 'setup.lineSet.length',
+  mostLineLength: 'setup.lineSet.mostLength',
+  lift: 'setup.lineSet.lift',
+  lowestReturnDryBulb: 'visit.lowestReturnDryBulb',
+  instrumentsCheckedDaysAgo: 'visit.instrumentsCheckedDaysAgo',
+  hoursOff: 'visit.hoursOff',
+  addedThisVisit: 'visit.addedThisVisit',
+  additionsOnEarlierVisits: 'visit.additionsOnEarlierVisits',
+};
 
 /** What stands in a field now: what is being typed, else what was committed. */
 export function valueIn(draft: CheckDraft, key: FieldKey): TypedValue | undefined {

@@ -4,6 +4,7 @@
  */
 export const loadLaterParts = (): Promise<unknown> =>
   Promise.allSettled([
+    import('./first-set'),
     import('./glance'),
     import('./preflight'),
     import('./result-column'),

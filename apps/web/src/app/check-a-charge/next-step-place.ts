@@ -16,6 +16,7 @@ const PLACES: Readonly<Partial<Record<NextStepCode, StepPlace>>> = {
   'state-the-port': choice('setup', 'highSidePort'),
   'find-nameplate-target': { view: 'readings', control: '#typed-targetSubcooling' },
   'record-conditions': { view: 'readings', control: 'app-visit-clock button' },
+  'read-twice': { view: 'readings', control: 'app-first-set button' },
   'leak-first': choice('readings', 'leakSearch'),
 };
 

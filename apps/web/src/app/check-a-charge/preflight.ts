@@ -14,6 +14,7 @@ import { ChoiceGroup, type Choice } from './choice-group';
 import { ReadingRow } from './reading-row';
 import type { FieldView } from './reading-rows';
 import type { FieldTyped } from './setup-form';
+import { TickBox } from './tick-box';
 
 const words = checkPageWords.preflight;
 
@@ -30,7 +31,7 @@ const LEAK_CHOICES: readonly Choice<LeakSearch>[] = LEAK_SEARCHES.map((value) =>
 /** What is looked at before a reading counts: one tap each, all of it optional. */
 @Component({
   selector: 'app-preflight',
-  imports: [ChoiceGroup, Glyph, ReadingRow],
+  imports: [ChoiceGroup, Glyph, ReadingRow, TickBox],
   templateUrl: './preflight.html',
   styleUrl: './preflight.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

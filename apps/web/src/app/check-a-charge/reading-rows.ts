@@ -1,7 +1,8 @@
 /** What the page shows of each field: words, what was typed, how old it is, and what is wrong with it. */
 import type { Fault, ReadingId } from '@chargewright/engine';
 import { checkPageWords, faultText, readingWords, setupWords, type UnitSystem } from '@chargewright/wording';
-import type { CheckDraft, FieldKey, TypedField, TypedValue } from '../loose-checks/check-draft';
+import type { TypedField } from '@chargewright/contract/typed-fields';
+import type { CheckDraft, FieldKey, TypedValue } from '../loose-checks/check-draft';
 import { canBeNegative, systemOfUnit, unitsOf } from '../quantities/field-units';
 import type { NumberProblem } from '../quantities/parse-number';
 import type { Evaluation } from './evaluation';
@@ -37,7 +38,8 @@ export const inputId = (key: FieldKey): string => key.replace(':', '-');
 
 const belongsTo = (fault: Fault, key: FieldKey): boolean => {
   const path = pathOf(key);
-  return fault.path === path || fault.path.startsWith(`${path}.`);
+  // a fault of a range belongs to both of its ends
+  return fault.path === path || fault.path.startsWith(`${path}.`) || path.startsWith(`${fault.path}.`);
 };
 
 /** What is wrong with a field, in words; an empty list when nothing is. */

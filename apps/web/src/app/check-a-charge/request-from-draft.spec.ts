@@ -69,6 +69,65 @@ describe('requestFromDraft', () => {
     expect(modeOf('off', 'heating')).toBeUndefined();
   });
 
+  it('says how the airflow is shown under the certificates of 2019, and nowhere else', () => {
+    const setupOf = (procedure: CheckDraft['setup']['procedure'] & string, airflowPath: 'duct-table' | 'measured') =>
+      requestFromDraft(
+        draft({ setup: { refrigerant: 'R-22', meteringDevice: 'txv', procedure, airflowPath, alteration: true } }),
+        NOW,
+      ).request?.setup;
+    expect(setupOf('cec-ra3.2-2019-rater', 'duct-table')).toMatchObject({
+      airflowPath: 'duct-table',
+      alteration: true,
+    });
+    expect(setupOf('cec-ra3.2-2019-rater', 'measured')).not.toHaveProperty('airflowPath');
+    expect(setupOf('general-rules', 'duct-table')).not.toHaveProperty('airflowPath');
+  });
+
+  it('makes a range of its two ends, and nothing of one', () => {
+    const asked = (typed: CheckDraft['typed']) => requestFromDraft(draft({ typed }), NOW);
+    const low = { text: '6', unit: 'deltaF' };
+    expect(asked({ superheatLow: low }).request?.setup).not.toHaveProperty('superheatRange');
+    expect(
+      asked({ superheatLow: low, superheatHigh: { text: '14', unit: 'deltaF' } }).request?.setup.superheatRange,
+    ).toEqual({ low: 6, high: 14, unit: 'deltaF' });
+    const mixed = asked({ superheatLow: low, superheatHigh: { text: '8', unit: 'deltaC' } });
+    expect(mixed.request?.setup).not.toHaveProperty('superheatRange');
+    expect(mixed.faults).toEqual([{ code: 'wrong-unit', figures: {}, path: 'setup.superheatRange.high' }]);
+  });
+
+  it('puts the line set, the hours off and the earlier additions where the engine looks for them', () => {
+    const { request } = requestFromDraft(
+      draft({
+        typed: {
+          lineLength: { text: '45', unit: 'ft' },
+          mostLineLength: { text: '50', unit: 'ft' },
+          lift: { text: '12', unit: 'ft' },
+          stationPressure: { text: '14.2', unit: 'psia' },
+          hoursOff: { text: '5', unit: 'h' },
+          additionsOnEarlierVisits: { text: '1', unit: 'times' },
+        },
+      }),
+      NOW,
+    );
+    expect(request?.setup.lineSet).toEqual({
+      length: { value: 45, unit: 'ft' },
+      mostLength: { value: 50, unit: 'ft' },
+      lift: { value: 12, unit: 'ft' },
+    });
+    expect(request?.setup.stationPressure).toEqual({ value: 14.2, unit: 'psia' });
+    expect(request?.visit).toMatchObject({ hoursOff: 5, additionsOnEarlierVisits: 1 });
+  });
+
+  it('holds the second set against the first, as far apart as they were read', () => {
+    const firstSet = { takenAt: ago(480), readings: { returnWetBulb: { text: '66.0', unit: 'degF' } } };
+    const visit = { preflight: {}, firstSet };
+    const second = { returnWetBulb: reading('returnWetBulb', '65.8', 'degF', ago(120)) };
+    const earlier = (readings: CheckDraft['readings']) =>
+      requestFromDraft(draft({ visit, readings }), NOW).request?.visit?.earlier;
+    expect(earlier(second)).toMatchObject({ minutesAgo: 6, readings: { returnWetBulb: { value: 66, unit: 'degF' } } });
+    expect(earlier({})?.minutesAgo).toBe(8);
+  });
+
   it('gives a reading its number, unit, age, and the step its decimals tell', () => {
     const { request } = requestFromDraft(
       draft({ readings: { returnWetBulb: reading('returnWetBulb', '64,50', 'degF', ago(90)) } }),

@@ -10,7 +10,8 @@ import type {
   VisitInput,
 } from '@chargewright/engine';
 import { READING_IDS } from '@chargewright/engine';
-import type { CheckDraft, DraftSetup, FieldKey, TypedField } from '../loose-checks/check-draft';
+import type { TypedField } from '@chargewright/contract/typed-fields';
+import type { CheckDraft, DraftSetup, FieldKey, FirstSet } from '../loose-checks/check-draft';
 import { isUnitOf } from '../quantities/field-units';
 import { parseNumber, type NumberProblem, type TypedNumber } from '../quantities/parse-number';
 import { ALL_FIELD_KEYS, pathOf, readingKey, typedKey, valueIn } from './field-key';
@@ -57,6 +58,10 @@ export const asksTargetPort = ({ highSidePort, meteringDevice }: DraftSetup): bo
 export const asksChargeMode = ({ mode, kind }: DraftSetup): boolean =>
   mode !== 'heating' && kind !== 'mini-split' && kind !== 'multi-split';
 
+/** Only the certificates of 2019 ask less airflow of some systems, and permit a way in place of measuring it. */
+export const asksAirflowProof = ({ procedure }: DraftSetup): boolean =>
+  procedure === 'cec-ra3.2-2019-installer' || procedure === 'cec-ra3.2-2019-rater';
+
 export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsRequest {
   const entries = new Map<FieldKey, Entry>();
   const problems = new Map<FieldKey, NumberProblem>();
@@ -71,7 +76,8 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
     else faults.push({ code: 'wrong-unit', figures: {}, path: pathOf(key) });
   }
 
-  const { refrigerant, meteringDevice, chargeMode, targetSubcoolingPort, procedure, ...choices } = draft.setup;
+  const { refrigerant, meteringDevice, chargeMode, targetSubcoolingPort, procedure, airflowPath, ...choices } =
+    draft.setup;
   if (refrigerant === undefined || meteringDevice === undefined) return { request: null, problems, faults };
 
   const setup: SetupInput = {
@@ -82,8 +88,12 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
     ...(chargeMode &&
       chargeMode !== 'no-inverter' &&
       asksChargeMode(draft.setup) && { chargeMode: chargeMode === 'on' }),
+    ...(airflowPath && airflowPath !== 'measured' && asksAirflowProof(draft.setup) && { airflowPath }),
+    ...superheatRange(entries, faults),
+    ...lineSet(entries),
     ...amounts(entries, [
       'elevation',
+      'stationPressure',
       'targetSubcooling',
       'targetSuperheat',
       'nominalCapacity',
@@ -110,15 +120,69 @@ const amounts = (entries: ReadonlyMap<FieldKey, Entry>, fields: readonly TypedFi
     }),
   ) as Readonly<Record<string, Amount<never>>>;
 
+/** Numbers whose unit is in their name. */
+const counts = (entries: ReadonlyMap<FieldKey, Entry>, fields: readonly TypedField[]) =>
+  Object.fromEntries(
+    fields.flatMap((field) => {
+      const entry = entries.get(typedKey(field));
+      return entry ? [[field, entry.value]] : [];
+    }),
+  );
+
+/** A range takes both of its ends, in one unit. */
+function superheatRange(entries: ReadonlyMap<FieldKey, Entry>, faults: Fault[]): Pick<SetupInput, 'superheatRange'> {
+  const low = entries.get('typed:superheatLow');
+  const high = entries.get('typed:superheatHigh');
+  if (!low || !high) return {};
+  if (low.unit !== high.unit) {
+    faults.push({ code: 'wrong-unit', figures: {}, path: pathOf('typed:superheatHigh') });
+    return {};
+  }
+  const unit = low.unit as NonNullable<SetupInput['superheatRange']>['unit'];
+  return { superheatRange: { low: low.value, high: high.value, unit } };
+}
+
+function lineSet(entries: ReadonlyMap<FieldKey, Entry>): Pick<SetupInput, 'lineSet'> {
+  const {
+    lineLength: length,
+    mostLineLength: mostLength,
+    lift,
+  } = amounts(entries, ['lineLength', 'mostLineLength', 'lift']);
+  if (!length && !mostLength && !lift) return {};
+  return { lineSet: { ...(length && { length }), ...(mostLength && { mostLength }), ...(lift && { lift }) } };
+}
+
+/** The set kept before, as old as it was when the first of the present readings was taken. */
+function earlierOf(
+  draft: CheckDraft,
+  { takenAt, readings }: FirstSet,
+  nowMs: number,
+): NonNullable<VisitInput['earlier']> {
+  const times = Object.values(draft.readings).map((reading) => Date.parse(reading.takenAt));
+  const until = Math.min(nowMs, ...times.filter((time) => time > Date.parse(takenAt)));
+  const read: Partial<Record<ReadingId, ReadingInput>> = {};
+  for (const id of READING_IDS) {
+    const typed = readings[id];
+    const parsed = typed && parseNumber(typed.text);
+    if (parsed?.state !== 'number' || !isUnitOf(readingKey(id), typed!.unit)) continue;
+    read[id] = {
+      value: parsed.number.value,
+      unit: typed!.unit as ReadingInput['unit'],
+      resolution: parsed.number.resolution,
+    };
+  }
+  return { minutesAgo: elapsedMs(takenAt, until) / MS_PER_MINUTE, readings: read };
+}
+
 function visitOf(draft: CheckDraft, entries: ReadonlyMap<FieldKey, Entry>, nowMs: number): VisitInput {
-  const { runningSince: _, preflight, ...choices } = draft.visit;
+  const { runningSince: _, preflight, firstSet, ...choices } = draft.visit;
   const minutes = runningMinutes(draft, nowMs);
-  const days = entries.get('typed:instrumentsCheckedDaysAgo');
   return {
     ...choices,
     preflight,
     ...(minutes !== undefined && { runningMinutes: minutes }),
-    ...(days && { instrumentsCheckedDaysAgo: days.value }),
+    ...counts(entries, ['instrumentsCheckedDaysAgo', 'hoursOff', 'additionsOnEarlierVisits']),
+    ...(firstSet && { earlier: earlierOf(draft, firstSet, nowMs) }),
     ...amounts(entries, ['lowestReturnDryBulb', 'addedThisVisit']),
   };
 }

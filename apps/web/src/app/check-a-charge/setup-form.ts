@@ -9,7 +9,9 @@ import {
   type SetupField,
 } from '@chargewright/engine';
 import { checkPageWords, procedureWords, setupWords, type SetupFieldWords } from '@chargewright/wording';
+import { TickBox } from './tick-box';
 import {
+  AIRFLOW_PROOFS,
   CHARGE_MODES,
   type CheckDraft,
   type DraftSetup,
@@ -21,7 +23,7 @@ import { choicesOf } from './choices';
 import { ReadingRow } from './reading-row';
 import type { FieldView } from './reading-rows';
 import { RefrigerantChoice } from './refrigerant-choice';
-import { asksChargeMode, asksTargetPort } from './request-from-draft';
+import { asksAirflowProof, asksChargeMode, asksTargetPort } from './request-from-draft';
 import { TargetPort } from './target-port';
 
 export interface FieldTyped {
@@ -44,7 +46,7 @@ const SYSTEM_FIELDS = [
 /** What must be right before any reading. */
 @Component({
   selector: 'app-setup-form',
-  imports: [ChoiceGroup, ReadingRow, RefrigerantChoice, TargetPort],
+  imports: [ChoiceGroup, ReadingRow, RefrigerantChoice, TargetPort, TickBox],
   templateUrl: './setup-form.html',
   styleUrl: './setup-form.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -71,6 +73,11 @@ export class SetupForm {
   protected readonly procedureHint = computed(() => procedureWords[this.setup().procedure ?? 'general-rules'].note);
   protected readonly asksTargetPort = computed(() => asksTargetPort(this.setup()));
   protected readonly asksChargeMode = computed(() => asksChargeMode(this.setup()));
+  protected readonly airflowProof = setupWords.airflowProof;
+  protected readonly airflowProofs = choicesOf(AIRFLOW_PROOFS, setupWords.airflowProof, 'hinted');
+  protected readonly alteration = setupWords.alteration;
+  protected readonly highVelocity = setupWords.highVelocity;
+  protected readonly asksAirflowProof = computed(() => asksAirflowProof(this.setup()));
   protected readonly unconfirmed = computed(() =>
     SYSTEM_FIELDS.filter(({ field }) => this.setup()[field] === undefined),
   );

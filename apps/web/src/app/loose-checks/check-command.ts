@@ -1,6 +1,7 @@
 /** What a person can do to a loose check. Times and ids are in the command, so that applying it twice, or on two tabs, gives the same. */
 import type { ReadingId } from '@chargewright/engine';
-import type { DraftEdit, DraftReading, DraftSetup, DraftVisit, FieldKey, TypedField, TypedValue } from './check-draft';
+import type { TypedField } from '@chargewright/contract/typed-fields';
+import type { DraftEdit, DraftReading, DraftSetup, DraftVisit, FieldKey, TypedValue } from './check-draft';
 
 interface Told {
   readonly checkId: string;
@@ -16,6 +17,8 @@ export type CheckCommand = Told &
     | { readonly do: 'choose'; readonly setup: Partial<DraftSetup> }
     | { readonly do: 'visit'; readonly patch: Partial<DraftVisit> }
     | { readonly do: 'fill'; readonly example: ExampleCheck; readonly readingIds: readonly string[] }
+    | { readonly do: 'keep-first-set' }
+    | { readonly do: 'forget-first-set' }
     | { readonly do: 'retake' }
     | {
         readonly do: 'take-back-retake';

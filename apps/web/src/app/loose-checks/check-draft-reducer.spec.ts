@@ -3,7 +3,8 @@ import { READING_IDS } from '@chargewright/engine';
 import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { CheckCommand, CheckState } from './check-command';
-import { TYPED_FIELDS, type FieldKey } from './check-draft';
+import { TYPED_FIELDS } from '@chargewright/contract/typed-fields';
+import type { FieldKey } from './check-draft';
 import { applyCommand, draftOf, isEmpty, summaryOf } from './check-draft-reducer';
 import { rowChanges, stateFromRows } from './check-rows';
 
@@ -54,6 +55,8 @@ const stepArbitrary: fc.Arbitrary<Step> = fc.oneof(
       .constantFrom('ok', 'not-ok')
       .map((panelsOn): Step => (n) => ({ ...told(n), do: 'visit', patch: { preflight: { panelsOn } } })),
   },
+  { weight: 1, arbitrary: fc.constant<Step>((n) => ({ ...told(n), do: 'keep-first-set' })) },
+  { weight: 1, arbitrary: fc.constant<Step>((n) => ({ ...told(n), do: 'forget-first-set' })) },
   { weight: 1, arbitrary: fc.constant<Step>((n) => ({ ...told(n), do: 'visit', patch: { runningSince: timeAt(n) } })) },
   {
     weight: 1,
@@ -157,7 +160,7 @@ describe('a check and its rows', () => {
         const expected = new Map<FieldKey, string>();
         for (const command of commands) {
           if (command.do === 'type') expected.set(command.field, command.value.text);
-          if (command.do === 'fill' || command.do === 'retake' || command.do === 'take-back-retake') {
+          if (['fill', 'keep-first-set', 'retake', 'take-back-retake'].includes(command.do)) {
             for (const field of [...expected.keys()]) if (field.startsWith('reading:')) expected.delete(field);
           }
         }
@@ -171,6 +174,20 @@ describe('a check and its rows', () => {
       }),
       { numRuns: 500 },
     );
+  });
+});
+
+describe('a first set', () => {
+  it('keeps what was read, asks it all again with the clock running on, and can be forgotten', () => {
+    const FIELD = 'reading:returnWetBulb' as const;
+    const kept = play([typing(FIELD, '66.0', 1), committing(FIELD, 2), { ...told(3), do: 'keep-first-set' }]);
+    expect(draftOf(kept).readings).toEqual({});
+    expect(kept.visit.firstSet).toEqual({
+      takenAt: timeAt(3),
+      readings: { returnWetBulb: { text: '66.0', unit: 'degF' } },
+    });
+    expect(kept.readings).toHaveLength(1);
+    expect(applyCommand(kept, { ...told(4), do: 'forget-first-set' }).visit).toEqual({ preflight: {} });
   });
 });
 

@@ -1,6 +1,7 @@
 /** Commands to states, and states to what the page shows. Pure: the page and the phone's store apply the same commands by it. */
 import { READING_IDS, type ReadingId } from '@chargewright/engine';
 import type { CheckCommand, CheckState, ExampleCheck, KnownEdit } from './check-command';
+import type { TypedField } from '@chargewright/contract/typed-fields';
 import type {
   CheckDraft,
   CheckSummary,
@@ -8,7 +9,6 @@ import type {
   DraftReading,
   DraftVisit,
   FieldKey,
-  TypedField,
   TypedValue,
 } from './check-draft';
 import { READING_PLACES } from './reading-places';
@@ -122,6 +122,21 @@ function fill(state: CheckState, example: ExampleCheck, ids: readonly string[], 
   );
 }
 
+const retire = (state: CheckState): CheckState => ({ ...state, retired: state.readings.map(({ id }) => id) });
+
+/** What stands is set aside to be compared with, and asked again; the clock runs on. */
+function keepFirstSet(state: CheckState, at: string): CheckState {
+  const readings = Object.fromEntries(
+    Object.entries(standingReadings(state)).map(([id, { text, unit }]) => [id, { text, unit }]),
+  );
+  return retire({ ...state, visit: { ...state.visit, firstSet: { takenAt: at, readings } } });
+}
+
+function forgetFirstSet(state: CheckState): CheckState {
+  const { firstSet: _, ...visit } = state.visit;
+  return { ...state, visit };
+}
+
 /** What stood before the adjustment stands again; what was read since then stays, too. */
 function takeBackRetake(state: CheckState, retired: readonly string[], runningSince: string | undefined): CheckState {
   const { runningSince: _, ...visit } = state.visit;
@@ -145,8 +160,12 @@ function entered(state: CheckState, command: Exclude<CheckCommand, { do: 'open' 
       return { ...state, visit: mergeVisit(state.visit, command.patch) };
     case 'fill':
       return fill(state, command.example, command.readingIds, command.at);
+    case 'keep-first-set':
+      return keepFirstSet(state, command.at);
+    case 'forget-first-set':
+      return forgetFirstSet(state);
     case 'retake':
-      return { ...state, retired: state.readings.map(({ id }) => id) };
+      return retire(state);
     case 'take-back-retake':
       return takeBackRetake(state, command.retired, command.runningSince);
     case 'restore':

@@ -2,7 +2,9 @@
  * A check on the page, as the person typed it. Text and unit are the truth; numbers are made from them when the engine is asked.
  * The same shapes are stored on the phone (see `@chargewright/contract/stored-check`).
  */
+import type { TypedField } from '@chargewright/contract/typed-fields';
 import type {
+  AirflowPath,
   HighSidePort,
   LeakSearch,
   MeteringDevice,
@@ -27,21 +29,6 @@ export interface DraftEdit extends TypedValue {
   readonly editedAt: string;
 }
 
-/** Fields of the setup and the visit that hold a typed number. */
-export const TYPED_FIELDS = [
-  'elevation',
-  'targetSubcooling',
-  'targetSuperheat',
-  'nominalCapacity',
-  'designAirflow',
-  'factoryCharge',
-  'maxHighPressure',
-  'lowestReturnDryBulb',
-  'instrumentsCheckedDaysAgo',
-  'addedThisVisit',
-] as const;
-export type TypedField = (typeof TYPED_FIELDS)[number];
-
 /** A field that can be typed into: a reading, or a number of the setup or visit. */
 export type FieldKey = `reading:${ReadingId}` | `typed:${TypedField}`;
 
@@ -52,6 +39,12 @@ export type ChargeMode = (typeof CHARGE_MODES)[number];
 /** Ports that a target subcooling can hold for. */
 export const TARGET_PORTS = ['liquid', 'discharge'] as const satisfies readonly HighSidePort[];
 export type TargetPort = (typeof TARGET_PORTS)[number];
+
+/** How the airflow is shown; a path in its place only where the rules permit one. */
+export const AIRFLOW_PROOFS = ['measured', 'duct-table', 'best-possible'] as const satisfies readonly (
+  AirflowPath | 'measured'
+)[];
+export type AirflowProof = (typeof AIRFLOW_PROOFS)[number];
 
 /** The choices of the setup; nothing is chosen for the person. */
 export interface DraftSetup {
@@ -65,6 +58,9 @@ export interface DraftSetup {
   readonly chargeMode?: ChargeMode;
   /** The rules the check is judged by; general rules where nothing is chosen. */
   readonly procedure?: ProcedureId;
+  readonly alteration?: boolean;
+  readonly highVelocity?: boolean;
+  readonly airflowPath?: AirflowProof;
 }
 
 export interface DraftVisit {
@@ -74,6 +70,16 @@ export interface DraftVisit {
   readonly iceSeen?: boolean;
   readonly leakSearch?: LeakSearch;
   readonly commissioning?: boolean;
+  /** The head was raised on purpose, by the maker's method. */
+  readonly headRaised?: boolean;
+  /** A set of readings kept to compare the next one with. */
+  readonly firstSet?: FirstSet;
+}
+
+export interface FirstSet {
+  /** ISO 8601 in UTC. */
+  readonly takenAt: string;
+  readonly readings: Readonly<Partial<Record<ReadingId, TypedValue>>>;
 }
 
 /** One committed reading. Append-only: a correction is a new reading that supersedes an old one. */

@@ -116,13 +116,21 @@ export class LooseChecks {
 
   /** After an adjustment of the system: the clock starts anew and every reading is asked again; the old ones stay in the history. */
   retakeAll(): void {
-    for (const field of Object.keys(this.#state().edits) as FieldKey[]) {
-      if (field.startsWith('reading:')) this.commit(field);
-    }
+    this.#commitReadings();
     const { id, retired, visit } = this.#state();
     this.#retaken.set({ id, retired, runningSince: visit.runningSince });
     this.#tell({ do: 'retake' });
     this.visit({ runningSince: this.#now().toISOString() });
+  }
+
+  /** The readings that stand become the first of two sets; all are asked again, the clock runs on. */
+  keepFirstSet(): void {
+    this.#commitReadings();
+    this.#tell({ do: 'keep-first-set' });
+  }
+
+  forgetFirstSet(): void {
+    this.#tell({ do: 'forget-first-set' });
   }
 
   /** There was no adjustment: clock and readings stand as before. What was read meanwhile stays, too. */
@@ -131,6 +139,12 @@ export class LooseChecks {
     if (!before) return;
     this.#retaken.set(undefined);
     this.#tell({ do: 'take-back-retake', retired: before.retired, runningSince: before.runningSince }, before.id);
+  }
+
+  #commitReadings(): void {
+    for (const field of Object.keys(this.#state().edits) as FieldKey[]) {
+      if (field.startsWith('reading:')) this.commit(field);
+    }
   }
 
   /** Opens an empty check, unless the open one is empty. */

@@ -1,21 +1,31 @@
 /** Which units a field can hold, and which one an empty field starts with. What was typed keeps the unit it was typed in. */
 import { READING_DIMENSIONS, type Dimension, type ReadingId } from '@chargewright/engine';
 import type { UnitSystem } from '@chargewright/wording';
-import type { FieldKey, TypedField } from '../loose-checks/check-draft';
+import type { TypedField } from '@chargewright/contract/typed-fields';
+import type { FieldKey } from '../loose-checks/check-draft';
 
-type FieldDimension = Dimension | 'difference' | 'elevation' | 'power' | 'mass' | 'days';
+type FieldDimension =
+  Dimension | 'difference' | 'elevation' | 'barometer' | 'length' | 'power' | 'mass' | 'days' | 'hours' | 'count';
 
 const TYPED_DIMENSIONS: Readonly<Record<TypedField, FieldDimension>> = {
   elevation: 'elevation',
+  stationPressure: 'barometer',
   targetSubcooling: 'difference',
   targetSuperheat: 'difference',
+  superheatLow: 'difference',
+  superheatHigh: 'difference',
   nominalCapacity: 'power',
   designAirflow: 'airflow',
   factoryCharge: 'mass',
   maxHighPressure: 'pressure',
+  lineLength: 'length',
+  mostLineLength: 'length',
+  lift: 'length',
   lowestReturnDryBulb: 'temperature',
   instrumentsCheckedDaysAgo: 'days',
+  hoursOff: 'hours',
   addedThisVisit: 'mass',
+  additionsOnEarlierVisits: 'count',
 };
 
 type Units = readonly [string, ...string[]];
@@ -30,9 +40,13 @@ const INCH_POUND: Readonly<Record<FieldDimension, Units>> = {
   current: ['A'],
   voltage: ['V'],
   elevation: ['ft'],
+  barometer: ['psia'],
+  length: ['ft'],
   power: ['ton', 'Btu/h'],
   mass: ['oz', 'lb'],
   days: ['days'],
+  hours: ['h'],
+  count: ['times'],
 };
 
 const METRIC: Readonly<Record<FieldDimension, Units>> = {
@@ -43,6 +57,8 @@ const METRIC: Readonly<Record<FieldDimension, Units>> = {
   airflow: ['m3/h', 'L/s'],
   staticPressure: ['Pa'],
   elevation: ['m'],
+  barometer: ['kPaa'],
+  length: ['m'],
   power: ['kW'],
   mass: ['kg', 'g'],
 };
@@ -50,7 +66,7 @@ const METRIC: Readonly<Record<FieldDimension, Units>> = {
 const UNITS: Readonly<Record<UnitSystem, Readonly<Record<FieldDimension, Units>>>> = {
   'F-psi': INCH_POUND,
   'C-kPa': METRIC,
-  'C-bar': { ...METRIC, pressure: ['barg'] },
+  'C-bar': { ...METRIC, pressure: ['barg'], barometer: ['bara'] },
 };
 
 const CAN_BE_NEGATIVE: ReadonlySet<FieldDimension> = new Set(['temperature', 'elevation']);
