@@ -25,6 +25,7 @@ const ENGINE_LAYERS = [
   ['methods'],
   ['steadiness', 'diagnosis'],
   ['check'],
+  ['field'],
   ['training'],
 ];
 

@@ -123,6 +123,9 @@ const FORMULAS: readonly Formula[] = [
   capacityFormulas.sensibleHeatRatio,
   capacityFormulas.capacityRatio,
   capacityFormulas.dryAirMassFlowFromStandard,
+  chargeFormulas.extraLength,
+  chargeFormulas.lineCharge('installed'),
+  chargeFormulas.lineCharge('included'),
   ...(['subtract', 'keep'] as const).flatMap((rule) => [
     chargeFormulas.lineAdjustment(rule),
     chargeFormulas.lineAdjustmentOfTwoSizes(rule),

@@ -22,6 +22,7 @@ import { atmosphereOf } from './atmosphere';
 import type { Fault, SetupField } from './codes';
 import { crossCheck } from './cross-check';
 import type { CheckInput, CheckReading, CheckReadings, CheckSetup, CheckVisit } from './input';
+import { present } from './present';
 import { DEFAULT_PROCEDURE, findProcedure } from './procedure-catalogue';
 import type {
   DifferenceAmount,
@@ -197,9 +198,4 @@ function convert<Unit extends string>(
   toSiUnit: (value: number, unit: Unit) => number,
 ): number | undefined {
   return amount && toSiUnit(amount.value, amount.unit);
-}
-
-/** An optional property is left out, not set to `undefined`. */
-function present<Key extends string, Value>(key: Key, value: Value | undefined): Readonly<Partial<Record<Key, Value>>> {
-  return (value === undefined ? {} : { [key]: value }) as Partial<Record<Key, Value>>;
 }

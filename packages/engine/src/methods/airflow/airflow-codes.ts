@@ -1,6 +1,12 @@
 /** What an airflow result can say besides its numbers. The engine writes no sentences. */
 
-export type AirflowMethod = 'measured' | 'temperature-rise-electric' | 'temperature-rise-gas' | 'static-pressure';
+export const AIRFLOW_METHODS = [
+  'measured',
+  'temperature-rise-electric',
+  'temperature-rise-gas',
+  'static-pressure',
+] as const;
+export type AirflowMethod = (typeof AIRFLOW_METHODS)[number];
 
 /** Why there is no airflow. `inputs` are the ids of what is missing. */
 export type AirflowReason =
@@ -13,6 +19,8 @@ export type AirflowReason =
 export type AirflowCaution =
   /** Nobody said whether the blower ran at the speed it has in cooling: the airflow proves nothing about cooling until it is known. */
   | 'blower-speed-unknown'
+  /** Sea level was taken. */
+  | 'elevation-assumed'
   /** No humidity was given: 0 to 0.012 was allowed for. */
   | 'humidity-assumed'
   /** AFUE stands in for the steady-state efficiency. */

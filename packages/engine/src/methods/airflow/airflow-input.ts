@@ -3,9 +3,11 @@ import type { Quantity } from '../../derivation/quantity';
 import type { AirPlace } from './air-properties';
 import type { FanTable } from './fan-table';
 
-interface AnyMethod {
+export interface AnyMethod {
   /** Station pressure, absolute. */
   readonly atmosphere: Quantity;
+  /** Nobody stated the site: the atmosphere is that of sea level. */
+  readonly elevationAssumed?: boolean;
   /** Left out: 0.006 ± 0.006 is taken. */
   readonly humidityRatio?: Quantity;
   /** Was the blower at the speed it runs at in cooling? `no`: the airflow is shown for that speed and does not count. */
@@ -57,7 +59,7 @@ export interface StaticPressureAirflow extends AnyMethod {
   readonly returnStatic: Quantity;
   readonly supplyStatic: Quantity;
   /** For the tap the blower ran at. */
-  readonly table: FanTable;
+  readonly table?: FanTable;
   /** Dry bulb of the air through the blower; with the elevation it brings the static pressure to the table's standard air. */
   readonly dryBulb: Quantity;
   readonly place: AirPlace;

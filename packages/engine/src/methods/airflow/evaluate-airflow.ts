@@ -23,6 +23,7 @@ import type {
 } from './airflow-input';
 import type { AirPlace } from './air-properties';
 import { airSpecificHeat, airSpecificVolume } from './air-properties';
+import type { FanTable } from './fan-table';
 import { fanTableAirflow, fanTableError, risingAirflow, staticInStandardAir, totalExternalStatic } from './fan-table';
 import { electricHeat, gasHeat, gasInput, totalHeat } from './heat-input';
 import { standardAirDensity, standardAirflow } from './standard-air';
@@ -158,10 +159,17 @@ function byStaticPressure(input: StaticPressureAirflow, humidityRatio: Quantity)
     specificVolumeM3PerKg: volumeOf(place, air),
     humidityRatio,
   });
+  const airflow = byTable(table, externalStaticPa);
+  return { airflow, statedIn: place, standard: toStandard(airflow, place, air) };
+}
+
+function byTable(table: FanTable | undefined, externalStaticPa: Quantity): Quantity {
+  if (table === undefined) {
+    return missing(...(externalStaticPa.state === 'missing' ? externalStaticPa.inputs : []), 'fanTable');
+  }
   const printed = bareValue(derive(fanTableAirflow(table), { externalStaticPa }));
   const parts = printed === undefined ? [] : [fanTableError(printed)];
-  const airflow = derive(fanTableAirflow(table), { externalStaticPa }, parts);
-  return { airflow, statedIn: place, standard: toStandard(airflow, place, air) };
+  return derive(fanTableAirflow(table), { externalStaticPa }, parts);
 }
 
 function refuse({ value }: Known): Quantity {
@@ -188,12 +196,13 @@ function cautionsOf(input: AirflowInput): readonly AirflowCaution[] {
   const cautions: AirflowCaution[] = [];
   if (input.atCoolingSpeed === 'unknown') cautions.push('blower-speed-unknown');
   const showsStandard = input.method === 'measured' && input.shows === 'standard';
+  if (input.elevationAssumed === true && !showsStandard) cautions.push('elevation-assumed');
   if (input.humidityRatio === undefined && !showsStandard) cautions.push('humidity-assumed');
   if (input.method === 'temperature-rise-gas' && input.efficiencyIs === 'afue') cautions.push('afue-for-steady-state');
   if (input.method === 'static-pressure') {
     const supply = bareValue(input.supplyStatic);
     if (supply !== undefined && supply <= 0) cautions.push('supply-static-not-above-room');
-    if (risingAirflow(input.table)) cautions.push('fan-table-rises');
+    if (input.table !== undefined && risingAirflow(input.table)) cautions.push('fan-table-rises');
   }
   return cautions;
 }

@@ -16,9 +16,9 @@ export interface FanTableRow {
 }
 
 export interface FanTable {
-  /** Document and page, as the person states them. */
+  /** Document and page, as the person states them; empty: not stated. */
   readonly source: string;
-  /** Speed tap or setting the rows are for. */
+  /** Speed tap or setting the rows are for; empty: not stated. */
   readonly blowerTap: string;
   readonly rows: readonly FanTableRow[];
 }
@@ -132,6 +132,9 @@ export const staticInStandardAir = formula({
     (externalStaticPa * standardDensityKgPerM3 * specificVolumeM3PerKg) / (1 + humidityRatio),
 });
 
+const citation = ({ source, blowerTap }: FanTable): string =>
+  `Maker's fan table${blowerTap === '' ? '' : `, blower at ${blowerTap}`}${source === '' ? '' : `: ${source}`}`;
+
 /** Airflow of a blower by its maker's table. */
 export const fanTableAirflow = (table: FanTable): Formula<'externalStaticPa'> =>
   formula({
@@ -139,6 +142,6 @@ export const fanTableAirflow = (table: FanTable): Formula<'externalStaticPa'> =>
     gives: 'flowM3PerS',
     text: 'table(P)',
     symbols: { externalStaticPa: 'P' },
-    source: `Maker's fan table, blower at ${table.blowerTap}: ${table.source}`,
+    source: citation(table),
     of: ({ externalStaticPa }) => fanTableAirflowM3PerS(table, externalStaticPa),
   });

@@ -56,19 +56,35 @@ const KINDS: Readonly<Record<FieldReadingId, QuantityKind>> = {
   supplyStaticPressure: 'staticPressurePa',
 };
 
-/**
- * A reading in SI as a quantity. `limit` is the stated ± (rectangular) in the unit of the reading; left out, the assumed one is taken. `instrumentId`
- * makes all readings of that kind by one instrument share its error (JCGM 100:2008, 5.2.2).
- */
-export function fieldReading(
-  id: FieldReadingId,
-  reading: { readonly value: number; readonly limit?: number; readonly instrumentId?: string },
-): Known {
-  const { value, instrumentId } = reading;
-  const assumed = ASSUMED_FIELD_LIMITS[id];
-  const limit = reading.limit ?? (assumed.of === 'reading' ? assumed.value * Math.abs(value) : assumed.value);
+export interface FieldReadingInput {
+  /** SI. */
+  readonly value: number;
+  /** Stated ± in the unit of the value, as a limit (rectangular); left out, the assumed one is taken. */
+  readonly limit?: number;
+  /** Stated ± as an expanded uncertainty, k = 2 (normal), in place of a limit. */
+  readonly expanded?: number;
+  /** Smallest step the instrument shows. */
+  readonly resolution?: number;
+  /** All readings of a kind by one instrument share its error (JCGM 100:2008, 5.2.2). */
+  readonly instrumentId?: string;
+}
+
+/** A reading in SI as a quantity with its uncertainty. */
+export function fieldReading(id: FieldReadingId, reading: FieldReadingInput): Known {
+  const { value, instrumentId, resolution = 0 } = reading;
   const kind = KINDS[id];
   const key = instrumentId === undefined ? `reading:${id}` : `instrument:${kind}:${instrumentId}`;
-  const parts: readonly ErrorPart[] = limit > 0 ? [{ key, u: limit / Math.sqrt(3), shape: 'rectangular' }] : [];
+  const own = instrumentError(id, reading);
+  const parts: ErrorPart[] = own.u > 0 ? [{ key, ...own }] : [];
+  if (resolution > 0) {
+    parts.push({ key: `resolution:${id}`, u: resolution / 2 / Math.sqrt(3), shape: 'rectangular' });
+  }
   return leaf({ id, kind, value, origin: 'reading', parts });
+}
+
+function instrumentError(id: FieldReadingId, { value, limit, expanded }: FieldReadingInput): Omit<ErrorPart, 'key'> {
+  if (expanded !== undefined) return { u: expanded / 2, shape: 'normal' };
+  const assumed = ASSUMED_FIELD_LIMITS[id];
+  const half = limit ?? (assumed.of === 'reading' ? assumed.value * Math.abs(value) : assumed.value);
+  return { u: half / Math.sqrt(3), shape: 'rectangular' };
 }

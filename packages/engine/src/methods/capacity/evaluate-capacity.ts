@@ -41,12 +41,20 @@ export interface CapacityInput {
   readonly supplyAir: AirReading;
   /** Station pressure, absolute. */
   readonly atmosphere: Quantity;
+  /** Nobody stated the site: the atmosphere is that of sea level. */
+  readonly elevationAssumed?: boolean;
   /** `neglected` (the default) as the air-enthalpy method of testing does; counted, the total is 0.3 to 1 % less. */
   readonly condensate?: 'neglected' | 'counted';
   readonly nominalCapacity?: Quantity;
 }
 
+/** Why there is no total. `inputs` are the ids of what is missing. */
+export type CapacityReason =
+  { readonly code: 'inputs-missing'; readonly inputs: readonly string[] } | { readonly code: 'outside-range' };
+
 export type CapacityCaution =
+  /** Sea level was taken. */
+  | 'elevation-assumed'
   /** More water in the supply than in the return: a coil does not do that; exchanged or wetted probes, or attic air drawn in. */
   | 'supply-wetter-than-return'
   /** The supply is not cooler than the return. */
@@ -59,6 +67,8 @@ export interface CapacityResult {
   /** Of the nominal capacity. */
   readonly ofNominal: Quantity;
   readonly dryAirMassFlowKgPerS: Quantity;
+  /** `null`: there is a total. */
+  readonly reason: CapacityReason | null;
   readonly cautions: readonly CapacityCaution[];
   readonly steps: readonly DerivationStep[];
 }
@@ -102,7 +112,8 @@ export function evaluateCapacity(input: CapacityInput): CapacityResult {
     sensibleHeatRatio: ratio,
     ofNominal,
     dryAirMassFlowKgPerS,
-    cautions: cautionsOf(before, after),
+    reason: reasonOf(total),
+    cautions: cautionsOf(input, before, after),
     steps: derivationSteps([total, sensible, ratio, ofNominal].filter(isKnown)),
   };
 }
@@ -170,8 +181,17 @@ function totalOf({ condensate }: CapacityInput, dryAirMassFlowKgPerS: Quantity, 
   return derive(totalCapacityLessCondensate, { ...flows, condensateJPerKg });
 }
 
-function cautionsOf(before: AirState, after: AirState): readonly CapacityCaution[] {
-  const cautions: CapacityCaution[] = [];
+function reasonOf(total: Quantity): CapacityReason | null {
+  if (isKnown(total)) return null;
+  return total.state === 'missing' ? { code: 'inputs-missing', inputs: total.inputs } : { code: 'outside-range' };
+}
+
+function cautionsOf(
+  { elevationAssumed }: CapacityInput,
+  before: AirState,
+  after: AirState,
+): readonly CapacityCaution[] {
+  const cautions: CapacityCaution[] = elevationAssumed === true ? ['elevation-assumed'] : [];
   const [wet, dry] = [bareValue(after.humidityRatio), bareValue(before.humidityRatio)];
   if (wet !== undefined && dry !== undefined && wet > dry) cautions.push('supply-wetter-than-return');
   const [cold, warm] = [bareValue(after.dryBulbK), bareValue(before.dryBulbK)];

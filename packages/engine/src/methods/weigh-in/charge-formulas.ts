@@ -57,6 +57,37 @@ export const lineAdjustmentOfTwoSizes = (
   });
 };
 
+/** Line in m beyond the length the factory charge covers; short of it, negative. */
+export const extraLength = formula({
+  id: 'extraLength',
+  gives: 'lengthM',
+  text: 'L − L_included',
+  symbols: { installedM: 'L', includedM: 'L_included' },
+  source: MAKERS_RULE,
+  of: ({ installedM, includedM }) => {
+    assertNotNegative(installedM, 'installedLengthM');
+    assertNotNegative(includedM, 'includedLengthM');
+    return installedM - includedM;
+  },
+});
+
+/** Charge in kg of a length by its rate in kg/m. */
+export const lineCharge = (line: 'installed' | 'included'): Formula<'lengthM' | 'rateKgPerM'> => {
+  const low = line === 'included' ? '_included' : '';
+  return formula({
+    id: `${line}LineCharge`,
+    gives: 'massKg',
+    text: `L${low} × r${low}`,
+    symbols: { lengthM: `L${low}`, rateKgPerM: `r${low}` },
+    source: MAKERS_RULE,
+    of: ({ lengthM, rateKgPerM }) => {
+      assertNotNegative(lengthM, `${line}LengthM`);
+      assertPositive(rateKgPerM, 'rateKgPerM');
+      return lengthM * rateKgPerM;
+    },
+  });
+};
+
 export const CORRECTIONS = ['coil', 'drier', 'other'] as const;
 export type Correction = (typeof CORRECTIONS)[number];
 

@@ -22,11 +22,13 @@ import type { Scale, WeighInDecision, WeightJudgement } from './judge-weight';
 import { isCoarse, judgeWeight } from './judge-weight';
 import type { LabelOutcome } from './label-maximum';
 import { judgeLabelMaximum } from './label-maximum';
-import type { LineAdjustment, LineSetInput } from './line-adjustment';
+import type { LineAdjustment, LineSetInput, LineWorking } from './line-adjustment';
 import { lineAdjustmentOf } from './line-adjustment';
 import type { LineRate } from './line-rate';
 import type { VacuumOutcome, VacuumRecord } from './vacuum';
 import { judgeVacuum } from './vacuum';
+import type { WeighInPermission } from './weigh-in-permission';
+import { judgePermission, promisesToReturn } from './weigh-in-permission';
 import type { WeighInCaution, WeighInFinding, WeighInInputId, WeighInReason } from './weigh-in-codes';
 
 export interface WeighInInput {
@@ -45,6 +47,8 @@ export interface WeighInInput {
   readonly decision: WeighInDecision;
   /** Whether a vacuum nobody recorded shuts the weigh-in or only cautions. */
   readonly vacuumRecord: 'required' | 'advised';
+  /** Left out: whoever weighs in may. */
+  readonly permission?: WeighInPermission;
 }
 
 export interface WeighInResult {
@@ -52,6 +56,7 @@ export interface WeighInResult {
   readonly rate: LineRate | null;
   /** Of the line the factory charge covers; the same as `rate` for one diameter. */
   readonly includedRate: LineRate | null;
+  readonly working: LineWorking | null;
   readonly lineAdjustment: Quantity;
   readonly requiredAdjustment: Quantity;
   readonly requiredTotal: Quantity;
@@ -94,14 +99,19 @@ export function evaluateWeighIn(input: WeighInInput): WeighInResult {
     isKnown(required) && isKnown(actual) && isKnown(difference)
       ? judgeWeight({ required, actual, difference, scale, decision: input.decision })
       : null;
+  const permitted = judgePermission(input.permission ?? EVERYBODY_MAY);
+  const outdoor = permitted.state === 'outdoor-missing' ? [missing(OUTDOOR)] : [];
   const reason =
     // a hazard is said first, whatever else is missing
     outcomes.label === 'above'
       ? ({ code: 'above-label-maximum' } as const)
-      : (absence(line, [requiredTotal, required, actual]) ?? vacuumGate(input, outcomes.vacuum));
+      : permitted.state === 'shut'
+        ? permitted.reason
+        : (absence(line, [requiredTotal, required, actual, ...outdoor]) ?? vacuumGate(input, outcomes.vacuum));
   return {
     rate: line.rate,
     includedRate: line.includedRate,
+    working: line.working,
     lineAdjustment: line.adjustment,
     requiredAdjustment: adjustment,
     requiredTotal,
@@ -118,6 +128,9 @@ export function evaluateWeighIn(input: WeighInInput): WeighInResult {
     steps: derivationSteps([requiredTotal, difference, actualTotal].filter(isKnown)),
   };
 }
+
+const EVERYBODY_MAY: WeighInPermission = { role: 'performs', testable: true };
+const OUTDOOR: WeighInInputId = 'outdoorDryBulb';
 
 interface Outcomes {
   readonly vacuum: VacuumOutcome;
@@ -178,6 +191,8 @@ const GATES: readonly WeighInReason['code'][] = [
   'vacuum-failed',
   'vacuum-not-proven',
   'vacuum-not-recorded',
+  'weigh-in-not-permitted',
+  'too-warm-to-observe',
 ];
 
 function findingOf(weight: WeightJudgement | null, reason: WeighInReason | null): WeighInFinding {
@@ -186,7 +201,7 @@ function findingOf(weight: WeightJudgement | null, reason: WeighInReason | null)
 }
 
 function cautionsOf(
-  { scale: stated, vacuumRecord }: WeighInInput,
+  { scale: stated, vacuumRecord, permission = EVERYBODY_MAY }: WeighInInput,
   found: Outcomes & { readonly line: LineAdjustment; readonly scale: Scale; readonly adjustment: Quantity },
 ): readonly WeighInCaution[] {
   const { line, scale, adjustment, vacuum, label } = found;
@@ -202,6 +217,8 @@ function cautionsOf(
     'vacuum-not-proven': vacuumRecord === 'advised' && vacuum === 'not-proven',
     'label-maximum-not-recorded': label === 'not-recorded',
     'near-label-maximum': label === 'near',
+    'promise-to-return': promisesToReturn(permission),
+    'observe-only': permission.role === 'observes',
   };
   return (Object.keys(holds) as WeighInCaution[]).filter((caution) => holds[caution]);
 }

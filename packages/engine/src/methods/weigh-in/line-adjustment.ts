@@ -4,7 +4,7 @@ import type { Quantity } from '../../derivation/quantity';
 import { bareValue, leaf, missing } from '../../derivation/quantity';
 import type { RefrigerantId } from '../../refrigerants/catalogue';
 import type { ShorterLineRule } from './charge-formulas';
-import { lineAdjustment, lineAdjustmentOfTwoSizes } from './charge-formulas';
+import { extraLength, lineAdjustment, lineAdjustmentOfTwoSizes, lineCharge } from './charge-formulas';
 import type { LineSetKind, LiquidLineSize } from './data/line-rates';
 import type { LineRate } from './line-rate';
 import { lineRateOf } from './line-rate';
@@ -28,12 +28,25 @@ export interface LineSetInput {
 /** Two products of lengths and rates that are equal on paper. */
 const ROUNDING_KG = 1e-9;
 
+/** The numbers between lengths and adjustment, as a person writes them down on the way. */
+export type LineWorking =
+  | { readonly sizes: 'one'; readonly installed: Quantity; readonly included: Quantity; readonly extra: Quantity }
+  | {
+      readonly sizes: 'two';
+      readonly installed: Quantity;
+      readonly included: Quantity;
+      readonly installedCharge: Quantity;
+      readonly includedCharge: Quantity;
+    };
+
 export interface LineAdjustment {
   /** `null`: there is none for this refrigerant, size and system. */
   readonly rate: LineRate | null;
   /** Of the line the factory charge covers; the same as `rate` for one diameter. */
   readonly includedRate: LineRate | null;
   readonly adjustment: Quantity;
+  /** `null` without a rate. */
+  readonly working: LineWorking | null;
   readonly reason: Extract<WeighInReason['code'], 'rate-needed' | 'shorter-line-rule-needed'> | null;
 }
 
@@ -63,18 +76,35 @@ export function lineAdjustmentOf(input: {
       })
     : rate;
   const rates = { rate, includedRate };
-  if (rate === null || includedRate === null) return { ...rates, adjustment: missing(), reason: 'rate-needed' };
+  if (rate === null || includedRate === null) {
+    return { ...rates, working: null, adjustment: missing(), reason: 'rate-needed' };
+  }
   const lengths = { installedM: installedLength(line), includedM: includedLength(line), rateKgPerM: rate.rate };
+  const known = { ...rates, working: workingOf(lengths, twoSizes ? includedRate : null) };
   const by = (rule: ShorterLineRule): Quantity =>
     twoSizes
       ? derive(lineAdjustmentOfTwoSizes(rule), { ...lengths, includedRateKgPerM: includedRate.rate })
       : derive(lineAdjustment(rule), lengths);
   const subtracted = by('subtract');
-  if (shorterLine === 'keep') return { ...rates, adjustment: by('keep'), reason: null };
+  if (shorterLine === 'keep') return { ...known, adjustment: by('keep'), reason: null };
   const isShorter = (bareValue(subtracted) ?? 0) < -ROUNDING_KG;
   if (isShorter && shorterLine === undefined)
-    return { ...rates, adjustment: missing(), reason: 'shorter-line-rule-needed' };
-  return { ...rates, adjustment: subtracted, reason: null };
+    return { ...known, adjustment: missing(), reason: 'shorter-line-rule-needed' };
+  return { ...known, adjustment: subtracted, reason: null };
+}
+
+function workingOf(
+  { installedM, includedM, rateKgPerM }: Readonly<Record<'installedM' | 'includedM' | 'rateKgPerM', Quantity>>,
+  otherRate: LineRate | null,
+): LineWorking {
+  const lengths = { installed: installedM, included: includedM };
+  if (otherRate === null) return { sizes: 'one', ...lengths, extra: derive(extraLength, { installedM, includedM }) };
+  return {
+    sizes: 'two',
+    ...lengths,
+    installedCharge: derive(lineCharge('installed'), { lengthM: installedM, rateKgPerM }),
+    includedCharge: derive(lineCharge('included'), { lengthM: includedM, rateKgPerM: otherRate.rate }),
+  };
 }
 
 function installedLength({ installedLengthM, lengthLimitM = 0 }: LineSetInput): Quantity {

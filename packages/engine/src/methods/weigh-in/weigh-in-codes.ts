@@ -4,7 +4,13 @@
 export type WeighInFinding = 'within' | 'above' | 'below' | 'too-close-to-call' | 'not-verifiable' | 'not-judged';
 
 export type WeighInInputId =
-  'factoryCharge' | 'installedLength' | 'includedLength' | 'liquidLineSize' | 'includedLiquidLineSize' | 'actualCharge';
+  | 'factoryCharge'
+  | 'installedLength'
+  | 'includedLength'
+  | 'liquidLineSize'
+  | 'includedLiquidLineSize'
+  | 'actualCharge'
+  | 'outdoorDryBulb';
 
 export type WeighInReason =
   /** Not judged: something is missing. */
@@ -21,7 +27,11 @@ export type WeighInReason =
         | 'vacuum-failed'
         | 'vacuum-not-proven'
         | 'vacuum-not-recorded'
-        | 'above-label-maximum';
+        | 'above-label-maximum'
+        /** Not verifiable: by these rules this person never weighs in, nor counts somebody else's. */
+        | 'weigh-in-not-permitted'
+        /** Not verifiable: warm enough to test this system by its readings, so watching a weigh-in does not count. */
+        | 'too-warm-to-observe';
     };
 
 export type WeighInCaution =
@@ -39,4 +49,8 @@ export type WeighInCaution =
   /** A flammable refrigerant without the label's maximum. */
   | 'label-maximum-not-recorded'
   /** Not above the label's maximum, but within the uncertainty of it. */
-  | 'near-label-maximum';
+  | 'near-label-maximum'
+  /** Weighed in only because it is cold: whoever did it promises to come back if a later test fails. */
+  | 'promise-to-return'
+  /** The person judging watches somebody else weigh in. */
+  | 'observe-only';
