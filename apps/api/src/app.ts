@@ -1,14 +1,17 @@
 import express from 'express';
 import type { Express } from 'express';
 import type { Logger } from 'pino';
+import { airflowRoutes } from './features/airflow/airflow-routes';
+import { capacityRoutes } from './features/capacity/capacity-routes';
 import { evaluationsRoutes } from './features/evaluations/evaluations-routes';
 import { healthRoutes } from './features/health/health-routes';
 import type { HealthDeps } from './features/health/health-routes';
 import { openApiRoutes } from './features/openapi/openapi-routes';
 import { psychrometricsRoutes } from './features/psychrometrics/psychrometrics-routes';
 import { refrigerantsRoutes } from './features/refrigerants/refrigerants-routes';
+import { weighInRoutes } from './features/weigh-in/weigh-in-routes';
 import { compress } from './http/compress';
-import { limitRate } from './http/limits';
+import { limitEvaluations, limitRate } from './http/limits';
 import type { Limits } from './http/limits';
 import { openCors } from './http/open-cors';
 import { notFound, problemHandler } from './http/problem-handler';
@@ -27,6 +30,9 @@ export interface AppDeps extends HealthDeps {
 /** Routes that answer any origin. */
 const OPEN_ROUTES = [
   '/api/v1/evaluations',
+  '/api/v1/airflow',
+  '/api/v1/capacity',
+  '/api/v1/weigh-in',
   '/api/v1/refrigerants',
   '/api/v1/psychrometrics',
   '/api/v1/openapi.json',
@@ -45,7 +51,11 @@ export function createApp(deps: AppDeps): Express {
   app.use(compress);
   app.use(OPEN_ROUTES, openCors);
   app.use('/api', limitRate(limits));
-  app.use(evaluationsRoutes(limits));
+  const limit = limitEvaluations(limits);
+  app.use(evaluationsRoutes(limit));
+  app.use(airflowRoutes(limit));
+  app.use(capacityRoutes(limit));
+  app.use(weighInRoutes(limit));
   app.use(refrigerantsRoutes());
   app.use(psychrometricsRoutes());
   app.use(openApiRoutes());

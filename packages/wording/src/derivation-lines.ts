@@ -2,6 +2,7 @@ import type { DerivationStep, Known } from '@chargewright/engine';
 import { findingPhrases } from './english/findings';
 import { formatValue } from './format-value';
 import type { Language } from './language';
+import type { Print } from './message-texts';
 import { presentValue, type ContractUnit } from './present-value';
 import type { UnitSystem } from './unit-system';
 
@@ -26,10 +27,10 @@ const escaped = (text: string): string => text.replace(/[.*+?^${}()|[\]\\]/g, '\
 const isGauge = (name: string): boolean => /gaugePa$/i.test(name);
 
 /** A negative number after an operator is put in brackets, as on paper. */
-const shown = (name: string, input: Known, system: UnitSystem): string => {
+const shown = (name: string, input: Known, system: UnitSystem, print: Print): string => {
   const text = isGauge(name)
-    ? `${formatValue('pressureDifferencePa', input.value, system)}g`
-    : formatValue(input.kind, input.value, system);
+    ? `${print('pressureDifferencePa', input.value, system)}g`
+    : print(input.kind, input.value, system);
   return text.startsWith('−') ? `(${text})` : text;
 };
 
@@ -48,19 +49,20 @@ export const derivationLines = (
   steps: readonly DerivationStep[],
   system: UnitSystem,
   language: Pick<Language, 'findings'> = { findings: findingPhrases },
+  print: Print = formatValue,
 ): readonly DerivationLine[] =>
   steps.map(({ id, result, step }) => {
     const { text, symbols, source } = step.formula;
     const values = new Map<string, string>();
     for (const [name, input] of Object.entries(step.from))
-      values.set(symbols[name] ?? name, shown(name, input, system));
+      values.set(symbols[name] ?? name, shown(name, input, system, print));
     return {
       id,
       name: language.findings.stepName(id),
       formula: text,
       substitution: substitute(text, values),
       ...presentValue(result.kind, result.value, system),
-      result: formatValue(result.kind, result.value, system),
+      result: print(result.kind, result.value, system),
       source,
     };
   });

@@ -29,3 +29,10 @@ export * from './english/glance';
 export * from './english/owner';
 export * from './english/target-comparison';
 export * from './owners-text';
+// For the pages and routes of airflow, capacity and weigh-in.
+export * from './field-sentences';
+export * from './format-mass';
+export * from './weigh-in-sum';
+export * from './english/airflow';
+export * from './english/field-inputs';
+export * from './english/weigh-in';

@@ -1,8 +1,11 @@
 import type { Caution, NextStep } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
+import { airflowWords } from './english/airflow';
 import { cautionTexts } from './english/cautions';
 import { checkPageWords } from './english/check-page';
 import { faultWords } from './english/faults';
+import { fieldFaultNaming, fieldFaultTexts } from './english/field-faults';
+import { fieldInputWords } from './english/field-inputs';
 import { findingPhrases } from './english/findings';
 import { looseChecksWords } from './english/loose-checks';
 import { airTexts } from './english/moist-air';
@@ -21,6 +24,7 @@ import { safetyWords } from './english/safety';
 import { setupWords } from './english/setup';
 import { stopTexts } from './english/stops';
 import { structureFaultWords } from './english/structure-faults';
+import { weighInWords } from './english/weigh-in';
 import type { Language } from './language';
 import { cautionText, nextStepText } from './sentences';
 
@@ -35,6 +39,10 @@ const english: Language = {
   faults: faultWords,
   structureFaults: structureFaultWords,
   air: airTexts,
+  fieldFaults: { texts: fieldFaultTexts, naming: fieldFaultNaming },
+  fieldInputs: fieldInputWords,
+  airflow: airflowWords,
+  weighIn: weighInWords,
   readings: readingWords,
   readingHelp,
   setup: setupWords,

@@ -15,7 +15,10 @@ import type {
 } from '@chargewright/engine';
 import type { CriterionParts } from './criterion-parts';
 import type { AirFigures } from './english/moist-air';
+import type { airflowWords } from './english/airflow';
 import type { checkPageWords } from './english/check-page';
+import type { fieldFaultTexts } from './english/field-faults';
+import type { fieldInputWords } from './english/field-inputs';
 import type { looseChecksWords } from './english/loose-checks';
 import type { offlineWords } from './english/offline';
 import type { pageMenuWords } from './english/page-menu';
@@ -27,6 +30,7 @@ import type { procedureWords } from './english/procedures';
 import type { readingWords } from './english/readings';
 import type { safetyWords } from './english/safety';
 import type { setupWords } from './english/setup';
+import type { weighInWords } from './english/weigh-in';
 import type { FigureNames, MessageTexts, Say } from './message-texts';
 import type { StructureFaultKind } from './structure-fault';
 
@@ -89,6 +93,10 @@ export interface Language {
   readonly faults: FaultWords;
   readonly structureFaults: StructureFaultWords;
   readonly air: MessageTexts<AirFigures>;
+  readonly fieldFaults: { readonly texts: typeof fieldFaultTexts; readonly naming: FieldNaming };
+  readonly fieldInputs: typeof fieldInputWords;
+  readonly airflow: typeof airflowWords;
+  readonly weighIn: typeof weighInWords;
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;

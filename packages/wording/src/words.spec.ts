@@ -1,6 +1,8 @@
 import { PREFLIGHT_ITEMS, PROCEDURES, READING_IDS } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
+import { airflowWords } from './english/airflow';
 import { checkPageWords } from './english/check-page';
+import { fieldInputWords } from './english/field-inputs';
 import { looseChecksWords } from './english/loose-checks';
 import { glanceWords } from './english/glance';
 import { offlineWords } from './english/offline';
@@ -11,6 +13,7 @@ import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
 import { safetyWords } from './english/safety';
 import { listWords, setupWords } from './english/setup';
+import { weighInWords } from './english/weigh-in';
 
 /** Every text of a tree of words; those that take figures get 2 and 8. */
 function textsOf(words: unknown, path: string): readonly (readonly [string, string])[] {
@@ -35,6 +38,9 @@ const roots = Object.entries({
   safety: safetyWords,
   setup: setupWords,
   procedures: procedureWords,
+  fieldInputs: fieldInputWords,
+  airflow: airflowWords,
+  weighIn: weighInWords,
 });
 
 describe('words of the page', () => {

@@ -5,7 +5,7 @@ import { HttpProblem } from './http-problem';
 export interface Limits {
   /** Of one address to the API. A guard of cost, far above what a page, a class of apprentices or a script of look-ups needs. */
   readonly requestsPerSecond: number;
-  /** Evaluations whose bodies are read or judged at one time. */
+  /** Evaluations, airflows, capacities and weigh-ins whose bodies are read or judged at one time. */
   readonly evaluationsAtOnce: number;
   /** The share of them that one address may hold: a sender of slow bodies does not shut out the others. */
   readonly evaluationsAtOncePerAddress: number;

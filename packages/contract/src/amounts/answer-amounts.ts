@@ -83,3 +83,15 @@ export const codedText = object({
   code: z.string(),
   text: z.string().meta({ description: 'English, for people; programs use the code.' }),
 }).meta({ id: 'CodedText' });
+
+/** One step of a derivation, as on paper. */
+export const derivationLine = object({
+  id: z.string(),
+  name: z.string(),
+  formula: z.string(),
+  substitution: z.string(),
+  value: z.number(),
+  unit,
+  result: z.string().meta({ description: 'The value as printed.' }),
+  source: z.string(),
+}).meta({ id: 'DerivationLine' });

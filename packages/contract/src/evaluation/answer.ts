@@ -2,7 +2,7 @@ import { CRITERION_IDS, DERIVED_IDS, FINDINGS } from '@chargewright/engine';
 import type { DerivedId, TargetSource } from '@chargewright/engine';
 import * as z from 'zod';
 import { object } from '../parsing/object';
-import { ANSWER_UNITS, codedText, orNull, toleranceAmount, uncertainAmount } from '../amounts/answer-amounts';
+import { codedText, derivationLine, orNull, toleranceAmount, uncertainAmount } from '../amounts/answer-amounts';
 
 const TARGET_SOURCES = [
   'entered',
@@ -49,17 +49,6 @@ const diagnosis = object({
   doesNotFit: z.array(codedText),
   nextMeasurement: orNull(codedText),
 }).meta({ id: 'Diagnosis' });
-
-const derivationLine = object({
-  id: z.string(),
-  name: z.string(),
-  formula: z.string(),
-  substitution: z.string(),
-  value: z.number(),
-  unit: z.enum(ANSWER_UNITS),
-  result: z.string().meta({ description: 'The value as printed.' }),
-  source: z.string(),
-}).meta({ id: 'DerivationLine' });
 
 export const evaluationAnswer = object({
   engineVersion: z.string(),

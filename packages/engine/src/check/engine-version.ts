@@ -18,11 +18,14 @@ function fnv1a(text: string): string {
   return (hash >>> 0).toString(16).padStart(8, '0');
 }
 
+/** `0.1.0+1a2b3c4d`: the package's version and a hash of the data. */
+export const versionOf = (data: readonly unknown[]): string => `${VERSION}+${fnv1a(JSON.stringify(data))}`;
+
 let version: string | undefined;
 
 /** `0.1.0+1a2b3c4d`: two results with the same version came from the same rules and tables. Computed once, when first asked for. */
 export function engineVersion(): string {
   const data = [INPUT_HASH, SUPERHEAT_CHART_A, SUPERHEAT_TABLE_FINER, SPLIT_TABLE, PROCEDURES, NEXT_STEP_TABLE];
-  version ??= `${VERSION}+${fnv1a(JSON.stringify(data))}`;
+  version ??= versionOf(data);
   return version;
 }

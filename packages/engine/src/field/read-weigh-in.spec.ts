@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { PROCEDURE_IDS } from '../check/procedure';
+import { PROCEDURE_IDS } from '../check/procedure-ids';
 import type { Quantity } from '../derivation/quantity';
 import { isKnown } from '../derivation/quantity';
 import { evaluateWeighIn } from '../methods/weigh-in/evaluate-weigh-in';

@@ -2,7 +2,7 @@
  * What each set of rules asks of a weigh-in, as data: who may do it, how warm it may be, and whether the vacuum has to be on record.
  * Whether equality alone decides or the scale's uncertainty as well is the procedure's own decision.
  */
-import type { ProcedureId } from '../check/procedure';
+import type { ProcedureId } from '../check/procedure-ids';
 import type { SourcedFigure } from '../methods/sourced-figure';
 import type { WeighInRole } from '../methods/weigh-in/weigh-in-permission';
 import { temperatureToK } from '../units';

@@ -1,11 +1,10 @@
 import type { EvaluationAnswer } from '@chargewright/contract/evaluation';
-import { DERIVED_IDS, expandedUncertainty, moistAirEnthalpyBtuPerLb, temperatureFromK } from '@chargewright/engine';
+import { DERIVED_IDS, moistAirEnthalpyBtuPerLb, temperatureFromK } from '@chargewright/engine';
 import type {
   CheckInput,
   CheckResult,
   CriterionId,
   CriterionResult,
-  Known,
   QuantityKind,
   Tolerance,
 } from '@chargewright/engine';
@@ -19,9 +18,9 @@ import {
   stopText,
 } from '@chargewright/wording';
 import type { UnitSystem } from '@chargewright/wording';
+import { uncertainAmount } from '../../answers/uncertain-amount';
 
 type Criterion = EvaluationAnswer['criteria'][number];
-type UncertainAmount = NonNullable<Criterion['actual']>;
 
 /** The result of a check in the units and words of the contract; numbers unrounded. */
 export function evaluationAnswer(input: CheckInput, result: CheckResult, system: UnitSystem): EvaluationAnswer {
@@ -79,19 +78,6 @@ function criterionAnswer(criterion: CriterionResult, system: UnitSystem): Criter
     finding: criterion.finding,
     reason: reason && reason.code,
     reasonText: reason && reasonText(reason, system),
-  };
-}
-
-function uncertainAmount(quantity: Known, system: UnitSystem): UncertainAmount {
-  const { kind, value } = quantity;
-  const spread = expandedUncertainty(quantity);
-  return {
-    ...presentValue(kind, value, system),
-    // an enthalpy's unit has a datum of its own: what is left of it at zero is not part of a spread
-    plusMinus:
-      kind === 'temperatureK'
-        ? presentValue('differenceK', spread, system).value
-        : presentValue(kind, spread, system).value - presentValue(kind, 0, system).value,
   };
 }
 

@@ -5,9 +5,10 @@ import { crossCheck, evaluateCheck, readRequest } from '@chargewright/engine';
 import type { Fault } from '@chargewright/engine';
 import { faultText } from '@chargewright/wording';
 import type { UnitSystem } from '@chargewright/wording';
+import { answerUnits } from '../../answers/answer-units';
 import { HttpProblem } from '../../http/http-problem';
 import { structureErrors } from '../../http/structure-errors';
-import { answerUnits } from './answer-units';
+
 import { evaluationAnswer } from './evaluation-answer';
 
 /** Judges the check of a request's body. Throws `HttpProblem` `invalid-input` with every fault at once. Stores nothing. */

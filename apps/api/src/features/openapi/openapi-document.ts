@@ -1,3 +1,5 @@
+import { airflowAnswer, airflowRequest } from '@chargewright/contract/airflow';
+import { capacityAnswer, capacityRequest } from '@chargewright/contract/capacity';
 import { evaluationAnswer, evaluationRequest } from '@chargewright/contract/evaluation';
 import { problem } from '@chargewright/contract/problem';
 import { psychrometricsAnswer, psychrometricsParameters } from '@chargewright/contract/psychrometrics';
@@ -7,6 +9,7 @@ import {
   saturationByTemperature,
   saturationParameters,
 } from '@chargewright/contract/refrigerant';
+import { weighInAnswer, weighInRequest } from '@chargewright/contract/weigh-in';
 import * as z from 'zod';
 
 type JsonObject = Readonly<Record<string, unknown>>;
@@ -70,18 +73,40 @@ const refrigerantId = {
   schema: { type: 'string' },
 };
 
-const PATHS: Readonly<Record<string, JsonObject>> = {
-  '/api/v1/evaluations': {
-    post: {
-      operationId: 'evaluateCheck',
-      summary: 'Judges one check of airflow and charge. Stores nothing.',
-      requestBody: { required: true, ...json(reference(evaluationRequest)) },
-      responses: {
-        ...answer('How it came out.', reference(evaluationAnswer)),
-        ...problems(400, 413, 415, 422, 429, 503),
-      },
+/** An operation that computes from a body and stores nothing. */
+const computation = (
+  operationId: string,
+  summary: string,
+  body: { readonly request: z.ZodType; readonly answer: z.ZodType },
+): JsonObject => ({
+  post: {
+    operationId,
+    summary: `${summary} Stores nothing.`,
+    requestBody: { required: true, ...json(reference(body.request)) },
+    responses: {
+      ...answer('How it came out.', reference(body.answer)),
+      ...problems(400, 413, 415, 422, 429, 503),
     },
   },
+});
+
+const PATHS: Readonly<Record<string, JsonObject>> = {
+  '/api/v1/evaluations': computation('evaluateCheck', 'Judges one check of airflow and charge.', {
+    request: evaluationRequest,
+    answer: evaluationAnswer,
+  }),
+  '/api/v1/airflow': computation('findAirflow', 'The airflow: measured, by temperature rise or by the fan table.', {
+    request: airflowRequest,
+    answer: airflowAnswer,
+  }),
+  '/api/v1/capacity': computation('findCapacity', 'Cooling delivered, from the air side.', {
+    request: capacityRequest,
+    answer: capacityAnswer,
+  }),
+  '/api/v1/weigh-in': computation('judgeWeighIn', 'Required against weighed-in charge, with the whole sum.', {
+    request: weighInRequest,
+    answer: weighInAnswer,
+  }),
   '/api/v1/refrigerants': {
     get: {
       operationId: 'listRefrigerants',

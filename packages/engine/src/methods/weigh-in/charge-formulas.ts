@@ -3,6 +3,7 @@ import type { Formula } from '../../derivation/formula';
 import { formula } from '../../derivation/formula';
 import { EngineError } from '../../errors';
 import { assertPositive } from '../airflow/assert-positive';
+import type { Correction } from './corrections';
 
 const MAKERS_RULE = "Maker's rule: factory charge + (installed − included length) × rate + corrections";
 
@@ -87,9 +88,6 @@ export const lineCharge = (line: 'installed' | 'included'): Formula<'lengthM' | 
     },
   });
 };
-
-export const CORRECTIONS = ['coil', 'drier', 'other'] as const;
-export type Correction = (typeof CORRECTIONS)[number];
 
 /** Adjustment in kg of the line and of what else the maker corrects for: one term for each that was entered. */
 export const requiredAdjustment = (entered: readonly Correction[]): Formula<Correction | 'line'> =>

@@ -319,6 +319,13 @@ describe('the vacuum', () => {
     expect(result.weight?.byRule).toBe('passes');
   });
 
+  it('that failed is said before anything is put in', () => {
+    const { actualKg: _, ...before } = INPUT;
+    const result = evaluateWeighIn({ ...before, vacuum: { deepestPa: micronsToPa(900) } });
+    expect(result.finding).toBe('not-verifiable');
+    expect(result.reason).toEqual({ code: 'vacuum-failed' });
+  });
+
   it('that nobody recorded shuts it where a record is required, and cautions elsewhere', () => {
     expect(evaluateWeighIn(without('vacuum')).reason).toEqual({ code: 'vacuum-not-recorded' });
     expect(judged(400, 100, 4).reason).toEqual({ code: 'vacuum-not-proven' });

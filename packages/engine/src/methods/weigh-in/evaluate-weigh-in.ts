@@ -8,14 +8,9 @@ import { bareValue, isKnown, leaf, missing } from '../../derivation/quantity';
 import type { DerivationStep } from '../../derivation/steps';
 import { derivationSteps } from '../../derivation/steps';
 import type { RefrigerantId } from '../../refrigerants/catalogue';
-import type { Correction } from './charge-formulas';
-import {
-  chargeAfterAdjustment,
-  chargeDifference,
-  CORRECTIONS,
-  requiredAdjustment,
-  requiredCharge,
-} from './charge-formulas';
+import { chargeAfterAdjustment, chargeDifference, requiredAdjustment, requiredCharge } from './charge-formulas';
+import type { Correction } from './corrections';
+import { CORRECTIONS } from './corrections';
 import type { LineSetKind } from './data/line-rates';
 import { WEIGH_IN_FIGURES } from './data/weigh-in-figures';
 import type { Scale, WeighInDecision, WeightJudgement } from './judge-weight';
@@ -52,6 +47,7 @@ export interface WeighInInput {
 }
 
 export interface WeighInResult {
+  readonly method: WeighInInput['method'];
   /** `null`: there is none for this refrigerant, size and system. */
   readonly rate: LineRate | null;
   /** Of the line the factory charge covers; the same as `rate` for one diameter. */
@@ -102,13 +98,12 @@ export function evaluateWeighIn(input: WeighInInput): WeighInResult {
   const permitted = judgePermission(input.permission ?? EVERYBODY_MAY);
   const outdoor = permitted.state === 'outdoor-missing' ? [missing(OUTDOOR)] : [];
   const reason =
-    // a hazard is said first, whatever else is missing
-    outcomes.label === 'above'
-      ? ({ code: 'above-label-maximum' } as const)
-      : permitted.state === 'shut'
-        ? permitted.reason
-        : (absence(line, [requiredTotal, required, actual, ...outdoor]) ?? vacuumGate(input, outcomes.vacuum));
+    hazard(outcomes) ??
+    (permitted.state === 'shut' ? permitted.reason : null) ??
+    absence(line, [requiredTotal, required, actual, ...outdoor]) ??
+    vacuumGate(input, outcomes.vacuum);
   return {
+    method,
     rate: line.rate,
     includedRate: line.includedRate,
     working: line.working,
@@ -131,6 +126,12 @@ export function evaluateWeighIn(input: WeighInInput): WeighInResult {
 
 const EVERYBODY_MAY: WeighInPermission = { role: 'performs', testable: true };
 const OUTDOOR: WeighInInputId = 'outdoorDryBulb';
+
+/** Said first, whatever else is missing: more than the label allows, and nothing goes into a system that does not hold its vacuum. */
+function hazard({ label, vacuum }: Outcomes): WeighInReason | null {
+  if (label === 'above') return { code: 'above-label-maximum' };
+  return vacuum === 'fails' ? { code: 'vacuum-failed' } : null;
+}
 
 interface Outcomes {
   readonly vacuum: VacuumOutcome;
@@ -181,7 +182,6 @@ function absence(line: LineAdjustment, quantities: readonly Quantity[]): WeighIn
 }
 
 function vacuumGate({ vacuumRecord }: WeighInInput, vacuum: VacuumOutcome): WeighInReason | null {
-  if (vacuum === 'fails') return { code: 'vacuum-failed' };
   if (vacuumRecord === 'advised' || vacuum === 'passes') return null;
   return { code: vacuum === 'not-proven' ? 'vacuum-not-proven' : 'vacuum-not-recorded' };
 }
