@@ -21,17 +21,9 @@ import {
   SYSTEM_KINDS,
   VALVE_MOVES,
 } from '@chargewright/engine';
-
-const STEPS = 1_000_000;
-
-/** A number in an open interval; the offset keeps it off every round limit, where a last digit would decide. */
-export const between = (low: number, high: number): fc.Arbitrary<number> =>
-  fc.integer({ min: 0, max: STEPS - 1 }).map((k) => low + ((high - low) * (k + Math.SQRT1_2)) / STEPS);
-
-type Weighted<T> = readonly [weight: number, arbitrary: fc.Arbitrary<T>];
-
-export const mixed = <T>(...choices: readonly Weighted<T>[]): fc.Arbitrary<T> =>
-  fc.oneof(...choices.map(([weight, arbitrary]) => ({ weight, arbitrary })));
+import { between, mixed } from './draws';
+import type { DrawnChart } from './makers-charts';
+import { anyChart } from './makers-charts';
 
 const oneOf = <T>(values: readonly T[]): fc.Arbitrary<T> => fc.constantFrom(...values);
 
@@ -135,7 +127,12 @@ export const DRIVES = {
   liftFt: sometimes(15, between(-30, 60)),
   lineLengthFt: sometimes(15, between(5, 120)),
   mostLineLengthFt: sometimes(15, between(30, 80)),
-  makersChart: sometimes(4, fc.constant({ kind: 'superheat' })),
+  makersCharts: sometimes<readonly DrawnChart[]>(
+    14,
+    fc.uniqueArray(anyChart, { minLength: 1, maxLength: 3, selector: ({ kind }) => kind }),
+  ),
+  /** Of the hot gas in heating, absolute; below every critical pressure. */
+  heatingDischargePsi: between(240, 395),
 
   humidityBy: mixed<HumidityBy>(
     [10, fc.constant('wet-bulb')],

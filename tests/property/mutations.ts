@@ -10,7 +10,8 @@ import {
   TEMPERATURE_UNITS,
 } from '@chargewright/engine';
 import fc from 'fast-check';
-import { mixed } from './drives';
+import { mixed } from './draws';
+import { CHART_SLIPS, REPEATED, TOO_MANY, withSlip } from './makers-charts';
 
 type Json = Record<string, unknown>;
 
@@ -157,6 +158,13 @@ const field = fc.constantFrom<Mutation[]>(
   (request) => delete request['visit'],
 );
 
+/** A maker's table that was typed wrong. */
+const table = fc.constantFrom<Mutation[]>(
+  ...CHART_SLIPS.map((slip) => setup((fields) => withSlip(fields, slip))),
+  setup((fields) => Object.assign(fields, structuredClone(REPEATED))),
+  setup((fields) => Object.assign(fields, structuredClone(TOO_MANY))),
+);
+
 const mutation: fc.Arbitrary<Mutation> = mixed<Mutation>(
   [6, drop],
   [4, swap],
@@ -165,6 +173,7 @@ const mutation: fc.Arbitrary<Mutation> = mixed<Mutation>(
   [3, unit],
   [2, stray],
   [1, field],
+  [1, table],
 );
 
 /** None, for as many systems as not, or up to three. */

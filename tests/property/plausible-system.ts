@@ -9,6 +9,7 @@ import {
   flowToM3PerS,
   moistAirFromDryBulbAndRelativeHumidity,
   pressureDifferenceToPa,
+  pressureToPa,
   READING_DIMENSIONS,
   saturationRange,
   standardAtmospherePressurePa,
@@ -20,6 +21,7 @@ import { SUPERHEAT_CHART_A } from '../../packages/engine/src/methods/data/superh
 import { SUPERHEAT_TABLE_FINER } from '../../packages/engine/src/methods/data/superheat-table-finer';
 import { attempt } from '../../packages/engine/src/result';
 import type { Drives } from './drives';
+import type { ChartSite } from './makers-charts';
 
 export interface SiReading {
   /** K, absolute Pa, fraction, m³/s, Pa, A or V by the quantity. */
@@ -39,6 +41,7 @@ export interface PlausibleSystem {
   readonly earlierReadings: SiReadings | undefined;
   readonly targetSuperheatK: number | undefined;
   readonly targetSubcoolingK: number | undefined;
+  readonly chartSite: ChartSite;
 }
 
 const kelvin = (fahrenheit: number): number => temperatureToK(fahrenheit, 'degF');
@@ -47,13 +50,19 @@ const difference = (fahrenheit: number): number => differenceToK(fahrenheit, 'de
 const USUAL_SUPERHEAT_K = difference(12);
 const USUAL_SUBCOOLING_K = difference(10);
 const USUAL_SPLIT_K = difference(19);
+const USUAL_HOT_GAS_F = 155;
 
 export function plausibleSystem(drives: Drives): PlausibleSystem {
   const standardPa = standardAtmospherePressurePa(drives.elevationM ?? 0);
   const atmospherePa = Math.min(Math.max(standardPa + (drives.weatherPa ?? 0), 50_100), 109_900);
   const targetSuperheatK = mapped(drives.targetSuperheatF, difference);
   const targetSubcoolingK = mapped(drives.targetSubcoolingF, difference);
-  const readings = readingsOf(drives, { atmospherePa, targetSuperheatK, targetSubcoolingK });
+  const { wetBulbK } = moistAirFromDryBulbAndRelativeHumidity({
+    dryBulbK: kelvin(drives.returnF),
+    relativeHumidityRatio: drives.relativeHumidity,
+    pressurePa: atmospherePa,
+  });
+  const readings = readingsOf(drives, { targetSuperheatK, targetSubcoolingK, wetBulbK });
   return {
     drives,
     atmospherePa,
@@ -61,26 +70,36 @@ export function plausibleSystem(drives: Drives): PlausibleSystem {
     earlierReadings: drives.earlier && earlierReadings(readings, drives),
     targetSuperheatK,
     targetSubcoolingK,
+    chartSite: { readings, wetBulbK, ...differencesOf(readings, drives.refrigerant) },
+  };
+}
+
+/** What gauges and clamps show as superheat and subcooling, where both are there and on the curve. */
+function differencesOf(
+  { suctionPressure, suctionLineTemperature, liquidLineTemperature, ...rest }: SiReadings,
+  refrigerant: RefrigerantId,
+): Pick<ChartSite, 'superheatK' | 'subcoolingK'> {
+  const high = rest.liquidPressure ?? rest.dischargePressure;
+  const dew = suctionPressure && attempt(() => dewTemperatureK({ refrigerant, pressurePa: suctionPressure.value }));
+  const bubble = high && attempt(() => bubbleTemperatureK({ refrigerant, pressurePa: high.value }));
+  return {
+    superheatK: dew?.ok && suctionLineTemperature ? suctionLineTemperature.value - dew.value : undefined,
+    subcoolingK: bubble?.ok && liquidLineTemperature ? bubble.value - liquidLineTemperature.value : undefined,
   };
 }
 
 interface Site {
-  readonly atmospherePa: number;
+  readonly wetBulbK: number;
   readonly targetSuperheatK: number | undefined;
   readonly targetSubcoolingK: number | undefined;
 }
 
 function readingsOf(drives: Drives, site: Site): SiReadings {
-  const { wetBulbK } = moistAirFromDryBulbAndRelativeHumidity({
-    dryBulbK: kelvin(drives.returnF),
-    relativeHumidityRatio: drives.relativeHumidity,
-    pressurePa: site.atmospherePa,
-  });
   const values: Partial<Record<ReadingId, number>> = {
-    ...airSide(drives, wetBulbK),
-    ...refrigerantSide(drives, site, wetBulbK),
+    ...airSide(drives, site.wetBulbK),
+    ...refrigerantSide(drives, site),
     ...otherReadings(drives),
-    ...testReadings(drives, wetBulbK),
+    ...testReadings(drives, site.wetBulbK),
   };
   for (const id of drives.leftOut) delete values[id];
   const readings: SiReadings = {};
@@ -114,7 +133,8 @@ function airSide(drives: Drives, wetBulbK: number): Partial<Record<ReadingId, nu
 }
 
 function otherReadings(drives: Drives): Partial<Record<ReadingId, number>> {
-  const { airflowPerTon, electrical, staticPressureInH2O, dischargeLineF } = drives;
+  const { airflowPerTon, electrical, staticPressureInH2O, dischargeLineF, heatingDischargePsi } = drives;
+  const heating = drives.mode === 'heating';
   const ton = drives.nominalCapacityTon ?? 3;
   return defined({
     airflow: mapped(airflowPerTon, (perTon) => flowToM3PerS(perTon * ton, 'cfm')),
@@ -122,7 +142,8 @@ function otherReadings(drives: Drives): Partial<Record<ReadingId, number>> {
     lineVoltage: mapped(electrical, (current) => 245 - current),
     returnStaticPressure: staticPressureInH2O,
     supplyStaticPressure: mapped(staticPressureInH2O, (inches) => -inches),
-    dischargeLineTemperature: mapped(dischargeLineF, kelvin),
+    dischargeLineTemperature: mapped(dischargeLineF ?? (heating ? USUAL_HOT_GAS_F : undefined), kelvin),
+    dischargePressure: heating ? pressureToPa(heatingDischargePsi, 'psia', 0) : undefined,
   });
 }
 
@@ -151,8 +172,7 @@ function testReadings(drives: Drives, wetBulbK: number): Partial<Record<ReadingI
 
 function refrigerantSide(
   drives: Drives,
-  { targetSuperheatK, targetSubcoolingK }: Site,
-  wetBulbK: number,
+  { targetSuperheatK, targetSubcoolingK, wetBulbK }: Site,
 ): Partial<Record<ReadingId, number>> {
   const { refrigerant, highSidePort, rightHighSide } = drives;
   const outdoorK = kelvin(drives.outdoorF);

@@ -27,6 +27,8 @@ import {
   temperatureFromK,
   temperatureToK,
 } from '@chargewright/engine';
+import type { ChartSite } from './makers-charts';
+import { makersChartInput } from './makers-charts';
 import type { PlausibleSystem, SiReading, SiReadings } from './plausible-system';
 import { defined, mapped } from './plausible-system';
 
@@ -119,7 +121,7 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
         unit: unit.pressure,
       })),
       chargeMode: drives.chargeMode,
-      makersChart: drives.makersChart,
+      ...chartsIn(drives.makersCharts, system.chartSite, unitSystem),
       lineSet: defined({
         lift: mapped(drives.liftFt, length),
         length: mapped(drives.lineLengthFt, length),
@@ -127,6 +129,19 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
       }),
     }),
   };
+}
+
+/** One table in the field for one, several in the field for several. */
+function chartsIn(
+  drawn: PlausibleSystem['drives']['makersCharts'],
+  site: ChartSite,
+  unitSystem: UnitSystem,
+): Pick<SetupInput, 'makersChart' | 'makersCharts'> {
+  const charts = (drawn ?? []).map((chart) => makersChartInput(chart, site, unitSystem));
+  const [only] = charts;
+  return charts.length === 1 && only !== undefined
+    ? { makersChart: only }
+    : defined({ makersCharts: mapped(drawn, () => charts) });
 }
 
 function visitIn({ drives }: PlausibleSystem, unitSystem: UnitSystem): VisitInput {

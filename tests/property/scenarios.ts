@@ -1,7 +1,8 @@
 /** Corners that chance alone would hardly reach: several rare things at once, drawn more often than they happen. */
 import fc from 'fast-check';
 import type { Drives, Overrides } from './drives';
-import { between, drivesWith, mixed } from './drives';
+import { between, mixed } from './draws';
+import { drivesWith } from './drives';
 
 const always = <T>(value: T): fc.Arbitrary<T> => fc.constant(value);
 

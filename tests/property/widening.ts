@@ -1,7 +1,7 @@
 /** A request with wider ±: of one reading, now or earlier, or of all of them. Readings by one instrument share its error, so they widen together. */
 import type { EvaluationRequest, ReadingInput, ReadingsInput } from '@chargewright/engine';
 import fc from 'fast-check';
-import { mixed } from './drives';
+import { mixed } from './draws';
 
 export interface Widening {
   readonly factor: number;

@@ -165,6 +165,62 @@ describe('reading a request', () => {
   });
 });
 
+describe('a maker’s table', () => {
+  const CHART = {
+    kind: 'superheat',
+    rows: { unit: 'degF', values: [75, 85] },
+    columns: { unit: 'degF', values: [60, 66] },
+    unit: 'deltaF',
+    cells: [
+      [12, 21],
+      [null, 15],
+    ],
+    tolerance: { value: 4, unit: 'deltaF' },
+    leastOutdoor: { value: 55, unit: 'degF' },
+  };
+  const setup = { refrigerant: 'R-32', meteringDevice: 'txv' };
+
+  it('is taken as the engine takes it, alone or among several, dashes and all', () => {
+    for (const charts of [{ makersChart: CHART }, { makersCharts: [CHART, { ...CHART, kind: 'subcooling' }] }]) {
+      const read = readEvaluationRequest({ setup: { ...setup, ...charts } });
+      expect(read).toEqual({ ok: true, request: { setup: { ...setup, ...charts }, readings: {} } });
+    }
+  });
+
+  it('tells every fault of its shape at once, down to the cell', () => {
+    const chart = {
+      kind: 'by-feel',
+      rows: { unit: 'F', values: [75, '85'] },
+      columns: null,
+      unit: 'deltaF',
+      cells: [[12, true], 15],
+      tolerance: { value: 4, unit: 'degF' },
+    };
+    expect(faultPaths({ setup: { ...setup, makersChart: chart } }).sort()).toEqual([
+      'setup.makersChart.cells.0.1 wrong-type',
+      'setup.makersChart.cells.1 wrong-type',
+      'setup.makersChart.columns null',
+      'setup.makersChart.kind unknown-value',
+      'setup.makersChart.rows wrong-unit',
+      'setup.makersChart.rows.values.1 wrong-type',
+      'setup.makersChart.tolerance temperature-unit-on-difference',
+    ]);
+    expect(faultPaths({ setup: { ...setup, makersChart: { kind: 'superheat', cells: [[1]] } } })).toEqual([
+      'setup.makersChart.unit missing',
+    ]);
+    expect(faultPaths({ setup: { ...setup, makersCharts: CHART } })).toEqual(['setup.makersCharts wrong-type']);
+  });
+
+  it('that is faulty leaves its place to the others, so that their values are looked at too', () => {
+    const faulty = { ...CHART, cells: 'none' };
+    const read = readEvaluationRequest({ setup: { ...setup, makersCharts: [faulty, CHART, null] } });
+    expect(read).toMatchObject({
+      ok: false,
+      rest: { setup: { ...setup, makersCharts: [undefined, CHART, undefined] } },
+    });
+  });
+});
+
 describe('null', () => {
   const paths = knownPaths(evaluationRequest);
 
@@ -204,7 +260,15 @@ it('reads any JSON without throwing, and what it keeps of it has no fault', () =
   const body = fc.record(
     {
       procedure: fc.jsonValue(),
-      setup: fields(['refrigerant', 'meteringDevice', 'elevation', 'lineSet', 'superheatRange', 'chargeMode']),
+      setup: fields([
+        'refrigerant',
+        'meteringDevice',
+        'elevation',
+        'lineSet',
+        'superheatRange',
+        'chargeMode',
+        'makersChart',
+      ]),
       visit: fields(['runningMinutes', 'earlier', 'preflight', 'addedBefore', 'iceSeen']),
       readings: fields(READING_IDS),
     },

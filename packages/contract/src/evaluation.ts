@@ -1,6 +1,6 @@
 /** `POST /api/v1/evaluations`: what is asked and what is answered. */
 import { PROCEDURES } from '@chargewright/engine';
-import type { EvaluationRequest, ReadingsInput, SetupInput, VisitInput } from '@chargewright/engine';
+import type { EvaluationRequest, PartialSetup, ReadingsInput, VisitInput } from '@chargewright/engine';
 import * as z from 'zod';
 import { evaluationAnswer } from './evaluation/answer';
 import { LONGEST_TEXT, readings } from './evaluation/readings';
@@ -35,7 +35,7 @@ export type EvaluationAnswer = z.infer<typeof evaluationAnswer>;
 /** What parsed of a faulty request. */
 export interface EvaluationRest {
   readonly procedure?: string;
-  readonly setup: Partial<SetupInput>;
+  readonly setup: PartialSetup;
   readonly visit?: VisitInput;
   readonly readings: ReadingsInput;
 }

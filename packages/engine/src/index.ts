@@ -17,6 +17,7 @@ export * from './check/procedure-catalogue';
 export * from './check/procedure-ids';
 export type { Procedure, Rule, Standing } from './check/procedure';
 export * from './check/cross-check';
+export * from './check/makers-charts/plausibility';
 export * from './check/read-request';
 export type { CheckInput } from './check/input';
 export * from './check/evaluate-check';
@@ -28,6 +29,8 @@ export * from './psychrometrics/moist-air-pairs';
 export * from './psychrometrics/inch-pound-enthalpy';
 export * from './psychrometrics/moist-air-range';
 export * from './psychrometrics/standard-atmosphere';
+export * from './methods/makers-chart/chart-units';
+export * from './methods/makers-chart/kinds';
 export * from './methods/target-comparison';
 export * from './refrigerants/refrigerant-model';
 // For the pages and routes of airflow, capacity and weigh-in.

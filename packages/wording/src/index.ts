@@ -23,6 +23,7 @@ export * from './english/setup';
 export * from './english/safety';
 export * from './english/check-page';
 export * from './english/loose-checks';
+export * from './english/makers-charts';
 export * from './english/offline';
 export * from './english/page-menu';
 export * from './english/glance';

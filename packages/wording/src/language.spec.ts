@@ -12,6 +12,7 @@ import { airTexts } from './english/moist-air';
 import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { glanceWords } from './english/glance';
+import { makersChartWords } from './english/makers-charts';
 import { offlineWords } from './english/offline';
 import { ownerWords } from './english/owner';
 import { targetComparisonWords } from './english/target-comparison';
@@ -47,6 +48,7 @@ const english: Language = {
   readingHelp,
   setup: setupWords,
   procedures: procedureWords,
+  makersCharts: makersChartWords,
   safety: safetyWords,
   checkPage: checkPageWords,
   looseChecks: looseChecksWords,

@@ -20,6 +20,7 @@ import type { checkPageWords } from './english/check-page';
 import type { fieldFaultTexts } from './english/field-faults';
 import type { fieldInputWords } from './english/field-inputs';
 import type { looseChecksWords } from './english/loose-checks';
+import type { makersChartWords } from './english/makers-charts';
 import type { offlineWords } from './english/offline';
 import type { pageMenuWords } from './english/page-menu';
 import type { glanceWords } from './english/glance';
@@ -39,6 +40,10 @@ export interface FieldNaming {
   readonly parts: Readonly<Record<string, string>>;
   earlier(name: string): string;
   partOf(name: string, part: string): string;
+  /** One of several of the same name, counted from 1. */
+  numbered(name: string, number: number): string;
+  /** A place within a part: one number along an axis, row and column of a cell, counted from 1. */
+  placed(part: string, places: readonly number[]): string;
 }
 
 export interface NextStepWords {
@@ -101,6 +106,7 @@ export interface Language {
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;
   readonly procedures: typeof procedureWords;
+  readonly makersCharts: typeof makersChartWords;
   readonly safety: typeof safetyWords;
   readonly checkPage: typeof checkPageWords;
   readonly looseChecks: typeof looseChecksWords;

@@ -59,6 +59,10 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   dryBulb: temperature(78),
   stated: { kind: 'pressurePa', value: 101_325 },
   expected: { kind: 'pressurePa', value: 84_556 },
+  place: { kind: 'count', value: 3 },
+  row: { kind: 'count', value: 2 },
+  given: { kind: 'count', value: 5 },
+  wanted: { kind: 'count', value: 6 },
 };
 
 const message = <Message>(code: string, more: object = {}): Message =>
@@ -224,6 +228,21 @@ describe('faults', () => {
       'Earlier return dry bulb is not a number.',
     );
     expect(fault('not-a-finite-number', 'setup.constructor')).toBe('“setup.constructor” is not a number.');
+  });
+
+  it('name a table by its number, and the place in it', () => {
+    const say = (path: string) => fault('not-a-finite-number', path);
+    expect(say('setup.makersChart.cells.2.0')).toBe('Maker’s table, row 3, cell 1 is not a number.');
+    expect(say('setup.makersCharts.1.rows.values.4')).toBe('Maker’s table 2, rows, value 5 is not a number.');
+    expect(say('setup.makersCharts.0.leastOutdoor')).toBe(
+      'Maker’s table 1, least outdoor temperature is not a number.',
+    );
+    expect(fault('wrong-length-of-row', 'setup.makersChart.cells')).toBe(
+      'Maker’s table, cells: numbers in row 2: 5, columns: 6. They must be as many.',
+    );
+    expect(fault('axis-not-ascending', 'setup.makersChart.rows')).toBe(
+      'Maker’s table, rows: value 3 is not above the one before it. Type them from low to high.',
+    );
   });
 
   it('of the shape have a sentence too', () => {

@@ -5,6 +5,7 @@ import { checkPageWords } from './english/check-page';
 import { fieldInputWords } from './english/field-inputs';
 import { looseChecksWords } from './english/loose-checks';
 import { glanceWords } from './english/glance';
+import { makersChartWords } from './english/makers-charts';
 import { offlineWords } from './english/offline';
 import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
@@ -41,6 +42,7 @@ const roots = Object.entries({
   fieldInputs: fieldInputWords,
   airflow: airflowWords,
   weighIn: weighInWords,
+  makersCharts: makersChartWords,
 });
 
 describe('words of the page', () => {

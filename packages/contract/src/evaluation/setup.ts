@@ -3,6 +3,7 @@ import type { SetupInput } from '@chargewright/engine';
 import * as z from 'zod';
 import { object } from '../parsing/object';
 import { current, DIFFERENCE_UNITS_GIVEN, difference, flow, length, mass, power, pressure } from '../amounts/amounts';
+import { makersChart } from './makers-chart';
 import { LONGEST_TEXT } from './readings';
 
 const required = {
@@ -45,10 +46,11 @@ const optional = {
   ),
   maxHighPressure: z.exactOptional(pressure),
   chargeMode: z.exactOptional(z.boolean()),
-  makersChart: z.exactOptional(
-    object({ kind: z.string().max(LONGEST_TEXT) }).meta({
-      description: 'Accepted, not judged by yet: the answer then carries the caution makers-chart-not-used.',
-    }),
+  makersChart: z.exactOptional(makersChart),
+  makersCharts: z.exactOptional(
+    z
+      .array(makersChart)
+      .meta({ description: 'Several tables, in place of makersChart or beside it; one of a kind and port.' }),
   ),
   lineSet: z.exactOptional(lineSet),
 };
@@ -63,4 +65,6 @@ export const setupRest = object({
   refrigerant: z.exactOptional(required.refrigerant),
   meteringDevice: z.exactOptional(required.meteringDevice),
   ...optional,
+  // a faulty table leaves its place, so that the paths of the others stay
+  makersCharts: z.exactOptional(z.array(z.union([makersChart, z.undefined()]))),
 });

@@ -1,5 +1,5 @@
 import type * as z from 'zod';
-import { isRecord, structureFault, valueAt } from './structure-fault';
+import { isContainer, isRecord, structureFault, valueAt } from './structure-fault';
 import type { StructureFault } from './structure-fault';
 
 export interface ParsedByField<Whole, Rest> {
@@ -39,16 +39,22 @@ function parseRest<Rest>(schema: z.ZodType<Rest>, input: unknown): Rest {
   }
 }
 
+/** Whether there is something at the path to take away; of a list its entry, whose place stays. */
 function holds(input: unknown, path: readonly PropertyKey[]): boolean {
   const parent = valueAt(input, path.slice(0, -1));
   const last = path.at(-1);
-  return last !== undefined && typeof parent === 'object' && parent !== null && Object.hasOwn(parent, last);
+  if (last === undefined || !isContainer(parent) || !Object.hasOwn(parent, last)) return false;
+  return !Array.isArray(parent) || parent[last] !== undefined;
 }
 
-/** The input without the value at `path`. Copies only along the path. A table without one of its rows is another table: it goes as a whole. */
+/** The input without the value at `path`. Copies only along the path. */
 function without(input: unknown, path: readonly PropertyKey[]): unknown {
   const [key, ...below] = path;
-  if (key === undefined || Array.isArray(input)) return undefined;
+  if (key === undefined) return undefined;
+  if (Array.isArray(input)) {
+    // an entry leaves its place behind, so that the others keep theirs; where the place may not be empty, the next round takes the list
+    return input.map((entry: unknown, at) => (at === key ? without(entry, below) : entry));
+  }
   if (!isRecord(input) || !Object.hasOwn(input, key)) return input;
   const { [key]: held, ...others } = input;
   const value = without(held, below);

@@ -41,7 +41,10 @@ const EXPECTED_TYPES: Readonly<Record<string, ExpectedType>> = {
 /** The fault a person is told for an issue of zod. */
 export function structureFault(issue: z.core.$ZodIssue, input: unknown): StructureFault {
   const last = issue.path.at(-1);
-  const inAmount = (issue.path.length > 1 && AMOUNT_PARTS.includes(last ?? '')) || issue.path.at(-2) === 'plusMinus';
+  const holder = issue.path.at(-2);
+  // the unit of a table is one field of it among others
+  const inTable = typeof holder === 'number' || holder === 'makersChart';
+  const inAmount = (issue.path.length > 1 && !inTable && AMOUNT_PARTS.includes(last ?? '')) || holder === 'plusMinus';
   const where = {
     path: (inAmount ? issue.path.slice(0, -1) : issue.path).join('.'),
     part: issue.path.join('.'),
@@ -69,12 +72,13 @@ function wrongUnit(given: unknown, allowed: readonly string[]): StructureFault['
 /** The value at a path, also through the rows of a table; undefined where there is none. */
 export function valueAt(input: unknown, path: readonly PropertyKey[]): unknown {
   let value = input;
-  for (const key of path) value = hasKey(value, key) ? value[key] : undefined;
+  for (const key of path) value = isContainer(value) && Object.hasOwn(value, key) ? value[key] : undefined;
   return value;
 }
 
-const hasKey = (value: unknown, key: PropertyKey): value is Record<PropertyKey, unknown> =>
-  typeof value === 'object' && value !== null && Object.hasOwn(value, key);
+/** What has parts: an object or a list. */
+export const isContainer = (value: unknown): value is Record<PropertyKey, unknown> =>
+  typeof value === 'object' && value !== null;
 
 export const isRecord = (value: unknown): value is Record<PropertyKey, unknown> =>
   typeof value === 'object' && value !== null && !Array.isArray(value);

@@ -232,7 +232,12 @@ describe('setup', () => {
   });
 
   it('makers-chart-not-used: a table was given, and nothing is judged by it', () => {
-    expect(has(valveRequest({ setup: { makersChart: { kind: 'superheat' } } }), 'makers-chart-not-used')).toBe(true);
+    expect(
+      has(
+        valveRequest({ setup: { makersChart: { kind: 'superheat', unit: 'deltaF', cells: [[12]] } } }),
+        'makers-chart-not-used',
+      ),
+    ).toBe(true);
     expect(has(valveRequest(), 'makers-chart-not-used')).toBe(false);
   });
 

@@ -204,7 +204,7 @@ export function lowHead(input: CheckInput): Caution | null {
 
 function setupCautions({ setup }: CheckInput): readonly Caution[] {
   const found: Caution[] = [];
-  if (setup.makersChartGiven) found.push(plain('makers-chart-not-used'));
+  if (setup.makersCharts.length > 0) found.push(plain('makers-chart-not-used'));
   if (setup.elevationAssumed) found.push(plain('elevation-assumed'));
   if (setup.assumed.length > 0) {
     found.push({ code: 'setup-assumed', figures: { fields: { kind: 'setup', value: setup.assumed } } });

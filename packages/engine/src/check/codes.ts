@@ -242,6 +242,18 @@ export interface FaultFigures {
   'must-be-positive': never;
   'must-not-be-negative': never;
   'low-above-high': never;
+  // the shape of a maker's table
+  'axis-missing': never;
+  'axis-not-used': never;
+  'axis-too-short': 'least';
+  'axis-not-ascending': 'place';
+  'table-too-large': 'most';
+  'wrong-number-of-rows': 'given' | 'wanted';
+  'wrong-length-of-row': 'row' | 'given' | 'wanted';
+  'no-cell-printed': never;
+  'port-does-not-fit': never;
+  'too-many-tables': 'most';
+  'table-given-twice': never;
 }
 export type FaultMessage = MessageOf<FaultFigures>;
 export type Fault = FaultMessage & { readonly path: string };

@@ -6,6 +6,8 @@ import { isRefrigerantId, refrigerantFacts } from '../refrigerants/catalogue';
 import type { TemperatureUnit } from '../units';
 import { atmosphereOf } from './atmosphere';
 import type { Fault } from './codes';
+import type { ChartsInput } from './makers-charts/chart-faults';
+import { checkMakersCharts } from './makers-charts/chart-faults';
 import { findProcedure } from './procedure-catalogue';
 import type { Amount, ReadingsInput, SetupInput, VisitInput } from './request';
 import type { ReadingId } from './readings';
@@ -16,10 +18,12 @@ import { Faults } from './value-faults';
 /** A request of which some fields may be left out because their own shape was at fault. */
 export interface PartialRequest {
   readonly procedure?: string;
-  readonly setup?: Partial<SetupInput>;
+  readonly setup?: PartialSetup;
   readonly visit?: VisitInput;
   readonly readings?: ReadingsInput;
 }
+
+export type PartialSetup = Partial<Omit<SetupInput, 'makersChart' | 'makersCharts'>> & ChartsInput;
 
 /** Every fault of the values; an empty list means that the request can be judged. Total: never throws for a well-typed request. */
 export function crossCheck(request: PartialRequest): readonly Fault[] {
@@ -34,7 +38,7 @@ export function crossCheck(request: PartialRequest): readonly Fault[] {
   return faults.list;
 }
 
-function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext {
+function checkSetup(faults: Faults, setup: PartialSetup): PressureContext {
   const { refrigerant, superheatRange, lineSet } = setup;
   const context: { atmospherePa?: number; criticalPa?: number } = {};
   if (refrigerant !== undefined) {
@@ -57,6 +61,7 @@ function checkSetup(faults: Faults, setup: Partial<SetupInput>): PressureContext
       if (superheatRange.low > superheatRange.high) faults.add(path, { code: 'low-above-high', figures: {} });
     }
   }
+  checkMakersCharts(faults, setup);
   faults.notNegative('setup.lineSet.length', lineSet?.length?.value);
   faults.notNegative('setup.lineSet.mostLength', lineSet?.mostLength?.value);
   faults.notNegative('setup.lineSet.included', lineSet?.included?.value);

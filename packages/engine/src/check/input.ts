@@ -1,6 +1,8 @@
 /** A check in SI, ready to be judged: what `readRequest` makes of a request. */
 import type { Known } from '../derivation/quantity';
 import type { RefrigerantId } from '../refrigerants/catalogue';
+import type { ChartPort } from '../methods/makers-chart/kinds';
+import type { MakersTable } from '../methods/makers-chart/makers-table';
 import type { UsedReadingId } from './assumed-uncertainty';
 import type { SetupField } from './codes';
 import type { Procedure } from './procedure';
@@ -55,8 +57,21 @@ export interface CheckSetup {
   readonly liftM?: number;
   readonly lineLengthM?: number;
   readonly mostLineLengthM?: number;
-  /** A maker's table was given, by which nothing is judged yet. */
-  readonly makersChartGiven: boolean;
+  readonly makersCharts: readonly CheckMakersChart[];
+}
+
+/** A maker's table with what the maker says beside it. */
+export interface CheckMakersChart {
+  readonly table: MakersTable;
+  readonly port: ChartPort;
+  /** The maker's ± as half a width: K, or Pa for a table of pressures. */
+  readonly tolerance?: number;
+  readonly leastOutdoorK?: number;
+  readonly mostOutdoorK?: number;
+  readonly leastReturnK?: number;
+  readonly mostReturnK?: number;
+  /** How many of its figures look odd. */
+  readonly oddities: number;
 }
 
 export interface CheckVisit {

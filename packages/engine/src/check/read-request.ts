@@ -22,6 +22,7 @@ import { atmosphereOf } from './atmosphere';
 import type { Fault, SetupField } from './codes';
 import { crossCheck } from './cross-check';
 import type { CheckInput, CheckReading, CheckReadings, CheckSetup, CheckVisit } from './input';
+import { readMakersCharts } from './makers-charts/read-makers-charts';
 import { present } from './present';
 import { DEFAULT_PROCEDURE, findProcedure } from './procedure-catalogue';
 import type {
@@ -71,7 +72,7 @@ function readSetup(setup: SetupInput): CheckSetup {
     assumed,
     atmosphere,
     elevationAssumed: setup.elevation === undefined && setup.stationPressure === undefined,
-    makersChartGiven: setup.makersChart !== undefined,
+    makersCharts: readMakersCharts(setup),
     alteration: setup.alteration ?? false,
     highVelocity: setup.highVelocity ?? false,
     ...present('airflowPath', setup.airflowPath),

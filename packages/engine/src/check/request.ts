@@ -13,6 +13,8 @@ import type {
   StaticPressureUnit,
   TemperatureUnit,
 } from '../units';
+import type { ChartUnit } from '../methods/makers-chart/chart-units';
+import type { ChartPort, MakersChartKind } from '../methods/makers-chart/kinds';
 import type { ReadingId } from './readings';
 
 export const METERING_DEVICES = ['fixed-orifice', 'txv', 'eev'] as const;
@@ -78,6 +80,39 @@ export interface ReadingInput extends Amount<ReadingUnit> {
 
 export type ReadingsInput = Readonly<Partial<Record<ReadingId, ReadingInput>>>;
 
+export interface ChartAxisInput {
+  readonly unit: ChartUnit;
+  /** Ascending. */
+  readonly values: readonly number[];
+}
+
+/**
+ * A table that the maker prints for this unit; `MAKERS_CHART_FACTS` says what the rows, columns and cells of each kind are. Gauge pressures count
+ * from sea level, as printed tables do.
+ */
+export interface MakersChartInput {
+  readonly kind: MakersChartKind;
+  /** Left out: one figure that holds at all conditions, the one cell. */
+  readonly rows?: ChartAxisInput;
+  /** Only where the kind has a second condition. */
+  readonly columns?: ChartAxisInput;
+  /** Of the cells. */
+  readonly unit: ChartUnit;
+  /** One list for each row; `null` is a dash: no target there. */
+  readonly cells: readonly (readonly (number | null)[])[];
+  /** The service port it holds for; left out, the usual one of the kind. */
+  readonly port?: ChartPort;
+  /** Smallest step the cells are printed in, in their unit; left out, from their decimals. */
+  readonly resolution?: number;
+  /** The maker's ±; left out, that of the procedure. */
+  readonly tolerance?: Amount<Exclude<DifferenceUnit, 'K'> | PressureDifferenceUnit>;
+  /** Weather and house that the maker allows for this table. */
+  readonly leastOutdoor?: TemperatureAmount;
+  readonly mostOutdoor?: TemperatureAmount;
+  readonly leastReturn?: TemperatureAmount;
+  readonly mostReturn?: TemperatureAmount;
+}
+
 export interface SetupInput {
   readonly refrigerant: string;
   readonly meteringDevice: MeteringDevice;
@@ -110,8 +145,9 @@ export interface SetupInput {
   readonly maxHighPressure?: Amount<PressureUnit>;
   /** Whether an inverter runs in the maker's charge mode; leave out for a single-speed unit. */
   readonly chargeMode?: boolean;
-  /** A maker's own table. It is not judged by yet, and the result says so: enter its target instead. */
-  readonly makersChart?: { readonly kind: string };
+  /** What the maker prints for this unit: one table, or several. */
+  readonly makersChart?: MakersChartInput;
+  readonly makersCharts?: readonly MakersChartInput[];
   readonly lineSet?: {
     readonly length?: Amount<LengthUnit>;
     /** The longest the maker allows without further measures. */

@@ -2,9 +2,10 @@ import { describe, expect, it } from 'vitest';
 import { EngineError } from '../errors';
 import { differenceToK, temperatureToK } from '../units';
 import type { Chart } from './chart';
-import { chartValueK, interpolate } from './chart';
+import { chartValueK } from './chart';
 import { SPLIT_TABLE } from './data/split-table';
 import { SUPERHEAT_CHART_A } from './data/superheat-chart-a';
+import { interpolate } from './grid';
 
 const valueF = (chart: Chart, rowF: number, columnF: number): number =>
   (chartValueK(chart, { rowK: temperatureToK(rowF, 'degF'), columnK: temperatureToK(columnF, 'degF') }) * 9) / 5;

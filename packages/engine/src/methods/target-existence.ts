@@ -4,10 +4,13 @@
  */
 import { standardNormalCdf } from '../numerics/normal-distribution';
 import { temperatureFromK } from '../units';
-import type { Chart, Corners } from './chart';
-import { cornersOf } from './chart';
+import type { Chart } from './chart';
+import { gridOfChart } from './chart';
+import type { Corners, Grid } from './grid';
+import { cornersOf } from './grid';
 
-interface Normal {
+/** A coordinate of a grid, in its printed unit, with its standard uncertainty. */
+export interface Normal {
   readonly mean: number;
   readonly u: number;
 }
@@ -22,30 +25,38 @@ const GAUSS_3: readonly (readonly [x: number, weight: number])[] = [
   [Math.sqrt(0.6), 5 / 9],
 ];
 
-/** A standard uncertainty that stands for an exactly known coordinate, in °F. */
-const EXACT_F = 1e-7;
+/** A standard uncertainty that stands for an exactly known coordinate, in °F or any other printed unit of an axis. */
+const EXACT = 1e-7;
 
-/**
- * Probability in [0, 1] that the chart has no value at the true row and column temperature, both taken as independent normal variables
- * with the given means and standard uncertainties in K (JCGM 106:2012, 7.2, over two variables). Integrated row by row; exact along the columns.
- */
-export function probabilityOfNoTarget(
+/** `probabilityOfNoValue` of a chart, at temperatures with standard uncertainties in K. */
+export const probabilityOfNoTarget = (
   chart: Chart,
   at: { readonly rowK: number; readonly rowUK: number; readonly columnK: number; readonly columnUK: number },
-): number {
-  const row: Normal = { mean: temperatureFromK(at.rowK, 'degF'), u: Math.max(1.8 * at.rowUK, EXACT_F) };
-  const column: Normal = { mean: temperatureFromK(at.columnK, 'degF'), u: Math.max(1.8 * at.columnUK, EXACT_F) };
-  if (at.rowUK === 0 && at.columnUK === 0) return 0;
-  if (allPrintedWithinReach(chart, row, column)) return 0;
-  const cdfAtColumns = chart.columnsF.map((c) => standardNormalCdf((c - column.mean) / column.u));
+): number =>
+  probabilityOfNoValue(
+    gridOfChart(chart),
+    { mean: temperatureFromK(at.rowK, 'degF'), u: 1.8 * at.rowUK },
+    { mean: temperatureFromK(at.columnK, 'degF'), u: 1.8 * at.columnUK },
+  );
+
+/**
+ * Probability in [0, 1] that the grid has no value at the true row and column, both taken as independent normal variables
+ * (JCGM 106:2012, 7.2, over two variables). Integrated row by row; exact along the columns.
+ */
+export function probabilityOfNoValue(grid: Grid, atRow: Normal, atColumn: Normal): number {
+  if (atRow.u === 0 && atColumn.u === 0) return 0;
+  const row: Normal = { mean: atRow.mean, u: Math.max(atRow.u, EXACT) };
+  const column: Normal = { mean: atColumn.mean, u: Math.max(atColumn.u, EXACT) };
+  if (allPrintedWithinReach(grid, row, column)) return 0;
+  const cdfAtColumns = grid.columns.map((c) => standardNormalCdf((c - column.mean) / column.u));
   let exists = 0;
-  for (let r = 0; r < chart.rowsF.length - 1; r++) {
-    const low = chart.rowsF[r]!;
-    const height = chart.rowsF[r + 1]! - low;
+  for (let r = 0; r < grid.rows.length - 1; r++) {
+    const low = grid.rows[r]!;
+    const height = grid.rows[r + 1]! - low;
     const from = Math.max(low, row.mean - REACH * row.u);
     const to = Math.min(low + height, row.mean + REACH * row.u);
     if (to <= from) continue;
-    const cells = cellsInRow(chart, r, cdfAtColumns);
+    const cells = cellsInRow(grid, r, cdfAtColumns);
     const panels = Math.ceil((to - from) / (PANEL * row.u));
     const half = (0.5 * (to - from)) / panels;
     for (let p = 0; p < panels; p++) {
@@ -75,19 +86,19 @@ interface CutCell {
   readonly cdfHigh: number;
 }
 
-function cellsInRow(chart: Chart, row: number, cdfAtColumns: readonly number[]): CellsInRow {
+function cellsInRow(grid: Grid, row: number, cdfAtColumns: readonly number[]): CellsInRow {
   const cut: CutCell[] = [];
   let printed = 0;
-  for (let c = 0; c < chart.columnsF.length - 1; c++) {
+  for (let c = 0; c < grid.columns.length - 1; c++) {
     const cdfLow = cdfAtColumns[c]!;
     const cdfHigh = cdfAtColumns[c + 1]!;
     if (cdfHigh - cdfLow < 1e-9) continue;
-    const corners = cornersOf(chart, row, c);
+    const corners = cornersOf(grid, row, c);
     const dashes = numberOfDashes(corners);
     if (dashes === 0) printed += cdfHigh - cdfLow;
     if (dashes !== 1) continue;
-    const low = chart.columnsF[c]!;
-    cut.push({ corners, low, width: chart.columnsF[c + 1]! - low, cdfLow, cdfHigh });
+    const low = grid.columns[c]!;
+    cut.push({ corners, low, width: grid.columns[c + 1]! - low, cdfLow, cdfHigh });
   }
   return { printed, cut };
 }
@@ -115,17 +126,17 @@ function printedPart({ c00, c01, c11 }: Corners, r: number): readonly [from: num
   return [r, 1];
 }
 
-function allPrintedWithinReach(chart: Chart, row: Normal, column: Normal): boolean {
+function allPrintedWithinReach(grid: Grid, row: Normal, column: Normal): boolean {
   const within = (axis: readonly number[], { mean, u }: Normal): boolean =>
     mean - REACH * u >= axis[0]! && mean + REACH * u <= axis[axis.length - 1]!;
-  if (!within(chart.rowsF, row) || !within(chart.columnsF, column)) return false;
+  if (!within(grid.rows, row) || !within(grid.columns, column)) return false;
   const touches = (axis: readonly number[], i: number, { mean, u }: Normal): boolean =>
     axis[i + 1]! >= mean - REACH * u && axis[i]! <= mean + REACH * u;
-  for (let r = 0; r < chart.rowsF.length - 1; r++) {
-    if (!touches(chart.rowsF, r, row)) continue;
-    for (let c = 0; c < chart.columnsF.length - 1; c++) {
-      if (!touches(chart.columnsF, c, column)) continue;
-      if (numberOfDashes(cornersOf(chart, r, c)) > 0) return false;
+  for (let r = 0; r < grid.rows.length - 1; r++) {
+    if (!touches(grid.rows, r, row)) continue;
+    for (let c = 0; c < grid.columns.length - 1; c++) {
+      if (!touches(grid.columns, c, column)) continue;
+      if (numberOfDashes(cornersOf(grid, r, c)) > 0) return false;
     }
   }
   return true;

@@ -22,6 +22,19 @@ const faults: FaultWords['faults'] = {
   'must-be-positive': (f) => `${f.field} must be more than zero.`,
   'must-not-be-negative': (f) => `${f.field} must not be less than zero.`,
   'low-above-high': (f) => `${f.field}: the low end is above the high end.`,
+  'axis-missing': (f) => `${f.field}: missing. This kind of table has values down and across.`,
+  'axis-not-used': (f) => `${f.field}: this table has one value a row. Leave the columns out.`,
+  'axis-too-short': (f) => `${f.field}: give at least ${f.least} values.`,
+  'axis-not-ascending': (f) =>
+    `${f.field}: value ${f.place} is not above the one before it. Type them from low to high.`,
+  'table-too-large': (f) => `${f.field}: at most ${f.most} values.`,
+  'wrong-number-of-rows': (f) => `${f.field}: lines of numbers: ${f.given}, rows: ${f.wanted}. They must be as many.`,
+  'wrong-length-of-row': (f) =>
+    `${f.field}: numbers in row ${f.row}: ${f.given}, columns: ${f.wanted}. They must be as many.`,
+  'no-cell-printed': (f) => `${f.field}: nothing but dashes. Type at least one number.`,
+  'port-does-not-fit': (f) => `${f.field}: this kind of table does not hold at that port.`,
+  'too-many-tables': (f) => `${f.field}: at most ${f.most} tables.`,
+  'table-given-twice': (f) => `${f.field}: there is another table of this kind for this port.`,
 };
 
 const {
@@ -59,6 +72,8 @@ const naming: FaultWords['naming'] = {
     liquidShutIn: { name: 'liquid shut in' },
     bulb: { name: 'bulb' },
     valve: { name: 'valve' },
+    makersChart: { name: 'maker’s table' },
+    makersCharts: { name: 'maker’s table' },
   },
   parts: {
     unit: 'unit',
@@ -66,9 +81,21 @@ const naming: FaultWords['naming'] = {
     ageSeconds: 'age',
     resolution: 'resolution',
     instrumentId: 'instrument',
+    rows: 'rows',
+    columns: 'columns',
+    cells: 'cells',
+    port: 'port',
+    tolerance: 'tolerance',
+    leastOutdoor: 'least outdoor temperature',
+    mostOutdoor: 'most outdoor temperature',
+    leastReturn: 'least return temperature',
+    mostReturn: 'most return temperature',
   },
   earlier: (name) => `earlier ${name}`,
   partOf: (name, part) => `${name}, ${part}`,
+  numbered: (name, number) => `${name} ${number}`,
+  placed: (part, [first, second]) =>
+    second === undefined ? `${part}, value ${first}` : `row ${first}, cell ${second}`,
 };
 
 export const faultWords: FaultWords = { faults, naming };

@@ -1,7 +1,7 @@
 import { evaluationAnswer } from '@chargewright/contract/evaluation';
 import type { EvaluationAnswer } from '@chargewright/contract/evaluation';
 import { problem } from '@chargewright/contract/problem';
-import { READING_IDS } from '@chargewright/engine';
+import { MAKERS_CHART_KINDS, READING_IDS } from '@chargewright/engine';
 import * as fc from 'fast-check';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import * as z from 'zod';
@@ -277,6 +277,26 @@ describe('a check that cannot be', () => {
     });
   });
 
+  it('tells every fault of the maker’s tables at once, of the shape and of the values', async () => {
+    const axis = (...values: readonly unknown[]) => ({ unit: 'degF', values });
+    const curve = { kind: 'liquid-pressure', rows: axis(80, 100), unit: 'psig', cells: [[270], [355]] };
+    const makersCharts = [
+      { ...curve, rows: axis(100, 80) },
+      { ...curve, port: 'any' },
+      { ...curve, unit: 'deltaF', port: 'discharge' },
+    ];
+    const makersChart = { kind: 'subcooling', unit: 'deltaF', cells: [[null]] };
+    expect(
+      await refused({ setup: { refrigerant: 'R-410A', meteringDevice: 'txv', makersChart, makersCharts } }),
+    ).toEqual({
+      'setup.makersChart.cells': 'Maker’s table, cells: nothing but dashes. Type at least one number.',
+      'setup.makersCharts.0.rows':
+        'Maker’s table 1, rows: value 2 is not above the one before it. Type them from low to high.',
+      'setup.makersCharts.1.port': 'Maker’s table 2, port has an unknown value: give liquid, discharge or suction.',
+      'setup.makersCharts.2.unit': 'Maker’s table 3, unit is not measured in this unit.',
+    });
+  });
+
   it('has a sentence for each fault', async () => {
     const messages = Object.values(
       await refused({ setup: { refrigerant: null, stage: 7 }, readings: { airflow: {} } }),
@@ -344,6 +364,17 @@ it('never answers 5xx, whatever the body', async () => {
   );
   const any = fc.oneof({ weight: 4, arbitrary: amount }, anything);
   const fields = (...names: readonly string[]) => fc.dictionary(fc.constantFrom(...names), any);
+  const axis = fc.record({ unit: fc.constantFrom(...units), values: fc.array(number, { maxLength: 3 }) });
+  const table = fc.record(
+    {
+      kind: fc.constantFrom(...MAKERS_CHART_KINDS, 7),
+      rows: axis,
+      columns: axis,
+      unit: fc.constantFrom(...units),
+      cells: fc.array(fc.array(fc.oneof(number, fc.constant(null)), { maxLength: 3 }), { maxLength: 3 }),
+    },
+    { requiredKeys: ['kind', 'unit', 'cells'] },
+  );
   const setup = fc
     .tuple(
       fc.record({
@@ -351,8 +382,9 @@ it('never answers 5xx, whatever the body', async () => {
         meteringDevice: fc.constantFrom<unknown>('txv', 'fixed-orifice', 7),
       }),
       fields('elevation', 'stationPressure', 'targetSuperheat', 'targetSubcooling', 'nominalCapacity', 'lineSet'),
+      fc.option(table, { nil: undefined }),
     )
-    .map(([required, optional]) => ({ ...optional, ...required }));
+    .map(([required, optional, makersChart]) => ({ ...optional, ...required, ...(makersChart && { makersChart }) }));
   const visit = fields('runningMinutes', 'lowestReturnDryBulb', 'preflight', 'earlier', 'addedThisVisit', 'iceSeen');
   const body = fc.record({ setup, visit, readings: fields(...READING_IDS) }, { requiredKeys: ['setup'] });
   const statuses = new Set<number>();

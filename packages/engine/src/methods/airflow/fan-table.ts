@@ -6,7 +6,7 @@ import type { ErrorPart } from '../../derivation/quantity';
 import type { Formula } from '../../derivation/formula';
 import { formula } from '../../derivation/formula';
 import { EngineError } from '../../errors';
-import { LEAST_WEIGHT } from '../chart';
+import { LEAST_WEIGHT } from '../grid';
 import type { SourcedFigure } from '../sourced-figure';
 
 export interface FanTableRow {
