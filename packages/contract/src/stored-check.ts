@@ -4,8 +4,11 @@
  */
 import {
   AIRFLOW_PATHS,
+  CHART_PORTS,
+  CHART_UNITS,
   HIGH_SIDE_PORTS,
   LEAK_SEARCHES,
+  MAKERS_CHART_KINDS,
   METERING_DEVICES,
   MODES,
   PREFLIGHT_ITEMS,
@@ -15,6 +18,7 @@ import {
   STAGES,
   SYSTEM_KINDS,
 } from '@chargewright/engine';
+import type { ChartDimension } from '@chargewright/engine';
 import * as z from 'zod';
 import { TYPED_FIELDS } from './typed-fields';
 
@@ -26,6 +30,9 @@ export const STORED_CHECK_SCHEMA = 1;
 
 const MAX_TEXT = 200;
 const MAX_READINGS = 10_000;
+/** Room beyond what the engine takes, so that nothing typed is lost. */
+const MOST_LINES = 60;
+const MOST_TABLES = 20;
 
 const id = z.uuidv7();
 const text = z.string().max(MAX_TEXT);
@@ -35,6 +42,25 @@ const fieldKey = z.union([
   z.templateLiteral(['reading:', z.enum(READING_IDS)]),
   z.templateLiteral(['typed:', z.enum(TYPED_FIELDS)]),
 ]);
+
+const chartUnit = z.enum(
+  (Object.keys(CHART_UNITS) as ChartDimension[]).flatMap((dimension) => CHART_UNITS[dimension].units),
+);
+const lineOfTexts = z.array(text).max(MOST_LINES).readonly();
+const typedAxis = z.object({ unit: chartUnit, values: lineOfTexts });
+
+/** A maker's table as it is typed off, finished or not. */
+const typedChart = z.object({
+  kind: z.enum(MAKERS_CHART_KINDS),
+  rows: z.exactOptional(typedAxis),
+  columns: z.exactOptional(typedAxis),
+  unit: chartUnit,
+  cells: z.array(lineOfTexts).max(MOST_LINES).readonly(),
+  port: z.exactOptional(z.enum(CHART_PORTS)),
+  tolerance: z.exactOptional(z.object(typedValue)),
+  leastOutdoor: z.exactOptional(z.object(typedValue)),
+  mostOutdoor: z.exactOptional(z.object(typedValue)),
+});
 
 const setup = z.object({
   refrigerant: z.exactOptional(text),
@@ -49,6 +75,7 @@ const setup = z.object({
   alteration: z.exactOptional(z.boolean()),
   highVelocity: z.exactOptional(z.boolean()),
   airflowPath: z.exactOptional(z.enum([...AIRFLOW_PATHS, 'measured'])),
+  makersCharts: z.exactOptional(z.array(typedChart).max(MOST_TABLES).readonly()),
 });
 
 const visit = z.object({

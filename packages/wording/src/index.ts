@@ -25,6 +25,7 @@ export * from './english/check-page';
 export * from './english/loose-checks';
 export * from './english/makers-charts';
 export * from './english/offline';
+export * from './english/makers-data-page';
 export * from './english/page-menu';
 export * from './english/glance';
 export * from './english/owner';

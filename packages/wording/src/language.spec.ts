@@ -13,6 +13,7 @@ import { names } from './english/names';
 import { nextStepWords } from './english/next-steps';
 import { glanceWords } from './english/glance';
 import { makersChartWords } from './english/makers-charts';
+import { makersDataWords } from './english/makers-data-page';
 import { offlineWords } from './english/offline';
 import { ownerWords } from './english/owner';
 import { targetComparisonWords } from './english/target-comparison';
@@ -55,6 +56,7 @@ const english: Language = {
   offline: offlineWords,
   pageMenu: pageMenuWords,
   glance: glanceWords,
+  makersData: makersDataWords,
   owner: ownerWords,
   targetComparison: targetComparisonWords,
 };

@@ -24,6 +24,7 @@ import type { makersChartWords } from './english/makers-charts';
 import type { offlineWords } from './english/offline';
 import type { pageMenuWords } from './english/page-menu';
 import type { glanceWords } from './english/glance';
+import type { makersDataWords } from './english/makers-data-page';
 import type { ownerWords } from './english/owner';
 import type { targetComparisonWords } from './english/target-comparison';
 import type { readingHelp } from './english/reading-help';
@@ -113,6 +114,7 @@ export interface Language {
   readonly offline: typeof offlineWords;
   readonly pageMenu: typeof pageMenuWords;
   readonly glance: typeof glanceWords;
+  readonly makersData: typeof makersDataWords;
   readonly owner: typeof ownerWords;
   readonly targetComparison: typeof targetComparisonWords;
 }

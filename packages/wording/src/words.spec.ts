@@ -6,6 +6,7 @@ import { fieldInputWords } from './english/field-inputs';
 import { looseChecksWords } from './english/loose-checks';
 import { glanceWords } from './english/glance';
 import { makersChartWords } from './english/makers-charts';
+import { makersDataWords } from './english/makers-data-page';
 import { offlineWords } from './english/offline';
 import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
@@ -16,13 +17,13 @@ import { safetyWords } from './english/safety';
 import { listWords, setupWords } from './english/setup';
 import { weighInWords } from './english/weigh-in';
 
-/** Every text of a tree of words; those that take figures get 2 and 8. */
+/** Every text of a tree of words; those that take figures get 2 and then 8. */
 function textsOf(words: unknown, path: string): readonly (readonly [string, string])[] {
   if (typeof words === 'string') return [[path, words]];
   if (typeof words === 'function') {
     const say = words as (...figures: readonly unknown[]) => string;
     // the unit toggle answers only for a unit system
-    return [[path, say(path.startsWith('checkPage.units') ? 'F-psi' : 2, 8)]];
+    return [[path, say(path.startsWith('checkPage.units') ? 'F-psi' : 2, 8, 8, 8)]];
   }
   return Object.entries(words as object).flatMap(([key, value]) => textsOf(value, `${path}.${key}`));
 }
@@ -33,6 +34,7 @@ const roots = Object.entries({
   offline: offlineWords,
   pageMenu: pageMenuWords,
   glance: glanceWords,
+  makersData: makersDataWords,
   targetComparison: targetComparisonWords,
   readings: readingWords,
   readingHelp,

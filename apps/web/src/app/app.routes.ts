@@ -10,5 +10,10 @@ export const routes: Routes = [
     loadComponent: async () => (await import('./layout/checks-page')).ChecksPage,
     title: `${looseChecksWords.title} · ${checkPageWords.shell.product}`,
   },
+  {
+    path: 'makers-data',
+    loadComponent: async () => (await import('./makers-data/makers-data-page')).MakersDataPage,
+    title: `${checkPageWords.setup.makersData} · ${checkPageWords.shell.product}`,
+  },
   { path: '**', redirectTo: '' },
 ];

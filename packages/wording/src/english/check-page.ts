@@ -29,6 +29,11 @@ export const checkPageWords = {
     otherRefrigerants: 'All others',
     estimated: 'estimated properties',
     more: 'More from the nameplate',
+    makersData: 'Maker’s data',
+    makersDataLink: (tables: number) =>
+      tables === 0
+        ? 'Maker’s data: type off a table'
+        : `Maker’s data: ${tables === 1 ? '1 table' : `${tables} tables`}`,
     moreNote: 'Each of these makes the answer sharper. None is needed to start.',
     missingBoth: 'Choose the refrigerant and the metering device to start.',
     missingRefrigerant: 'Choose the refrigerant. It stands on the nameplate; look for a retrofit label too.',

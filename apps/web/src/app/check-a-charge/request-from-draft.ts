@@ -11,7 +11,8 @@ import type {
 } from '@chargewright/engine';
 import { READING_IDS } from '@chargewright/engine';
 import type { TypedField } from '@chargewright/contract/typed-fields';
-import type { CheckDraft, DraftSetup, FieldKey, FirstSet } from '../loose-checks/check-draft';
+import type { CheckDraft, DraftSetup, FieldKey, FirstSet, TypedChart } from '../loose-checks/check-draft';
+import { readTypedChart } from '../makers-data/read-typed-chart';
 import { isUnitOf } from '../quantities/field-units';
 import { parseNumber, type NumberProblem, type TypedNumber } from '../quantities/parse-number';
 import { ALL_FIELD_KEYS, pathOf, readingKey, typedKey, valueIn } from './field-key';
@@ -76,8 +77,16 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
     else faults.push({ code: 'wrong-unit', figures: {}, path: pathOf(key) });
   }
 
-  const { refrigerant, meteringDevice, chargeMode, targetSubcoolingPort, procedure, airflowPath, ...choices } =
-    draft.setup;
+  const {
+    refrigerant,
+    meteringDevice,
+    chargeMode,
+    targetSubcoolingPort,
+    procedure,
+    airflowPath,
+    makersCharts,
+    ...choices
+  } = draft.setup;
   if (refrigerant === undefined || meteringDevice === undefined) return { request: null, problems, faults };
 
   const setup: SetupInput = {
@@ -89,6 +98,7 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
       chargeMode !== 'no-inverter' &&
       asksChargeMode(draft.setup) && { chargeMode: chargeMode === 'on' }),
     ...(airflowPath && airflowPath !== 'measured' && asksAirflowProof(draft.setup) && { airflowPath }),
+    ...makersTables(makersCharts),
     ...superheatRange(entries, faults),
     ...lineSet(entries),
     ...amounts(entries, [
@@ -128,6 +138,15 @@ const counts = (entries: ReadonlyMap<FieldKey, Entry>, fields: readonly TypedFie
       return entry ? [[field, entry.value]] : [];
     }),
   );
+
+/** The finished ones; one that is still being typed is not judged by. */
+function makersTables(charts: readonly TypedChart[] = []): Pick<SetupInput, 'makersCharts'> {
+  const complete = charts.flatMap((chart) => {
+    const reading = readTypedChart(chart);
+    return reading.state === 'complete' ? [reading.chart] : [];
+  });
+  return complete.length === 0 ? {} : { makersCharts: complete };
+}
 
 /** A range takes both of its ends, in one unit. */
 function superheatRange(entries: ReadonlyMap<FieldKey, Entry>, faults: Fault[]): Pick<SetupInput, 'superheatRange'> {

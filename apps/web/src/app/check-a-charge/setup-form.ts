@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import { RouterLink } from '@angular/router';
 import {
   HIGH_SIDE_PORTS,
   METERING_DEVICES,
@@ -46,7 +47,7 @@ const SYSTEM_FIELDS = [
 /** What must be right before any reading. */
 @Component({
   selector: 'app-setup-form',
-  imports: [ChoiceGroup, ReadingRow, RefrigerantChoice, TargetPort, TickBox],
+  imports: [ChoiceGroup, ReadingRow, RefrigerantChoice, RouterLink, TargetPort, TickBox],
   templateUrl: './setup-form.html',
   styleUrl: './setup-form.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -5,8 +5,11 @@
 import type { TypedField } from '@chargewright/contract/typed-fields';
 import type {
   AirflowPath,
+  ChartPort,
+  ChartUnit,
   HighSidePort,
   LeakSearch,
+  MakersChartKind,
   MeteringDevice,
   Mode,
   PreflightItem,
@@ -61,6 +64,27 @@ export interface DraftSetup {
   readonly alteration?: boolean;
   readonly highVelocity?: boolean;
   readonly airflowPath?: AirflowProof;
+  /** What the maker prints for this unit, as typed. */
+  readonly makersCharts?: readonly TypedChart[];
+}
+
+export interface TypedAxis {
+  readonly unit: ChartUnit;
+  readonly values: readonly string[];
+}
+
+/** A maker's table in the words of the person who types it off: it may be unfinished. */
+export interface TypedChart {
+  readonly kind: MakersChartKind;
+  /** Left out: one figure that always holds. */
+  readonly rows?: TypedAxis;
+  readonly columns?: TypedAxis;
+  readonly unit: ChartUnit;
+  readonly cells: readonly (readonly string[])[];
+  readonly port?: ChartPort;
+  readonly tolerance?: TypedValue;
+  readonly leastOutdoor?: TypedValue;
+  readonly mostOutdoor?: TypedValue;
 }
 
 export interface DraftVisit {

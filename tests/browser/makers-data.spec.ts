@@ -1,0 +1,61 @@
+import { checkPageWords, makersChartWords, makersDataWords } from '@chargewright/wording';
+import { describe, expect, it } from 'vitest';
+import { HIGH_SUPERHEAT } from './harness/check-page';
+import { browserSuite } from './harness/suite';
+
+const suite = browserSuite();
+const words = makersDataWords;
+
+
+const atTheTables = async () => {
+  const phone = await suite.newPhone();
+  await phone.check.open();
+  await phone.check.setUp('R-410A', 'fixed-orifice');
+  await phone.check.read(HIGH_SUPERHEAT);
+  await phone.check.button(checkPageWords.setup.changeLabel).click();
+  await phone.page.getByText(checkPageWords.setup.more, { exact: true }).click();
+  await phone.page.getByRole('link', { name: checkPageWords.setup.makersDataLink(0) }).click();
+  await phone.page.getByRole('heading', { name: words.pageTitle }).waitFor();
+  return phone;
+};
+
+describe('somebody with the maker’s table in his hand', () => {
+  it('types it row by row with a dash key, is told what is odd, takes it away and brings it back', async () => {
+    const { page, check } = await atTheTables();
+    await page.getByRole('button', { name: makersChartWords.kinds.superheat.label }).click();
+    await page.getByText(words.unfinished(8)).waitFor();
+    const type = async (id: string, text: string) => {
+      await page.locator(`#${id}`).fill(text);
+      await page.locator(`#${id}`).press('Enter');
+    };
+    await type('column-0', '57');
+    await type('column-1', '67');
+    await type('row-head', '85');
+    await type('cell-0', '10');
+    await type('cell-1', '20');
+    await page.getByText(words.rowNumber(2, 2)).waitFor();
+    await page.locator('#row-head').fill('80');
+    await check.button(words.dashLabel('Return wet bulb 57')).click();
+    await type('cell-1', '21');
+    // 80 after 85: refused in words, nothing lost
+    await page
+      .getByText(/not above the one before it/)
+      .first()
+      .waitFor();
+    await page.locator('#row-head').fill('95');
+    await page.getByText(words.complete).waitFor();
+    await check.button(words.done).click();
+    const name = makersChartWords.kinds.superheat.label;
+    await check.button(words.removeLabel(name)).click();
+    await page.getByText(words.none).waitFor();
+    await check.button(words.undo).click();
+    await page.getByText(words.complete).waitFor();
+    await page.reload();
+    await check.button(words.editLabel(name)).click();
+    expect(await page.locator('#cell-1').inputValue()).toBe('20');
+    const sideways = await page.evaluate(
+      () => document.documentElement.scrollWidth > document.documentElement.clientWidth,
+    );
+    expect(sideways).toBe(false);
+  });
+});
