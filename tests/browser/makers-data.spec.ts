@@ -6,7 +6,6 @@ import { browserSuite } from './harness/suite';
 const suite = browserSuite();
 const words = makersDataWords;
 
-
 const atTheTables = async () => {
   const phone = await suite.newPhone();
   await phone.check.open();
