@@ -140,7 +140,7 @@ export const FAULT_PATTERNS: readonly FaultPattern[] = [
       superheatValve: LITTLE,
       subcooling: LITTLE_OR_DOWN,
       split: DOWN,
-      current: DOWN,
+      current: leading('down'),
       approach: null,
     },
   },
