@@ -144,8 +144,9 @@ export const DRIVES = {
   rightHighSide: mixed([5, fc.constant(true)], [1, fc.constant(false)]),
   writtenEvaporating: sometimes(12, oneOf<Written>(['right', 'other-column', 'far'])),
   writtenCondensing: sometimes(12, oneOf<Written>(['right', 'other-column', 'far'])),
-  electrical: sometimes(5, between(1, 20)),
-  expectedCurrentA: sometimes(5, between(4, 20)),
+  electrical: sometimes(15, between(4, 20)),
+  /** Of the current that was measured. */
+  expectedCurrentShare: sometimes(60, between(0.7, 1.4)),
   wetBulbBeforeF: sometimes(10, usual(between(-0.9, 0.9), between(-4, 4))),
   drierDropF: sometimes(10, mixed([2, between(-1, 1.5)], [1, between(1.5, 4.5)], [2, between(4.5, 20)])),
   standing: sometimes(10, standing),

@@ -115,7 +115,11 @@ function setupIn({ drives, ...system }: PlausibleSystem, unitSystem: UnitSystem)
       highVelocity: drives.highVelocity,
       airflowPath: drives.airflowPath,
       factoryCharge: mapped(drives.factoryChargeLb, (pounds) => mass(pounds, unitSystem)),
-      expectedCompressorCurrent: mapped(drives.expectedCurrentA, (value) => ({ value, unit: 'A' as const })),
+      expectedCompressorCurrent: mapped(drives.electrical, (measured) =>
+        drives.expectedCurrentShare === undefined
+          ? undefined
+          : { value: drives.expectedCurrentShare * measured, unit: 'A' as const },
+      ),
       maxHighPressure: mapped(drives.maxHighPressurePsi, (psi) => ({
         value: pressureDifferenceFromPa(pressureDifferenceToPa(psi, 'psi'), unit.pressureDifference),
         unit: unit.pressure,

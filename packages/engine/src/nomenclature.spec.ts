@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import * as engine from './index';
+import * as airToRefrigerant from './methods/air-to-refrigerant';
 import * as airSide from './methods/air-side';
 import { FIELD_READING_IDS } from './methods/airflow/field-readings';
 import * as cyclePoints from './methods/cycle-points';
@@ -64,6 +65,7 @@ describe('NOMENCLATURE.md', () => {
       ...Object.values(targets),
       ...Object.values(cyclePoints),
       ...Object.values(separatingTests),
+      ...Object.values(airToRefrigerant),
       separatingTests.standingSaturation('R-22'),
       cyclePoints.absolutePressure('suctionPressure'),
       cyclePoints.evaporatingDewTemperature('R-22'),

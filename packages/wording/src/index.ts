@@ -38,3 +38,4 @@ export * from './weigh-in-sum';
 export * from './english/airflow';
 export * from './english/field-inputs';
 export * from './english/weigh-in';
+export * from './diagnosis-sentences';

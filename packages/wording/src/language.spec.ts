@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { airflowWords } from './english/airflow';
 import { cautionTexts } from './english/cautions';
 import { checkPageWords } from './english/check-page';
+import { diagnosisTexts } from './english/diagnosis';
 import { faultWords } from './english/faults';
 import { fieldFaultNaming, fieldFaultTexts } from './english/field-faults';
 import { fieldInputWords } from './english/field-inputs';
@@ -45,6 +46,7 @@ const english: Language = {
   fieldInputs: fieldInputWords,
   airflow: airflowWords,
   weighIn: weighInWords,
+  diagnosis: diagnosisTexts,
   readings: readingWords,
   readingHelp,
   setup: setupWords,

@@ -19,6 +19,7 @@ import type { airflowWords } from './english/airflow';
 import type { checkPageWords } from './english/check-page';
 import type { fieldFaultTexts } from './english/field-faults';
 import type { fieldInputWords } from './english/field-inputs';
+import type { DiagnosisTexts } from './english/diagnosis';
 import type { looseChecksWords } from './english/loose-checks';
 import type { makersChartWords } from './english/makers-charts';
 import type { offlineWords } from './english/offline';
@@ -103,6 +104,7 @@ export interface Language {
   readonly fieldInputs: typeof fieldInputWords;
   readonly airflow: typeof airflowWords;
   readonly weighIn: typeof weighInWords;
+  readonly diagnosis: DiagnosisTexts;
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;

@@ -1,8 +1,12 @@
 import type {
+  Cause,
   Caution,
+  DiagnosisNote,
+  Evidence,
   Fault,
   FaultFigures,
   Figure,
+  Measurement,
   NextStep,
   NextStepCode,
   NotYetCode,
@@ -10,9 +14,11 @@ import type {
   Stop,
   StopCode,
 } from '@chargewright/engine';
-import { NOT_YET_CODES, temperatureToK } from '@chargewright/engine';
+import { CAUSES, DIAGNOSIS_NOTES, MEASUREMENTS, NOT_YET_CODES, temperatureToK } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
+import { causeText, diagnosisNoteText, evidenceText, measurementText } from './diagnosis-sentences';
 import { cautionTexts } from './english/cautions';
+import { diagnosisTexts } from './english/diagnosis';
 import { faultWords } from './english/faults';
 import { nextStepWords } from './english/next-steps';
 import { reasonTexts } from './english/reasons';
@@ -39,6 +45,8 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   limit: temperature(55),
   critical: { kind: 'pressurePa', value: 4_901_200 },
   superheat: difference(1),
+  deviation: difference(-6.4),
+  airflow: { kind: 'flowM3PerS', value: 0.4 },
   uncertainty: difference(1.8),
   subcooling: difference(-0.5),
   difference: { kind: 'pressureDifferencePa', value: 1e6 },
@@ -73,6 +81,10 @@ const catalogues: readonly (readonly [string, readonly string[], Say])[] = [
   ['reason', Object.keys(reasonTexts), (code, system) => reasonText(message<Reason>(code), system)],
   ['stop', Object.keys(stopTexts), (code, system) => stopText(message<Stop>(code), system)],
   ['caution', Object.keys(cautionTexts), (code, system) => cautionText(message<Caution>(code), system)],
+  ['evidence', Object.keys(diagnosisTexts.evidence), (code, system) => evidenceText(message<Evidence>(code), system)],
+  ['cause', CAUSES, (code) => causeText(code as Cause)],
+  ['measurement', MEASUREMENTS, (code) => measurementText(code as Measurement)],
+  ['diagnosis note', DIAGNOSIS_NOTES, (code) => diagnosisNoteText(code as DiagnosisNote)],
   [
     'next step',
     Object.keys(nextStepWords.steps),
@@ -129,6 +141,12 @@ describe('figures', () => {
     const drop = (system: UnitSystem) => nextStepText(message<NextStep>('measure-drier-drop', { notYet: [] }), system);
     expect(drop('F-psi')).toContain('about 3 °F');
     expect(drop('C-kPa')).toContain('about 1.7 °C');
+  });
+
+  it('say a side in words, never with a minus as well', () => {
+    const below = (code: Evidence['code']) => evidenceText(message<Evidence>(code), 'F-psi');
+    expect(below('superheat-below-target')).toBe('Superheat is 6.4 °F ± 1.8 °F below its target.');
+    expect(below('subcooling-on-target')).toBe('Subcooling is within its band (−6.4 °F off target, ± 1.8 °F).');
   });
 
   it('of a code without a sentence are refused', () => {

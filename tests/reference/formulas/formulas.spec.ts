@@ -3,6 +3,7 @@ import { compile } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import type { Formula } from '../../../packages/engine/src/derivation/formula';
 import * as airSide from '../../../packages/engine/src/methods/air-side';
+import * as airToRefrigerant from '../../../packages/engine/src/methods/air-to-refrigerant';
 import { chartValueK } from '../../../packages/engine/src/methods/chart';
 import * as cyclePoints from '../../../packages/engine/src/methods/cycle-points';
 import { SPLIT_TABLE } from '../../../packages/engine/src/methods/data/split-table';
@@ -61,6 +62,9 @@ const RANGES: Readonly<Record<string, readonly [low: number, high: number]>> = {
   T_wb: [291, 294],
   RH: [0.1, 1],
   W: [0.004, 0.01],
+  T_mean: [270, 285],
+  I: [4, 20],
+  I_expected: [4, 20],
   T_before: [300, 310],
   T_after: [295, 310],
   p_standing: [8e5, 1.6e6],
@@ -83,6 +87,9 @@ const FORMULAS: readonly Formula[] = [
   airSide.returnHumidityRatio,
   airSide.returnRelativeHumidity,
   airSide.returnEnthalpy,
+  airToRefrigerant.returnOverEvaporating,
+  airToRefrigerant.liquidLineApproach,
+  airToRefrigerant.currentOffExpected,
   separatingTests.drierDrop,
   separatingTests.standingSaturation(REFRIGERANT),
   separatingTests.standingExcess,
@@ -100,7 +107,7 @@ describe('the list', () => {
     const refrigerant = (value: unknown): unknown =>
       // a formula of one refrigerant, reading or criterion is a function of it
       typeof value === 'function' ? attempt(() => (value as (x: string) => unknown)(REFRIGERANT)) : value;
-    const ids = [cyclePoints, airSide, separatingTests, targets]
+    const ids = [cyclePoints, airSide, airToRefrigerant, separatingTests, targets]
       .flatMap((module) => Object.values(module).map(refrigerant))
       .filter(isFormula)
       .map(({ text }) => text);

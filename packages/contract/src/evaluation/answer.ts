@@ -1,4 +1,4 @@
-import { CRITERION_IDS, DERIVED_IDS, FINDINGS } from '@chargewright/engine';
+import { CAUSES, CRITERION_IDS, DERIVED_IDS, FINDINGS } from '@chargewright/engine';
 import type { DerivedId, TargetSource } from '@chargewright/engine';
 import * as z from 'zod';
 import { object } from '../parsing/object';
@@ -44,11 +44,12 @@ const nextStep = object({
 }).meta({ id: 'NextStep' });
 
 const diagnosis = object({
-  cause: z.string(),
+  cause: z.enum(CAUSES),
+  text: z.string(),
   fits: z.array(codedText),
   doesNotFit: z.array(codedText),
   nextMeasurement: orNull(codedText),
-}).meta({ id: 'Diagnosis' });
+}).meta({ id: 'Diagnosis', description: 'A cause to check. Their order is fixed and says nothing about likelihood.' });
 
 export const evaluationAnswer = object({
   engineVersion: z.string(),
@@ -67,6 +68,9 @@ export const evaluationAnswer = object({
     cautions: z.array(codedText),
   }),
   diagnosis: z.array(diagnosis),
+  diagnosisNotes: z
+    .array(codedText)
+    .meta({ description: 'What there is to say besides the causes, or why none is listed.' }),
   derivation: z.array(derivationLine),
 }).meta({
   id: 'EvaluationAnswer',

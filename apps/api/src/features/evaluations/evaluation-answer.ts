@@ -1,16 +1,21 @@
 import type { EvaluationAnswer } from '@chargewright/contract/evaluation';
-import { DERIVED_IDS, moistAirEnthalpyBtuPerLb, temperatureFromK } from '@chargewright/engine';
+import { DERIVED_IDS, diagnoseCheck, moistAirEnthalpyBtuPerLb, temperatureFromK } from '@chargewright/engine';
 import type {
   CheckInput,
   CheckResult,
   CriterionId,
   CriterionResult,
+  Diagnosis,
   QuantityKind,
   Tolerance,
 } from '@chargewright/engine';
 import {
+  causeText,
   cautionText,
   derivationLines,
+  diagnosisNoteText,
+  evidenceText,
+  measurementText,
   nextStepText,
   notYetText,
   presentValue,
@@ -41,8 +46,24 @@ export function evaluationAnswer(input: CheckInput, result: CheckResult, system:
       stops: overall.stops.map((stop) => ({ code: stop.code, text: stopText(stop, system) })),
       cautions: overall.cautions.map((caution) => ({ code: caution.code, text: cautionText(caution, system) })),
     },
-    diagnosis: [],
+    ...diagnosisAnswer(diagnoseCheck(input, result), system),
     derivation: [...derivationLines(derivation, system)],
+  };
+}
+
+function diagnosisAnswer(
+  { causes, notes }: Diagnosis,
+  system: UnitSystem,
+): Pick<EvaluationAnswer, 'diagnosis' | 'diagnosisNotes'> {
+  return {
+    diagnosis: causes.map(({ cause, fits, doesNotFit, nextMeasurement }) => ({
+      cause,
+      text: causeText(cause),
+      fits: fits.map((evidence) => ({ code: evidence.code, text: evidenceText(evidence, system) })),
+      doesNotFit: doesNotFit.map((evidence) => ({ code: evidence.code, text: evidenceText(evidence, system) })),
+      nextMeasurement: nextMeasurement && { code: nextMeasurement, text: measurementText(nextMeasurement) },
+    })),
+    diagnosisNotes: notes.map((code) => ({ code, text: diagnosisNoteText(code) })),
   };
 }
 

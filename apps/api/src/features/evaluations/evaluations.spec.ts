@@ -47,7 +47,7 @@ describe('a check that can be judged', () => {
   });
 
   it('has its numbers, unrounded and in the units of the return dry bulb', async () => {
-    const { derived, criteria, overall, engineVersion, procedure, diagnosis } = await evaluated(EVALUATION_EXAMPLE);
+    const { derived, criteria, overall, engineVersion, procedure } = await evaluated(EVALUATION_EXAMPLE);
     expect(engineVersion).toMatch(/^\d+\.\d+\.\d+\+/);
     expect(procedure).toEqual({ id: 'general-rules', version: 1 });
     expect(derived.superheat?.unit).toBe('deltaF');
@@ -69,7 +69,76 @@ describe('a check that can be judged', () => {
     expect(superheat?.tolerance?.low).toBeCloseTo(-3, 9);
     expect(overall.finding).toBe('too-close-to-call');
     expect(overall.cautions.map(({ code }) => code)).toContain('gauge-not-zeroed');
-    expect(diagnosis).toEqual([]);
+  });
+
+  it('has the causes that fit, what would separate them, and why there is none', async () => {
+    const starved = withReadings({
+      suctionPressure: { value: 95, unit: 'psig' },
+      suctionLineTemperature: { value: 62, unit: 'degF' },
+      liquidPressure: { value: 340, unit: 'psig' },
+      liquidLineTemperature: { value: 102, unit: 'degF' },
+      supplyDryBulb: { value: 64, unit: 'degF' },
+    });
+    const { diagnosis, diagnosisNotes } = await evaluated(starved);
+    expect(diagnosis).toEqual([
+      {
+        cause: 'low-charge',
+        text: 'Too little refrigerant',
+        fits: expect.arrayContaining([
+          { code: 'superheat-above-target', text: expect.stringMatching(/^Superheat is [\d.]+ °F ± [\d.]+ °F above/) },
+          { code: 'subcooling-below-target', text: expect.stringContaining('below its target') },
+        ]) as unknown,
+        doesNotFit: [],
+        nextMeasurement: { code: 'leak-search', text: 'Search for the leak.' },
+      },
+    ]);
+    expect(diagnosisNotes).toEqual([]);
+    const heating = await evaluated({ ...starved, setup: { ...starved.setup, mode: 'heating' } });
+    expect(heating.diagnosis).toEqual([]);
+    expect(heating.diagnosisNotes.map(({ code }) => code)).toEqual(['unfit']);
+  });
+
+  it('takes the separating tests into the diagnosis and the next step', async () => {
+    const drier = {
+      drierInletTemperature: { value: 100, unit: 'degF' },
+      drierOutletTemperature: { value: 91, unit: 'degF' },
+    };
+    const { diagnosis, overall } = await evaluated(withReadings(drier));
+    expect(overall.nextStep.code).toBe('find-restriction');
+    const restriction = diagnosis.find(({ cause }) => cause === 'restriction');
+    expect(restriction?.fits.at(-1)).toEqual({
+      code: 'drier-drop',
+      text: 'The line cools by 9.0 °F ± 1.6 °F over the drier.',
+    });
+    const standing = {
+      standingPressure: { value: 330, unit: 'psig' },
+      standingOutdoorCoilTemperature: { value: 92, unit: 'degF' },
+    };
+    const air = await evaluated({ ...withReadings(standing), visit: { tests: { liquidShutIn: true } } });
+    expect(air.diagnosis.map(({ cause }) => cause)).toContain('air-in-system');
+    const free = await evaluated(withReadings(standing));
+    expect(free.diagnosis.map(({ cause }) => cause)).not.toContain('air-in-system');
+  });
+
+  it('names what is wrong with a test that was recorded', async () => {
+    const errors = await refused({
+      ...withReadings({
+        standingPressure: { value: 900, unit: 'psig' },
+        drierInletTemperature: { value: 100, unit: 'psig' },
+      }),
+      setup: { ...EVALUATION_EXAMPLE.setup, expectedCompressorCurrent: { value: 0, unit: 'A' } },
+      visit: { tests: { bulb: 'gone', liquidShutIn: 1 } },
+    });
+    expect(errors).toEqual({
+      'readings.standingPressure': expect.stringMatching(
+        /^Standing pressure .* is above the critical pressure/,
+      ) as unknown,
+      'readings.drierInletTemperature':
+        'Temperature before the drier has a unit that does not fit: give degF, degC or K.',
+      'setup.expectedCompressorCurrent': 'Expected compressor current must be more than zero.',
+      'visit.tests.bulb': 'Bulb has an unknown value: give right, loose or charge-lost.',
+      'visit.tests.liquidShutIn': 'Liquid shut in has the wrong type: give true or false.',
+    });
   });
 
   it('is judged by the procedure that is asked for, only just where the rule alone decides', async () => {

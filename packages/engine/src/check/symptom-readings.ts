@@ -1,0 +1,80 @@
+/** What a diagnosis reads off a check: the criteria by their numbers, whatever gate shuts their findings, and the differences between refrigerant and air. */
+import { derive } from '../derivation/derive';
+import type { Quantity } from '../derivation/quantity';
+import { isKnown, leaf, missing } from '../derivation/quantity';
+import type { Held, SymptomReadings } from '../diagnosis/read-symptoms';
+import { currentOffExpected, liquidLineApproach, returnOverEvaporating } from '../methods/air-to-refrigerant';
+import type { UsedReadingId } from './assumed-uncertainty';
+import type { CriterionId } from './codes';
+import type { DerivedQuantities } from './derived-quantities';
+import type { CheckInput } from './input';
+import { isFixedOrifice } from './input';
+import type { CheckResult, CriterionResult } from './result';
+
+export function symptomReadings(
+  input: CheckInput,
+  derived: DerivedQuantities,
+  { criteria }: CheckResult,
+): SymptomReadings {
+  const { setup, visit, readings, procedure } = input;
+  const read = (id: UsedReadingId): Quantity => readings[id]?.quantity ?? missing(id);
+  // a head raised on purpose shows nothing, nor does what hangs on it
+  const free = (quantity: Quantity): Quantity => (visit.headRaised ? missing() : quantity);
+  const { subcooling } = derived;
+  const { lowBelowK, clearFromK, highAboveK } = procedure.subcooling;
+  const hasLevels = isKnown(subcooling) && setup.targetSubcooling === undefined && setup.highSidePort === 'liquid';
+  return {
+    metering: isFixedOrifice(setup) ? 'orifice' : 'valve',
+    refrigerant: setup.refrigerant,
+    port: setup.highSidePort === 'discharge' ? 'discharge' : 'liquid',
+    superheat: heldBy(criteria, isFixedOrifice(setup) ? 'superheat' : 'superheat-window'),
+    subcooling: heldBy(criteria, 'subcooling'),
+    subcoolingLevels: hasLevels
+      ? {
+          measured: subcooling,
+          lowBelowK: lowBelowK.value,
+          clearFromK: clearFromK.value,
+          highAboveK: highAboveK.value,
+        }
+      : null,
+    split: heldBy(criteria, 'temperature-split'),
+    returnOverEvaporating: derive(returnOverEvaporating, {
+      returnDryBulbK: read('returnDryBulb'),
+      evaporatingK: derived.meanEvaporatingTemperature,
+    }),
+    airflowPerCapacity: airflowPerCapacity(input),
+    condensingOverAir: free(derived.condensingOverAmbient),
+    liquidLineApproach: free(
+      derive(liquidLineApproach, { liquidLineK: read('liquidLineTemperature'), outdoorK: read('outdoorDryBulb') }),
+    ),
+    currentOffExpected: derive(currentOffExpected, {
+      currentA: read('compressorCurrent'),
+      expectedA: expectedCurrent(input),
+    }),
+  };
+}
+
+const expectedCurrent = ({ setup: { expectedCompressorCurrentA: value } }: CheckInput): Quantity =>
+  value === undefined
+    ? missing()
+    : leaf({ id: 'expectedCompressorCurrent', kind: 'currentA', value, origin: 'entered' });
+
+function airflowPerCapacity({ setup, readings }: CheckInput): number | null {
+  const { nominalCapacityW } = setup;
+  return readings.airflow === undefined || nominalCapacityW === undefined
+    ? null
+    : readings.airflow.quantity.value / nominalCapacityW;
+}
+
+export const criterionOf = (criteria: readonly CriterionResult[], id: CriterionId): CriterionResult | undefined =>
+  criteria.find(({ criterion }) => criterion === id);
+
+/** A number and the limits it is judged by, whatever gate shuts the finding; none where a target may not exist. */
+export function heldBy(criteria: readonly CriterionResult[], id: CriterionId): Held | null {
+  const criterion = criterionOf(criteria, id);
+  if (criterion === undefined || criterion.reason?.code === 'target-may-not-exist') return null;
+  const { actual, deviation, tolerance } = criterion;
+  const measured = id === 'superheat-window' ? actual : deviation;
+  if (measured === null || tolerance?.low == null || tolerance.high === null) return null;
+  return { measured, low: tolerance.low, high: tolerance.high };
+}
