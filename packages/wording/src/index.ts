@@ -13,6 +13,7 @@ export * from './api-texts';
 export * from './english/api';
 export * from './air-refusal';
 export * from './format-amount';
+export * from './saturation-fault';
 export type { StructureFault, StructureFaultKind } from './structure-fault';
 export type { Language } from './language';
 export * from './load-reading-help';
