@@ -54,3 +54,7 @@ export * from './methods/weigh-in/evaluate-weigh-in';
 export type { LabelOutcome } from './methods/weigh-in/label-maximum';
 export type { VacuumOutcome } from './methods/weigh-in/vacuum';
 export * from './methods/weigh-in/weigh-in-codes';
+export * from './refrigerants/model-limit';
+export * from './refrigerants/printed-difference';
+export type { PrintedTable } from './refrigerants/data/printed-tables';
+export * from './check/site-atmosphere';

@@ -4,7 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { airRefusal } from './air-refusal';
 import { airTexts } from './english/moist-air';
 import { names } from './english/names';
-import { formatAmount, formatStatedAmount } from './format-amount';
+import { formatAmount, formatShift, formatStatedAmount } from './format-amount';
 
 const pressurePa = 101_325;
 const degF = (value: number) => temperatureToK(value, 'degF');
@@ -59,5 +59,11 @@ describe('an amount in its own unit', () => {
     expect(formatAmount(78.26, 'gr/lb')).toBe('78.3 gr/lb');
     expect(formatStatedAmount(31.25, 'kJ/kg')).toBe('31.25 kJ/kg');
     expect(formatStatedAmount(9, 'g/kg')).toBe('9 g/kg');
+  });
+
+  it('has a sign where it is a shift', () => {
+    expect(formatShift(0.4277, 'F-psi')).toBe('+0.77 °F');
+    expect(formatShift(-0.6333, 'C-bar')).toBe('−0.63 °C');
+    expect(formatShift(0.001, 'C-kPa')).toBe('0.00 °C');
   });
 });

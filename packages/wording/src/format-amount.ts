@@ -1,5 +1,7 @@
 import type { EnthalpyUnit, HumidityRatioUnit } from '@chargewright/engine';
 import { decimalsOfUnit, formatNumber, formatTrimmed, unitLabel } from './format-value';
+import { presentValue } from './present-value';
+import type { UnitSystem } from './unit-system';
 
 /** Units whose value the SI one and the unit system alone do not tell: an inch-pound enthalpy has its own datum, a humidity ratio several units. */
 export type AmountUnit = EnthalpyUnit | HumidityRatioUnit;
@@ -16,3 +18,11 @@ export const formatAmount = (value: number, unit: AmountUnit): string =>
 /** "31.25 Btu/lb": what a person stated, said back without zeros at the end; one decimal more than `formatAmount`. */
 export const formatStatedAmount = (value: number, unit: AmountUnit): string =>
   `${formatTrimmed(value, decimalsOf(unit) + 1)} ${unitLabel(unit)}`;
+
+/** "+0.77 °F": how far one value lies from another, with one decimal more than a value has, and its sign. */
+export function formatShift(kelvin: number, system: UnitSystem): string {
+  const { value, unit } = presentValue('differenceK', kelvin, system);
+  const text = formatNumber(value, decimalsOfUnit(unit) + 1);
+  const sign = Number(text) > 0 ? '+' : '';
+  return `${sign}${text} ${unitLabel(unit)}`;
+}

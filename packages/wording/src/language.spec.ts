@@ -19,6 +19,7 @@ import { offlineWords } from './english/offline';
 import { ownerWords } from './english/owner';
 import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
+import { propertiesWords } from './english/properties';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
@@ -52,6 +53,7 @@ const english: Language = {
   setup: setupWords,
   procedures: procedureWords,
   makersCharts: makersChartWords,
+  properties: propertiesWords,
   safety: safetyWords,
   checkPage: checkPageWords,
   looseChecks: looseChecksWords,

@@ -28,6 +28,7 @@ import type { glanceWords } from './english/glance';
 import type { makersDataWords } from './english/makers-data-page';
 import type { ownerWords } from './english/owner';
 import type { targetComparisonWords } from './english/target-comparison';
+import type { propertiesWords } from './english/properties';
 import type { readingHelp } from './english/reading-help';
 import type { procedureWords } from './english/procedures';
 import type { readingWords } from './english/readings';
@@ -110,6 +111,7 @@ export interface Language {
   readonly setup: typeof setupWords;
   readonly procedures: typeof procedureWords;
   readonly makersCharts: typeof makersChartWords;
+  readonly properties: typeof propertiesWords;
   readonly safety: typeof safetyWords;
   readonly checkPage: typeof checkPageWords;
   readonly looseChecks: typeof looseChecksWords;

@@ -10,6 +10,7 @@ import { makersDataWords } from './english/makers-data-page';
 import { offlineWords } from './english/offline';
 import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
+import { propertiesWords } from './english/properties';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
@@ -45,6 +46,7 @@ const roots = Object.entries({
   airflow: airflowWords,
   weighIn: weighInWords,
   makersCharts: makersChartWords,
+  properties: propertiesWords,
 });
 
 describe('words of the page', () => {

@@ -15,5 +15,9 @@ export const routes: Routes = [
     loadComponent: async () => (await import('./makers-data/makers-data-page')).MakersDataPage,
     title: `${checkPageWords.setup.makersData} · ${checkPageWords.shell.product}`,
   },
+  {
+    path: 'properties',
+    loadChildren: async () => (await import('./properties/properties.routes')).propertiesRoutes,
+  },
   { path: '**', redirectTo: '' },
 ];

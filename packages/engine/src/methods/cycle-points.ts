@@ -7,21 +7,16 @@ import type { Formula } from '../derivation/formula';
 import { formula } from '../derivation/formula';
 import { EngineError } from '../errors';
 import { bubbleTemperatureK, dewTemperatureK } from '../refrigerants/saturation';
-import { refrigerantFacts } from '../refrigerants/catalogue';
 import type { RefrigerantId } from '../refrigerants/catalogue';
-import { differenceToK } from '../units';
+import { saturationModelLimitK } from '../refrigerants/model-limit';
 
 /** Part of the glide left at the evaporator's inlet, where some vapour has flashed already; common practice, no source. */
 const INLET_GLIDE_FRACTION = 0.2;
 
-/** ± of the property model as a limit in °F, by the model's grade (choice, from the differences between printed charts and models). */
-const MODEL_LIMIT_F = { pure: 0.25, A: 0.8, B: 1.2, C: 2 } as const;
-
 /** The model's own error, added to a saturation temperature of this refrigerant. */
 export function saturationModelError(refrigerant: RefrigerantId, point: 'bubble' | 'dew'): ErrorPart {
-  const { kind, grade } = refrigerantFacts(refrigerant);
-  const limitK = differenceToK(MODEL_LIMIT_F[kind === 'pure' ? 'pure' : grade], 'deltaF');
-  return { key: `model:${point}`, u: limitK / Math.sqrt(3), shape: 'rectangular' };
+  const u = saturationModelLimitK(refrigerant) / Math.sqrt(3);
+  return { key: `model:${point}`, u, shape: 'rectangular' };
 }
 
 /** Absolute pressure of a gauge reading; `reading` keeps the steps of several gauges apart. */

@@ -19,7 +19,12 @@ import {
   temperatureToK,
 } from '@chargewright/engine';
 import type { Amount, PressureUnit, RefrigerantId, Result, TemperatureUnit } from '@chargewright/engine';
-import { lookUpFaultText, presentValue } from '@chargewright/wording';
+import {
+  lookUpFaultText,
+  presentValue,
+  saturationPressureFault,
+  saturationTemperatureFault,
+} from '@chargewright/wording';
 import type { LookUpMessage, UnitSystem } from '@chargewright/wording';
 import { atmosphereAt } from '../../http/atmosphere';
 import { HttpProblem } from '../../http/http-problem';
@@ -46,7 +51,7 @@ function byPressure(id: RefrigerantId, query: SaturationQuery, pressure: Amount<
     atmosphere.ok || !isGaugeUnit(unit) ? pressureToPa(value, unit, atmosphere.ok ? atmosphere.pressurePa : 0) : null;
   const errors = [
     ...(atmosphere.ok ? [] : atmosphere.errors),
-    ...(pressurePa === null ? [] : said('pressure', pressureFault(id, pressurePa), system)),
+    ...(pressurePa === null ? [] : said('pressure', saturationPressureFault(id, pressurePa), system)),
   ];
   if (errors.length > 0 || !atmosphere.ok || pressurePa === null) throw new HttpProblem('invalid-input', { errors });
   const at = { refrigerant: id, pressurePa };
@@ -71,7 +76,7 @@ function byTemperature(
   const temperatureK = temperatureToK(temperature.value, temperature.unit);
   const errors = [
     ...(atmosphere.ok ? [] : atmosphere.errors),
-    ...said('temperature', temperatureFault(id, temperatureK), system),
+    ...said('temperature', saturationTemperatureFault(id, temperatureK), system),
   ];
   if (errors.length > 0 || !atmosphere.ok) throw new HttpProblem('invalid-input', { errors });
   const at = { refrigerant: id, temperatureK };
@@ -90,26 +95,6 @@ const common = (id: RefrigerantId, atmospherePa: number, system: UnitSystem) => 
   modelGrade: refrigerantFacts(id).grade,
   atmosphere: presentValue('pressurePa', atmospherePa, system),
 });
-
-function pressureFault(id: RefrigerantId, pressurePa: number): LookUpMessage | null {
-  if (pressurePa <= 0) return { code: 'not-above-vacuum', figures: {} };
-  const { criticalPressurePa } = refrigerantFacts(id);
-  if (pressurePa <= criticalPressurePa) return null;
-  const figures = {
-    actual: { kind: 'pressurePa', value: pressurePa },
-    critical: { kind: 'pressurePa', value: criticalPressurePa },
-  } as const;
-  return { code: 'above-critical-pressure', figures };
-}
-
-function temperatureFault(id: RefrigerantId, temperatureK: number): LookUpMessage | null {
-  const actual = { kind: 'temperatureK', value: temperatureK } as const;
-  if (temperatureK < 0) return { code: 'below-absolute-zero', figures: { actual } };
-  const { criticalTemperatureK } = refrigerantFacts(id);
-  if (temperatureK <= criticalTemperatureK) return null;
-  const critical = { kind: 'temperatureK', value: criticalTemperatureK } as const;
-  return { code: 'above-critical-temperature', figures: { actual, critical } };
-}
 
 const said = (path: string, message: LookUpMessage | null, system: UnitSystem): readonly ProblemError[] =>
   message === null ? [] : [{ path, message: lookUpFaultText(message, system) }];
