@@ -37,3 +37,6 @@ export * from './weigh-in-sum';
 export * from './english/airflow';
 export * from './english/field-inputs';
 export * from './english/weigh-in';
+export * from './english/worked-examples';
+export * from './english/worked-example-stories';
+export * from './worked-example-rows';
