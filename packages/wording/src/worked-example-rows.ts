@@ -63,11 +63,13 @@ function otherText(id: ReadingId, { value, unit }: ReadingInput, system: UnitSys
 
 function readingRow(id: ReadingId, reading: ReadingInput, system: UnitSystem): GivenRow {
   return {
-    name: readingWords[id].label,
+    name: capital(readingWords[id].name),
     own: amountText(reading, decimalsIn(reading.resolution ?? 1)),
     other: otherText(id, reading, system),
   };
 }
+
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 const trimmed = (amount: Amount<string>): string => amountText(amount, decimalsOf(amount.value));
 
@@ -179,6 +181,11 @@ export interface FigureRow {
   readonly misprint: boolean;
 }
 
+/** A step of the math, with the figure its result is held against where there is one. */
+export interface CheckedLine extends DerivationLine {
+  readonly check: Pick<FigureRow, 'printed' | 'against'> | null;
+}
+
 const OF: Readonly<Record<string, string>> = {
   ...Object.fromEntries(Object.entries(words.slips).map(([id, { name }]) => [id, name])),
   ...words.standingTests,
@@ -191,21 +198,56 @@ function figureName({ what, of }: CheckedFigure): string {
   return which === undefined ? name : words.key.ofWhich(name, which);
 }
 
-/** Each number as printed and as found here, with one decimal more, in the unit of the print. */
-export const figureRows = (figures: readonly WorkedFigure[]): readonly FigureRow[] =>
-  figures.map(({ figure, computed }) => {
-    const { value, unit, standing, source, misprint = false } = figure;
-    const decimals = decimalsOf(value);
-    const text = (number: number, places: number): string => amountText({ value: number, unit }, places).trim();
+/** A number as printed and as found here, with one decimal more, in the unit of the print. */
+function figureRow({ figure, computed }: WorkedFigure): FigureRow {
+  const { value, unit, standing, source, misprint = false } = figure;
+  const decimals = decimalsOf(value);
+  const text = (number: number, places: number): string => amountText({ value: number, unit }, places).trim();
+  return {
+    name: figureName(figure),
+    printed: text(value, decimals),
+    here: computed === null ? '' : text(computed, decimals + 1),
+    against: words.against[standing](source),
+    misprint,
+  };
+}
+
+/** Figures that have another name than the step that gives them. */
+const STEP_OF: Readonly<Partial<Record<CheckedFigure['what'], string>>> = {
+  splitDeviation: 'temperature-splitDeviation',
+  lineCharge: 'lineAdjustment',
+};
+
+const stepOf = ({ what }: CheckedFigure): string => STEP_OF[what] ?? what;
+
+/** A figure stands beside a step where it is right, and of the same readings or line: `of` is that of the steps. */
+const standsBeside = ({ figure }: WorkedFigure, of: string | undefined): boolean =>
+  figure.of === of && figure.misprint !== true;
+
+/** The math in its order, each result with what it is held against. */
+export const checkedLines = (
+  steps: readonly DerivationStep[],
+  { figures, of }: { readonly figures: readonly WorkedFigure[]; readonly of?: string },
+  system: UnitSystem,
+): readonly CheckedLine[] =>
+  derivationLines(steps, system).map((line) => {
+    const worked = figures.find((each) => standsBeside(each, of) && stepOf(each.figure) === line.id);
+    const { printed = '', against = '' } = worked === undefined ? {} : figureRow(worked);
     return {
-      name: figureName(figure),
-      printed: text(value, decimals),
-      here: computed === null ? '' : text(computed, decimals + 1),
-      against: words.against[standing](source),
-      misprint,
+      ...line,
+      name: words.steps[line.id] ?? line.name,
+      check: worked === undefined ? null : { printed, against },
     };
   });
 
-/** Steps that only the examples show have their names here. */
-export const exampleLines = (steps: readonly DerivationStep[], system: UnitSystem): readonly DerivationLine[] =>
-  derivationLines(steps, system).map((line) => ({ ...line, name: words.steps[line.id] ?? line.name }));
+/** The figures that stand beside no step of these. */
+export const otherFigureRows = (
+  figures: readonly WorkedFigure[],
+  shown: readonly { readonly of?: string; readonly steps: readonly DerivationStep[] }[],
+): readonly FigureRow[] =>
+  figures
+    .filter(
+      (each) =>
+        !shown.some(({ of, steps }) => standsBeside(each, of) && steps.some(({ id }) => id === stepOf(each.figure))),
+    )
+    .map(figureRow);

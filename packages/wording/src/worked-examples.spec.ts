@@ -1,8 +1,14 @@
-import { WORKED_EXAMPLES, workCheck, workMoistAir, workWeighIn } from '@chargewright/engine/training';
+import {
+  WORKED_EXAMPLES,
+  workCheck,
+  workMoistAir,
+  workWeighIn,
+  type WorkedExample,
+} from '@chargewright/engine/training';
 import { describe, expect, it } from 'vitest';
 import { workedExampleStories } from './english/worked-example-stories';
 import { UNIT_SYSTEMS } from './unit-system';
-import { airRows, exampleLines, figureRows, lineRows, readingRows, systemRows } from './worked-example-rows';
+import { airRows, checkedLines, lineRows, otherFigureRows, readingRows, systemRows } from './worked-example-rows';
 
 describe.each(UNIT_SYSTEMS)('the examples told in %s', (system) => {
   const stories = workedExampleStories(system);
@@ -65,26 +71,48 @@ describe('givens', () => {
 });
 
 describe('the numbers of a key', () => {
-  it('each say what they are held against', () => {
-    for (const each of WORKED_EXAMPLES) {
-      const { figures } =
-        each.kind === 'check' ? workCheck(each) : each.kind === 'moist-air' ? workMoistAir(each) : workWeighIn(each);
-      for (const row of figureRows(figures)) {
-        expect(row.name).toMatch(/^[A-Z]/);
-        expect(row.against).toMatch(
-          /^(Printed: .|Computed: .|By hand|Rule of thumb: Common practice, no source|Table: .*from memory)/,
-        );
-        expect(`${row.printed} ${row.here}`).not.toMatch(/NaN|undefined|null/);
-        expect(row.here).not.toBe('');
+  /** The math of an example, and its figures. */
+  const worked = (each: WorkedExample) => {
+    switch (each.kind) {
+      case 'check': {
+        const { result, figures } = workCheck(each);
+        return { figures, shown: [{ steps: result.derivation }] };
+      }
+      case 'moist-air': {
+        const { steps, figures } = workMoistAir(each);
+        return { figures, shown: [{ steps }] };
+      }
+      case 'weigh-in': {
+        const { parts, figures } = workWeighIn(each);
+        return { figures, shown: parts.map(({ part, result }) => ({ of: part.id, steps: result.steps })) };
       }
     }
-  });
+  };
+
+  it.each(WORKED_EXAMPLES)(
+    '$id: each stands beside its step or in the list of the others, with what it is held against',
+    (each) => {
+      const { figures, shown } = worked(each);
+      const beside = shown
+        .flatMap(({ steps, ...of }) => checkedLines(steps, { figures, ...of }, 'F-psi'))
+        .flatMap(({ check }) => (check === null ? [] : [check]));
+      const others = otherFigureRows(figures, shown);
+      expect(beside.length + others.length).toBe(figures.length);
+      expect(beside.length).toBeGreaterThan(0);
+      for (const { printed, against } of [...beside, ...others]) {
+        expect(against).toMatch(/^(printed: .|computed: .|by hand|rule of thumb: .*no source|table: .*from memory)/);
+        expect(printed).toMatch(/^[\u22120-9]/);
+      }
+      for (const { name, here } of others) {
+        expect(name).toMatch(/^[A-Z]/);
+        expect(here).toMatch(/^[\u22120-9]/);
+      }
+    },
+  );
 
   it('show a misprint as one', () => {
-    const line = example('printed-sum');
-    if (line.kind !== 'weigh-in') throw new Error('no weigh-in');
-    const [row] = figureRows(workWeighIn(line).figures);
-    expect(row).toMatchObject({
+    const { figures, shown } = worked(example('printed-sum'));
+    expect(otherFigureRows(figures, shown)[0]).toMatchObject({
       name: 'Charge of the line, 5/16 in. line',
       printed: '9 oz',
       here: '18.0 oz',
@@ -93,9 +121,11 @@ describe('the numbers of a key', () => {
   });
 
   it('name every step of their math', () => {
-    const [air, line] = [example('handbook-moist-air'), example('printed-sum')];
-    if (air.kind !== 'moist-air' || line.kind !== 'weigh-in') throw new Error('no such kind');
-    const steps = [...workMoistAir(air).steps, ...workWeighIn(line).parts.flatMap(({ result }) => result.steps)];
-    for (const { name, id } of exampleLines(steps, 'F-psi')) expect(name, id).toMatch(/^[A-Z].+/);
+    for (const id of ['handbook-moist-air', 'printed-sum']) {
+      const { figures, shown } = worked(example(id));
+      for (const { steps } of shown) {
+        for (const line of checkedLines(steps, { figures }, 'F-psi')) expect(line.name, line.id).toMatch(/^[A-Z].+/);
+      }
+    }
   });
 });

@@ -10,5 +10,9 @@ export const routes: Routes = [
     loadComponent: async () => (await import('./layout/checks-page')).ChecksPage,
     title: `${looseChecksWords.title} · ${checkPageWords.shell.product}`,
   },
+  {
+    path: 'examples',
+    loadChildren: async () => (await import('./worked-examples/worked-examples-routes')).workedExamplesRoutes,
+  },
   { path: '**', redirectTo: '' },
 ];

@@ -3,24 +3,21 @@ import type { SlipId, StandingTest, WeighInPart, WorkedFigureId, WorkedStanding 
 
 /** What is read or set up otherwise, and what would come of it. */
 const slips: Readonly<Record<SlipId, { readonly name: string; readonly what: string }>> = {
-  'wick-dried-out': {
-    name: 'wick dried out',
-    what: 'With a wick that has dried out, so that the wet bulb reads too high',
-  },
-  'judged-as-orifice': { name: 'judged as an orifice', what: 'Judged by superheat, as if it had a fixed orifice' },
-  'without-liquid-pair': { name: 'liquid side unread', what: 'With the liquid side not read' },
+  'wick-dried-out': { name: 'wick dried out', what: 'The wick has dried out, so the wet bulb reads too high.' },
+  'judged-as-orifice': { name: 'judged as an orifice', what: 'Judged by superheat, as if it had a fixed orifice.' },
+  'without-liquid-pair': { name: 'liquid side unread', what: 'The liquid side is not read.' },
   'rule-without-floor': {
     name: 'rules of 2008',
-    what: 'By the California rules of 2008, whose superheat has no floor: by that rule it passes, and the stop stays',
+    what: 'By the California rules of 2008, whose superheat has no floor, the number passes. The stop stays.',
   },
-  'without-supply-air': { name: 'supply air unread', what: 'With the supply air not read' },
-  'liquid-line-warm': { name: 'liquid line warmer', what: 'With a liquid line as warm as a low charge leaves it' },
-  'gauge-at-sea-level': { name: 'sea-level chart', what: 'By the chart for sea level' },
-  'scale-of-r410a': { name: 'scale of R-410A', what: 'On the scale of R-410A' },
-  'cooler-liquid-line': {
-    name: 'liquid line cooler',
-    what: 'With a second reading of the liquid line, somewhat cooler',
+  'without-supply-air': {
+    name: 'supply air unread',
+    what: 'The supply air is not read, so the cause stays in the dark.',
   },
+  'liquid-line-warm': { name: 'liquid line warmer', what: 'The liquid line is as warm as a low charge leaves it.' },
+  'gauge-at-sea-level': { name: 'sea-level chart', what: 'By the chart for sea level.' },
+  'scale-of-r410a': { name: 'scale of R-410A', what: 'On the scale of R-410A.' },
+  'cooler-liquid-line': { name: 'liquid line cooler', what: 'A second reading of the liquid line is somewhat cooler.' },
 };
 
 const standingTests: Readonly<Record<StandingTest['id'], string>> = {
@@ -52,7 +49,7 @@ const figures: Readonly<Record<WorkedFigureId, string>> = {
   shortFormula: 'Short formula',
   atmosphere: 'Pressure of the air',
   standingBubblePressure: 'Bubble pressure of the coils',
-  standingExcess: 'Standing pressure, as a temperature, above the coils',
+  standingExcess: 'Temperature over the coils’',
   humidityRatio: 'Humidity ratio',
   relativeHumidity: 'Relative humidity',
   dewPoint: 'Dew point',
@@ -63,12 +60,12 @@ const figures: Readonly<Record<WorkedFigureId, string>> = {
 
 /** What a number is held against. */
 const against: Readonly<Record<WorkedStanding, (source: string) => string>> = {
-  read: (source) => `Printed: ${source}`,
-  memory: (source) => `Table: ${source}`,
-  practice: (source) => `Rule of thumb: ${source}`,
-  choice: (source) => `Choice: ${source}`,
-  computed: (source) => `Computed: ${source}`,
-  'by-hand': () => 'By hand, from the numbers here',
+  read: (source) => `printed: ${source}`,
+  memory: (source) => `table: ${source}`,
+  practice: (source) => `rule of thumb: ${source}`,
+  choice: (source) => `choice: ${source}`,
+  computed: (source) => `computed: ${source}`,
+  'by-hand': () => 'by hand',
 };
 
 /** Steps of a derivation that no other page shows. */
@@ -89,7 +86,6 @@ export const workedExampleWords = {
     title: 'Worked examples',
     intro:
       'Readings as on paper, with questions. The key to each has the math, the finding and where every number comes from.',
-    own: 'The readings are our own numbers, chosen so that the lesson happens. No real system stands behind them.',
     air: 'Moist air',
     weighIn: 'Weigh-in',
   },
@@ -108,6 +104,12 @@ export const workedExampleWords = {
     openWeighIn: 'Open in Weigh in',
     openNote: 'Starts a new check with these readings, marked as an example. Your own checks stay as they are.',
     print: 'Print this page',
+    own: {
+      check: 'The readings are our own numbers, chosen so that the lesson happens. No real system stands behind them.',
+      'moist-air': 'Given as the Handbook gives it.',
+      'weigh-in':
+        'Lengths beyond, rates and printed sums are the manual’s. Factory charge and included length are our own numbers.',
+    },
   },
   key: {
     title: (example: string) => `Key: ${example}`,
@@ -119,22 +121,20 @@ export const workedExampleWords = {
     nextStep: 'Next step',
     otherwise: 'Done otherwise',
     point: 'What stays',
-    figures: 'Where the numbers come from',
+    figures: 'Other numbers of this example',
     figure: 'Number',
     print: 'Checked against',
     here: 'Here',
     source: 'Source',
+    checked: (printed: string, against: string) => `${printed} · ${against}`,
     ofWhich: (figure: string, which: string) => `${figure}, ${which}`,
     misprint: 'a misprint',
-    ownNumbers: (readings: string) => `Our own numbers: ${readings}.`,
-    ownReadings: 'all readings and what is given of the system',
-    ownWeighIn: 'factory charge, installed length, vacuum and scale',
-    noneOwn: 'None of the numbers given here is our own.',
     tables:
       'A printed table and our curves of the refrigerant may differ by a few tenths of a degree. Both are right within what is known.',
     showsAir: (which: string) => `The ${which} shows air in the system.`,
     showsNoAir: (which: string) => `The ${which} shows no air.`,
-    printedSumWouldBe: 'The printed sum, weighed in',
+    printedSumWeighedIn: (line: string, sum: string) => `The ${line}, with ${sum} weighed in.`,
+    offRequired: (difference: string) => `${difference} off what is required.`,
   },
   given: {
     refrigerant: 'Refrigerant',

@@ -1,0 +1,124 @@
+/** What a key says of each kind of example, as texts: the page only lays it out. */
+import type { CheckResult, DerivationStep, NextStep } from '@chargewright/engine';
+import {
+  workCheck,
+  workMoistAir,
+  workWeighIn,
+  type CheckExample,
+  type MoistAirExample,
+  type WeighInExample,
+  type WorkedExample,
+} from '@chargewright/engine/training';
+import {
+  cautionText,
+  checkedLines,
+  formatStated,
+  formatValue,
+  nextStepLines,
+  otherFigureRows,
+  overallHeadline,
+  stopText,
+  workedExampleWords,
+  type CheckedLine,
+  type FigureRow,
+  type UnitSystem,
+} from '@chargewright/wording';
+import { firstSentence } from '../check-a-charge/first-sentence';
+
+export interface ExampleKey {
+  readonly math: readonly { readonly title: string; readonly lines: readonly CheckedLine[] }[];
+  /** Empty where nothing is judged. */
+  readonly findings: readonly string[];
+  readonly nextStep: NextStep | undefined;
+  readonly otherwise: readonly { readonly what: string; readonly outcome: string }[];
+  /** Those that stand beside no step of the math. */
+  readonly figures: readonly FigureRow[];
+}
+
+const { key: words, slips: slipWords, standingTests, lines: lineNames } = workedExampleWords;
+
+export function keyOf(example: WorkedExample, system: UnitSystem): ExampleKey {
+  switch (example.kind) {
+    case 'check':
+      return checkKey(example, system);
+    case 'moist-air':
+      return airKey(example, system);
+    case 'weigh-in':
+      return weighInKey(example, system);
+  }
+}
+
+/** Beside the lesson: the state of the return air is derived in every check. */
+const BESIDE: readonly string[] = ['returnHumidityRatio', 'returnRelativeHumidity', 'returnEnthalpy'];
+const toTheLesson = ({ id }: DerivationStep): boolean => !BESIDE.includes(id);
+
+function checkKey(example: CheckExample, system: UnitSystem): ExampleKey {
+  const { result, slips, standingTests: tests, figures } = workCheck(example);
+  const { stops, cautions, nextStep } = result.overall;
+  const steps = result.derivation.filter(toTheLesson);
+  return {
+    math: [{ title: words.math, lines: checkedLines(steps, { figures }, system) }],
+    findings: [
+      ...(stops.length > 0 ? stops.map((stop) => stopText(stop, system)) : [`${overallHeadline(result, system)}.`]),
+      ...cautions.filter(({ code }) => example.key.cautions.includes(code)).map((each) => cautionText(each, system)),
+      ...tests.flatMap(({ test, showsAir }) =>
+        showsAir === null
+          ? []
+          : [showsAir ? words.showsAir(standingTests[test.id]) : words.showsNoAir(standingTests[test.id])],
+      ),
+    ],
+    nextStep,
+    otherwise: slips.map(({ slip, result: slipped }) => ({
+      what: slipWords[slip.id].what,
+      outcome: outcome(slipped, system),
+    })),
+    figures: otherFigureRows(figures, [{ steps }]),
+  };
+}
+
+/** The finding and the first sentence of what to do. */
+const outcome = (result: CheckResult, system: UnitSystem): string =>
+  `${overallHeadline(result, system)}. ${firstSentence(nextStepLines(result.overall.nextStep, system).step)}`;
+
+function airKey(example: MoistAirExample, system: UnitSystem): ExampleKey {
+  const { steps, figures } = workMoistAir(example);
+  return {
+    math: [{ title: words.math, lines: checkedLines(steps, { figures }, system) }],
+    findings: [],
+    nextStep: undefined,
+    otherwise: [],
+    figures: otherFigureRows(figures, [{ steps }]),
+  };
+}
+
+/** The sum itself; what was put in is compared with it below. */
+const SUM: readonly string[] = ['lineAdjustment', 'requiredCharge'];
+
+function weighInKey(example: WeighInExample, system: UnitSystem): ExampleKey {
+  const { parts, figures } = workWeighIn(example);
+  const shown = parts.map(({ part, result }) => ({
+    of: part.id,
+    steps: result.steps.filter(({ id }) => SUM.includes(id)),
+  }));
+  return {
+    math: shown.map(({ of, steps }) => ({
+      title: words.mathOf(lineNames[of]),
+      lines: checkedLines(steps, { figures, of }, system),
+    })),
+    findings: [],
+    nextStep: undefined,
+    otherwise: parts.flatMap(({ part, misprinted }) =>
+      misprinted.flatMap(({ actual, difference }) =>
+        actual.state === 'known' && difference.state === 'known'
+          ? [
+              {
+                what: words.printedSumWeighedIn(lineNames[part.id], formatStated('massKg', actual.value, system)),
+                outcome: words.offRequired(formatValue('massKg', difference.value, system)),
+              },
+            ]
+          : [],
+      ),
+    ),
+    figures: otherFigureRows(figures, shown),
+  };
+}
