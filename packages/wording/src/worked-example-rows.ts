@@ -18,7 +18,6 @@ import type {
   CheckedFigure,
   CheckExample,
   MoistAirExample,
-  StandingTest,
   WeighInPart,
   WorkedFigure,
 } from '@chargewright/engine/training';
@@ -111,28 +110,26 @@ export function systemRows({ request }: Pick<CheckExample, 'request'>, system: U
   ];
 }
 
-/** The readings, and the standing pressures where the lesson has them. */
-export function readingRows(
-  { request, standingTests }: Pick<CheckExample, 'request' | 'standingTests'>,
-  system: UnitSystem,
-): readonly GivenRow[] {
+export function readingRows({ request }: Pick<CheckExample, 'request'>, system: UnitSystem): readonly GivenRow[] {
   const beside = besideUnits(ownUnits(request), system);
-  const readings = Object.entries(request.readings) as [ReadingId, ReadingInput][];
-  return [
-    ...readings.map(([id, reading]) => readingRow(id, reading, beside)),
-    ...standingTests.map((test) => standingRow(test, beside)),
-  ];
+  return readingsOf(request).map(([id, reading]) => readingRow(id, reading, beside));
 }
 
-function standingRow({ id, pressurePsig, temperatureF }: StandingTest, beside: UnitSystem): GivenRow {
-  const { given, standingTests } = words;
-  const standing = (system: UnitSystem): string =>
-    given.standing(
-      gaugeText(pressureAsReadToPa(pressurePsig, 'psig'), system),
-      formatValue('temperatureK', temperatureToK(temperatureF, 'degF'), system),
-    );
-  return { name: given.standingTest(standingTests[id]), own: standing('F-psi'), other: standing(beside) };
-}
+/** What was read further, in the tests that are given with the example. */
+export const furtherRows = (
+  { request, slips }: Pick<CheckExample, 'request' | 'slips'>,
+  system: UnitSystem,
+): readonly { readonly name: string; readonly rows: readonly GivenRow[] }[] =>
+  slips
+    .filter(({ given }) => given === true)
+    .map((slip) => ({
+      name: capital(words.slips[slip.id].name),
+      rows: readingsOf(slip.request)
+        .filter(([id]) => request.readings[id] === undefined)
+        .map(([id, reading]) => readingRow(id, reading, besideUnits(ownUnits(request), system))),
+    }));
+
+const readingsOf = ({ readings }: EvaluationRequest) => Object.entries(readings) as [ReadingId, ReadingInput][];
 
 export function airRows({ given }: Pick<MoistAirExample, 'given'>, system: UnitSystem): readonly GivenRow[] {
   const beside = besideUnits('inch-pound', system);
@@ -188,7 +185,6 @@ export interface CheckedLine extends DerivationLine {
 
 const OF: Readonly<Record<string, string>> = {
   ...Object.fromEntries(Object.entries(words.slips).map(([id, { name }]) => [id, name])),
-  ...words.standingTests,
   ...words.lines,
 };
 
@@ -215,39 +211,30 @@ function figureRow({ figure, computed }: WorkedFigure): FigureRow {
 /** Figures that have another name than the step that gives them. */
 const STEP_OF: Readonly<Partial<Record<CheckedFigure['what'], string>>> = {
   splitDeviation: 'temperature-splitDeviation',
-  lineCharge: 'lineAdjustment',
 };
 
 const stepOf = ({ what }: CheckedFigure): string => STEP_OF[what] ?? what;
 
-/** A figure stands beside a step where it is right, and of the same readings or line: `of` is that of the steps. */
-const standsBeside = ({ figure }: WorkedFigure, of: string | undefined): boolean =>
-  figure.of === of && figure.misprint !== true;
+/** A figure of other readings, or of a line set, stands beside no step of the example's own. */
+const standsBeside = ({ figure }: WorkedFigure, { id }: { readonly id: string }): boolean =>
+  figure.of === undefined && stepOf(figure) === id;
 
 /** The math in its order, each result with what it is held against. */
 export const checkedLines = (
   steps: readonly DerivationStep[],
-  { figures, of }: { readonly figures: readonly WorkedFigure[]; readonly of?: string },
+  figures: readonly WorkedFigure[],
   system: UnitSystem,
 ): readonly CheckedLine[] =>
   derivationLines(steps, system).map((line) => {
-    const worked = figures.find((each) => standsBeside(each, of) && stepOf(each.figure) === line.id);
-    const { printed = '', against = '' } = worked === undefined ? {} : figureRow(worked);
-    return {
-      ...line,
-      name: words.steps[line.id] ?? line.name,
-      check: worked === undefined ? null : { printed, against },
-    };
+    const worked = figures.find((each) => standsBeside(each, line));
+    const name = words.steps[line.id] ?? line.name;
+    if (worked === undefined) return { ...line, name, check: null };
+    const { printed, against } = figureRow(worked);
+    return { ...line, name, check: { printed, against } };
   });
 
-/** The figures that stand beside no step of these. */
+/** The figures that stand beside none of these steps. */
 export const otherFigureRows = (
   figures: readonly WorkedFigure[],
-  shown: readonly { readonly of?: string; readonly steps: readonly DerivationStep[] }[],
-): readonly FigureRow[] =>
-  figures
-    .filter(
-      (each) =>
-        !shown.some(({ of, steps }) => standsBeside(each, of) && steps.some(({ id }) => id === stepOf(each.figure))),
-    )
-    .map(figureRow);
+  steps: readonly DerivationStep[],
+): readonly FigureRow[] => figures.filter((each) => !steps.some((step) => standsBeside(each, step))).map(figureRow);

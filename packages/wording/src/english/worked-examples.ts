@@ -1,5 +1,5 @@
 /** The pages of the worked examples, and the names of what stands on their keys. */
-import type { SlipId, StandingTest, WeighInPart, WorkedFigureId, WorkedStanding } from '@chargewright/engine/training';
+import type { SlipId, WeighInPart, WorkedFigureId, WorkedStanding } from '@chargewright/engine/training';
 
 /** What is read or set up otherwise, and what would come of it. */
 const slips: Readonly<Record<SlipId, { readonly name: string; readonly what: string }>> = {
@@ -18,11 +18,8 @@ const slips: Readonly<Record<SlipId, { readonly name: string; readonly what: str
   'gauge-at-sea-level': { name: 'sea-level chart', what: 'By the chart for sea level.' },
   'scale-of-r410a': { name: 'scale of R-410A', what: 'On the scale of R-410A.' },
   'cooler-liquid-line': { name: 'liquid line cooler', what: 'A second reading of the liquid line is somewhat cooler.' },
-};
-
-const standingTests: Readonly<Record<StandingTest['id'], string>> = {
-  'no-air': 'first standing pressure',
-  air: 'second standing pressure',
+  'standing-as-printed': { name: 'first one, stopped', what: 'The first one, stopped.' },
+  'standing-too-high': { name: 'second one, stopped', what: 'The second one, stopped.' },
 };
 
 const lines: Readonly<Record<WeighInPart['id'], string>> = {
@@ -48,8 +45,8 @@ const figures: Readonly<Record<WorkedFigureId, string>> = {
   splitDeviation: 'Split off target',
   shortFormula: 'Short formula',
   atmosphere: 'Pressure of the air',
-  standingBubblePressure: 'Bubble pressure of the coils',
-  standingExcess: 'Temperature over the coils’',
+  standingBubblePressure: 'Bubble pressure at the coils’ temperature',
+  standingExcess: 'Saturation over the coils’ temperature',
   humidityRatio: 'Humidity ratio',
   relativeHumidity: 'Relative humidity',
   dewPoint: 'Dew point',
@@ -75,10 +72,6 @@ const steps: Readonly<Record<string, string>> = {
   dewPoint: 'Dew point',
   enthalpy: 'Enthalpy',
   specificVolume: 'Specific volume',
-  lineAdjustment: 'Charge of the line beyond',
-  requiredCharge: 'Charge required in all',
-  chargeDifference: 'Put in, less required',
-  chargeAfterAdjustment: 'Charge now in the system',
 };
 
 export const workedExampleWords = {
@@ -119,7 +112,7 @@ export const workedExampleWords = {
     mathOf: (what: string) => `The math, ${what}`,
     finding: 'Finding',
     nextStep: 'Next step',
-    otherwise: 'Done otherwise',
+    otherwise: 'What if',
     point: 'What stays',
     figures: 'Other numbers of this example',
     figure: 'Number',
@@ -131,8 +124,6 @@ export const workedExampleWords = {
     misprint: 'a misprint',
     tables:
       'A printed table and our curves of the refrigerant may differ by a few tenths of a degree. Both are right within what is known.',
-    showsAir: (which: string) => `The ${which} shows air in the system.`,
-    showsNoAir: (which: string) => `The ${which} shows no air.`,
     printedSumWeighedIn: (line: string, sum: string) => `The ${line}, with ${sum} weighed in.`,
     offRequired: (difference: string) => `${difference} off what is required.`,
   },
@@ -146,8 +137,6 @@ export const workedExampleWords = {
     pressure: 'Pressure of the air',
     dryBulb: 'Dry bulb',
     wetBulb: 'Wet bulb',
-    standingTest: (which: string) => `Stopped, ${which}`,
-    standing: (pressure: string, temperature: string) => `${pressure}, both coils at ${temperature}`,
     factoryCharge: 'Factory charge',
     includedLength: 'Line included in it',
     extraLength: 'Line beyond that',
@@ -156,7 +145,6 @@ export const workedExampleWords = {
     putIn: 'Put in beyond the factory charge',
   },
   slips,
-  standingTests,
   lines,
   figures,
   steps,

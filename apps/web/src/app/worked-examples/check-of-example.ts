@@ -1,7 +1,8 @@
 import type { Amount, ReadingId, ReadingInput } from '@chargewright/engine';
 import type { CheckExample } from '@chargewright/engine/training';
 import type { ExampleCheck } from '../loose-checks/check-command';
-import type { TypedField, TypedValue } from '../loose-checks/check-draft';
+import type { TypedField } from '@chargewright/contract/typed-fields';
+import type { TypedValue } from '../loose-checks/check-draft';
 
 const MS_PER_MINUTE = 60_000;
 

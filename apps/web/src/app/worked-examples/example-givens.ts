@@ -1,6 +1,7 @@
 import type { WorkedExample } from '@chargewright/engine/training';
 import {
   airRows,
+  furtherRows,
   lineRows,
   readingRows,
   systemRows,
@@ -23,6 +24,7 @@ export function givensOf(example: WorkedExample, system: UnitSystem): readonly G
       return [
         { caption: words.system, rows: systemRows(example, system) },
         { caption: words.readings, rows: readingRows(example, system) },
+        ...furtherRows(example, system).map(({ name, rows }) => ({ caption: name, rows })),
       ];
     case 'moist-air':
       return [{ caption: words.readings, rows: airRows(example, system) }];

@@ -18,15 +18,19 @@ import {
   otherFigureRows,
   overallHeadline,
   stopText,
+  weighInSum,
   workedExampleWords,
   type CheckedLine,
   type FigureRow,
+  type SumLine,
   type UnitSystem,
 } from '@chargewright/wording';
 import { firstSentence } from '../check-a-charge/first-sentence';
 
 export interface ExampleKey {
-  readonly math: readonly { readonly title: string; readonly lines: readonly CheckedLine[] }[];
+  readonly math: readonly CheckedLine[];
+  /** The sums of a weigh-in, a line set each. */
+  readonly sums: readonly { readonly title: string; readonly lines: readonly SumLine[] }[];
   /** Empty where nothing is judged. */
   readonly findings: readonly string[];
   readonly nextStep: NextStep | undefined;
@@ -35,7 +39,7 @@ export interface ExampleKey {
   readonly figures: readonly FigureRow[];
 }
 
-const { key: words, slips: slipWords, standingTests, lines: lineNames } = workedExampleWords;
+const { key: words, slips: slipWords, lines: lineNames } = workedExampleWords;
 
 export function keyOf(example: WorkedExample, system: UnitSystem): ExampleKey {
   switch (example.kind) {
@@ -53,26 +57,22 @@ const BESIDE: readonly string[] = ['returnHumidityRatio', 'returnRelativeHumidit
 const toTheLesson = ({ id }: DerivationStep): boolean => !BESIDE.includes(id);
 
 function checkKey(example: CheckExample, system: UnitSystem): ExampleKey {
-  const { result, slips, standingTests: tests, figures } = workCheck(example);
+  const { result, slips, figures } = workCheck(example);
   const { stops, cautions, nextStep } = result.overall;
   const steps = result.derivation.filter(toTheLesson);
   return {
-    math: [{ title: words.math, lines: checkedLines(steps, { figures }, system) }],
+    math: checkedLines(steps, figures, system),
+    sums: [],
     findings: [
       ...(stops.length > 0 ? stops.map((stop) => stopText(stop, system)) : [`${overallHeadline(result, system)}.`]),
       ...cautions.filter(({ code }) => example.key.cautions.includes(code)).map((each) => cautionText(each, system)),
-      ...tests.flatMap(({ test, showsAir }) =>
-        showsAir === null
-          ? []
-          : [showsAir ? words.showsAir(standingTests[test.id]) : words.showsNoAir(standingTests[test.id])],
-      ),
     ],
     nextStep,
     otherwise: slips.map(({ slip, result: slipped }) => ({
       what: slipWords[slip.id].what,
       outcome: outcome(slipped, system),
     })),
-    figures: otherFigureRows(figures, [{ steps }]),
+    figures: otherFigureRows(figures, steps),
   };
 }
 
@@ -83,27 +83,22 @@ const outcome = (result: CheckResult, system: UnitSystem): string =>
 function airKey(example: MoistAirExample, system: UnitSystem): ExampleKey {
   const { steps, figures } = workMoistAir(example);
   return {
-    math: [{ title: words.math, lines: checkedLines(steps, { figures }, system) }],
+    math: checkedLines(steps, figures, system),
+    sums: [],
     findings: [],
     nextStep: undefined,
     otherwise: [],
-    figures: otherFigureRows(figures, [{ steps }]),
+    figures: otherFigureRows(figures, steps),
   };
 }
 
-/** The sum itself; what was put in is compared with it below. */
-const SUM: readonly string[] = ['lineAdjustment', 'requiredCharge'];
-
 function weighInKey(example: WeighInExample, system: UnitSystem): ExampleKey {
   const { parts, figures } = workWeighIn(example);
-  const shown = parts.map(({ part, result }) => ({
-    of: part.id,
-    steps: result.steps.filter(({ id }) => SUM.includes(id)),
-  }));
   return {
-    math: shown.map(({ of, steps }) => ({
-      title: words.mathOf(lineNames[of]),
-      lines: checkedLines(steps, { figures, of }, system),
+    math: [],
+    sums: parts.map(({ part, result }) => ({
+      title: words.mathOf(lineNames[part.id]),
+      lines: weighInSum(result, system),
     })),
     findings: [],
     nextStep: undefined,
@@ -119,6 +114,6 @@ function weighInKey(example: WeighInExample, system: UnitSystem): ExampleKey {
           : [],
       ),
     ),
-    figures: otherFigureRows(figures, shown),
+    figures: otherFigureRows(figures, []),
   };
 }
