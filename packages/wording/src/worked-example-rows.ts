@@ -8,6 +8,7 @@ import {
   type Amount,
   type DerivationStep,
   type EvaluationRequest,
+  type Known,
   type PressureUnit,
   type QuantityKind,
   type ReadingId,
@@ -218,6 +219,21 @@ const stepOf = ({ what }: CheckedFigure): string => STEP_OF[what] ?? what;
 /** A figure of other readings, or of a line set, stands beside no step of the example's own. */
 const standsBeside = ({ figure }: WorkedFigure, { id }: { readonly id: string }): boolean =>
   figure.of === undefined && stepOf(figure) === id;
+
+/** The steps that lead to the figures of a lesson; a check derives more than it is about. */
+export function stepsOfLesson(
+  steps: readonly DerivationStep[],
+  figures: readonly WorkedFigure[],
+): readonly DerivationStep[] {
+  const wanted = new Set<string>();
+  const visit = ({ step }: Known): void => {
+    if (step.type === 'leaf' || wanted.has(step.formula.id)) return;
+    wanted.add(step.formula.id);
+    Object.values(step.from).forEach(visit);
+  };
+  for (const { id, result } of steps) if (figures.some((each) => standsBeside(each, { id }))) visit(result);
+  return steps.filter(({ id }) => wanted.has(id));
+}
 
 /** The math in its order, each result with what it is held against. */
 export const checkedLines = (

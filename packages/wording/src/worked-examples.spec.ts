@@ -15,6 +15,7 @@ import {
   lineRows,
   otherFigureRows,
   readingRows,
+  stepsOfLesson,
   systemRows,
 } from './worked-example-rows';
 
@@ -115,6 +116,21 @@ describe('the numbers of a key', () => {
       }
     },
   );
+
+  it('leave out of the math what the lesson is not about', () => {
+    const { figures, steps } = worked(example('overcharge-or-air'));
+    const ids = stepsOfLesson(steps, figures).map(({ id }) => id);
+    expect(ids).toEqual([
+      'liquidPressureAbsolute',
+      'condensingBubbleTemperature',
+      'subcooling',
+      'subcoolingDeviation',
+      'suctionPressureAbsolute',
+      'evaporatingDewTemperature',
+      'superheat',
+    ]);
+    expect(steps.map(({ id }) => id)).toContain('temperatureSplit');
+  });
 
   it('show a misprint as one', () => {
     const { figures, steps } = worked(example('printed-sum'));

@@ -1,5 +1,5 @@
 /** What a key says of each kind of example, as texts: the page only lays it out. */
-import type { CheckResult, DerivationStep, NextStep } from '@chargewright/engine';
+import type { CheckResult, NextStep } from '@chargewright/engine';
 import {
   workCheck,
   workMoistAir,
@@ -17,6 +17,7 @@ import {
   nextStepLines,
   otherFigureRows,
   overallHeadline,
+  stepsOfLesson,
   stopText,
   weighInSum,
   workedExampleWords,
@@ -52,14 +53,10 @@ export function keyOf(example: WorkedExample, system: UnitSystem): ExampleKey {
   }
 }
 
-/** Beside the lesson: the state of the return air is derived in every check. */
-const BESIDE: readonly string[] = ['returnHumidityRatio', 'returnRelativeHumidity', 'returnEnthalpy'];
-const toTheLesson = ({ id }: DerivationStep): boolean => !BESIDE.includes(id);
-
 function checkKey(example: CheckExample, system: UnitSystem): ExampleKey {
   const { result, slips, figures } = workCheck(example);
   const { stops, cautions, nextStep } = result.overall;
-  const steps = result.derivation.filter(toTheLesson);
+  const steps = stepsOfLesson(result.derivation, figures);
   return {
     math: checkedLines(steps, figures, system),
     sums: [],

@@ -13,7 +13,7 @@ import { ChangeDetectionStrategy, Component, ViewEncapsulation } from '@angular/
     }
     @media print {
       @page {
-        margin: 12mm 14mm;
+        margin: 11mm 14mm;
       }
       html {
         color-scheme: light;
