@@ -42,3 +42,6 @@ export * from './english/field-inputs';
 export * from './english/weigh-in';
 export * from './diagnosis-sentences';
 export * from './english/properties';
+export * from './english/worked-examples';
+export * from './english/worked-example-stories';
+export * from './worked-example-rows';

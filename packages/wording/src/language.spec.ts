@@ -29,6 +29,8 @@ import { setupWords } from './english/setup';
 import { stopTexts } from './english/stops';
 import { structureFaultWords } from './english/structure-faults';
 import { weighInWords } from './english/weigh-in';
+import { workedExampleStories } from './english/worked-example-stories';
+import { workedExampleWords } from './english/worked-examples';
 import type { Language } from './language';
 import { cautionText, nextStepText } from './sentences';
 
@@ -63,6 +65,8 @@ const english: Language = {
   makersData: makersDataWords,
   owner: ownerWords,
   targetComparison: targetComparisonWords,
+  workedExamples: workedExampleWords,
+  workedExampleStories,
 };
 
 describe('a language', () => {

@@ -35,6 +35,8 @@ import type { readingWords } from './english/readings';
 import type { safetyWords } from './english/safety';
 import type { setupWords } from './english/setup';
 import type { weighInWords } from './english/weigh-in';
+import type { workedExampleStories } from './english/worked-example-stories';
+import type { workedExampleWords } from './english/worked-examples';
 import type { FigureNames, MessageTexts, Say } from './message-texts';
 import type { StructureFaultKind } from './structure-fault';
 
@@ -121,4 +123,6 @@ export interface Language {
   readonly makersData: typeof makersDataWords;
   readonly owner: typeof ownerWords;
   readonly targetComparison: typeof targetComparisonWords;
+  readonly workedExamples: typeof workedExampleWords;
+  readonly workedExampleStories: typeof workedExampleStories;
 }

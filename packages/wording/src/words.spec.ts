@@ -17,6 +17,8 @@ import { readingWords } from './english/readings';
 import { safetyWords } from './english/safety';
 import { listWords, setupWords } from './english/setup';
 import { weighInWords } from './english/weigh-in';
+import { workedExampleStories } from './english/worked-example-stories';
+import { workedExampleWords } from './english/worked-examples';
 
 /** Every text of a tree of words; those that take figures get 2 and then 8. */
 function textsOf(words: unknown, path: string): readonly (readonly [string, string])[] {
@@ -47,6 +49,8 @@ const roots = Object.entries({
   weighIn: weighInWords,
   makersCharts: makersChartWords,
   properties: propertiesWords,
+  workedExamples: workedExampleWords,
+  workedExampleStories: workedExampleStories('F-psi'),
 });
 
 describe('words of the page', () => {

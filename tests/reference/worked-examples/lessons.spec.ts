@@ -1,5 +1,5 @@
 /** What each example is to teach, as a contrast that can be counted: with the usual slip another conclusion comes out. */
-import type { CheckResult } from '@chargewright/engine';
+import type { CheckResult, ReadingId } from '@chargewright/engine';
 import { expandedUncertainty, isKnown } from '@chargewright/engine';
 import {
   findWorkedExample,
@@ -123,19 +123,23 @@ describe('overcharge or air', () => {
   const either = check('overcharge-or-air');
 
   it('are told apart by the standing pressure, and by nothing that was read while it ran', () => {
-    const { standingTests, result } = workCheck(either);
-    expect(standingTests.map(({ test, showsAir }) => [test.id, showsAir])).toEqual([
-      ['no-air', false],
-      ['air', true],
-    ]);
-    for (const { test, showsAir } of standingTests) expect(showsAir).toBe(test.airInSystem);
+    const { result } = workCheck(either);
     expect(result.overall.nextStep.notYet).toEqual(['add-nothing', 'recover-nothing']);
+    const ran = Object.keys(either.request.readings).sort();
+    for (const { request } of either.slips) {
+      expect(Object.keys(request.readings).sort()).toEqual(
+        [...ran, 'standingIndoorCoilTemperature', 'standingOutdoorCoilTemperature', 'standingPressure'].sort(),
+      );
+      for (const id of ran) expect(request.readings).toHaveProperty(id, either.request.readings[id as ReadingId]);
+    }
+    expect(slipOf('overcharge-or-air', 'standing-as-printed').overall.nextStep.code).toBe('recover-in-steps');
+    expect(slipOf('overcharge-or-air', 'standing-too-high').overall.nextStep.code).toBe('recover-air-weigh-in');
   });
 
   it('show air from 3 °F of excess on, by the printed table', () => {
-    const excess = (id: string) => onPaper(either, { what: 'standingExcess', of: id });
-    expect(excess('no-air')).toBeLessThan(3);
-    expect(excess('air')).toBeGreaterThan(3);
+    const excess = (of: SlipId) => onPaper(either, { what: 'standingExcess', of });
+    expect(excess('standing-as-printed')).toBeLessThan(3);
+    expect(excess('standing-too-high')).toBeGreaterThan(3);
   });
 });
 

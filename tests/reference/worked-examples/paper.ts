@@ -3,7 +3,7 @@
  * charts, the rest by subtraction. Temperatures in °F, pressures in psi. The tables keep their provenance in their files.
  */
 import { readFileSync } from 'node:fs';
-import type { CheckedFigure, CheckExample, StandingTest, WorkedFigureId } from '@chargewright/engine/training';
+import type { CheckedFigure, CheckExample, WorkedFigureId } from '@chargewright/engine/training';
 import type { EvaluationRequest, ReadingId } from '@chargewright/engine';
 import { evaluate } from 'mathjs';
 
@@ -111,7 +111,6 @@ const targetF = (amount: { value: number; unit: string } | undefined): number =>
 /** What paper works a figure out from. */
 interface Sheet {
   readonly request: EvaluationRequest;
-  readonly standing: StandingTest | undefined;
   read(id: ReadingId): number;
   figure(what: WorkedFigureId): number;
 }
@@ -129,11 +128,6 @@ const saturation =
 function notADash(target: number | null): number {
   if (target === null) throw new Error('a dash');
   return target;
-}
-
-function testOf({ standing }: Sheet): StandingTest {
-  if (standing === undefined) throw new Error('no standing test');
-  return standing;
 }
 
 const WORKINGS: Readonly<Partial<Record<WorkedFigureId, (sheet: Sheet) => number>>> = {
@@ -158,19 +152,18 @@ const WORKINGS: Readonly<Partial<Record<WorkedFigureId, (sheet: Sheet) => number
   shortFormula: ({ read }) =>
     evaluate('(3 * wb - 80 - db) / 2', { wb: read('returnWetBulb'), db: read('outdoorDryBulb') }) as number,
   atmosphere: ({ request }) => standardAtmospherePsia(request.setup.elevation?.value ?? 0),
-  standingBubblePressure: (sheet) => {
-    const { temperatureF } = testOf(sheet);
-    const { refrigerant } = sheet.request.setup;
+  standingBubblePressure: ({ request, read }) => {
+    const temperatureF = read('standingOutdoorCoilTemperature');
+    const { refrigerant } = request.setup;
     const point = POINTS.find(
       (each) => each.refrigerant === refrigerant && each.source === 'S1' && each.temperatureF === temperatureF,
     );
     if (point === undefined) throw new Error(`${temperatureF} °F is not printed`);
     return point.bubblePsig;
   },
-  standingExcess: (sheet) => {
-    const { temperatureF, pressurePsig } = testOf(sheet);
-    return temperatureByTable(sheet.request.setup.refrigerant, 'high', 'bubble', pressurePsig) - temperatureF;
-  },
+  standingExcess: ({ request, read }) =>
+    temperatureByTable(request.setup.refrigerant, 'high', 'bubble', read('standingPressure')) -
+    read('standingOutdoorCoilTemperature'),
 };
 
 /** The figure by paper, in °F or psi. */
@@ -180,7 +173,6 @@ export function onPaper(example: CheckExample, { what, of }: Pick<CheckedFigure,
   if (working === undefined) throw new Error(`${what} is not of a check`);
   return working({
     request,
-    standing: example.standingTests.find(({ id }) => id === of),
     read: (id) => readingOf(request, id),
     figure: (other) => onPaper(example, { what: other, ...(of && { of }) }),
   });

@@ -19,5 +19,9 @@ export const routes: Routes = [
     path: 'properties',
     loadChildren: async () => (await import('./properties/properties.routes')).propertiesRoutes,
   },
+  {
+    path: 'examples',
+    loadChildren: async () => (await import('./worked-examples/worked-examples-routes')).workedExamplesRoutes,
+  },
   { path: '**', redirectTo: '' },
 ];

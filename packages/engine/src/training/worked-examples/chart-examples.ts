@@ -49,7 +49,6 @@ export const FORMULA_IN_A_DASH: CheckExample = {
     cellOf(SPLIT_TABLE, { what: 'targetTemperatureSplit', value: 20.6 }),
   ],
   slips: [],
-  standingTests: [],
 };
 
 const MILE_HIGH_SETUP = {
@@ -126,5 +125,4 @@ export const SEA_LEVEL_CHART: CheckExample = {
       key: { overall: 'within', nextStep: 'record', criterion: 'superheat', byRule: 'passes' },
     },
   ],
-  standingTests: [],
 };

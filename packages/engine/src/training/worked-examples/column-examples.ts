@@ -51,7 +51,6 @@ export const WRONG_COLUMN: CheckExample = {
     difference({ what: 'superheat', value: 10, within: 0.06 }),
   ],
   slips: [],
-  standingTests: [],
 };
 
 /** Bubble read for dew on a blend with a wide glide: a right charge looks low by far. */
@@ -92,7 +91,6 @@ export const WIDE_GLIDE_WRONG_COLUMN: CheckExample = {
     difference({ what: 'subcooling', value: 10, within: 0.06 }),
   ],
   slips: [],
-  standingTests: [],
 };
 
 const WRONG_SCALE_REQUEST = {
@@ -154,5 +152,4 @@ export const WRONG_SCALE: CheckExample = {
       key: { overall: 'below', nextStep: 'leak-first', criterion: 'subcooling', byRule: 'fails' },
     },
   ],
-  standingTests: [],
 };

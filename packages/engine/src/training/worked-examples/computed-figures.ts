@@ -1,22 +1,15 @@
 /** What the engine finds for a checked figure of an example, in the unit of its print. */
 import type { UsedReadingId } from '../../check/assumed-uncertainty';
 import type { CriterionId } from '../../check/codes';
+import { airTest } from '../../check/separating-tests';
 import type { Quantity } from '../../derivation/quantity';
 import { bareValue } from '../../derivation/quantity';
 import { shortFormulaK } from '../../methods/short-formula';
 import { bubblePressurePa } from '../../refrigerants/saturation';
-import {
-  differenceFromK,
-  massFromKg,
-  pressureFromPa,
-  specificVolumeToFt3PerLb,
-  temperatureFromK,
-  temperatureToK,
-} from '../../units';
+import { differenceFromK, massFromKg, pressureFromPa, specificVolumeToFt3PerLb, temperatureFromK } from '../../units';
 import { standardAtmospherePressurePa } from '../../psychrometrics/standard-atmosphere';
 import type { JudgedRequest } from './judged-request';
-import { standingExcessOf } from './standing-test';
-import type { CheckedFigure, StandingTest, WorkedFigureUnit } from './worked-example';
+import type { CheckedFigure, WorkedFigureUnit } from './worked-example';
 
 export interface WorkedFigure {
   readonly figure: CheckedFigure;
@@ -47,12 +40,8 @@ export function inUnit(si: number, unit: Exclude<WorkedFigureUnit, 'Btu/lb'>): n
   }
 }
 
-/** Figures of a check, from the request they are `of`, or of the standing test. */
-export function checkFigureSi(
-  { what }: CheckedFigure,
-  judged: JudgedRequest,
-  standing: StandingTest | undefined,
-): number | null {
+/** Figures of a check, from the request they are `of`. */
+export function checkFigureSi({ what }: CheckedFigure, judged: JudgedRequest): number | null {
   const { input, derived, result } = judged;
   const reading = (id: UsedReadingId): number | undefined => input.readings[id]?.quantity.value;
   const criterion = (id: CriterionId) => result.criteria.find((each) => each.criterion === id);
@@ -89,12 +78,11 @@ export function checkFigureSi(
       return input.setup.atmosphere.value;
     case 'standingBubblePressure': {
       const { refrigerant } = input.setup;
-      return standing === undefined
-        ? null
-        : bubblePressurePa({ refrigerant, temperatureK: temperatureToK(standing.temperatureF, 'degF') });
+      const temperatureK = reading('standingOutdoorCoilTemperature');
+      return temperatureK === undefined ? null : bubblePressurePa({ refrigerant, temperatureK });
     }
     case 'standingExcess':
-      return standing === undefined ? null : bare(standingExcessOf(input.setup.refrigerant, standing));
+      return bare(airTest(input).excess);
     case 'humidityRatio':
     case 'relativeHumidity':
     case 'dewPoint':

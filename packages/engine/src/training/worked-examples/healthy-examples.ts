@@ -44,7 +44,6 @@ export const HEALTHY_ORIFICE: CheckExample = {
     cellOf(SPLIT_TABLE, { what: 'targetTemperatureSplit', value: 16.3 }),
   ],
   slips: [],
-  standingTests: [],
 };
 
 /** The same lesson for a valve, read on instruments in °C and kPa. */
@@ -82,7 +81,6 @@ export const HEALTHY_VALVE_METRIC: CheckExample = {
     { what: 'temperatureSplit', value: 11, unit: 'deltaC', standing: 'by-hand', source: DEFINITION, within: 1e-6 },
   ],
   slips: [],
-  standingTests: [],
 };
 
 const DRY_HOUSE_REQUEST = {
@@ -129,5 +127,4 @@ export const DRY_HOUSE: CheckExample = {
       key: { overall: 'not-verifiable', nextStep: 'reread-wet-bulb-then-airflow', reason: 'split-above' },
     },
   ],
-  standingTests: [],
 };

@@ -64,7 +64,6 @@ export const LOW_AIRFLOW_FLOODS: CheckExample = {
       key: { overall: 'stop', nextStep: 'check-metering', stops: ['liquid-return'] },
     },
   ],
-  standingTests: [],
 };
 
 const ICE_REQUEST = {
@@ -114,33 +113,44 @@ export const RESTRICTION_WITH_ICE: CheckExample = {
       key: { overall: 'stop', nextStep: 'thaw-then-leak-search', stops: ['freezing'] },
     },
   ],
-  standingTests: [],
 };
+
+const HIGH_HEAD_REQUEST = {
+  setup: {
+    ...SPLIT_IN_COOLING,
+    ...AT_SEA_LEVEL,
+    refrigerant: 'R-410A',
+    meteringDevice: 'txv',
+    targetSubcooling: { value: 10, unit: 'deltaF' },
+  },
+  visit: LOOKED_OVER,
+  readings: readInchPound({
+    liquidPressure: 380.2,
+    liquidLineTemperature: 95,
+    outdoorDryBulb: 85,
+    suctionPressure: 118,
+    suctionLineTemperature: 50,
+    returnDryBulb: 76,
+    returnWetBulb: 64,
+    supplyDryBulb: 58,
+  }),
+} as const satisfies CheckExample['request'];
+
+const standing = (pressurePsig: number): CheckExample['request'] =>
+  withReadings(
+    HIGH_HEAD_REQUEST,
+    readInchPound({
+      standingPressure: pressurePsig,
+      standingOutdoorCoilTemperature: 85,
+      standingIndoorCoilTemperature: 85,
+    }),
+  );
 
 /** One set of readings, two causes: only the standing pressure of the stopped system tells them apart. */
 export const OVERCHARGE_OR_AIR: CheckExample = {
   id: 'overcharge-or-air',
   kind: 'check',
-  request: {
-    setup: {
-      ...SPLIT_IN_COOLING,
-      ...AT_SEA_LEVEL,
-      refrigerant: 'R-410A',
-      meteringDevice: 'txv',
-      targetSubcooling: { value: 10, unit: 'deltaF' },
-    },
-    visit: LOOKED_OVER,
-    readings: readInchPound({
-      liquidPressure: 380.2,
-      liquidLineTemperature: 95,
-      outdoorDryBulb: 85,
-      suctionPressure: 118,
-      suctionLineTemperature: 50,
-      returnDryBulb: 76,
-      returnWetBulb: 64,
-      supplyDryBulb: 58,
-    }),
-  },
+  request: HIGH_HEAD_REQUEST,
   key: {
     overall: 'above',
     criterion: 'subcooling',
@@ -157,14 +167,29 @@ export const OVERCHARGE_OR_AIR: CheckExample = {
     difference({ what: 'condensingOverAmbient', value: 28, within: 0.33 }),
     read(R410A_TABLE, { what: 'evaporatingDewTemperature', value: 40, unit: 'degF', within: 0.37 }),
     difference({ what: 'superheat', value: 10, within: 0.37 }),
-    read(R410A_TABLE, { what: 'standingBubblePressure', of: 'no-air', value: 254.1, unit: 'psig', within: 1.4 }),
-    difference({ what: 'standingExcess', of: 'no-air', value: 0, within: 0.35 }),
+    read(R410A_TABLE, {
+      what: 'standingBubblePressure',
+      of: 'standing-as-printed',
+      value: 254.1,
+      unit: 'psig',
+      within: 1.4,
+    }),
+    difference({ what: 'standingExcess', of: 'standing-as-printed', value: 0, within: 0.35 }),
     // the table prints 290.8 psig at 94 °F
-    difference({ what: 'standingExcess', of: 'air', value: 9, within: 0.32 }),
+    difference({ what: 'standingExcess', of: 'standing-too-high', value: 9, within: 0.32 }),
   ],
-  slips: [],
-  standingTests: [
-    { id: 'no-air', temperatureF: 85, pressurePsig: 254.1, airInSystem: false },
-    { id: 'air', temperatureF: 85, pressurePsig: 290.8, airInSystem: true },
+  slips: [
+    {
+      id: 'standing-as-printed',
+      given: true,
+      request: standing(254.1),
+      key: { overall: 'above', nextStep: 'recover-in-steps' },
+    },
+    {
+      id: 'standing-too-high',
+      given: true,
+      request: standing(290.8),
+      key: { overall: 'above', nextStep: 'recover-air-weigh-in' },
+    },
   ],
 };

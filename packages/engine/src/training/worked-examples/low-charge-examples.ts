@@ -64,7 +64,6 @@ export const VALVE_HIDES_LOW_CHARGE: CheckExample = {
       key: { overall: 'not-judged', nextStep: 'take-readings', reason: 'readings-missing' },
     },
   ],
-  standingTests: [],
 };
 
 export const UNDERCHARGE_LOW_SPLIT: CheckExample = {
@@ -105,5 +104,4 @@ export const UNDERCHARGE_LOW_SPLIT: CheckExample = {
     exactDifference({ what: 'splitDeviation', value: -6 }),
   ],
   slips: [],
-  standingTests: [],
 };

@@ -51,5 +51,4 @@ export const TOO_CLOSE_TO_CALL: CheckExample = {
       key: { overall: 'within', nextStep: 'record', criterion: 'subcooling', byRule: 'passes' },
     },
   ],
-  standingTests: [],
 };

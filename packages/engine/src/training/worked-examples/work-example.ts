@@ -9,39 +9,23 @@ import type { WorkedFigure } from './computed-figures';
 import { checkFigureSi, inUnit } from './computed-figures';
 import { judgeRequest } from './judged-request';
 import { moistAirSteps } from './moist-air-steps';
-import { showsAir, standingExcessOf } from './standing-test';
-import type {
-  CheckedFigure,
-  CheckExample,
-  MoistAirExample,
-  Slip,
-  StandingTest,
-  WeighInExample,
-  WeighInPart,
-} from './worked-example';
+import type { CheckedFigure, CheckExample, MoistAirExample, Slip, WeighInExample, WeighInPart } from './worked-example';
 
 export interface WorkedCheck {
   readonly result: CheckResult;
   readonly slips: readonly { readonly slip: Slip; readonly result: CheckResult }[];
-  readonly standingTests: readonly { readonly test: StandingTest; readonly showsAir: boolean | null }[];
   readonly figures: readonly WorkedFigure[];
 }
 
 export function workCheck(example: CheckExample): WorkedCheck {
   const own = judgeRequest(example.request);
   const slips = example.slips.map((slip) => ({ slip, judged: judgeRequest(slip.request) }));
-  const { refrigerant } = own.input.setup;
   return {
     result: own.result,
     slips: slips.map(({ slip, judged }) => ({ slip, result: judged.result })),
-    standingTests: example.standingTests.map((test) => ({
-      test,
-      showsAir: showsAir(standingExcessOf(refrigerant, test)),
-    })),
     figures: example.figures.map((figure) => {
       const judged = slips.find(({ slip }) => slip.id === figure.of)?.judged ?? own;
-      const standing = example.standingTests.find(({ id }) => id === figure.of);
-      return workedFigure(figure, checkFigureSi(figure, judged, standing));
+      return workedFigure(figure, checkFigureSi(figure, judged));
     }),
   };
 }

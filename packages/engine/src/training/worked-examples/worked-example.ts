@@ -65,7 +65,7 @@ export type WorkedStanding = FigureStanding | 'by-hand';
 /** A number as it is printed, or worked out from what is printed. */
 export interface CheckedFigure {
   readonly what: WorkedFigureId;
-  /** Of the readings with this slip, or of this part, in place of the example's own. */
+  /** Of the readings with this slip, or of this line, in place of the example's own. */
   readonly of?: string;
   readonly value: number;
   readonly unit: WorkedFigureUnit;
@@ -90,14 +90,6 @@ export interface CheckKey {
   readonly cautions: readonly CautionCode[];
 }
 
-/** Pressure of the stopped system, both coils at one temperature. */
-export interface StandingTest {
-  readonly id: 'no-air' | 'air';
-  readonly temperatureF: number;
-  readonly pressurePsig: number;
-  readonly airInSystem: boolean;
-}
-
 export const SLIP_IDS = [
   'wick-dried-out',
   'judged-as-orifice',
@@ -108,12 +100,16 @@ export const SLIP_IDS = [
   'gauge-at-sea-level',
   'scale-of-r410a',
   'cooler-liquid-line',
+  'standing-as-printed',
+  'standing-too-high',
 ] as const;
 export type SlipId = (typeof SLIP_IDS)[number];
 
-/** The same system read or set up in another way: what somebody else would conclude. */
+/** The same system read or set up in another way, or tested further: what would be concluded then. */
 export interface Slip {
   readonly id: SlipId;
+  /** Its further readings are given with the others: the question is what they tell. */
+  readonly given?: true;
   readonly request: EvaluationRequest;
   readonly key: Pick<CheckKey, 'overall' | 'nextStep'> & Partial<CheckKey>;
 }
@@ -128,7 +124,6 @@ export interface CheckExample extends Example {
   readonly request: EvaluationRequest;
   readonly key: CheckKey;
   readonly slips: readonly Slip[];
-  readonly standingTests: readonly StandingTest[];
 }
 
 export interface MoistAirExample extends Example {
