@@ -61,6 +61,7 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   liquid: temperature(80),
   outdoor: temperature(92),
   lift: { kind: 'lengthM', value: 9 },
+  length: { kind: 'lengthM', value: 20 },
   measured: temperature(64),
   fromHumidity: temperature(60),
   wetBulb: temperature(81),
