@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { storedRow, type StoredRow } from './stored-check';
+import { isNewerRow, storedRow, type StoredRow } from './stored-check';
 
 const ID = '01900000-0000-7000-8000-000000000001';
 const CHECK_ID = '01900000-0000-7000-8000-000000000002';
@@ -46,11 +46,28 @@ const check = {
   },
 } satisfies StoredRow;
 
+const worksheet = {
+  id: ID,
+  kind: 'worksheet',
+  schema: 2,
+  body: {
+    checkId: CHECK_ID,
+    page: 'airflow',
+    updatedAt: TIME,
+    typed: { heaterCurrent: { text: '41,5', unit: 'A' } },
+    choices: { method: 'static-pressure' },
+    rows: [
+      ['0.3', '1300'],
+      ['0.5', '–'],
+    ],
+  },
+} satisfies StoredRow;
+
 const isGood = (row: unknown) => storedRow.safeParse(row).success;
 const withBody = (row: { body: object }, change: object) => ({ ...row, body: { ...row.body, ...change } });
 
 describe('a stored row', () => {
-  it.each([reading, edit, check])('of kind $kind is read as it was written', (row) => {
+  it.each([reading, edit, check, worksheet])('of kind $kind is read as it was written', (row) => {
     expect(storedRow.parse(structuredClone(row))).toEqual(row);
   });
 
@@ -58,6 +75,15 @@ describe('a stored row', () => {
     const setup = { refrigerant: 'R-32', targetSubcoolingPort: 'discharge', chargeMode: 'off' };
     const row = withBody(check, { setup });
     expect(storedRow.parse(structuredClone(row))).toEqual(row);
+  });
+
+  it('of a reading that was worked out says how, and its ±', () => {
+    const workedOut = { method: 'temperature-rise-gas', plusMinus: 68.5 };
+    const row = withBody(reading, { quantity: 'airflow', unit: 'cfm', workedOut });
+    expect(storedRow.parse(structuredClone(row))).toEqual(row);
+    for (const wrong of [{ ...workedOut, plusMinus: -1 }, { ...workedOut, method: 'by feel' }, 68.5]) {
+      expect(isGood(withBody(reading, { workedOut: wrong }))).toBe(false);
+    }
   });
 
   it('keeps any text that was typed, not only numbers', () => {
@@ -79,7 +105,26 @@ describe('a stored row', () => {
     ['a target for no port', withBody(check, { setup: { targetSubcoolingPort: 'none' } })],
     ['a missing pre-flight', withBody(check, { visit: {} })],
     ['another version', { ...check, schema: 2 }],
+    ['the version of another kind', { ...worksheet, schema: 1 }],
+    ['a sheet of no page', withBody(worksheet, { page: 'attic' })],
+    ['a number in place of a chosen text', withBody(worksheet, { choices: { method: 1 } })],
+    ['an endless table', withBody(worksheet, { rows: Array(101).fill(['1', '2']) })],
+    [
+      'endless fields',
+      withBody(worksheet, { choices: Object.fromEntries(Array.from({ length: 101 }, (_, n) => [n, ''])) }),
+    ],
   ])('with %s is refused', (_, row) => {
     expect(isGood(row)).toBe(false);
+  });
+});
+
+describe('a row of a newer version', () => {
+  it('is known by the schema of its kind, and not touched', () => {
+    expect(isNewerRow({ ...check, schema: 2 })).toBe(true);
+    expect(isNewerRow({ kind: 'photo', schema: 2 })).toBe(true);
+    expect(isNewerRow({ ...worksheet, schema: 3 })).toBe(true);
+    for (const row of [check, worksheet, { kind: 'photo', schema: 1 }, null, 'row', {}]) {
+      expect(isNewerRow(row)).toBe(false);
+    }
   });
 });

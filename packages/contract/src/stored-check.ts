@@ -3,6 +3,7 @@
  * records. Rows are parsed whenever they are read, since the store of a browser outlives the version of the page that wrote it.
  */
 import {
+  AIRFLOW_METHODS,
   AIRFLOW_PATHS,
   CHART_PORTS,
   CHART_UNITS,
@@ -27,6 +28,11 @@ z.config({ jitless: true });
 
 /** The version of the row shapes below; it rises with every change that older rows do not fulfil. */
 export const STORED_CHECK_SCHEMA = 1;
+/** Of worksheets. They came later: a page from before would set aside a row of a kind it does not know, but leaves a newer schema alone. */
+export const STORED_WORKSHEET_SCHEMA = 2;
+/** Pages that keep a sheet beside a check. */
+export const WORKSHEET_PAGES = ['airflow', 'weigh-in'] as const;
+export type WorksheetPage = (typeof WORKSHEET_PAGES)[number];
 
 const MAX_TEXT = 200;
 const MAX_READINGS = 10_000;
@@ -123,6 +129,10 @@ export const storedReadingRow = row(
     takenAt: time,
     source: z.enum(['typed', 'example']),
     instrumentId: z.exactOptional(text),
+    /** Not shown by an instrument but found on the airflow page: how, and its ± in the unit of the reading, k = 2. */
+    workedOut: z.exactOptional(
+      z.object({ method: z.enum(AIRFLOW_METHODS), plusMinus: z.number().nonnegative().max(1e9) }),
+    ),
     supersedes: z.exactOptional(id),
   }),
 );
@@ -130,9 +140,41 @@ export const storedReadingRow = row(
 /** What stands in a field and is not committed yet. */
 export const storedEditRow = row('edit', z.object({ checkId: id, field: fieldKey, ...typedValue, editedAt: time }));
 
-export const storedRow = z.discriminatedUnion('kind', [storedCheckRow, storedReadingRow, storedEditRow]);
+const MAX_FIELDS = 100;
+const mostFields = (fields: object): boolean => Object.keys(fields).length <= MAX_FIELDS;
+
+/** What stands on a page beside a check, as it was typed and chosen. */
+export const storedWorksheetRow = z.object({
+  id,
+  kind: z.literal('worksheet'),
+  schema: z.literal(STORED_WORKSHEET_SCHEMA),
+  body: z.object({
+    checkId: id,
+    page: z.enum(WORKSHEET_PAGES),
+    updatedAt: time,
+    typed: z.record(text, z.object(typedValue)).refine(mostFields),
+    choices: z.record(text, text).refine(mostFields),
+    /** Of a table, a text a cell. */
+    rows: z.array(z.array(text).max(MAX_FIELDS)).max(MAX_FIELDS),
+  }),
+});
+
+export const storedRow = z.discriminatedUnion('kind', [
+  storedCheckRow,
+  storedReadingRow,
+  storedEditRow,
+  storedWorksheetRow,
+]);
+
+/** Whether a newer version of the page wrote a row: not this one's to judge. */
+export function isNewerRow(row: unknown): boolean {
+  if (typeof row !== 'object' || row === null || !('schema' in row) || typeof row.schema !== 'number') return false;
+  const isWorksheet = 'kind' in row && row.kind === 'worksheet';
+  return row.schema > (isWorksheet ? STORED_WORKSHEET_SCHEMA : STORED_CHECK_SCHEMA);
+}
 
 export type StoredCheckRow = z.infer<typeof storedCheckRow>;
 export type StoredReadingRow = z.infer<typeof storedReadingRow>;
 export type StoredEditRow = z.infer<typeof storedEditRow>;
+export type StoredWorksheetRow = z.infer<typeof storedWorksheetRow>;
 export type StoredRow = z.infer<typeof storedRow>;

@@ -45,3 +45,6 @@ export * from './english/properties';
 export * from './english/worked-examples';
 export * from './english/worked-example-stories';
 export * from './worked-example-rows';
+export * from './english/field-safety';
+export * from './english/worksheets';
+export * from './english/airflow-page';

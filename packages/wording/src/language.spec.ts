@@ -1,12 +1,14 @@
 import type { Caution, NextStep } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
 import { airflowWords } from './english/airflow';
+import { airflowPageWords } from './english/airflow-page';
 import { cautionTexts } from './english/cautions';
 import { checkPageWords } from './english/check-page';
 import { diagnosisTexts } from './english/diagnosis';
 import { faultWords } from './english/faults';
 import { fieldFaultNaming, fieldFaultTexts } from './english/field-faults';
 import { fieldInputWords } from './english/field-inputs';
+import { fieldSafetyWords } from './english/field-safety';
 import { findingPhrases } from './english/findings';
 import { looseChecksWords } from './english/loose-checks';
 import { airTexts } from './english/moist-air';
@@ -31,6 +33,7 @@ import { structureFaultWords } from './english/structure-faults';
 import { weighInWords } from './english/weigh-in';
 import { workedExampleStories } from './english/worked-example-stories';
 import { workedExampleWords } from './english/worked-examples';
+import { worksheetWords } from './english/worksheets';
 import type { Language } from './language';
 import { cautionText, nextStepText } from './sentences';
 
@@ -50,6 +53,9 @@ const english: Language = {
   airflow: airflowWords,
   weighIn: weighInWords,
   diagnosis: diagnosisTexts,
+  fieldSafety: fieldSafetyWords,
+  worksheets: worksheetWords,
+  airflowPage: airflowPageWords,
   readings: readingWords,
   readingHelp,
   setup: setupWords,

@@ -16,10 +16,12 @@ import type {
 import type { CriterionParts } from './criterion-parts';
 import type { AirFigures } from './english/moist-air';
 import type { airflowWords } from './english/airflow';
+import type { airflowPageWords } from './english/airflow-page';
 import type { checkPageWords } from './english/check-page';
 import type { fieldFaultTexts } from './english/field-faults';
 import type { fieldInputWords } from './english/field-inputs';
 import type { DiagnosisTexts } from './english/diagnosis';
+import type { fieldSafetyWords } from './english/field-safety';
 import type { looseChecksWords } from './english/loose-checks';
 import type { makersChartWords } from './english/makers-charts';
 import type { offlineWords } from './english/offline';
@@ -37,6 +39,7 @@ import type { setupWords } from './english/setup';
 import type { weighInWords } from './english/weigh-in';
 import type { workedExampleStories } from './english/worked-example-stories';
 import type { workedExampleWords } from './english/worked-examples';
+import type { worksheetWords } from './english/worksheets';
 import type { FigureNames, MessageTexts, Say } from './message-texts';
 import type { StructureFaultKind } from './structure-fault';
 
@@ -108,6 +111,9 @@ export interface Language {
   readonly airflow: typeof airflowWords;
   readonly weighIn: typeof weighInWords;
   readonly diagnosis: DiagnosisTexts;
+  readonly fieldSafety: typeof fieldSafetyWords;
+  readonly worksheets: typeof worksheetWords;
+  readonly airflowPage: typeof airflowPageWords;
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;

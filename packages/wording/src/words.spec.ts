@@ -1,8 +1,10 @@
 import { PREFLIGHT_ITEMS, PROCEDURES, READING_IDS } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
 import { airflowWords } from './english/airflow';
+import { airflowPageWords } from './english/airflow-page';
 import { checkPageWords } from './english/check-page';
 import { fieldInputWords } from './english/field-inputs';
+import { fieldSafetyWords } from './english/field-safety';
 import { looseChecksWords } from './english/loose-checks';
 import { glanceWords } from './english/glance';
 import { makersChartWords } from './english/makers-charts';
@@ -19,6 +21,7 @@ import { listWords, setupWords } from './english/setup';
 import { weighInWords } from './english/weigh-in';
 import { workedExampleStories } from './english/worked-example-stories';
 import { workedExampleWords } from './english/worked-examples';
+import { worksheetWords } from './english/worksheets';
 
 /** Every text of a tree of words; those that take figures get 2 and then 8. */
 function textsOf(words: unknown, path: string): readonly (readonly [string, string])[] {
@@ -47,6 +50,9 @@ const roots = Object.entries({
   fieldInputs: fieldInputWords,
   airflow: airflowWords,
   weighIn: weighInWords,
+  fieldSafety: fieldSafetyWords,
+  worksheets: worksheetWords,
+  airflowPage: airflowPageWords,
   makersCharts: makersChartWords,
   properties: propertiesWords,
   workedExamples: workedExampleWords,

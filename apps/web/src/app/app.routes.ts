@@ -23,5 +23,6 @@ export const routes: Routes = [
     path: 'examples',
     loadChildren: async () => (await import('./worked-examples/worked-examples-routes')).workedExamplesRoutes,
   },
+  { path: 'airflow', loadChildren: async () => (await import('./airflow/airflow.routes')).airflowRoutes },
   { path: '**', redirectTo: '' },
 ];

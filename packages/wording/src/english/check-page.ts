@@ -92,6 +92,8 @@ export const checkPageWords = {
     typedAgo: (minutes: number) => (minutes < 1 ? 'typed just now' : `typed ${minutes} min ago`),
     staleAgo: (minutes: number) => `typed ${minutes} min ago · too old, read it again`,
     example: 'example value',
+    /** Brought from the airflow page, with its ±. */
+    workedOut: (plusMinus: string) => `from the Airflow page, ± ${plusMinus}`,
     editing: 'typing',
     useHumidity: 'Use relative humidity instead',
     useWetBulb: 'Use wet bulb instead',
@@ -122,7 +124,12 @@ export const checkPageWords = {
     hideMathOf: (criterion: string) => `Hide the math of ${criterion}`,
     nextReading: 'Next reading',
     /** Leads to where the next step is done. */
-    placeButton: { setup: 'Go to the setup', readings: 'Record it now' },
+    placeButton: {
+      setup: 'Go to the setup',
+      readings: 'Record it now',
+      airflow: 'Find the airflow',
+      'weigh-in': 'Weigh in',
+    },
     nextReadingLabel: (reading: string) => `Next reading: ${reading}`,
     nextStep: 'Next step',
     stops: 'Stop',

@@ -25,6 +25,8 @@ export const fieldInputWords = {
   statedAt: input('Air through the blower', 'place of the blower'),
   airflow: input('Airflow', 'airflow', 'As the instrument shows it: flow grid, hood, anemometer traverse.'),
   airflowPlusMinus: input('Its accuracy', 'accuracy of the airflow', 'The instrument’s ±. Empty: ±7 %.'),
+  measuredAir: input('Its temperature', 'dry bulb of the measured air', 'Dry bulb where it was measured.'),
+  airHumidity: input('Its humidity', 'humidity of the air', 'It changes the result by less than 1 %.'),
   riseReturn: input('Return air', 'return dry bulb', 'While heating, beside the blower, away from radiation.'),
   riseSupply: input(
     'Supply air',

@@ -10,6 +10,7 @@ import {
   signal,
   untracked,
 } from '@angular/core';
+import { Router } from '@angular/router';
 import { checkPageWords, looseChecksWords, safetyWords } from '@chargewright/wording';
 import type { TypedField } from '@chargewright/contract/typed-fields';
 import type { DraftSetup, DraftVisit, FieldKey } from '../loose-checks/check-draft';
@@ -18,6 +19,7 @@ import { StorageNote } from '../loose-checks/storage-note';
 import { NOW } from '../loose-checks/time-and-ids';
 import { InstallButton } from '../offline/install-button';
 import { NetworkNote } from '../offline/network-note';
+import { goToNextField } from '../quantities/next-field';
 import { UnitPreference } from '../quantities/unit-preference';
 import { exampleCheck } from './example-check';
 import { readingKey, typedKey } from './field-key';
@@ -86,6 +88,7 @@ export class CheckAChargePage {
   private readonly now = inject(NOW);
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
   private readonly injector = inject(Injector);
+  private readonly router = inject(Router);
 
   protected readonly draft = this.checks.current;
   protected readonly isSetUp = computed(() => {
@@ -314,10 +317,10 @@ export class CheckAChargePage {
   protected pressMain(): void {
     const place = this.place();
     if (this.setupOpen()) this.closeSetup();
-    else if (place) {
+    else if (place && 'control' in place) {
       if (place.view === 'setup') this.openSetup();
       this.goTo(place.control);
-    }
+    } else if (place) void this.router.navigateByUrl(`/${place.view}`);
   }
 
   protected goToNext(): void {
@@ -326,15 +329,8 @@ export class CheckAChargePage {
     if (next) goToControl(this.host.nativeElement, `#${next.id}`);
   }
 
-  /** Enter: the next field on the page; after the last one the keyboard goes and the result has the room. */
   protected advanceFrom(key: FieldKey): void {
-    const inputs = [...this.host.nativeElement.querySelectorAll<HTMLInputElement>('app-number-field input')].filter(
-      (each) => each.checkVisibility?.() ?? true,
-    );
-    const at = inputs.findIndex(({ id }) => id === inputId(key));
-    const next = inputs[at + 1];
-    if (next) next.focus();
-    else inputs[at]?.blur();
+    goToNextField(this.host.nativeElement, inputId(key));
   }
 
   protected notice(target: EventTarget | null): void {

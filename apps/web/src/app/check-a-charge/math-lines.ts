@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { CheckResult, CriterionResult, Known } from '@chargewright/engine';
-import { checkPageWords, derivationLines, type UnitSystem } from '@chargewright/wording';
-import { MathText } from './math-text';
+import { derivationLines, type UnitSystem } from '@chargewright/wording';
+import { WorkingLines } from './working-lines';
 
 /** Ids of every step behind these numbers. */
 function stepsBehind(results: readonly (Known | null)[]): ReadonlySet<string> {
@@ -19,23 +19,13 @@ function stepsBehind(results: readonly (Known | null)[]): ReadonlySet<string> {
 /** The derivation of one criterion, in the order a person would write it on paper. */
 @Component({
   selector: 'app-math-lines',
-  imports: [MathText],
-  template: `
-    @for (line of lines(); track line.id) {
-      <dl>
-        <dt>{{ line.name }}</dt>
-        <dd class="formula"><app-math-text [text]="line.formula" /></dd>
-        <dd class="working"><app-math-text [text]="'= ' + line.substitution" /></dd>
-        <dd class="value">= {{ line.result }}</dd>
-      </dl>
-    } @empty {
-      <p>{{ words.empty }}</p>
-    }
-    @if (sources()) {
-      <p class="sources">{{ resultWords.sources }}: {{ sources() }}</p>
+  imports: [WorkingLines],
+  template: `<app-working-lines [lines]="lines()" />`,
+  styles: `
+    :host {
+      display: block;
     }
   `,
-  styleUrl: './math-lines.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class MathLines {
@@ -43,8 +33,6 @@ export class MathLines {
   readonly criterion = input.required<CriterionResult>();
   readonly system = input.required<UnitSystem>();
 
-  protected readonly words = checkPageWords.math;
-  protected readonly resultWords = checkPageWords.result;
   protected readonly lines = computed(() => {
     const { actual, target, deviation } = this.criterion();
     const ids = stepsBehind([actual, target, deviation]);
@@ -53,5 +41,4 @@ export class MathLines {
       this.system(),
     );
   });
-  protected readonly sources = computed(() => [...new Set(this.lines().map(({ source }) => source))].join(' · '));
 }

@@ -1,13 +1,16 @@
 /** Where on the page a next step can be done, so that its button leads there. */
 import type { NextStepCode, Reason } from '@chargewright/engine';
 
-export interface StepPlace {
-  readonly view: 'setup' | 'readings';
-  /** Selects the control on the page; the first that it finds is meant. */
-  readonly control: string;
-}
+export type StepPlace =
+  | {
+      readonly view: 'setup' | 'readings';
+      /** Selects the control on the page; the first that it finds is meant. */
+      readonly control: string;
+    }
+  /** A page of its own, at the path of this name. */
+  | { readonly view: 'airflow' | 'weigh-in' };
 
-const choice = (view: StepPlace['view'], name: string): StepPlace => ({ view, control: `input[name="${name}"]` });
+const choice = (view: 'setup' | 'readings', name: string): StepPlace => ({ view, control: `input[name="${name}"]` });
 
 /** Steps that are not here are done at the unit. */
 const PLACES: Readonly<Partial<Record<NextStepCode, StepPlace>>> = {
@@ -18,7 +21,18 @@ const PLACES: Readonly<Partial<Record<NextStepCode, StepPlace>>> = {
   'record-conditions': { view: 'readings', control: 'app-visit-clock button' },
   'read-twice': { view: 'readings', control: 'app-first-set button' },
   'leak-first': choice('readings', 'leakSearch'),
+  'measure-airflow': { view: 'airflow' },
+  'weigh-in': { view: 'weigh-in' },
+  'cooling-season-or-weigh-in': { view: 'weigh-in' },
+  'wait-for-warmer-weather': { view: 'weigh-in' },
+  'mend-recover-weigh-in': { view: 'weigh-in' },
+  'locate-mend-weigh-in': { view: 'weigh-in' },
+  'recover-and-weigh-in': { view: 'weigh-in' },
 };
+
+/** Where a page of its own is; null for a place on this one. */
+export const pathOfPlace = (place: StepPlace | null): string | null =>
+  place === null || 'control' in place ? null : `/${place.view}`;
 
 /** Nothing read here can judge such a system, so no reading is asked for. */
 const REFUSALS: ReadonlySet<NextStepCode> = new Set(['cooling-season-or-weigh-in', 'weigh-in']);

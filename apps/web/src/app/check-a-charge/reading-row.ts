@@ -4,7 +4,7 @@ import { Glyph } from '../layout/glyph';
 import type { TypedValue } from '../loose-checks/check-draft';
 import { NumberField } from '../quantities/number-field';
 import { ReadingHelpTexts } from './reading-help-texts';
-import type { FieldView } from './reading-rows';
+import type { RowView } from './reading-rows';
 
 /** One field with its name, where its value comes from, what is wrong with it, and how to take it. */
 @Component({
@@ -17,7 +17,7 @@ import type { FieldView } from './reading-rows';
 export class ReadingRow {
   private readonly helpTexts = inject(ReadingHelpTexts);
 
-  readonly view = input.required<FieldView>();
+  readonly view = input.required<RowView>();
   readonly optional = input(false);
 
   readonly typed = output<TypedValue>();

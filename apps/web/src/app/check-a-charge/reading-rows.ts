@@ -1,19 +1,27 @@
 /** What the page shows of each field: words, what was typed, how old it is, and what is wrong with it. */
 import type { Fault, ReadingId } from '@chargewright/engine';
-import { checkPageWords, faultText, readingWords, setupWords, type UnitSystem } from '@chargewright/wording';
+import {
+  checkPageWords,
+  faultText,
+  formatTrimmed,
+  readingWords,
+  setupWords,
+  unitLabel,
+  type UnitSystem,
+} from '@chargewright/wording';
 import type { TypedField } from '@chargewright/contract/typed-fields';
 import type { CheckDraft, FieldKey, TypedValue } from '../loose-checks/check-draft';
 import { canBeNegative, systemOfUnit, unitsOf } from '../quantities/field-units';
 import type { NumberProblem } from '../quantities/parse-number';
 import type { Evaluation } from './evaluation';
-import { pathOf, valueIn } from './field-key';
+import { pathOf, readingKey, valueIn } from './field-key';
 import { ageSeconds } from './request-from-draft';
 
 /** As the procedures have it: a reading older than this is stale. */
 const STALE_AFTER_SECONDS = 600;
 
-export interface FieldView {
-  readonly key: FieldKey;
+/** What a row shows. */
+export interface RowView {
   /** Id of the input on the page. */
   readonly id: string;
   readonly label: string;
@@ -28,7 +36,11 @@ export interface FieldView {
   readonly reading: ReadingId | null;
 }
 
-const PROBLEM_TEXTS: Readonly<Record<NumberProblem, string>> = {
+export interface FieldView extends RowView {
+  readonly key: FieldKey;
+}
+
+export const PROBLEM_TEXTS: Readonly<Record<NumberProblem, string>> = {
   'not-a-number': checkPageWords.readings.notANumber,
   'too-long': checkPageWords.readings.tooLong,
   'thousands-mark': checkPageWords.readings.thousandsMark,
@@ -76,9 +88,19 @@ export function fieldView(key: FieldKey, page: PageState): FieldView {
   }
   const id = name as ReadingId;
   const words = readingWords[id];
+  const brought = workedOut(draft, id);
+  if (brought) return { ...shared, label: words.label, note: brought, stale: false, reading: id };
   const age = blank(value) ? undefined : ageSeconds(draft, id, nowMs);
   const stale = age !== undefined && age > STALE_AFTER_SECONDS;
   return { ...shared, label: words.label, note: noteOf(draft, key, id, age, words.place), stale, reading: id };
+}
+
+/** Brought from the airflow page, with its ±: it is one of blower and ducts and does not age as the weather does. */
+function workedOut({ edits, readings }: CheckDraft, id: ReadingId): string | undefined {
+  const reading = readings[id];
+  if (!reading?.workedOut || edits[readingKey(id)]) return undefined;
+  const plusMinus = `${formatTrimmed(reading.workedOut.plusMinus, 0)} ${unitLabel(reading.unit)}`;
+  return checkPageWords.readings.workedOut(plusMinus);
 }
 
 function noteOf(draft: CheckDraft, key: FieldKey, id: ReadingId, age: number | undefined, place: string): string {

@@ -40,6 +40,28 @@ describe('requestFromDraft', () => {
     expect(request?.visit).toEqual({ preflight: {} });
   });
 
+  it('gives an airflow from the airflow page its ±, and no age: blower and ducts stay as they are', () => {
+    const brought: DraftReading = {
+      ...reading('airflow', '1184', 'cfm', ago(4000)),
+      workedOut: { method: 'static-pressure', plusMinus: 62.5 },
+    };
+    const airflowOf = (change: Partial<CheckDraft>) => requestFromDraft(draft(change), NOW).request?.readings.airflow;
+    expect(airflowOf({ readings: { airflow: brought } })).toEqual({
+      value: 1184,
+      unit: 'cfm',
+      resolution: 1,
+      plusMinus: { value: 62.5, unit: 'cfm', kind: 'k2' },
+    });
+    // what is typed over it is another reading
+    const edits = { 'reading:airflow': { text: '1250', unit: 'cfm', editedAt: ago(5) } } as const;
+    expect(airflowOf({ readings: { airflow: brought }, edits })).toEqual({
+      value: 1250,
+      unit: 'cfm',
+      resolution: 1,
+      ageSeconds: 5,
+    });
+  });
+
   it('says which port the target holds for at a discharge port with a valve, and nowhere else', () => {
     const asked = { refrigerant: 'R-410A', meteringDevice: 'txv', targetSubcoolingPort: 'discharge' } as const;
     const portOf = (setup: CheckDraft['setup']) =>

@@ -211,15 +211,22 @@ function readingsOf(draft: CheckDraft, entries: ReadonlyMap<FieldKey, Entry>, no
   for (const id of READING_IDS) {
     const entry = entries.get(readingKey(id));
     if (!entry) continue;
-    const age = ageSeconds(draft, id, nowMs);
-    readings[id] = {
-      value: entry.value,
-      unit: entry.unit as ReadingInput['unit'],
-      resolution: entry.resolution,
-      ...(age !== undefined && { ageSeconds: age }),
-    };
+    const unit = entry.unit as ReadingInput['unit'];
+    readings[id] = { value: entry.value, unit, resolution: entry.resolution, ...provenance(draft, id, nowMs) };
   }
   return readings;
+}
+
+/** An instrument's reading ages. What was worked out on the airflow page has its ± and is one of blower and ducts, which stay as they are. */
+function provenance(draft: CheckDraft, id: ReadingId, nowMs: number): Pick<ReadingInput, 'ageSeconds' | 'plusMinus'> {
+  const reading = draft.edits[readingKey(id)] ? undefined : draft.readings[id];
+  if (reading?.workedOut) {
+    // the page brings it in a unit of airflow, and `isUnitOf` has held it to one
+    const unit = reading.unit as NonNullable<ReadingInput['plusMinus']>['unit'];
+    return { plusMinus: { value: reading.workedOut.plusMinus, unit, kind: 'k2' } };
+  }
+  const age = ageSeconds(draft, id, nowMs);
+  return age === undefined ? {} : { ageSeconds: age };
 }
 
 /** The request without the entries at these paths (`readings.returnWetBulb`), so that one fault does not hold up the rest. */

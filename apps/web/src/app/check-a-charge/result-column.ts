@@ -1,4 +1,6 @@
+import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import { RouterLink } from '@angular/router';
 import type { CheckInput, CheckResult } from '@chargewright/engine';
 import {
   cautionText,
@@ -11,13 +13,14 @@ import {
 import { Glyph } from '../layout/glyph';
 import { CriterionCard } from './criterion-card';
 import { NextStepNote } from './next-step-note';
+import { pathOfPlace } from './next-step-place';
 import { OwnersNote } from './owners-note';
 import type { ResultSummary } from './result-summary';
 
 /** The whole result: stops, the sentence, the next step, what to keep in mind, and each criterion. */
 @Component({
   selector: 'app-result-column',
-  imports: [CriterionCard, Glyph, NextStepNote, OwnersNote],
+  imports: [CriterionCard, Glyph, NextStepNote, NgTemplateOutlet, OwnersNote, RouterLink],
   templateUrl: './result-column.html',
   styleUrl: './result-column.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -34,6 +37,12 @@ export class ResultColumn {
   protected readonly words = checkPageWords.result;
   protected readonly glance = glanceWords;
   protected readonly limits = safetyWords.limits;
+  /** A page where the next step is done. */
+  protected readonly page = computed(() => {
+    const { place } = this.summary();
+    const path = pathOfPlace(place);
+    return place && path === null ? null : place && { path, label: checkPageWords.result.placeButton[place.view] };
+  });
   protected readonly stops = computed(() =>
     this.result().overall.stops.map((stop) => ({ code: stop.code, text: stopText(stop, this.system()) })),
   );

@@ -1,7 +1,7 @@
 /** What a person can do to a loose check. Times and ids are in the command, so that applying it twice, or on two tabs, gives the same. */
 import type { ReadingId } from '@chargewright/engine';
 import type { TypedField } from '@chargewright/contract/typed-fields';
-import type { DraftEdit, DraftReading, DraftSetup, DraftVisit, FieldKey, TypedValue } from './check-draft';
+import type { DraftEdit, DraftReading, DraftSetup, DraftVisit, FieldKey, TypedValue, WorkedOut } from './check-draft';
 
 interface Told {
   readonly checkId: string;
@@ -14,6 +14,7 @@ export type CheckCommand = Told &
     | { readonly do: 'open' }
     | { readonly do: 'type'; readonly field: FieldKey; readonly value: TypedValue; readonly editId: string }
     | { readonly do: 'commit'; readonly field: FieldKey; readonly readingId: string }
+    | { readonly do: 'bring'; readonly value: TypedValue; readonly workedOut: WorkedOut; readonly readingId: string }
     | { readonly do: 'choose'; readonly setup: Partial<DraftSetup> }
     | { readonly do: 'visit'; readonly patch: Partial<DraftVisit> }
     | { readonly do: 'fill'; readonly example: ExampleCheck; readonly readingIds: readonly string[] }

@@ -55,6 +55,16 @@ const stepArbitrary: fc.Arbitrary<Step> = fc.oneof(
       .constantFrom('ok', 'not-ok')
       .map((panelsOn): Step => (n) => ({ ...told(n), do: 'visit', patch: { preflight: { panelsOn } } })),
   },
+  {
+    weight: 1,
+    arbitrary: fc.constant<Step>((n) => ({
+      ...told(n),
+      do: 'bring',
+      value: { text: '1184', unit: 'cfm' },
+      workedOut: { method: 'static-pressure', plusMinus: 60.5 },
+      readingId: idAt(n),
+    })),
+  },
   { weight: 1, arbitrary: fc.constant<Step>((n) => ({ ...told(n), do: 'keep-first-set' })) },
   { weight: 1, arbitrary: fc.constant<Step>((n) => ({ ...told(n), do: 'forget-first-set' })) },
   { weight: 1, arbitrary: fc.constant<Step>((n) => ({ ...told(n), do: 'visit', patch: { runningSince: timeAt(n) } })) },
@@ -281,6 +291,37 @@ describe('readings', () => {
     const draft = draftOf(store.read() as CheckState);
     expect(draft.readings.outdoorDryBulb?.text).toBe('95');
     expect(draft.edits['typed:elevation']?.text).toBe('650');
+  });
+});
+
+describe('an airflow that was worked out', () => {
+  const FLOW = 'reading:airflow';
+  const bringing = (n: number): CheckCommand => ({
+    ...told(n),
+    do: 'bring',
+    value: { text: '1184', unit: 'cfm' },
+    workedOut: { method: 'temperature-rise-electric', plusMinus: 68 },
+    readingId: idAt(n),
+  });
+
+  it('stands with its ± in place of the one before, and of what is being typed', () => {
+    const state = play([typing(FLOW, '1100', 1), committing(FLOW, 2), typing(FLOW, '12', 3), bringing(4)]);
+    const { readings, edits } = draftOf(state);
+    expect(readings.airflow).toMatchObject({
+      text: '1184',
+      unit: 'cfm',
+      place: 'air-handler',
+      takenAt: timeAt(4),
+      workedOut: { method: 'temperature-rise-electric', plusMinus: 68 },
+      supersedes: idAt(2),
+    });
+    expect(edits).toEqual({});
+  });
+
+  it('gives way to one that is typed: the ± was not of that', () => {
+    const { airflow } = draftOf(play([bringing(1), typing(FLOW, '1250', 2), committing(FLOW, 3)])).readings;
+    expect(airflow?.text).toBe('1250');
+    expect(airflow).not.toHaveProperty('workedOut');
   });
 });
 

@@ -54,7 +54,7 @@ function appendReading(
   state: CheckState,
   quantity: ReadingId,
   { text, unit }: TypedValue,
-  { id, at, source }: { id: string; at: string; source: DraftReading['source'] },
+  { id, at, source, workedOut }: Pick<DraftReading, 'id' | 'source' | 'workedOut'> & { readonly at: string },
 ): CheckState {
   const before = lastReading(state, quantity);
   if (text.trim() === '' && (before === undefined || before.text.trim() === '')) return state;
@@ -67,6 +67,7 @@ function appendReading(
     place: READING_PLACES[quantity],
     takenAt: at,
     source,
+    ...(workedOut && { workedOut }),
     ...(before && { supersedes: before.id }),
   };
   return { ...state, readings: [...state.readings, reading] };
@@ -97,6 +98,15 @@ function commit(state: CheckState, key: FieldKey, id: string): CheckState {
   return 'reading' in field
     ? appendReading(without, field.reading, { text, unit }, { id, at: editedAt, source: 'typed' })
     : setTyped(without, field.typed, { text, unit });
+}
+
+/** What is being typed in the field gives way to what was worked out. */
+function bring(
+  state: CheckState,
+  { value, workedOut, readingId, at }: Extract<CheckCommand, { do: 'bring' }>,
+): CheckState {
+  const { 'reading:airflow': _, ...edits } = state.edits;
+  return appendReading({ ...state, edits }, 'airflow', value, { id: readingId, at, source: 'typed', workedOut });
 }
 
 const mergeVisit = (visit: DraftVisit, patch: Partial<DraftVisit>): DraftVisit => ({
@@ -154,6 +164,8 @@ function entered(state: CheckState, command: Exclude<CheckCommand, { do: 'open' 
       return type(state, command.field, command.value, { id: command.editId, at: command.at });
     case 'commit':
       return commit(state, command.field, command.readingId);
+    case 'bring':
+      return bring(state, command);
     case 'choose':
       return { ...state, setup: { ...state.setup, ...command.setup } };
     case 'visit':

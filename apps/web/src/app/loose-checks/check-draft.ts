@@ -4,6 +4,7 @@
  */
 import type { TypedField } from '@chargewright/contract/typed-fields';
 import type {
+  AirflowMethod,
   AirflowPath,
   ChartPort,
   ChartUnit,
@@ -106,6 +107,13 @@ export interface FirstSet {
   readonly readings: Readonly<Partial<Record<ReadingId, TypedValue>>>;
 }
 
+/** Not shown by an instrument but found on the airflow page. */
+export interface WorkedOut {
+  readonly method: AirflowMethod;
+  /** In the unit of the reading, k = 2. */
+  readonly plusMinus: number;
+}
+
 /** One committed reading. Append-only: a correction is a new reading that supersedes an old one. */
 export interface DraftReading {
   readonly id: string;
@@ -118,6 +126,7 @@ export interface DraftReading {
   readonly takenAt: string;
   readonly source: 'typed' | 'example';
   readonly instrumentId?: string;
+  readonly workedOut?: WorkedOut;
   readonly supersedes?: string;
 }
 

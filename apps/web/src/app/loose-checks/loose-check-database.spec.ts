@@ -3,7 +3,7 @@ import { Dexie } from 'dexie';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import type { CheckCommand } from './check-command';
 import { draftOf } from './check-draft-reducer';
-import { openLooseCheckDatabase } from './loose-check-database';
+import { openLooseCheckDatabase, openWorksheetDatabase } from './loose-check-database';
 import type { LooseCheckStore } from './loose-check-store';
 
 const id = (n: number) => `01900000-0000-7000-8000-${n.toString(16).padStart(12, '0')}`;
@@ -118,5 +118,70 @@ describe('the store of loose checks', () => {
     expect(await raw.table('rows').get(id(51))).toBeUndefined();
     expect(await raw.table('rows').get(id(52))).toBeDefined();
     expect(await store.list()).toEqual({ summaries: [], lastOpened: id(4) });
+  });
+});
+
+describe('the sheets beside the checks', () => {
+  const place = (checkId: string, page: 'airflow' | 'weigh-in', n: number) => ({ checkId, page, rowId: id(n), at });
+  const volts = (text: string) => ({ do: 'type', field: 'lineVoltage', value: { text, unit: 'V' } }) as const;
+
+  it('are kept by check and page, and changed in place', async () => {
+    const sheets = await openWorksheetDatabase();
+    await sheets.write(place(id(1), 'airflow', 90), [volts('24'), volts('240')]);
+    await sheets.write(place(id(1), 'airflow', 91), [{ do: 'choose', name: 'method', value: 'measured' }]);
+    await sheets.write(place(id(1), 'weigh-in', 92), [{ do: 'set-rows', rows: [['0.3', '–']] }]);
+    expect(await sheets.read(id(1), 'airflow')).toEqual({
+      typed: { lineVoltage: { text: '240', unit: 'V' } },
+      choices: { method: 'measured' },
+      rows: [],
+    });
+    expect((await sheets.read(id(1), 'weigh-in'))?.rows).toEqual([['0.3', '–']]);
+    expect(await sheets.read(id(2), 'airflow')).toBeUndefined();
+    expect(await raw.table('rows').count()).toBe(2);
+    sheets.close();
+  });
+
+  it('add what two tabs typed', async () => {
+    const [one, other] = [await openWorksheetDatabase(), await openWorksheetDatabase()];
+    await one.write(place(id(1), 'airflow', 90), [volts('240')]);
+    await other.write(place(id(1), 'airflow', 91), [
+      { do: 'type', field: 'heaterCurrent', value: { text: '41', unit: 'A' } },
+    ]);
+    expect(Object.keys((await one.read(id(1), 'airflow'))?.typed ?? {}).sort()).toEqual([
+      'heaterCurrent',
+      'lineVoltage',
+    ]);
+    one.close();
+    other.close();
+  });
+
+  it('that are damaged are put aside, those of a newer version left alone', async () => {
+    const sheets = await openWorksheetDatabase();
+    const body = { checkId: id(1), page: 'airflow', updatedAt: at, typed: { lineVoltage: 240 }, choices: {}, rows: [] };
+    await raw.table('rows').bulkPut([
+      { id: id(90), kind: 'worksheet', schema: 2, body },
+      { id: id(91), kind: 'worksheet', schema: 3, body: { ...body, page: 'weigh-in' } },
+    ]);
+    expect(await sheets.read(id(1), 'airflow')).toBeUndefined();
+    expect(await raw.table('quarantine').count()).toBe(1);
+    expect(await raw.table('rows').get(id(91))).toBeDefined();
+    await sheets.write(place(id(1), 'airflow', 92), [volts('240')]);
+    expect(await store.tidy(TODAY)).toBe(1);
+    expect((await sheets.read(id(1), 'airflow'))?.typed).toEqual({ lineVoltage: { text: '240', unit: 'V' } });
+    sheets.close();
+  });
+
+  it('keep an empty check, leave it as it is, and go with it', async () => {
+    const sheets = await openWorksheetDatabase();
+    await store.write(id(3), [{ checkId: id(3), at, do: 'open' }]);
+    await sheets.write(place(id(3), 'airflow', 90), [volts('240')]);
+    await store.write(id(4), [{ checkId: id(4), at: '2026-06-01T13:00:00.000Z', do: 'open' }]);
+    await store.tidy(TODAY);
+    expect(await sheets.read(id(3), 'airflow')).toBeDefined();
+    expect((await store.read(id(3)))?.readings).toEqual([]);
+    await store.write(id(3), [{ checkId: id(3), at: '2026-04-01T12:00:00.000Z', do: 'remove' }]);
+    await store.tidy(TODAY);
+    expect(await sheets.read(id(3), 'airflow')).toBeUndefined();
+    sheets.close();
   });
 });

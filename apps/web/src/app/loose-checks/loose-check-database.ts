@@ -1,9 +1,12 @@
 /** Loose checks in IndexedDB. The only file that knows Dexie and the row schemas at run time; loaded after the first paint. */
 import {
-  STORED_CHECK_SCHEMA,
+  isNewerRow,
+  STORED_WORKSHEET_SCHEMA,
   storedRow,
   type StoredCheckRow,
   type StoredRow,
+  type StoredWorksheetRow,
+  type WorksheetPage,
 } from '@chargewright/contract/stored-check';
 import { Dexie, type EntityTable } from 'dexie';
 import type { CheckCommand, CheckState } from './check-command';
@@ -11,6 +14,8 @@ import type { CheckSummary } from './check-draft';
 import { applyCommand, isEmpty } from './check-draft-reducer';
 import { checkRow, rowChanges, stateFromRows } from './check-rows';
 import type { LooseCheckStore, StoredChecks } from './loose-check-store';
+import { EMPTY_WORKSHEET, patched, type Worksheet, type WorksheetPatch } from './worksheet';
+import type { WorksheetStore } from './worksheet-store';
 
 const NAME = 'chargewright-loose';
 const KEEP_DELETED_MS = 30 * 24 * 60 * 60 * 1000;
@@ -34,21 +39,13 @@ const openDexie = () => {
 
 type Database = ReturnType<typeof openDexie>;
 
-/** A newer version of the page wrote it: not ours to judge. */
-const isNewer = (row: unknown): boolean =>
-  typeof row === 'object' &&
-  row !== null &&
-  'schema' in row &&
-  typeof row.schema === 'number' &&
-  row.schema > STORED_CHECK_SCHEMA;
-
 /** Parses what was found; damaged rows are moved out of the way. Runs in a transaction on both tables. */
 async function parseRows({ rows, quarantine }: Database, found: readonly StoredRow[]): Promise<StoredRow[]> {
   const good: StoredRow[] = [];
   for (const row of found) {
     const parsed = storedRow.safeParse(row);
     if (parsed.success) good.push(parsed.data);
-    else if (!isNewer(row)) {
+    else if (!isNewerRow(row)) {
       await quarantine.add({ row, reason: parsed.error.message });
       await rows.delete(row.id);
     }
@@ -131,7 +128,7 @@ async function purge(database: Database, now: Date): Promise<void> {
   const { lastOpened } = await list(database);
   await inTransaction(database, async () => {
     for (const row of await database.rows.where('kind').equals('check').toArray()) {
-      if (row.kind !== 'check' || isNewer(row)) continue;
+      if (row.kind !== 'check' || isNewerRow(row)) continue;
       const { deletedAt } = row.body;
       const old = deletedAt !== undefined && now.getTime() - Date.parse(deletedAt) > KEEP_DELETED_MS;
       if (old || (row.id !== lastOpened && (await isEmptyCheck(database, row)))) await deleteCheck(database, row.id);
@@ -179,5 +176,45 @@ export async function openLooseCheckDatabase(onOtherTab: (checkId: string) => vo
       channel.close();
       database.close();
     },
+  };
+}
+
+async function worksheetRow(
+  database: Database,
+  checkId: string,
+  page: WorksheetPage,
+): Promise<StoredWorksheetRow | undefined> {
+  const rows = (await rowsOf(database, checkId)).filter((row) => row.kind === 'worksheet');
+  return rows.find(({ body }) => body.page === page);
+}
+
+const sheetOf = ({ body: { typed, choices, rows } }: StoredWorksheetRow): Worksheet => ({ typed, choices, rows });
+
+/** Opens the sheets that pages keep beside the checks; rejects where the browser has no store to give. */
+export async function openWorksheetDatabase(): Promise<WorksheetStore> {
+  const database = openDexie();
+  await database.open();
+  return {
+    read: (checkId, page) =>
+      inTransaction(database, async () => {
+        const row = await worksheetRow(database, checkId, page);
+        return row && sheetOf(row);
+      }),
+    write: (place, patches: readonly WorksheetPatch[]) =>
+      inTransaction(database, async () => {
+        const { checkId, page, rowId, at } = place;
+        const before = await worksheetRow(database, checkId, page);
+        const { typed, choices, rows } = patches.reduce(patched, before ? sheetOf(before) : EMPTY_WORKSHEET);
+        const body = {
+          checkId,
+          page,
+          updatedAt: at,
+          typed: { ...typed },
+          choices: { ...choices },
+          rows: rows.map((row) => [...row]),
+        };
+        await database.rows.put({ id: before?.id ?? rowId, kind: 'worksheet', schema: STORED_WORKSHEET_SCHEMA, body });
+      }),
+    close: () => database.close(),
   };
 }

@@ -1,7 +1,7 @@
 import { afterNextRender, computed, DestroyRef, DOCUMENT, inject, Injectable, signal } from '@angular/core';
 import { afterPaint } from './after-paint';
 import type { CheckCommand, CheckState, ExampleCheck } from './check-command';
-import type { CheckDraft, CheckSummary, DraftSetup, DraftVisit, FieldKey, TypedValue } from './check-draft';
+import type { CheckDraft, CheckSummary, DraftSetup, DraftVisit, FieldKey, TypedValue, WorkedOut } from './check-draft';
 import { applyCommand, draftOf, emptyCheck, isEmpty, summaryOf } from './check-draft-reducer';
 import { CheckQueue } from './check-queue';
 import { OPEN_STORE } from './loose-check-store';
@@ -97,6 +97,16 @@ export class LooseChecks {
   /** What stands in the field becomes a reading, or a number of setup or visit; a blank text takes the value away. */
   commit(field: FieldKey): void {
     if (this.#state().edits[field]) this.#tell({ do: 'commit', field, readingId: this.#newId() });
+  }
+
+  /** An airflow that was worked out becomes the check's; what is being typed in its field gives way. */
+  bringAirflow(value: TypedValue, workedOut: WorkedOut): void {
+    this.#tell({ do: 'bring', value, workedOut, readingId: this.#newId() });
+  }
+
+  /** Stores the open check even while nothing is entered, for what hangs on it. */
+  keep(): void {
+    if (!this.#states().has(this.#currentId())) this.#tell({ do: 'open' });
   }
 
   choose(setup: Partial<DraftSetup>): void {

@@ -1,0 +1,87 @@
+/** The page Airflow. */
+import type { AirStatedIn, CoolingSpeedAnswer } from '@chargewright/engine';
+
+const statedIn: Readonly<Record<AirStatedIn, string>> = {
+  return: 'of return air',
+  supply: 'of supply air',
+  standard: 'of standard air',
+};
+
+export const airflowPageWords = {
+  title: 'Airflow',
+  pageTitle: 'Airflow · Chargewright',
+  intro: 'Airflow comes before charge: too little of it looks like a wrong charge.',
+  method: 'How do you find it?',
+  readings: {
+    measured: 'What the instrument shows',
+    electric: 'While the heat runs',
+    gas: 'While the furnace runs',
+    static: 'While the blower runs',
+  },
+  speed: {
+    title: 'Did the blower run at its cooling speed?',
+    note: 'An airflow counts only at the speed the blower has in cooling. Many furnaces heat at another.',
+    answers: {
+      yes: 'Yes, at the cooling speed',
+      no: 'No, at another',
+      unknown: 'Not known',
+    } satisfies Readonly<Record<CoolingSpeedAnswer, string>>,
+  },
+  shows: {
+    title: 'The instrument shows',
+    options: { return: 'Air at the return', supply: 'Air at the supply', standard: 'Standard air' },
+  },
+  efficiency: {
+    title: 'This efficiency is',
+    options: { 'steady-state': 'Steady state: output over input', afue: 'AFUE' },
+  },
+  site: 'Site and system',
+  table: {
+    title: 'The maker’s fan table',
+    note: 'For the speed tap the blower runs at. Lowest static pressure first; an empty airflow is a dash.',
+    source: 'Document and page',
+    tap: 'Blower at',
+    staticPressure: 'Static pressure',
+    airflow: 'Airflow',
+    staticUnit: 'Unit of the static pressure',
+    airflowUnit: 'Unit of the airflow',
+    row: (row: number) => `row ${row}`,
+    add: 'Add a row',
+    remove: (row: number) => `Remove row ${row}`,
+    paste: 'Paste from a spreadsheet',
+    pasteNote: 'Two columns: static pressure, airflow.',
+    pasteBox: 'Copied cells',
+    takeOver: 'Take over',
+    taken: (rows: number) => (rows === 1 ? '1 row taken over.' : `${rows} rows taken over.`),
+    nothing: 'No two columns of numbers were found in it.',
+  },
+  result: {
+    none: 'Nothing to show yet',
+    flow: (value: string) => `Airflow ${value}`,
+    asFound: 'As found, at this speed',
+    standard: 'As standard air',
+    perCapacity: 'For the nominal capacity',
+    statedIn,
+    use: 'Use in the check',
+    useNote: 'It goes into the check with its ±, as airflow.',
+    saySpeed: 'Say first whether the blower ran at its cooling speed.',
+  },
+  capacity: {
+    title: 'Capacity from the air',
+    intro: 'What the system delivers now, from this airflow and the air before and after the coil. In cooling, steady.',
+    needsAirflow: 'Find the airflow first: above.',
+    by: 'Humidity by',
+    byOptions: { 'wet-bulb': 'Wet bulb', humidity: 'Relative humidity' },
+    returnDry: 'Return dry bulb',
+    returnWet: 'Return wet bulb',
+    returnHumidity: 'Return humidity',
+    supplyDry: 'Supply dry bulb',
+    supplyWet: 'Supply wet bulb',
+    supplyHumidity: 'Supply humidity',
+    total: 'Total cooling',
+    sensible: 'Sensible cooling',
+    ratio: 'Sensible heat ratio',
+    ofNominal: 'Of the nominal capacity',
+    note: 'The nominal capacity holds at rating conditions only (95 °F or 35 °C outdoors; 80 and 67 °F or 27 and 19 °C indoors): more or less is no fault in itself.',
+  },
+};
