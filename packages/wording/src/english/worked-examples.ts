@@ -93,8 +93,6 @@ export const workedExampleWords = {
     questions: 'Questions',
     showKey: 'Show the key',
     openCheck: 'Open in Check a charge',
-    openAir: 'Open in Properties',
-    openWeighIn: 'Open in Weigh in',
     openNote: 'Starts a new check with these readings, marked as an example. Your own checks stay as they are.',
     print: 'Print this page',
     own: {

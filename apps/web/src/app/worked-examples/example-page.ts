@@ -9,7 +9,6 @@ import { checkOfExample } from './check-of-example';
 import { chosenExample } from './chosen-example';
 import { givensOf } from './example-givens';
 import { GivensTable } from './givens-table';
-import { otherPageOf } from './other-pages';
 import { PrintSheet } from './print-sheet';
 import { UnknownExample } from './unknown-example';
 
@@ -36,13 +35,6 @@ export class ExamplePage {
     const chosen = this.chosen();
     return chosen === undefined ? [] : givensOf(chosen.example, this.units.system());
   });
-  protected readonly otherPage = computed(() => {
-    const chosen = this.chosen();
-    return chosen && otherPageOf(chosen.example, this.router.config);
-  });
-  protected readonly opensOther = computed(() =>
-    this.otherPage()?.path === '/weigh-in' ? this.words.openWeighIn : this.words.openAir,
-  );
 
   /** Into a check of its own, so that nothing of the person's is touched. */
   protected async openCheck(): Promise<void> {
