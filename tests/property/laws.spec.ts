@@ -1,5 +1,5 @@
 import { isDeepStrictEqual } from 'node:util';
-import type { CheckResult, EvaluationRequest, ReadingId, ReasonCode } from '@chargewright/engine';
+import type { CheckResult, EvaluationRequest, MakersChartKind, ReadingId, ReasonCode } from '@chargewright/engine';
 import { evaluateCheck, PROCEDURES, readRequest } from '@chargewright/engine';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
@@ -109,7 +109,7 @@ describe('laws of judging', () => {
   it('only a missing required reading holds a check up', () => {
     fc.assert(
       fc.property(anySystem.map(inchPound), fc.nat(), (request, k) => {
-        const spare = SPARE[request.setup.meteringDevice === 'fixed-orifice' ? 'orifice' : 'valve'];
+        const spare = spareReadings(request);
         const dropped = spare[k % spare.length]!;
         const readings = Object.fromEntries(Object.entries(request.readings).filter(([id]) => id !== dropped));
         const [before, after] = [evaluate(request), evaluate({ ...request, readings })];
@@ -133,6 +133,23 @@ const SPARE = {
   orifice: ['supplyDryBulb', 'liquidPressure', 'liquidLineTemperature', 'airflow', 'writtenEvaporatingTemperature'],
   valve: ['returnDryBulb', 'returnWetBulb', 'returnRelativeHumidity', 'supplyDryBulb', 'outdoorDryBulb', 'airflow'],
 } as const satisfies Record<string, readonly ReadingId[]>;
+
+/** What a maker's table is entered with, and what it is held against. */
+const WANTED_BY_TABLE: Readonly<Record<MakersChartKind, readonly ReadingId[]>> = {
+  superheat: ['outdoorDryBulb', 'returnDryBulb', 'returnWetBulb', 'returnRelativeHumidity'],
+  subcooling: ['outdoorDryBulb'],
+  'liquid-line-approach': ['outdoorDryBulb', 'liquidLineTemperature'],
+  'suction-line-temperature': ['outdoorDryBulb'],
+  'liquid-pressure': ['liquidPressure', 'liquidLineTemperature'],
+  'heating-discharge-pressure': ['outdoorDryBulb', 'returnDryBulb'],
+  'heating-discharge-temperature': ['outdoorDryBulb', 'returnDryBulb'],
+};
+
+function spareReadings({ setup }: EvaluationRequest): readonly ReadingId[] {
+  const charts = [setup.makersChart, ...(setup.makersCharts ?? [])].filter((chart) => chart !== undefined);
+  const wanted = charts.flatMap(({ kind }) => WANTED_BY_TABLE[kind]);
+  return SPARE[setup.meteringDevice === 'fixed-orifice' ? 'orifice' : 'valve'].filter((id) => !wanted.includes(id));
+}
 
 const SIMPLE = PROCEDURES.filter(({ decision }) => decision.type === 'simple').map(({ id }) => id);
 

@@ -1,8 +1,11 @@
 /** Corners that chance alone would hardly reach: several rare things at once, drawn more often than they happen. */
+import type { MakersChartKind } from '@chargewright/engine';
 import fc from 'fast-check';
 import type { Drives, Overrides } from './drives';
 import { between, mixed } from './draws';
 import { drivesWith } from './drives';
+import type { DrawnChart } from './makers-charts';
+import { chartOf } from './makers-charts';
 
 const always = <T>(value: T): fc.Arbitrary<T> => fc.constant(value);
 
@@ -33,6 +36,7 @@ const CLEAR: Overrides = {
   preflight: always({ panelsOn: 'ok' } as const),
   targetSubcoolingPort: always(undefined),
   superheatRangeF: always(undefined),
+  makersCharts: always(undefined),
   earlier: always(undefined),
   wetBulbBeforeF: always(undefined),
   drierDropF: always(undefined),
@@ -57,6 +61,36 @@ const ORIFICE: Overrides = {
   meteringDevice: always('fixed-orifice' as const),
   targetSuperheatF: always(undefined),
 };
+
+const HEATING_KINDS = ['heating-discharge-pressure', 'heating-discharge-temperature'] as const;
+
+const HEATING: Overrides = {
+  procedure: always(undefined),
+  mode: always('heating' as const),
+  outdoorF: between(52, 66),
+  returnF: between(67, 78),
+  runningMinutes: between(16, 60),
+};
+
+/** One maker's table without dashes and slips, `changes` apart. */
+const tables = (
+  kind: fc.Arbitrary<MakersChartKind>,
+  changes: { readonly [Name in keyof DrawnChart]?: fc.Arbitrary<DrawnChart[Name]> },
+): fc.Arbitrary<readonly DrawnChart[]> =>
+  fc
+    .tuple(chartOf(kind), fc.record({ ...changes }))
+    .map(([chart, changed]) => [{ ...chart, ...PLAIN, ...(changed as Partial<DrawnChart>) }]);
+
+const PLAIN = {
+  isFigure: false,
+  dashes: 'none',
+  port: undefined,
+  leastOutdoorF: undefined,
+  mostOutdoorF: undefined,
+  leastReturnF: undefined,
+  mostReturnF: undefined,
+  slip: false,
+} as const satisfies Partial<DrawnChart>;
 
 const SCENARIOS: readonly Overrides[] = [
   // steps of one visit used up
@@ -112,6 +146,21 @@ const SCENARIOS: readonly Overrides[] = [
     ...VALVE,
     procedure: fc.constantFrom('cec-ra3.2-2008-installer' as const, 'cec-ra3.2-2008-rater' as const),
     kind: always('packaged' as const),
+  },
+  // a maker's heating table, met and missed
+  { ...CLEAR, ...HEATING, makersCharts: tables(fc.constantFrom(...HEATING_KINDS), {}) },
+  { ...CLEAR, ...HEATING, makersCharts: tables(fc.constantFrom(...HEATING_KINDS), { offset: between(-30, 30) }) },
+  // a house warmer than the maker allows
+  {
+    ...VALVE,
+    targetSubcoolingF: always(undefined),
+    makersCharts: tables(always('subcooling' as const), { mostReturnF: between(68, 73) }),
+  },
+  // a packaged unit by the maker's curve, short of charge and overcharged
+  {
+    ...ORIFICE,
+    kind: always('packaged' as const),
+    makersCharts: tables(always('liquid-pressure' as const), { offset: fc.oneof(between(-9, -5), between(5, 9)) }),
   },
   // a packaged unit whose port nobody stated
   { ...CLEAR, kind: always('packaged' as const), highSidePort: always(undefined) },

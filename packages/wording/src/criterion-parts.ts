@@ -2,11 +2,13 @@ import {
   expandedUncertainty,
   type CriterionId,
   type CriterionResult,
+  type DerivedStep,
   type Finding,
   type Known,
   type QuantityKind,
   type ReadingId,
   type TargetSource,
+  type ToleranceSource,
 } from '@chargewright/engine';
 import { formatBare, formatProbability, formatShort, formatValue } from './format-value';
 import type { UnitSystem } from './unit-system';
@@ -35,6 +37,7 @@ export interface CriterionParts {
   readonly lowBare: string | null;
   readonly highBare: string | null;
   readonly floored: boolean;
+  readonly toleranceSource: ToleranceSource | null;
   readonly byRule: 'passes' | 'fails' | null;
   readonly probabilityWithin: string | null;
   readonly probabilityOutside: string | null;
@@ -48,8 +51,17 @@ const conditionsOf = (target: Known | null, system: UnitSystem): Readonly<Record
   target === null || target.step.type === 'leaf'
     ? {}
     : Object.fromEntries(
-        Object.entries(target.step.from).map(([name, input]) => [name, formatShort(input.kind, input.value, system)]),
+        Object.entries(lookUpOf(target.step).from).map(([name, input]) => [
+          name,
+          formatShort(input.kind, input.value, system),
+        ]),
       );
+
+/** The step that looked the target up: a pressure is shown as a gauge has it, one step further on. */
+function lookUpOf(step: DerivedStep): DerivedStep {
+  const before = step.from['pressurePa']?.step;
+  return before?.type === 'derived' ? before : step;
+}
 
 const missingOf = ({ reason }: CriterionResult): readonly ReadingId[] =>
   reason?.code === 'readings-missing' && reason.figures.readings.kind === 'readings'
@@ -68,6 +80,7 @@ function bandOf(result: CriterionResult, kind: QuantityKind, system: UnitSystem)
     lowBare: at(low, formatBare),
     highBare: at(high, formatBare),
     floored: result.tolerance?.floored ?? false,
+    toleranceSource: result.tolerance?.source ?? null,
   };
 }
 
@@ -101,8 +114,8 @@ export function criterionParts(result: CriterionResult, system: UnitSystem): Cri
   };
 }
 
-/** The ± of a temperature is a difference, that of an absolute pressure a pressure difference. */
+/** The ± of a temperature is a difference, that of a pressure a pressure difference. */
 export const uncertaintyKind = (kind: QuantityKind): QuantityKind => {
   if (kind === 'temperatureK') return 'differenceK';
-  return kind === 'pressurePa' ? 'pressureDifferencePa' : kind;
+  return kind === 'pressurePa' || kind === 'gaugePressurePa' ? 'pressureDifferencePa' : kind;
 };

@@ -1,4 +1,12 @@
-import { CRITERION_IDS, FINDINGS, leaf, type CriterionResult, type Known, type Reason } from '@chargewright/engine';
+import {
+  CRITERION_IDS,
+  FINDINGS,
+  leaf,
+  type CriterionResult,
+  type DerivedStep,
+  type Known,
+  type Reason,
+} from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
 import {
   criterionDetail,
@@ -50,7 +58,7 @@ const superheat: CriterionResult = {
   target: chartTarget,
   targetSource: 'makers-chart-a',
   deviation: known(9.5),
-  tolerance: { low: -3.8 * K_PER_F, high: 5 * K_PER_F, floored: true },
+  tolerance: { low: -3.8 * K_PER_F, high: 5 * K_PER_F, floored: true, source: 'procedure' },
   byRule: 'fails',
   probabilityWithin: 0.01,
   onlyJust: false,
@@ -85,7 +93,7 @@ const window: CriterionResult = {
   target: null,
   targetSource: 'procedure-window',
   deviation: null,
-  tolerance: { low: 4 * K_PER_F, high: 25 * K_PER_F, floored: false },
+  tolerance: { low: 4 * K_PER_F, high: 25 * K_PER_F, floored: false, source: 'procedure' },
 };
 
 const airflow: CriterionResult = {
@@ -95,7 +103,7 @@ const airflow: CriterionResult = {
   target: leaf({ id: 'leastAirflow', kind: 'flowM3PerS', value: 0.5, origin: 'entered' }),
   targetSource: 'airflow-per-capacity',
   deviation: leaf({ id: 'd', kind: 'flowM3PerS', value: -0.08, origin: 'entered' }),
-  tolerance: { low: 0, high: null, floored: false },
+  tolerance: { low: 0, high: null, floored: false, source: 'procedure' },
   finding: 'below',
 };
 
@@ -167,6 +175,48 @@ describe('criterionDetail', () => {
     expect(criterionDetail({ ...airflow, probabilityWithin: 0.02 }, 'C-bar')).toBe(
       'At least 500 L/s from the nominal capacity · 98 % sure it is below the band',
     );
+  });
+
+  it('says of a maker’s table at what it was looked up, and whose the ± is', () => {
+    const psi = 6894.757293168;
+    const gauge = (value: number): Known =>
+      leaf({ id: 'x', kind: 'gaugePressurePa', value: value * psi, origin: 'reading' });
+    const liquidLineK = leaf({
+      id: 'liquidLineTemperature',
+      kind: 'temperatureK',
+      value: (98.5 + 459.67) * K_PER_F,
+      origin: 'reading',
+    });
+    const formula = { ...(chartTarget.step as DerivedStep).formula, id: 'x', gives: 'pressurePa' } as const;
+    const lookedUp: Known = {
+      ...leaf({ id: 'x', kind: 'pressurePa', value: 362.7 * psi, origin: 'entered' }),
+      step: { type: 'derived', parts: [], from: { liquidLineK }, formula },
+    };
+    const target: Known = {
+      ...gauge(348),
+      step: { type: 'derived', parts: [], from: { pressurePa: lookedUp, atmospherePa: lookedUp }, formula },
+    };
+    const pressure: CriterionResult = {
+      ...superheat,
+      criterion: 'liquid-pressure',
+      actual: { ...gauge(361), u: 2 * psi },
+      target,
+      targetSource: 'makers-data',
+      deviation: leaf({ id: 'd', kind: 'pressureDifferencePa', value: 13 * psi, origin: 'entered' }),
+      tolerance: { low: -9 * psi, high: 9 * psi, floored: false, source: 'choice' },
+    };
+    expect(criterionHeadline(pressure, 'F-psi')).toBe('Liquid pressure is 13.0 psi above target');
+    expect(criterionDetail(pressure, 'F-psi')).toBe(
+      'Target 348 psig from the maker’s table as entered at 98.5 °F liquid line, with a ± of our choice: the maker’s was not entered · 99 % sure it is above the band',
+    );
+    expect(rulerText(pressure, 'F-psi')).toBe(
+      'Liquid pressure 361 plus or minus 4.0 psi, target 348, tolerance 339 to 357',
+    );
+    expect(rulerText(pressure, 'C-bar')).toBe(
+      'Liquid pressure 24.89 plus or minus 0.28 bar, target 23.99, tolerance 23.37 to 24.61',
+    );
+    const stated = { ...superheat, tolerance: { ...superheat.tolerance!, source: 'makers-data' } } as const;
+    expect(criterionDetail(stated, 'F-psi')).toContain('92 °F outdoors, with the maker’s ±');
   });
 
   it('says only just, and what would settle it, where the rule alone decided', () => {

@@ -1,4 +1,4 @@
-import type { Figure, PreflightItem, ReadingId, SetupField } from '@chargewright/engine';
+import type { Figure, MakersChartKind, PreflightItem, ReadingId, SetupField } from '@chargewright/engine';
 import { differenceToK, massToKg, powerToW, temperatureToK } from '@chargewright/engine';
 import { formatNumber, formatShort, formatValue } from './format-value';
 import type { UnitSystem } from './unit-system';
@@ -33,6 +33,7 @@ export interface FigureNames {
   readonly reading: Readonly<Record<ReadingId, { readonly name: string }>>;
   readonly preflight: Readonly<Record<PreflightItem, { readonly name: string }>>;
   readonly setup: Readonly<Record<SetupField, { readonly name: string }>>;
+  readonly makersChart: Readonly<Record<MakersChartKind, { readonly name: string }>>;
   list(names: readonly string[]): string;
 }
 
@@ -48,6 +49,7 @@ function figureText(figure: Figure, system: UnitSystem, names: FigureNames, prin
   if (figure.kind === 'readings') return names.list(figure.value.map((id) => names.reading[id].name));
   if (figure.kind === 'preflight') return names.list(figure.value.map((id) => names.preflight[id].name));
   if (figure.kind === 'setup') return names.list(figure.value.map((id) => names.setup[id].name));
+  if (figure.kind === 'makersCharts') return names.list(figure.value.map((id) => names.makersChart[id].name));
   return print(figure.kind, figure.value, system);
 }
 

@@ -28,6 +28,9 @@ export type ContractUnit =
   | 'psia'
   | 'kPaa'
   | 'bara'
+  | 'psig'
+  | 'kPag'
+  | 'barg'
   | 'psi'
   | 'kPa'
   | 'bar'
@@ -90,6 +93,8 @@ const inchPound = (kind: QuantityKind, value: number): PresentedValue => {
       return { value: pressureFromPa(value, 'psia', 0), unit: 'psia' };
     case 'pressureDifferencePa':
       return { value: pressureDifferenceFromPa(value, 'psi'), unit: 'psi' };
+    case 'gaugePressurePa':
+      return { value: pressureDifferenceFromPa(value, 'psi'), unit: 'psig' };
     case 'enthalpyJPerKg':
       return { value: specificEnergyDifferenceToBtuPerLb(value + DATUM_SHIFT_J_PER_KG), unit: 'Btu/lb' };
     case 'specificVolumeM3PerKg':
@@ -150,6 +155,10 @@ const metric = (kind: QuantityKind, value: number, bar: boolean): PresentedValue
       const unit = bar ? 'bar' : 'kPa';
       return { value: pressureDifferenceFromPa(value, unit), unit };
     }
+    case 'gaugePressurePa':
+      return bar
+        ? { value: pressureDifferenceFromPa(value, 'bar'), unit: 'barg' }
+        : { value: pressureDifferenceFromPa(value, 'kPa'), unit: 'kPag' };
     case 'enthalpyJPerKg':
       return { value: value / 1e3, unit: 'kJ/kg' };
     case 'specificVolumeM3PerKg':
@@ -219,7 +228,7 @@ const unitless = (kind: 'fraction' | 'humidityRatio' | 'minutes' | 'days' | 'cou
 };
 
 /**
- * An SI value of the engine in the unit a person or the API reads, unrounded. Pressures stay absolute. Total for finite numbers.
+ * An SI value of the engine in the unit a person or the API reads, unrounded. A pressure is absolute unless it is a gauge one. Total for finite numbers.
  * An enthalpy is that of moist air on the datum of its unit: use it for states, never for differences.
  */
 export const presentValue = (kind: QuantityKind, value: number, system: UnitSystem): PresentedValue =>

@@ -72,6 +72,7 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   row: { kind: 'count', value: 2 },
   given: { kind: 'count', value: 5 },
   wanted: { kind: 'count', value: 6 },
+  charts: { kind: 'makersCharts', value: ['superheat', 'liquid-pressure'] },
 };
 
 const message = <Message>(code: string, more: object = {}): Message =>

@@ -11,6 +11,7 @@ export const ANSWER_UNITS = [
   'psia',
   'kPag',
   'kPaa',
+  'barg',
   'bara',
   'psi',
   'kPa',

@@ -1,5 +1,5 @@
 import { CAUSES, CRITERION_IDS, DERIVED_IDS, FINDINGS } from '@chargewright/engine';
-import type { DerivedId, TargetSource } from '@chargewright/engine';
+import type { DerivedId, TargetSource, ToleranceSource } from '@chargewright/engine';
 import * as z from 'zod';
 import { object } from '../parsing/object';
 import { codedText, derivationLine, orNull, toleranceAmount, uncertainAmount } from '../amounts/answer-amounts';
@@ -8,6 +8,7 @@ const TARGET_SOURCES = [
   'entered',
   'makers-chart-a',
   'finer-table',
+  'makers-data',
   'split-table',
   'procedure-window',
   'entered-range',
@@ -15,6 +16,8 @@ const TARGET_SOURCES = [
   'design-airflow',
   'airflow-per-capacity',
 ] as const satisfies readonly TargetSource[];
+
+const TOLERANCE_SOURCES = ['procedure', 'makers-data', 'choice'] as const satisfies readonly ToleranceSource[];
 
 const criterion = object({
   criterion: z.enum(CRITERION_IDS),
@@ -24,6 +27,12 @@ const criterion = object({
   targetSource: orNull(z.enum(TARGET_SOURCES)),
   deviation: orNull(uncertainAmount),
   tolerance: orNull(toleranceAmount),
+  toleranceSource: orNull(
+    z.enum(TOLERANCE_SOURCES).meta({
+      description:
+        'Whose the tolerance is: the procedure’s, the maker’s as entered, or our choice where neither has one.',
+    }),
+  ),
   byRule: orNull(z.enum(['passes', 'fails'])),
   probabilityWithin: z
     .number()

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { bubblePressurePa, dewPressurePa } from '../refrigerants/saturation';
 import type { RefrigerantId } from '../refrigerants/catalogue';
-import { lengthFromM, lengthToM, PA_PER_PSI, temperatureFromK, temperatureToK } from '../units';
+import { lengthFromM, PA_PER_PSI, temperatureFromK, temperatureToK } from '../units';
 import type { CautionCode, Figure } from './codes';
 import { deriveQuantities } from './derived-quantities';
 import type { EvaluationRequest, ReadingInput } from './request';
@@ -229,34 +229,6 @@ describe('setup', () => {
 
   it('setup-assumed names an unknown stage', () => {
     expect(has(valveRequest({ setup: { stage: 'unknown' } }), 'setup-assumed')).toBe(true);
-  });
-
-  it('makers-chart-not-used: a table was given, and nothing is judged by it', () => {
-    expect(
-      has(
-        valveRequest({ setup: { makersChart: { kind: 'superheat', unit: 'deltaF', cells: [[12]] } } }),
-        'makers-chart-not-used',
-      ),
-    ).toBe(true);
-    expect(has(valveRequest(), 'makers-chart-not-used')).toBe(false);
-  });
-
-  it('line-set-too-long: beyond the maker’s limit, in whatever unit either is given', () => {
-    const line = (length: number, most?: number) =>
-      valveRequest({
-        setup: {
-          lineSet: {
-            length: { value: length, unit: 'ft' },
-            ...(most !== undefined && { mostLength: { value: lengthFromM(lengthToM(most, 'ft'), 'm'), unit: 'm' } }),
-          },
-        },
-      });
-    expect(has(line(50, 50), 'line-set-too-long')).toBe(false);
-    expect(has(line(50.01, 50), 'line-set-too-long')).toBe(true);
-    expect(has(line(300), 'line-set-too-long')).toBe(false);
-    const { length, most } = figuresOf(line(60, 50), 'line-set-too-long');
-    expect(lengthFromM(length!.value as number, 'ft')).toBeCloseTo(60, 9);
-    expect(lengthFromM(most!.value as number, 'ft')).toBeCloseTo(50, 9);
   });
 
   it('long-lines: above 20 ft of lift', () => {

@@ -6,15 +6,17 @@ import { refrigerantFacts } from '../refrigerants/catalogue';
 import type { RefrigerantId } from '../refrigerants/catalogue';
 import { differenceToK, lengthToM, pressureDifferenceToPa } from '../units';
 import type { UsedReadingId } from './assumed-uncertainty';
+import { chargeMethod } from './charge-method';
 import type { Caution, CautionCode, Figure } from './codes';
 import { LIMIT_SLACK_K } from './conformance';
 import { airflowGate } from './criteria/air';
-import { conditionsRecorded, nearLimitCautions } from './criteria/conditions';
+import { conditionsRecorded, leastOutdoorK, nearLimitCautions } from './criteria/conditions';
 import type { DerivedQuantities } from './derived-quantities';
 import { plausibilityCautions } from './plausibility';
 import type { CheckInput } from './input';
 import { isFixedOrifice } from './input';
 import type { AirflowEvidence } from './procedure';
+import { makersChartCautions } from './makers-charts/chart-cautions';
 import { isPullDown } from './pull-down';
 import { freezeRisk } from './stops';
 
@@ -39,7 +41,6 @@ type PlainCautionCode = Extract<
   CautionCode,
   | 'pull-down'
   | 'elevation-assumed'
-  | 'makers-chart-not-used'
   | 'gauge-not-zeroed'
   | 'airflow-not-proven'
   | 'conditions-not-recorded'
@@ -60,7 +61,9 @@ export function findCautions(
   const cooling = input.setup.mode === 'cooling';
   return [
     ...(cooling ? coolingCautions(input, derived, airflow) : []),
+    ...nearLimitCautions(input),
     ...setupCautions(input),
+    ...makersChartCautions(input),
     ...visitCautions(input),
     ...refrigerantCautions(input.setup.refrigerant),
   ];
@@ -91,11 +94,7 @@ function coolingCautions(input: CheckInput, derived: DerivedQuantities, airflow:
     lowHead(input),
     airflow === 'nothing' && airflowGate(input.procedure, airflow) === null ? plain('airflow-not-proven') : null,
   ];
-  return [
-    ...found.filter((caution) => caution !== null),
-    ...nearLimitCautions(input),
-    ...plausibilityCautions(input, derived),
-  ];
+  return [...found.filter((caution) => caution !== null), ...plausibilityCautions(input, derived)];
 }
 
 /** The saturation temperature written on the paper against the one of the pressure: right column, other column, or another refrigerant. */
@@ -173,13 +172,13 @@ function liquidColderThanAir({ readings }: CheckInput): Caution | null {
 }
 
 /** Outdoor air warm enough to judge, too cool to move refrigerant on what is read. */
-export function isCoolWeather({ procedure, readings }: CheckInput): boolean {
-  const outdoor = readings.outdoorDryBulb?.quantity.value;
-  const { leastOutdoorK, coolBelowK } = procedure.conditions;
+export function isCoolWeather(input: CheckInput): boolean {
+  const outdoor = input.readings.outdoorDryBulb?.quantity.value;
+  const least = leastOutdoorK(input, chargeMethod(input)) ?? 0;
   return (
     outdoor !== undefined &&
-    outdoor >= leastOutdoorK.value - LIMIT_SLACK_K &&
-    outdoor < coolBelowK.value - LIMIT_SLACK_K
+    outdoor >= least - LIMIT_SLACK_K &&
+    outdoor < input.procedure.conditions.coolBelowK.value - LIMIT_SLACK_K
   );
 }
 
@@ -204,7 +203,6 @@ export function lowHead(input: CheckInput): Caution | null {
 
 function setupCautions({ setup }: CheckInput): readonly Caution[] {
   const found: Caution[] = [];
-  if (setup.makersCharts.length > 0) found.push(plain('makers-chart-not-used'));
   if (setup.elevationAssumed) found.push(plain('elevation-assumed'));
   if (setup.assumed.length > 0) {
     found.push({ code: 'setup-assumed', figures: { fields: { kind: 'setup', value: setup.assumed } } });

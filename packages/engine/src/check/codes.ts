@@ -3,12 +3,18 @@
  * and the compiler holds the two lists together.
  */
 import type { QuantityKind } from '../derivation/quantity';
+import type { MakersChartKind } from '../methods/makers-chart/kinds';
 import type { PreflightItem } from './request';
 import type { ReadingId } from './readings';
 
 export const CRITERION_IDS = [
   'superheat',
   'subcooling',
+  'liquid-line-approach',
+  'suction-line-temperature',
+  'liquid-pressure',
+  'heating-discharge-pressure',
+  'heating-discharge-temperature',
   'temperature-split',
   'superheat-window',
   'airflow',
@@ -29,7 +35,8 @@ export type Figure =
   | { readonly kind: QuantityKind; readonly value: number }
   | { readonly kind: 'readings'; readonly value: readonly ReadingId[] }
   | { readonly kind: 'preflight'; readonly value: readonly PreflightItem[] }
-  | { readonly kind: 'setup'; readonly value: readonly SetupField[] };
+  | { readonly kind: 'setup'; readonly value: readonly SetupField[] }
+  | { readonly kind: 'makersCharts'; readonly value: readonly MakersChartKind[] };
 
 /** A message of a catalogue `Names`: code → names of its figures (`never` for none). */
 export type MessageOf<Names> = {
@@ -63,6 +70,7 @@ export interface ReasonFigures {
   'not-ready': 'items';
   'running-time': 'minutes' | 'least';
   'return-too-cool': 'actual' | 'least';
+  'return-too-warm': 'actual' | 'most';
   'outdoor-too-cold': 'actual' | 'least';
   stale: 'readings';
   'ports-swapped': never;
@@ -106,7 +114,10 @@ export interface CautionFigures {
   'low-head': 'difference' | 'least';
   'long-lines': 'lift';
   'line-set-too-long': 'length' | 'most';
-  'makers-chart-not-used': never;
+  'makers-chart-not-by-these-rules': 'charts';
+  'makers-chart-for-orifice': 'charts';
+  'makers-chart-for-other-port': 'charts';
+  'makers-chart-odd': 'charts';
   'elevation-assumed': never;
   'gauge-not-zeroed': never;
   'instruments-old': 'days';
@@ -159,6 +170,7 @@ export interface NextStepFigures {
   // conditions
   'run-longer': 'minutes';
   'warm-the-house': never;
+  'cool-the-house': never;
   'wait-for-warmer-weather': never;
   'wait-for-cooler-weather': never;
   'check-instruments': never;
@@ -169,6 +181,7 @@ export interface NextStepFigures {
   'take-readings': 'readings';
   'take-readings-again': 'readings';
   'find-nameplate-target': never;
+  'find-target-for-this-port': never;
   // airflow
   'raise-airflow': never;
   'measure-airflow': never;
@@ -207,8 +220,10 @@ export interface NextStepFigures {
   'check-bulb-and-airflow': never;
   'find-restriction-recover-nothing': never;
   'check-bulb-then-recover': never;
+  'weigh-in-after-heating': never;
   // within
   'read-supply-or-airflow': never;
+  'record-heating': never;
   record: never;
 }
 export type NextStepMessage = MessageOf<NextStepFigures>;

@@ -23,7 +23,7 @@ const judgeBy = (
       origin: 'reading',
       parts: u === 0 ? [] : [{ key: 'deviation', u, shape: 'normal' }],
     }),
-    tolerance: { low, high, floored: false },
+    tolerance: { low, high, floored: false, source: 'procedure' },
     decision: { type, clearFrom: plainRule(0.8, '0.80', ['choice', 'the specs']) },
     probabilityOfNoTarget: noTarget,
   });
@@ -204,7 +204,7 @@ describe('a mean shifted by a kink', () => {
     });
     return judgeConformance({
       measured: { ...measured, meanShift },
-      tolerance: { low: -3, high: 3, floored: false },
+      tolerance: { low: -3, high: 3, floored: false, source: 'procedure' },
       decision: { type: 'guarded', clearFrom: plainRule(0.8, '0.80', ['choice', 'the specs']) },
     });
   };

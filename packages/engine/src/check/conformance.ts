@@ -7,6 +7,10 @@ import type { Tolerance } from './result';
 
 /** Limits are inclusive; 31 of 200 deviations of exactly 5 °F come out above it in doubles of kelvin. */
 export const LIMIT_SLACK_K = 1e-9;
+/** The same for pressures, of which a million is a usual number. */
+const LIMIT_SLACK_PA = 1e-3;
+
+const slackOf = ({ kind }: Known): number => (kind === 'pressureDifferencePa' ? LIMIT_SLACK_PA : LIMIT_SLACK_K);
 
 export interface Conformance {
   readonly byRule: 'passes' | 'fails';
@@ -33,7 +37,8 @@ export function judgeConformance(input: {
   const high = tolerance.high ?? Infinity;
   const { value, u, meanShift } = measured;
   const mean = value + meanShift;
-  const [from, to] = [low - LIMIT_SLACK_K, high + LIMIT_SLACK_K];
+  const slack = slackOf(measured);
+  const [from, to] = [low - slack, high + slack];
   const passes = value >= from && value <= to;
   const inside = probabilityBetween(mean, u, from, to);
   const probabilityWithin = inside * (1 - probabilityOfNoTarget);

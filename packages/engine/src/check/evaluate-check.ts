@@ -3,6 +3,7 @@ import type { Known } from '../derivation/quantity';
 import { isKnown } from '../derivation/quantity';
 import { derivationSteps } from '../derivation/steps';
 import { findCautions } from './cautions';
+import { chargeMethod, otherMethods, ownMethod } from './charge-method';
 import type { Caution, OverallFinding, Reason, Stop } from './codes';
 import {
   airflowCriterion,
@@ -16,8 +17,10 @@ import {
   splitTarget,
 } from './criteria/air';
 import type { ChargeJudgement } from './criteria/charge';
-import { judgeSubcooling, judgeSuperheat, judgeSuperheatWindow, superheatTarget } from './criteria/charge';
+import { judgeSubcooling, judgeSuperheat, judgeSuperheatWindow } from './criteria/charge';
+import { chargeTarget } from './criteria/charge-target';
 import { conditionsGate, judgeConditions, judgeInstruments, recordGate } from './criteria/conditions';
+import { judgeMakersMethod } from './criteria/makers-methods';
 import type { DerivedQuantities } from './derived-quantities';
 import { deriveQuantities } from './derived-quantities';
 import { engineVersion } from './engine-version';
@@ -40,28 +43,26 @@ export function evaluateCheck(input: CheckInput): CheckResult {
 
   const cooling = setup.mode === 'cooling';
   const targetSplit = splitTarget(input, derived);
-  const split = judgeSplit(input, derived, targetSplit, unfit);
+  const split = judgeSplit(input, derived, targetSplit, cooling ? unfit : HEATING);
   const measured = judgeAirflow(input);
   const splitShows = splitEvidence(input, derived, { split, target: targetSplit });
   const evidence = airflowEvidence(input, { airflow: measured, split: splitShows });
   const airflow = airflowCriterion(input, measured, evidence);
-  const target = superheatTarget(input, derived);
-  const charge = judgeCharge(
-    {
-      input,
-      derived,
-      unfit,
-      gates: (from) => [
-        impossible?.reason ?? null,
-        frozen(stops),
-        conditionsGate(input),
-        recordGate(input),
-        staleReason(input, from),
-        airflowGate(procedure, evidence),
-      ],
-    },
-    target,
-  );
+  const method = chargeMethod(input);
+  const charge = judgeCharge({
+    input,
+    derived,
+    unfit,
+    method: method ?? ownMethod(input),
+    gates: (judgedBy) => (from) => [
+      impossible?.reason ?? null,
+      frozen(stops),
+      conditionsGate(input, judgedBy),
+      recordGate(input),
+      staleReason(input, from),
+      airflowGate(procedure, evidence),
+    ],
+  });
   const criteria = [
     ...charge,
     ...(cooling ? [split] : []),
@@ -81,7 +82,8 @@ export function evaluateCheck(input: CheckInput): CheckResult {
     input,
     derived,
     criteria,
-    target,
+    method,
+    target: method && chargeTarget(input, derived, method),
     unfit,
     impossible: impossible?.reason ?? null,
     stops,
@@ -101,14 +103,19 @@ export function evaluateCheck(input: CheckInput): CheckResult {
   };
 }
 
-/** Subcooling of a fixed orifice is shown and looked at by the next step, but decides nothing. */
-function judgeCharge(
-  judgement: ChargeJudgement,
-  target: ReturnType<typeof superheatTarget>,
-): readonly CriterionResult[] {
-  return isFixedOrifice(judgement.input.setup)
-    ? [judgeSuperheat(judgement, target), judgeSubcooling(judgement)]
-    : [judgeSubcooling(judgement), judgeSuperheatWindow(judgement)];
+const HEATING: Reason = { code: 'heating-mode', figures: {} };
+
+/**
+ * Subcooling of a fixed orifice is shown and looked at by the next step, but decides nothing; so are the maker's further methods beside the one that
+ * decides. In heating no cooling target holds: only the maker's heating tables are judged, where there are any.
+ */
+function judgeCharge(judgement: ChargeJudgement): readonly CriterionResult[] {
+  const { input } = judgement;
+  const others = otherMethods(input).map((other) => judgeMakersMethod(judgement, other));
+  if (input.setup.mode === 'heating' && others.length > 0) return others;
+  return isFixedOrifice(input.setup)
+    ? [judgeSuperheat(judgement), judgeSubcooling(judgement), ...others]
+    : [judgeSubcooling(judgement), judgeSuperheatWindow(judgement), ...others];
 }
 
 /** Ice falsifies every reading of the cycle: they stay for diagnosis, without a finding on the charge. */
@@ -132,7 +139,8 @@ function hiddenFaults(
   { subcooling }: DerivedQuantities,
   finding: OverallFinding,
 ): readonly Caution[] {
-  const hidden = isFixedOrifice(setup) && finding === 'within' && !isKnown(subcooling);
+  const judged = setup.mode === 'cooling' && finding === 'within';
+  const hidden = isFixedOrifice(setup) && judged && !isKnown(subcooling);
   return hidden ? [{ code: 'faults-may-hide', figures: {} }] : [];
 }
 

@@ -2,6 +2,7 @@
  * Whether this system, as it runs now, can be judged by superheat or subcooling at all; decided before any stop or target. Rules: common practice
  * and the scope of CEC Reference Residential Appendices, RA3.2 (2008, 2019); a mini-split meters outdoors, its small pipe is two-phase.
  */
+import { chargeMethod, hasTargetForOtherPort, isEntered, usableChart } from './charge-method';
 import type { Reason } from './codes';
 import type { CheckInput, CheckVisit } from './input';
 import type { PreflightItem } from './request';
@@ -16,16 +17,18 @@ const MENDED_FIRST: readonly PreflightItem[] = [
 ];
 
 /** Why no charge criterion can be judged, or `null` when the system is fit for the test. */
-export function unfitReason({ procedure, setup, visit }: CheckInput): Reason | null {
-  if (setup.mode === 'heating') return { code: 'heating-mode', figures: {} };
+export function unfitReason(input: CheckInput): Reason | null {
+  const { procedure, setup, visit } = input;
+  const heating = setup.mode === 'heating';
+  if (heating && chargeMethod(input) === null) return { code: 'heating-mode', figures: {} };
   if (setup.kind === 'mini-split' || setup.kind === 'multi-split') return { code: 'metered-outdoors', figures: {} };
   if (setup.kind === 'packaged' && !procedure.packaged) return { code: 'not-in-scope', figures: {} };
   if (setup.stage === 'part') return { code: 'part-stage', figures: {} };
   if (setup.chargeMode === false) return { code: 'not-in-charge-mode', figures: {} };
   const items = unreadyItems(visit);
   if (items.length > 0) return { code: 'not-ready', figures: { items: { kind: 'preflight', value: items } } };
-  // a packaged unit has no usual port to assume
-  if (setup.kind === 'packaged' && setup.assumed.includes('highSidePort'))
+  // a packaged unit has no usual port to assume; in heating no liquid port is read
+  if (!heating && setup.kind === 'packaged' && setup.assumed.includes('highSidePort'))
     return { code: 'port-not-stated', figures: {} };
   return null;
 }
@@ -34,7 +37,8 @@ const unreadyItems = (visit: CheckVisit): readonly PreflightItem[] =>
   MENDED_FIRST.filter((item) => visit.preflight[item] === 'not-ok');
 
 /** Why subcooling cannot be judged at this port, or `null`. The suction side is not affected. */
-export function unfitPortReason({ setup, readings }: Pick<CheckInput, 'setup' | 'readings'>): Reason | null {
+export function unfitPortReason(input: CheckInput): Reason | null {
+  const { setup, readings } = input;
   if (setup.highSidePort === 'none') return { code: 'suction-port-only', figures: {} };
   if (
     setup.highSidePort === 'discharge' &&
@@ -43,7 +47,8 @@ export function unfitPortReason({ setup, readings }: Pick<CheckInput, 'setup' | 
   ) {
     return { code: 'liquid-reading-at-discharge-port', figures: {} };
   }
-  if (setup.targetSubcooling !== undefined && setup.targetSubcoolingPort !== setup.highSidePort) {
+  const hasTarget = isEntered(input, 'subcooling') || usableChart(input, 'subcooling') !== null;
+  if (!hasTarget && hasTargetForOtherPort(input)) {
     return { code: 'target-for-other-port', figures: {} };
   }
   return null;

@@ -62,6 +62,14 @@ export interface AirflowRules {
   readonly permittedPaths: readonly PermittedPath[];
 }
 
+export interface MakersTolerances {
+  readonly liquidLineApproachK: Rule;
+  readonly suctionLineTemperatureK: Rule;
+  readonly heatingDischargeTemperatureK: Rule;
+  /** Of a pressure: as the saturation temperature that it stands for. */
+  readonly pressureAsSaturationK: Rule;
+}
+
 export interface Procedure {
   readonly id: ProcedureId;
   readonly version: number;
@@ -72,8 +80,10 @@ export interface Procedure {
     readonly toleranceK: Rule;
     readonly floorK: Rule | null;
     readonly enteredTarget: boolean;
-    /** The table that gives the target where none is entered. */
-    readonly chart: SuperheatChartId;
+    /** Whether the maker's own table gives the target; that of subcooling always may. */
+    readonly makersTable: boolean;
+    /** The printed chart that gives the target where there is no other; `null`: none does. */
+    readonly chart: SuperheatChartId | null;
   };
   readonly subcooling: {
     readonly toleranceK: Rule;
@@ -85,6 +95,8 @@ export interface Procedure {
     readonly highAboveK: Rule;
   };
   readonly temperatureSplit: { readonly toleranceK: Rule };
+  /** The maker's methods beside superheat and subcooling: ± where the maker states none. `null`: these rules do not judge by them. */
+  readonly makersMethods: MakersTolerances | null;
   readonly superheatWindow: {
     readonly lowK: Rule;
     readonly highK: Rule;
@@ -93,11 +105,11 @@ export interface Procedure {
   };
   readonly airflow: AirflowRules;
   readonly conditions: {
-    readonly leastOutdoorK: Rule;
+    readonly leastOutdoorK: Rule | null;
     /** Warmest outdoor air for a superheat test. */
     readonly mostOutdoorForSuperheatK: Rule | null;
     readonly coolBelowK: Rule;
-    readonly leastReturnK: Rule;
+    readonly leastReturnK: Rule | null;
     readonly leastRunningMinutes: Rule;
     /** Running time, lowest return air, outdoor air, pre-flight: what happens when they are not recorded. */
     readonly unrecorded: Consequence;

@@ -21,6 +21,7 @@ export type TargetSource =
   | 'entered'
   | 'makers-chart-a'
   | 'finer-table'
+  | 'makers-data'
   | 'split-table'
   | 'procedure-window'
   | 'entered-range'
@@ -28,12 +29,16 @@ export type TargetSource =
   | 'design-airflow'
   | 'airflow-per-capacity';
 
+/** The procedure's own figure, the maker's as entered, or our choice where neither has one. */
+export type ToleranceSource = 'procedure' | 'makers-data' | 'choice';
+
 /** Limits of the deviation, in its unit; `null` on a side without a limit. */
 export interface Tolerance {
   readonly low: number | null;
   readonly high: number | null;
   /** The lower limit is the least the measured value may be, not the tolerance of the target. */
   readonly floored: boolean;
+  readonly source: ToleranceSource;
 }
 
 export interface CriterionResult {

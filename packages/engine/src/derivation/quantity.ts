@@ -7,6 +7,7 @@ export type QuantityKind =
   | 'differenceK'
   | 'pressurePa'
   | 'pressureDifferencePa'
+  | 'gaugePressurePa'
   | 'fraction'
   | 'humidityRatio'
   | 'enthalpyJPerKg'

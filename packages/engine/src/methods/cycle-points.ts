@@ -96,6 +96,17 @@ export const subcooling = formula({
   of: ({ bubblePointK, liquidLineK }) => bubblePointK - liquidLineK,
 });
 
+/** What a gauge shows of an absolute pressure at this site. */
+export const siteGaugePressure = (name: string): Formula<'pressurePa' | 'atmospherePa'> =>
+  formula({
+    id: `${name}Gauge`,
+    gives: 'gaugePressurePa',
+    text: 'p_absolute − p_atmosphere',
+    symbols: { pressurePa: 'p_absolute', atmospherePa: 'p_atmosphere' },
+    source: 'Definition of gauge pressure',
+    of: ({ pressurePa, atmospherePa }) => pressurePa - atmospherePa,
+  });
+
 export const condensingOverAmbient = formula({
   id: 'condensingOverAmbient',
   gives: 'differenceK',

@@ -38,7 +38,10 @@ export const targetTemperatureSplit = formula({
 export type DeviationFormula = Formula<'actual' | 'target'>;
 
 /** Actual less target. */
-export const deviation = (criterion: string, gives: 'differenceK' | 'flowM3PerS'): DeviationFormula =>
+export const deviation = (
+  criterion: string,
+  gives: 'differenceK' | 'flowM3PerS' | 'pressureDifferencePa',
+): DeviationFormula =>
   formula({
     id: `${criterion}Deviation`,
     gives,

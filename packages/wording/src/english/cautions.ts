@@ -30,8 +30,13 @@ export const cautionTexts: MessageTexts<CautionFigures> = {
     `It is ${f.outdoor} outdoors: cool for judging the charge. If a result is outside its band, move no refrigerant on it.`,
   'low-head': (f) =>
     `Only ${f.difference} between high and low side (at least ${f.least}): the valve may not be fed fully.`,
-  'makers-chart-not-used':
-    'The maker’s table that was given is not judged by yet. Read its target at these conditions and enter that.',
+  'makers-chart-not-by-these-rules': (f) =>
+    `Entered but not judged by: ${f.charts}. These rules take their target elsewhere; the general rules or the maker’s take it from here.`,
+  'makers-chart-for-orifice': (f) =>
+    `Entered but not judged by: ${f.charts}. It is for a fixed orifice, and this system has a valve. Look at the metering device once more.`,
+  'makers-chart-for-other-port': (f) =>
+    `Entered but not judged by: ${f.charts}. It holds for another high-side port than the one that is read.`,
+  'makers-chart-odd': (f) => `Some figures look odd: ${f.charts}. Compare what was typed with the print.`,
   'line-set-too-long': (f) =>
     `The line set is ${f.length} long; the maker’s limit is ${f.most}. Follow the maker’s rules for long lines: charge, oil, pipe size.`,
   'long-lines': (f) => `The line set lifts ${f.lift}. Follow the maker’s rules for long lines: charge, oil, pipe size.`,

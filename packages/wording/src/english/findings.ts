@@ -1,5 +1,5 @@
 /** How a criterion came out, in sentences a customer could read. */
-import type { CriterionId, TargetSource } from '@chargewright/engine';
+import type { CriterionId, TargetSource, ToleranceSource } from '@chargewright/engine';
 import type { CriterionParts } from '../criterion-parts';
 import type { FindingPhrases } from '../language';
 import type { Say } from '../message-texts';
@@ -9,6 +9,11 @@ import { listWords } from './setup';
 const criterionNames: FindingPhrases['criteria'] = {
   superheat: 'Superheat',
   subcooling: 'Subcooling',
+  'liquid-line-approach': 'Liquid line over outdoor air',
+  'suction-line-temperature': 'Suction line',
+  'liquid-pressure': 'Liquid pressure',
+  'heating-discharge-pressure': 'Discharge pressure in heating',
+  'heating-discharge-temperature': 'Discharge line in heating',
   'temperature-split': 'Temperature split',
   'superheat-window': 'Superheat window',
   airflow: 'Airflow',
@@ -56,6 +61,7 @@ const SOURCES: Readonly<Record<TargetSource, string>> = {
   entered: 'as entered',
   'makers-chart-a': 'from the makers’ chart',
   'finer-table': 'from the published table, from memory,',
+  'makers-data': 'from the maker’s table as entered',
   'split-table': 'from the published split table (see sources)',
   'procedure-window': 'by these rules',
   'entered-range': 'by the maker’s range as entered',
@@ -64,11 +70,20 @@ const SOURCES: Readonly<Record<TargetSource, string>> = {
   'airflow-per-capacity': 'from the nominal capacity',
 };
 
+/** Whose the width of the band is, where it is not simply that of the rules. */
+const TOLERANCES: Readonly<Record<ToleranceSource, string>> = {
+  procedure: '',
+  'makers-data': ', with the maker’s ±',
+  choice: ', with a ± of our choice: the maker’s was not entered',
+};
+
 /** How an input of a target's formula is named beside its value. */
 const CONDITIONS: Readonly<Record<string, string>> = {
   wetBulbK: 'wet bulb',
   outdoorK: 'outdoors',
   returnDryBulbK: 'return',
+  suctionPa: 'suction',
+  liquidLineK: 'liquid line',
 };
 
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
@@ -133,7 +148,7 @@ function headline(parts: CriterionParts): string {
 }
 
 function targetText(parts: CriterionParts): string {
-  const { criterion, target, targetSource, conditions } = parts;
+  const { criterion, target, targetSource, toleranceSource, conditions } = parts;
   const source = targetSource === null ? '' : ` ${SOURCES[targetSource]}`;
   if (criterion === 'superheat-window' || criterion === 'airflow') {
     const band = range(parts);
@@ -143,7 +158,8 @@ function targetText(parts: CriterionParts): string {
   const at = Object.entries(conditions).flatMap(([name, value]) =>
     CONDITIONS[name] ? [`${value} ${CONDITIONS[name]}`] : [],
   );
-  return `Target ${target}${source}${at.length === 0 ? '' : ` at ${at.join(', ')}`}`;
+  const width = toleranceSource === null ? '' : TOLERANCES[toleranceSource];
+  return `Target ${target}${source}${at.length === 0 ? '' : ` at ${at.join(', ')}`}${width}`;
 }
 
 /** With "only just" goes what would settle it. */
@@ -213,6 +229,13 @@ const STEP_NAMES: Readonly<Record<string, string>> = {
   returnEnthalpy: 'Return enthalpy',
   targetSuperheat: 'Target superheat',
   targetTemperatureSplit: 'Target split',
+  liquidLineApproach: 'Liquid line over outdoor air',
+  targetSubcooling: 'Target subcooling',
+  targetLiquidLineApproach: 'Target of liquid line over outdoor air',
+  targetSuctionLineTemperature: 'Target suction line',
+  targetLiquidPressure: 'Target liquid pressure, absolute',
+  targetHeatingDischargePressure: 'Target discharge pressure, absolute',
+  targetHeatingDischargeTemperature: 'Target discharge line',
 };
 
 /** What a step of the derivation gives. */
@@ -223,10 +246,13 @@ function stepName(id: string): string {
   const words =
     reading === undefined ? undefined : (readingWords as Readonly<Record<string, { label: string }>>)[reading];
   if (words !== undefined) return `${words.label}, absolute`;
+  const nameOf = (criterion: string): string =>
+    (criterionNames as Readonly<Record<string, string>>)[criterion] ?? criterion;
+  const [, measured, target] = /^([\w-]+?)(-target)?Gauge$/.exec(id) ?? [];
+  if (measured !== undefined)
+    return `${nameOf(measured)}, ${target === undefined ? 'on the gauge' : 'target on the gauge'}`;
   const [, criterion] = /^([\w-]+)Deviation$/.exec(id) ?? [];
-  return criterion === undefined
-    ? id
-    : `${(criterionNames as Readonly<Record<string, string>>)[criterion] ?? criterion} off target`;
+  return criterion === undefined ? id : `${nameOf(criterion)} off target`;
 }
 
 export const findingPhrases: FindingPhrases = {

@@ -1,4 +1,5 @@
 import type { FigureNames } from '../message-texts';
+import { makersChartWords } from './makers-charts';
 import { readingWords } from './readings';
 import { listWords, setupWords } from './setup';
 
@@ -9,5 +10,6 @@ export const names: FigureNames = {
   reading: readingWords,
   preflight: setupWords.preflight,
   setup: { mode, kind, stage, highSidePort },
+  makersChart: makersChartWords.kinds,
   list: listWords,
 };

@@ -123,13 +123,17 @@ const steps: NextStepWords['steps'] = {
       `Bring the return air to at least ${say.degF(70)}. Heating may warm the house first if the occupant agrees; mind people and animals. Then cool 15 minutes and read.`,
     'The targets do not reach down to air this cool.',
   ],
+  'cool-the-house': [
+    'Let the system cool the house first, then read.',
+    'The return air is warmer than the maker allows for this table.',
+  ],
   'wait-for-warmer-weather': [
     (_, say) => `Come back when it is at least ${say.degF(55)} outdoors, or weigh the charge in.`,
     'In the cold the pressures do not show the charge.',
   ],
   'wait-for-cooler-weather': [
     (_, say) => `Come back when it is ${say.degF(115)} outdoors or less; early morning is coolest.`,
-    'In hotter air these rules allow no superheat test.',
+    'In hotter air the test is not allowed.',
   ],
   'check-instruments': [
     'Hold gauges and thermometers against a reference, and record the day.',
@@ -156,6 +160,10 @@ const steps: NextStepWords['steps'] = {
     'Find this unit’s target on the nameplate or in the maker’s data, and enter it.',
     (say) =>
       `No target is right for every unit; subcooling of ${say.deltaF(8)} to ${say.deltaF(14)} is common, and never a limit.`,
+  ],
+  'find-target-for-this-port': [
+    'Find the maker’s target for the port you read at, or say which port the target holds for.',
+    'Liquid and discharge port differ by the pressure drop of the outdoor coil.',
   ],
   'raise-airflow': [
     `Raise the airflow first: filter, coil, blower speed, registers, ducts, ${THEN_READ}. With gas appliances in the house make sure no flue back-drafts.`,
@@ -288,6 +296,14 @@ const steps: NextStepWords['steps'] = {
   'read-liquid-pair': [
     'Read the liquid pressure and the liquid line next.',
     'They tell low charge from a restriction.',
+  ],
+  'weigh-in-after-heating': [
+    `Weigh the charge in; leave it as it is until then. Search for a leak first. To weigh in: ${WEIGH_IN}. Check it again in the cooling season.`,
+    'By the maker’s heating table the charge is not right; in steps it is only set in cooling.',
+  ],
+  'record-heating': [
+    'Record it, then close up; check the charge again in the cooling season. Hoses off with the least loss: the vapor line is hot gas now. Caps on, ports checked for leaks.',
+    'The maker’s heating table agrees with the charge; only the cooling season shows it closely.',
   ],
   record: [
     'Record it, then close up: hoses off with the least loss, caps on, ports checked for leaks, label updated.',

@@ -25,8 +25,9 @@ export const reasonTexts: MessageTexts<ReasonFigures> = {
   'not-ready': (f) => `Not ready for the test: ${f.items}.`,
   'running-time': (f) => `The system has run ${f.minutes}; it takes ${f.least}.`,
   'return-too-cool': (f) => `The return air was down to ${f.actual}; the test needs at least ${f.least}.`,
+  'return-too-warm': (f) => `The return air is at ${f.actual}; the maker allows the test up to ${f.most}.`,
   'outdoor-too-cold': (f) => `It is ${f.actual} outdoors; the test needs at least ${f.least}.`,
-  'outdoor-too-hot': (f) => `It is ${f.actual} outdoors; a superheat test is allowed up to ${f.most}.`,
+  'outdoor-too-hot': (f) => `It is ${f.actual} outdoors; the test is allowed up to ${f.most}.`,
   'access-hole-missing':
     'An access hole beside the coil for the air sensors is part of this test: it is not recorded as there.',
   stale: (f) => `Too old to count: ${f.readings}.`,

@@ -93,6 +93,7 @@ function criterionAnswer(criterion: CriterionResult, system: UnitSystem): Criter
     targetSource: criterion.targetSource,
     deviation: deviation && uncertainAmount(deviation, system),
     tolerance: tolerance && toleranceAnswer(tolerance, KIND_OF_TOLERANCE[criterion.criterion] ?? 'differenceK', system),
+    toleranceSource: tolerance && tolerance.source,
     byRule: criterion.byRule,
     probabilityWithin: criterion.probabilityWithin,
     onlyJust: criterion.onlyJust,
@@ -103,7 +104,11 @@ function criterionAnswer(criterion: CriterionResult, system: UnitSystem): Criter
 }
 
 /** A tolerance stands without an actual value, so its unit cannot come from one; the others judge a temperature difference. */
-const KIND_OF_TOLERANCE: Readonly<Partial<Record<CriterionId, QuantityKind>>> = { airflow: 'flowM3PerS' };
+const KIND_OF_TOLERANCE: Readonly<Partial<Record<CriterionId, QuantityKind>>> = {
+  airflow: 'flowM3PerS',
+  'liquid-pressure': 'pressureDifferencePa',
+  'heating-discharge-pressure': 'pressureDifferencePa',
+};
 
 function toleranceAnswer({ low, high }: Tolerance, kind: QuantityKind, system: UnitSystem): Criterion['tolerance'] {
   const limit = (value: number | null) => (value === null ? null : presentValue(kind, value, system).value);

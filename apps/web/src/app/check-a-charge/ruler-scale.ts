@@ -1,5 +1,11 @@
 /** The fixed scale of each criterion's ruler, in the engine's units, and the values laid on it. */
-import { differenceToK, expandedUncertainty, type CriterionId, type CriterionResult } from '@chargewright/engine';
+import {
+  differenceToK,
+  expandedUncertainty,
+  pressureDifferenceToPa,
+  type CriterionId,
+  type CriterionResult,
+} from '@chargewright/engine';
 import type { RulerScale, RulerValues } from './ruler-geometry';
 
 const scaleF = (low: number, high: number): RulerScale => ({
@@ -12,7 +18,16 @@ const SCALES: Readonly<Partial<Record<CriterionId, RulerScale>>> = {
   superheat: scaleF(0, 40),
   'superheat-window': scaleF(0, 40),
   subcooling: scaleF(0, 25),
+  'liquid-line-approach': scaleF(0, 30),
   'temperature-split': scaleF(5, 35),
+};
+
+/** Temperatures and pressures by a maker's table lie anywhere: so much to either side of the target is drawn. */
+const AROUND_TARGET: Readonly<Partial<Record<CriterionId, number>>> = {
+  'suction-line-temperature': differenceToK(15, 'deltaF'),
+  'heating-discharge-temperature': differenceToK(30, 'deltaF'),
+  'liquid-pressure': pressureDifferenceToPa(60, 'psi'),
+  'heating-discharge-pressure': pressureDifferenceToPa(60, 'psi'),
 };
 
 /** Airflow has no scale of its own: it depends on the size of the unit, which is not typed and retyped like a reading. */
@@ -21,7 +36,10 @@ const AIRFLOW_SPAN = { low: 0.5, high: 1.5 } as const;
 function scaleOf({ criterion, target }: CriterionResult): RulerScale | null {
   const scale = SCALES[criterion];
   if (scale) return scale;
-  if (criterion !== 'airflow' || target === null) return null;
+  if (target === null) return null;
+  const around = AROUND_TARGET[criterion];
+  if (around !== undefined) return { low: target.value - around, high: target.value + around };
+  if (criterion !== 'airflow') return null;
   return { low: target.value * AIRFLOW_SPAN.low, high: target.value * AIRFLOW_SPAN.high };
 }
 

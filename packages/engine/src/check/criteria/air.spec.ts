@@ -151,6 +151,7 @@ describe('the split criterion', () => {
       low: differenceToK(-3, 'deltaF'),
       high: differenceToK(3, 'deltaF'),
       floored: false,
+      source: 'procedure',
     });
     for (const [deltaF, byRule] of [
       [19.9, 'passes'],
@@ -185,7 +186,7 @@ describe('the airflow criterion', () => {
     const criterion = criterionOf(evaluate(valveRequest(measured(airflow))), 'airflow');
     expect(criterion.finding).toBe(finding);
     expect(criterion.targetSource).toBe('airflow-per-capacity');
-    expect(criterion.tolerance).toEqual({ low: 0, high: null, floored: false });
+    expect(criterion.tolerance).toEqual({ low: 0, high: null, floored: false, source: 'procedure' });
   });
 });
 

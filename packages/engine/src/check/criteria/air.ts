@@ -14,6 +14,7 @@ import type { AirflowEvidence, AirflowRules, Procedure, SplitEvidence } from '..
 import type { CriterionResult, TargetSource } from '../result';
 import { conditionsGate } from './conditions';
 import { judgeCriterion, unjudged } from './criterion';
+import { halfWidth, symmetric } from './tolerance';
 
 /** Target of the split, for its criterion and for the gate. */
 export function splitTarget({ readings }: CheckInput, { returnWetBulb }: DerivedQuantities): Quantity {
@@ -30,14 +31,13 @@ export function judgeSplit(
   const actual = derived.temperatureSplit;
   if (unfit !== null) return unjudged('temperature-split', false, 'not-verifiable', unfit, actual);
   const { procedure } = input;
-  const tolerance = procedure.temperatureSplit.toleranceK.value;
   return judgeCriterion({
     criterion: 'temperature-split',
     required: false,
     actual,
     target,
     targetSource: 'split-table',
-    tolerance: () => ({ low: -tolerance, high: tolerance, floored: false }),
+    tolerance: () => symmetric(halfWidth(null, procedure.temperatureSplit.toleranceK)),
     decision: procedure.decision,
     probabilityOfNoTarget: isKnown(target) ? noSplitTarget(input, derived) : 0,
     mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
@@ -71,7 +71,12 @@ export function judgeAirflow(input: CheckInput): CriterionResult | null {
     actual: measured.quantity,
     target: least.target,
     targetSource: least.source,
-    tolerance: () => ({ low: procedure.airflow.limitPasses ? 0 : LEAST_EXCESS_M3_PER_S, high: null, floored: false }),
+    tolerance: () => ({
+      low: procedure.airflow.limitPasses ? 0 : LEAST_EXCESS_M3_PER_S,
+      high: null,
+      floored: false,
+      source: 'procedure',
+    }),
     decision: procedure.decision,
     gates: (evidence) => [staleReason(input, evidence)],
   });

@@ -1,111 +1,75 @@
 /** The criteria that judge the charge: superheat of a fixed orifice; subcooling and the superheat window of a valve. */
-import { derive } from '../../derivation/derive';
-import type { Known, Quantity } from '../../derivation/quantity';
-import { bareValue, isKnown, missing } from '../../derivation/quantity';
-import { SUPERHEAT_CHART_A } from '../../methods/data/superheat-chart-a';
-import { probabilityOfNoTarget } from '../../methods/target-existence';
-import { SUPERHEAT_TABLE_FINER } from '../../methods/data/superheat-table-finer';
-import type { Chart } from '../../methods/chart';
-import { chartRounding, targetSuperheat } from '../../methods/targets';
+import type { Known } from '../../derivation/quantity';
+import { bareValue, isKnown } from '../../derivation/quantity';
+import type { ChargeMethod } from '../charge-method';
+import { isEntered, usableChart } from '../charge-method';
 import type { Reason } from '../codes';
 import type { DerivedQuantities } from '../derived-quantities';
 import { unfitPortReason } from '../fit-for-test';
 import type { CheckInput, CheckSetup } from '../input';
-import { isFixedOrifice } from '../input';
-import type { Procedure, SuperheatChartId } from '../procedure';
-import type { CriterionResult, Tolerance } from '../result';
+import type { Procedure } from '../procedure';
+import type { CriterionResult, ToleranceSource } from '../result';
+import type { ChargeTarget } from './charge-target';
+import { chargeTarget } from './charge-target';
 import { judgeCriterion, judgeWindow, unjudged } from './criterion';
+import { floored, halfWidth, sourceOf } from './tolerance';
 
 export interface ChargeJudgement {
   readonly input: CheckInput;
   readonly derived: DerivedQuantities;
   readonly unfit: Reason | null;
-  /** Gates shared by all charge criteria: impossible readings, conditions, age, airflow. */
-  readonly gates: (evidence: readonly Known[]) => readonly (Reason | null)[];
+  /** By what the charge is decided: its criterion is required. */
+  readonly method: ChargeMethod;
+  /** Gates shared by all charge criteria, with the limits of the method that is judged by: impossible readings, conditions, age, airflow. */
+  readonly gates: (method: ChargeMethod) => (evidence: readonly Known[]) => readonly (Reason | null)[];
 }
 
 /**
  * A measured subcooling or superheat below zero means about zero: nothing that rests on the readings is called *within*, however poor the
  * instruments that might excuse it.
  */
-function negativeDifference({ subcooling, superheat }: DerivedQuantities): Reason | null {
+export function negativeDifference({ subcooling, superheat }: DerivedQuantities): Reason | null {
   if ((bareValue(subcooling) ?? 0) < 0) return { code: 'flash', figures: {} };
   return (bareValue(superheat) ?? 0) < 0 ? { code: 'saturation-impossible', figures: {} } : null;
 }
 
-export interface SuperheatTarget {
-  readonly quantity: Quantity;
-  readonly source: 'entered' | SuperheatChartId;
-  readonly probabilityOfNoTarget: number;
-}
+const isMissing = ({ quantity }: ChargeTarget): boolean => quantity.state === 'missing' && quantity.inputs.length === 0;
 
-const SUPERHEAT_CHARTS: Readonly<Record<SuperheatChartId, Chart>> = {
-  'makers-chart-a': SUPERHEAT_CHART_A,
-  'finer-table': SUPERHEAT_TABLE_FINER,
-};
-
-/** Entered, where the procedure takes that; else its table, which is for split systems: a packaged unit needs its maker's own. */
-export function superheatTarget(input: CheckInput, derived: DerivedQuantities): SuperheatTarget {
-  const { procedure, setup, readings } = input;
-  const { chart: source, enteredTarget } = procedure.superheat;
-  if (setup.targetSuperheat !== undefined && enteredTarget) {
-    return { quantity: setup.targetSuperheat, source: 'entered', probabilityOfNoTarget: 0 };
-  }
-  if (setup.kind === 'packaged') {
-    return { quantity: missing(), source: 'entered', probabilityOfNoTarget: 0 };
-  }
-  const chart = SUPERHEAT_CHARTS[source];
-  const outdoorK: Quantity = readings.outdoorDryBulb?.quantity ?? missing('outdoorDryBulb');
-  const wetBulbK = derived.returnWetBulb;
-  const quantity = derive(targetSuperheat(chart), { wetBulbK, outdoorK }, [chartRounding(chart)]);
-  const probability =
-    isKnown(quantity) && isKnown(outdoorK) && isKnown(wetBulbK)
-      ? probabilityOfNoTarget(chart, {
-          rowK: outdoorK.value,
-          rowUK: outdoorK.u,
-          columnK: wetBulbK.value,
-          columnUK: wetBulbK.u,
-        })
-      : 0;
-  return { quantity, source, probabilityOfNoTarget: probability };
-}
-
-export function judgeSuperheat(
-  { input, derived, unfit, gates }: ChargeJudgement,
-  target: SuperheatTarget,
-): CriterionResult {
-  const actual = derived.superheat;
-  if (unfit !== null) return unjudged('superheat', true, 'not-verifiable', unfit, actual);
-  if (target.quantity.state === 'missing' && target.quantity.inputs.length === 0 && isKnown(actual)) {
-    return unjudged('superheat', true, 'not-judged', { code: 'target-missing', figures: {} }, actual);
-  }
+export function judgeSuperheat({ input, derived, unfit, method, gates }: ChargeJudgement): CriterionResult {
   const { procedure } = input;
-  const toleranceK = procedure.superheat.toleranceK.value;
-  const floorK = procedure.superheat.floorK?.value ?? null;
+  const actual = derived.superheat;
+  const required = method.kind === 'superheat';
+  if (unfit !== null) return unjudged('superheat', required, 'not-verifiable', unfit, actual);
+  const own = methodOf(input, 'superheat');
+  const target = chargeTarget(input, derived, own);
+  if (isMissing(target) && isKnown(actual)) {
+    return unjudged('superheat', required, 'not-judged', { code: 'target-missing', figures: {} }, actual);
+  }
+  const width = halfWidth(own.chart, procedure.superheat.toleranceK);
   return judgeCriterion({
     criterion: 'superheat',
-    required: true,
+    required,
     actual,
     target: target.quantity,
     targetSource: target.source,
-    tolerance: (known) => flooredTolerance(known.value, toleranceK, floorK),
+    tolerance: ({ value }) => floored(width, value, procedure.superheat.floorK),
     decision: procedure.decision,
     probabilityOfNoTarget: target.probabilityOfNoTarget,
     mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
-    gates,
+    gates: gates(own),
     neverWithin: negativeDifference(derived),
   });
 }
 
-/** The measured value itself must not pass under the floor, whatever the target allows. */
-function flooredTolerance(targetK: number, toleranceK: number, floorK: number | null): Tolerance {
-  const floored = floorK !== null && floorK - targetK > -toleranceK;
-  return { low: floored ? floorK - targetK : -toleranceK, high: toleranceK, floored };
-}
+/** How superheat or subcooling would be judged here, whether or not it decides. */
+const methodOf = (input: CheckInput, kind: 'superheat' | 'subcooling'): ChargeMethod => ({
+  kind,
+  chart: isEntered(input, kind) ? null : usableChart(input, kind),
+});
 
-export function judgeSubcooling({ input, derived, unfit, gates }: ChargeJudgement): CriterionResult {
-  const { procedure, setup } = input;
-  const required = !isFixedOrifice(setup);
+export function judgeSubcooling({ input, derived, unfit, method, gates }: ChargeJudgement): CriterionResult {
+  const { procedure } = input;
+  const required = method.kind === 'subcooling';
   const actual = derived.subcooling;
   if (unfit !== null) return unjudged('subcooling', required, 'not-verifiable', unfit, actual);
   const unfitPort = unfitPortReason(input);
@@ -114,25 +78,28 @@ export function judgeSubcooling({ input, derived, unfit, gates }: ChargeJudgemen
     const finding = unfitPort.code === 'liquid-reading-at-discharge-port' ? 'not-verifiable' : 'not-judged';
     return unjudged('subcooling', required, finding, unfitPort, actual);
   }
-  const target = setup.targetSubcooling;
-  if (target === undefined && isKnown(actual)) {
+  const own = methodOf(input, 'subcooling');
+  const target = chargeTarget(input, derived, own);
+  if (isMissing(target) && isKnown(actual)) {
     return unjudged('subcooling', required, 'not-judged', { code: 'target-missing', figures: {} }, actual);
   }
-  const toleranceK = procedure.subcooling.toleranceK.value;
+  const width = halfWidth(own.chart, procedure.subcooling.toleranceK);
   return judgeCriterion({
     criterion: 'subcooling',
     required,
     actual,
-    target: target ?? missing(),
-    targetSource: 'entered',
-    tolerance: (known) => flooredTolerance(known.value, toleranceK, procedure.subcooling.leastK?.value ?? null),
+    target: target.quantity,
+    targetSource: target.source,
+    tolerance: ({ value }) => floored(width, value, procedure.subcooling.leastK),
     decision: procedure.decision,
-    gates,
+    probabilityOfNoTarget: target.probabilityOfNoTarget,
+    mostProbabilityOfNoTarget: procedure.mostProbabilityOfNoTarget.value,
+    gates: gates(own),
     neverWithin: negativeDifference(derived),
   });
 }
 
-export function judgeSuperheatWindow({ input, derived, unfit, gates }: ChargeJudgement): CriterionResult {
+export function judgeSuperheatWindow({ input, derived, unfit, method, gates }: ChargeJudgement): CriterionResult {
   const { procedure, setup } = input;
   const actual = derived.superheat;
   if (unfit !== null) return unjudged('superheat-window', true, 'not-verifiable', unfit, actual);
@@ -142,9 +109,9 @@ export function judgeSuperheatWindow({ input, derived, unfit, gates }: ChargeJud
     required: true,
     actual,
     targetSource: range.source,
-    tolerance: { low: range.lowK, high: range.highK, floored: false },
+    tolerance: { low: range.lowK, high: range.highK, floored: false, source: range.toleranceSource },
     decision: procedure.decision,
-    gates,
+    gates: gates(method),
     neverWithin: negativeDifference(derived),
   });
 }
@@ -153,6 +120,7 @@ interface SuperheatWindow {
   readonly lowK: number;
   readonly highK: number;
   readonly source: 'procedure-window' | 'entered-range' | 'window-and-range';
+  readonly toleranceSource: ToleranceSource;
 }
 
 /** The procedure's window, the maker's range in its place, or what both allow. */
@@ -161,8 +129,8 @@ function windowOf(
   entered: CheckSetup['superheatRange'],
 ): SuperheatWindow {
   const own = { lowK: lowK.value, highK: highK.value };
-  if (entered === undefined) return { ...own, source: 'procedure-window' };
-  if (makersRange === 'replaces') return { ...entered, source: 'entered-range' };
+  if (entered === undefined) return { ...own, source: 'procedure-window', toleranceSource: sourceOf(lowK) };
+  if (makersRange === 'replaces') return { ...entered, source: 'entered-range', toleranceSource: 'makers-data' };
   const both = { lowK: Math.max(own.lowK, entered.lowK), highK: Math.min(own.highK, entered.highK) };
-  return { ...both, source: 'window-and-range' };
+  return { ...both, source: 'window-and-range', toleranceSource: sourceOf(lowK) };
 }

@@ -1,6 +1,9 @@
 /** Weather, house and running time: whether the procedure's conditions hold. They gate by the rule, on the measured value. */
 import type { Known } from '../../derivation/quantity';
 import { expandedUncertainty } from '../../derivation/quantity';
+import { MAKERS_CHART_FACTS } from '../../methods/makers-chart/kinds';
+import type { ChargeMethod } from '../charge-method';
+import { chargeMethod } from '../charge-method';
 import type { Caution, Reason } from '../codes';
 import { LIMIT_SLACK_K } from '../conformance';
 import type { CheckInput } from '../input';
@@ -9,7 +12,7 @@ import type { CriterionResult } from '../result';
 import { unjudged } from './criterion';
 
 interface TemperatureLimit {
-  readonly code: 'return-too-cool' | 'outdoor-too-cold' | 'outdoor-too-hot';
+  readonly code: 'return-too-cool' | 'return-too-warm' | 'outdoor-too-cold' | 'outdoor-too-hot';
   readonly actual: Known;
   readonly limitK: number;
 }
@@ -22,25 +25,41 @@ function lowestReturn({ visit, readings }: CheckInput): Known | undefined {
   return now.value < recorded.value ? now : recorded;
 }
 
-function temperatureLimits(input: CheckInput): readonly TemperatureLimit[] {
-  const { leastOutdoorK, leastReturnK, mostOutdoorForSuperheatK } = input.procedure.conditions;
-  const returnAir = lowestReturn(input);
-  const outdoor = input.readings.outdoorDryBulb?.quantity;
+/**
+ * The limits that hold for a method: those the maker states beside its table take the place of the procedure's, since the maker comes first. The
+ * procedure's are those of a cooling test.
+ */
+function temperatureLimits(input: CheckInput, method: ChargeMethod | null): readonly TemperatureLimit[] {
   const limits: TemperatureLimit[] = [];
-  if (outdoor !== undefined) {
-    limits.push({ code: 'outdoor-too-cold', actual: outdoor, limitK: leastOutdoorK.value });
-  }
-  if (returnAir !== undefined) {
-    limits.push({ code: 'return-too-cool', actual: returnAir, limitK: leastReturnK.value });
-  }
-  if (outdoor !== undefined && mostOutdoorForSuperheatK !== null && isFixedOrifice(input.setup)) {
-    limits.push({ code: 'outdoor-too-hot', actual: outdoor, limitK: mostOutdoorForSuperheatK.value });
-  }
+  const add = (code: TemperatureLimit['code'], actual: Known | undefined, limitK: number | undefined): void => {
+    if (actual !== undefined && limitK !== undefined) limits.push({ code, actual, limitK });
+  };
+  const outdoor = input.readings.outdoorDryBulb?.quantity;
+  const stated = method?.chart;
+  add('outdoor-too-cold', outdoor, leastOutdoorK(input, method));
+  add('return-too-cool', lowestReturn(input), stated?.leastReturnK ?? leastReturnK(input));
+  add('outdoor-too-hot', outdoor, stated?.mostOutdoorK ?? mostOutdoorK(input));
+  add('return-too-warm', input.readings.returnDryBulb?.quantity, stated?.mostReturnK);
   return limits;
 }
 
+/** The maker's limit; else the procedure's, or that of the method where it is higher. */
+export function leastOutdoorK({ procedure, setup }: CheckInput, method: ChargeMethod | null): number | undefined {
+  if (method?.chart?.leastOutdoorK !== undefined) return method.chart.leastOutdoorK;
+  const ofProcedure = setup.mode === 'cooling' ? procedure.conditions.leastOutdoorK?.value : undefined;
+  const ofMethod = method === null ? undefined : MAKERS_CHART_FACTS[method.kind].leastOutdoorK?.value;
+  const both = [ofProcedure, ofMethod].filter((limit) => limit !== undefined);
+  return both.length === 0 ? undefined : Math.max(...both);
+}
+
+const leastReturnK = ({ procedure, setup }: CheckInput): number | undefined =>
+  setup.mode === 'cooling' ? procedure.conditions.leastReturnK?.value : undefined;
+
+const mostOutdoorK = ({ procedure, setup }: CheckInput): number | undefined =>
+  setup.mode === 'cooling' && isFixedOrifice(setup) ? procedure.conditions.mostOutdoorForSuperheatK?.value : undefined;
+
 /** The first condition that shuts the test, or `null`. What was not recorded does not shut it here. */
-export function conditionsGate(input: CheckInput): Reason | null {
+export function conditionsGate(input: CheckInput, method = chargeMethod(input)): Reason | null {
   const { procedure, visit } = input;
   const least = procedure.conditions.leastRunningMinutes.value;
   if (visit.runningMinutes !== undefined && visit.runningMinutes < least) {
@@ -48,7 +67,7 @@ export function conditionsGate(input: CheckInput): Reason | null {
     return { code: 'running-time', figures: { minutes, least: { kind: 'minutes', value: least } } };
   }
   return (
-    temperatureLimits(input)
+    temperatureLimits(input, method)
       .map(beyondLimit)
       .find((reason) => reason !== null) ?? null
   );
@@ -56,7 +75,7 @@ export function conditionsGate(input: CheckInput): Reason | null {
 
 function beyondLimit({ code, actual, limitK }: TemperatureLimit): Reason | null {
   const [at, limit] = [temperature(actual.value), temperature(limitK)];
-  if (code === 'outdoor-too-hot') {
+  if (code === 'outdoor-too-hot' || code === 'return-too-warm') {
     return actual.value > limitK + LIMIT_SLACK_K ? { code, figures: { actual: at, most: limit } } : null;
   }
   return actual.value < limitK - LIMIT_SLACK_K ? { code, figures: { actual: at, least: limit } } : null;
@@ -84,7 +103,7 @@ function instrumentsReason({ visit, procedure }: CheckInput): Reason | null {
 
 /** A caution for each condition whose limit lies inside the reading's uncertainty, on either side. */
 export const nearLimitCautions = (input: CheckInput): readonly Caution[] =>
-  temperatureLimits(input)
+  temperatureLimits(input, chargeMethod(input))
     .filter(({ actual, limitK }) => Math.abs(actual.value - limitK) < expandedUncertainty(actual))
     .map(({ actual, limitK }) => ({
       code: 'near-limit',
@@ -104,8 +123,8 @@ export function conditionsRecorded(input: CheckInput): boolean {
 }
 
 export function judgeConditions(input: CheckInput): CriterionResult {
-  // the limits are those of a cooling test
-  if (input.setup.mode === 'heating') {
+  // without a heating table there is nothing that the limits would be of
+  if (input.setup.mode === 'heating' && chargeMethod(input) === null) {
     return unjudged('conditions', false, 'not-verifiable', { code: 'heating-mode', figures: {} });
   }
   const required = input.procedure.conditions.unrecorded === 'gate';

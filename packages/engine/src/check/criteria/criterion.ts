@@ -16,7 +16,8 @@ export interface NumericCriterion {
   readonly actual: Quantity;
   readonly target: Quantity;
   readonly targetSource: TargetSource;
-  readonly tolerance: (target: Known) => Tolerance;
+  /** `null`: none can be told for this target. */
+  readonly tolerance: (target: Known) => Tolerance | null;
   readonly decision: Decision;
   readonly probabilityOfNoTarget?: number;
   readonly mostProbabilityOfNoTarget?: number;
@@ -51,10 +52,7 @@ export const unjudged = (
 /** Judges actual against target. The numbers stand whenever they exist; gates change only the finding. */
 export function judgeCriterion(input: NumericCriterion): CriterionResult {
   const { criterion, required, actual, target, targetSource } = input;
-  const deviation = derive(deviationOf(criterion, criterion === 'airflow' ? 'flowM3PerS' : 'differenceK'), {
-    actual,
-    target,
-  });
+  const deviation = derive(deviationOf(criterion, kindOfDeviation(criterion)), { actual, target });
   const tolerance = isKnown(target) ? input.tolerance(target) : null;
   const conformance = isKnown(deviation) && tolerance !== null ? conformanceOf(input, deviation, tolerance) : null;
   const numbers = {
@@ -69,6 +67,13 @@ export function judgeCriterion(input: NumericCriterion): CriterionResult {
     probabilityWithin: conformance?.probabilityWithin ?? null,
   };
   return { ...numbers, ...findingOf(input, conformance) };
+}
+
+/** What is left when two of them are subtracted. */
+function kindOfDeviation(criterion: CriterionId): 'flowM3PerS' | 'pressureDifferencePa' | 'differenceK' {
+  if (criterion === 'airflow') return 'flowM3PerS';
+  const pressure = criterion === 'liquid-pressure' || criterion === 'heating-discharge-pressure';
+  return pressure ? 'pressureDifferencePa' : 'differenceK';
 }
 
 /** A window holds the actual value itself; there is no target to deviate from. */

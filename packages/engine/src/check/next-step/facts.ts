@@ -8,7 +8,9 @@ import type { Caution, OverallFinding, Reason, ReasonCode, Stop, StopCode } from
 import { conditionsGate, recordGate } from '../criteria/conditions';
 import { airflowGate } from '../criteria/air';
 import type { AirflowEvidence, SplitEvidence } from '../procedure';
-import type { SuperheatTarget } from '../criteria/charge';
+import type { ChargeTarget } from '../criteria/charge-target';
+import { MAKERS_CHART_FACTS } from '../../methods/makers-chart/kinds';
+import type { ChargeMethod } from '../charge-method';
 import { LIMIT_SLACK_K } from '../conformance';
 import type { DerivedQuantities } from '../derived-quantities';
 import type { CheckInput } from '../input';
@@ -22,7 +24,8 @@ export interface Facts {
   readonly impossible: 'none' | 'ports-swapped' | 'saturation-impossible';
   readonly stop: StopCode | 'none';
   readonly shutDown: 'yes' | 'no';
-  readonly condition: 'open' | 'running-time' | 'return-too-cool' | 'outdoor-too-cold' | 'outdoor-too-hot';
+  readonly condition:
+    'open' | 'running-time' | 'return-too-cool' | 'return-too-warm' | 'outdoor-too-cold' | 'outdoor-too-hot';
   /** What the procedure wants on record and is not. */
   readonly record: 'open' | 'conditions' | 'access-hole' | 'instruments';
   /** Whether the procedure shuts the test for want of proof. */
@@ -30,9 +33,22 @@ export interface Facts {
   readonly runningTime: 'recorded' | 'unrecorded';
   /** Why a required criterion has no number, or `none`. */
   readonly lacking:
-    'none' | 'readings' | 'stale' | 'nameplate-target' | 'port' | 'outside-tables' | 'suction-line-table';
+    | 'none'
+    | 'readings'
+    | 'stale'
+    | 'nameplate-target'
+    | 'target-port'
+    | 'port'
+    | 'outside-tables'
+    | 'suction-line-table';
   readonly superheatTarget: 'clear' | 'near-floor' | 'none-here' | 'not-used';
   readonly metering: 'orifice' | 'valve';
+  /** What decides: superheat of an orifice or subcooling of a valve, another method of the maker, or one in heating. */
+  readonly method: 'own' | 'makers' | 'heating';
+  /** Whether a maker's table has a target here. */
+  readonly makersTarget: 'clear' | 'none-here';
+  /** How full the system is by the maker's method, where that decides. */
+  readonly charge: 'unknown' | 'low' | 'within' | 'high';
   /** Where nothing counts, what the split shows: it may still tell the cause of a stop. */
   readonly airflow: AirflowEvidence;
   readonly airSeen: 'yes' | 'no';
@@ -41,7 +57,7 @@ export interface Facts {
   readonly overall: OverallFinding;
   readonly settling: 'possible' | 'impossible';
   readonly superheat: Side;
-  /** By the target where one was entered; see `subcoolingLevel` for the rest. */
+  /** By the target where one was entered, see `subcoolingLevel` for the rest; on a valve by whatever decides how full the system is. */
   readonly subcooling: Side;
   readonly subcoolingLevel: 'unread' | 'unreadable' | 'low' | 'unclear' | 'clear' | 'high';
   /** `warm` also stands for a valve whose head was raised by the maker's method. */
@@ -60,7 +76,9 @@ export interface Evidence {
   readonly input: CheckInput;
   readonly derived: DerivedQuantities;
   readonly criteria: readonly CriterionResult[];
-  readonly target: SuperheatTarget;
+  /** By what the charge is decided, and its target; `null` in heating without a heating table. */
+  readonly method: ChargeMethod | null;
+  readonly target: ChargeTarget | null;
   readonly unfit: Reason | null;
   readonly impossible: Reason | null;
   readonly stops: readonly Stop[];
@@ -99,13 +117,16 @@ export function gatherFacts(evidence: Evidence): Facts {
     lacking: whatIsLacking(criteria),
     superheatTarget: superheatTargetFact(evidence),
     metering: isFixedOrifice(setup) ? 'orifice' : 'valve',
+    method: methodFact(evidence),
+    makersTarget: makersTargetFact(evidence),
+    charge: chargeFact(evidence),
     airflow: airflow === 'nothing' ? evidence.split : airflow,
     airSeen: readings.supplyDryBulb !== undefined || readings.airflow !== undefined ? 'yes' : 'no',
     quality: readingQuality(evidence.cautions),
     overall,
     settling: canSettle(evidence) ? 'possible' : 'impossible',
     superheat: sideOf(criteria, isFixedOrifice(setup) ? 'superheat' : 'superheat-window'),
-    subcooling: sideOf(criteria, 'subcooling'),
+    subcooling: subcoolingSide(evidence),
     subcoolingLevel: subcoolingLevel(evidence),
     weather: weatherFact(input),
     leak: leakFact(input),
@@ -118,7 +139,11 @@ export function gatherFacts(evidence: Evidence): Facts {
 
 function conditionFact(code: ReasonCode | undefined): Facts['condition'] {
   const shut =
-    code === 'running-time' || code === 'return-too-cool' || code === 'outdoor-too-cold' || code === 'outdoor-too-hot';
+    code === 'running-time' ||
+    code === 'return-too-cool' ||
+    code === 'return-too-warm' ||
+    code === 'outdoor-too-cold' ||
+    code === 'outdoor-too-hot';
   return shut ? code : 'open';
 }
 
@@ -137,19 +162,48 @@ function whatIsLacking(criteria: readonly CriterionResult[]): Facts['lacking'] {
   const codes = criteria.filter(({ required }) => required).map(({ reason }) => reason?.code);
   if (codes.includes('readings-missing')) return 'readings';
   if (codes.includes('stale')) return 'stale';
-  if (codes.includes('target-missing') || codes.includes('target-for-other-port')) return 'nameplate-target';
+  if (codes.includes('target-for-other-port')) return 'target-port';
+  if (codes.includes('target-missing')) return 'nameplate-target';
   if (codes.includes('liquid-reading-at-discharge-port')) return 'port';
   if (codes.includes('suction-port-only')) return 'suction-line-table';
   return codes.includes('outside-curve') || codes.includes('outside-range') ? 'outside-tables' : 'none';
 }
 
-function superheatTargetFact({ input, target, criteria }: Evidence): Facts['superheatTarget'] {
-  if (!isFixedOrifice(input.setup)) return 'not-used';
+function superheatTargetFact({ method, target, criteria }: Evidence): Facts['superheatTarget'] {
+  if (method?.kind !== 'superheat' || target === null) return 'not-used';
   const reason = criteria.find(({ criterion }) => criterion === 'superheat')?.reason?.code;
   if (target.quantity.state === 'refused' && target.source !== 'entered') return 'none-here';
   if (reason === 'no-target-here' || reason === 'target-may-not-exist') return 'none-here';
   const nearFloor = isKnown(target.quantity) && target.quantity.value <= NEAR_FLOOR_TARGET_K + LIMIT_SLACK_K;
   return nearFloor ? 'near-floor' : 'clear';
+}
+
+function methodFact({ input, method }: Evidence): Facts['method'] {
+  if (input.setup.mode === 'heating') return 'heating';
+  return method === null || method.kind === 'superheat' || method.kind === 'subcooling' ? 'own' : 'makers';
+}
+
+function makersTargetFact({ method, criteria }: Evidence): Facts['makersTarget'] {
+  const reason = criteria.find(({ criterion }) => criterion === method?.kind)?.reason?.code;
+  const none = reason === 'no-target-here' || reason === 'target-may-not-exist';
+  return method?.chart != null && none ? 'none-here' : 'clear';
+}
+
+/** What a deviation from the maker's table means: which side is too much differs from method to method. */
+function chargeFact({ method, criteria }: Evidence): Facts['charge'] {
+  if (method === null || method.kind === 'superheat' || method.kind === 'subcooling') return 'unknown';
+  const side = sideOf(criteria, method.kind);
+  if (side === 'unknown' || side === 'within') return side;
+  return side === MAKERS_CHART_FACTS[method.kind].overchargeIs ? 'high' : 'low';
+}
+
+const SUBCOOLING_OF_CHARGE = { unknown: 'unknown', low: 'below', within: 'within', high: 'above' } as const;
+
+function subcoolingSide(evidence: Evidence): Side {
+  const valve = !isFixedOrifice(evidence.input.setup);
+  return valve && methodFact(evidence) === 'makers'
+    ? SUBCOOLING_OF_CHARGE[chargeFact(evidence)]
+    : sideOf(evidence.criteria, 'subcooling');
 }
 
 function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
@@ -162,7 +216,7 @@ function readingQuality(cautions: readonly Caution[]): Facts['quality'] {
 }
 
 /** Whether these instruments could ever call the criterion within: at the middle of its band, at these conditions. */
-function canSettle({ criteria, input, target }: Evidence): boolean {
+function canSettle({ criteria, input, method, target }: Evidence): boolean {
   const guard = input.procedure.decision.clearFrom.value;
   return criteria
     .filter(({ required, finding }) => required && finding === 'too-close-to-call')
@@ -171,7 +225,7 @@ function canSettle({ criteria, input, target }: Evidence): boolean {
       if (measured === null || tolerance?.low == null || tolerance.high === null) return true;
       const middle = 0.5 * (tolerance.low + tolerance.high);
       const most = probabilityBetween(middle, measured.u, tolerance.low, tolerance.high);
-      return most * (criterion === 'superheat' ? 1 - target.probabilityOfNoTarget : 1) >= guard;
+      return most * (criterion === method?.kind && target !== null ? 1 - target.probabilityOfNoTarget : 1) >= guard;
     });
 }
 
@@ -179,6 +233,7 @@ function canSettle({ criteria, input, target }: Evidence): boolean {
 function sideOf(criteria: readonly CriterionResult[], id: CriterionResult['criterion']): Side {
   const result = criteria.find(({ criterion }) => criterion === id);
   if (result?.byRule == null || result.tolerance === null) return 'unknown';
+  if (result.finding === 'above' || result.finding === 'below') return result.finding;
   if (result.byRule === 'passes') return 'within';
   const measured = result.deviation ?? result.actual;
   const { high } = result.tolerance;

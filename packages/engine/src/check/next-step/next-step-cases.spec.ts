@@ -3,13 +3,14 @@ import { describe, expect, it } from 'vitest';
 import { bubblePressurePa, dewPressurePa } from '../../refrigerants/saturation';
 import { PA_PER_PSI, temperatureToK } from '../../units';
 import { airflowEvidence, judgeAirflow, judgeSplit, splitEvidence, splitTarget } from '../criteria/air';
-import { superheatTarget } from '../criteria/charge';
+import { chargeMethod } from '../charge-method';
+import { chargeTarget } from '../criteria/charge-target';
 import type { NextStepCode, NotYetCode } from '../codes';
 import { deriveQuantities } from '../derived-quantities';
 import { unfitReason } from '../fit-for-test';
-import type { EvaluationRequest, ReadingInput } from '../request';
+import type { EvaluationRequest, MakersChartInput, ReadingInput } from '../request';
 import { impossibleReadings } from '../saturation-plausibility';
-import type { ReadingChanges } from '../testing/healthy-systems';
+import type { Changes, ReadingChanges } from '../testing/healthy-systems';
 import { evaluate, inputOf, orificeRequest, valveRequest, withPlusMinus } from '../testing/healthy-systems';
 import type { Facts } from './facts';
 import { gatherFacts } from './facts';
@@ -334,7 +335,7 @@ const LACKING: readonly Case[] = [
   [
     'a target for another port',
     valve({ setup: { targetSubcoolingPort: 'discharge' } }),
-    'find-nameplate-target',
+    'find-target-for-this-port',
     'move-no-refrigerant',
   ],
   [
@@ -945,6 +946,123 @@ const WITHIN: readonly Case[] = [
   ['valve within, airflow unseen', valve({ readings: { supplyDryBulb: null } }), 'record'],
 ];
 
+/** R-22, 10 °F of subcooling all along: the pressure of 10 °F more than the liquid line. */
+const CURVE: MakersChartInput = {
+  kind: 'liquid-pressure',
+  rows: { unit: 'degF', values: [80, 90, 100, 110] },
+  unit: 'psig',
+  cells: [[168.4], [195.9], [226.3], [259.9]],
+};
+const SUBCOOLING_TABLE: MakersChartInput = {
+  kind: 'subcooling',
+  rows: { unit: 'degF', values: [65, 80, 95, 110] },
+  unit: 'deltaF',
+  cells: [[12], [11], [10], [9]],
+};
+/** 330 psig at 47 °F outdoors and 70 °F indoors. */
+const HEATING_TABLE: MakersChartInput = {
+  kind: 'heating-discharge-pressure',
+  rows: { unit: 'degF', values: [27, 37, 47, 57] },
+  columns: { unit: 'degF', values: [65, 75] },
+  unit: 'psig',
+  cells: [
+    [270, 290],
+    [295, 315],
+    [320, 340],
+    [345, 365],
+  ],
+};
+const packaged = (visit: NonNullable<Changes['visit']> = {}, readings: ReadingChanges = {}): EvaluationRequest =>
+  orifice({ setup: { kind: 'packaged', makersChart: CURVE }, visit, readings });
+const heating = (dischargePressure: number | null, changes: Changes = {}): EvaluationRequest =>
+  valve({
+    ...changes,
+    setup: { mode: 'heating', makersChart: HEATING_TABLE },
+    readings: { outdoorDryBulb: 47, returnDryBulb: 70, dischargePressure, ...changes.readings },
+  });
+const LOW_CURVE = { liquidPressure: 190 } as const;
+const HIGH_CURVE = { liquidPressure: 235 } as const;
+const NO_AIR = {
+  standingPressure: 146,
+  standingOutdoorCoilTemperature: 82,
+  standingIndoorCoilTemperature: 81,
+} as const;
+
+const MAKERS: readonly Case[] = [
+  ['packaged, on the maker’s curve', packaged(), 'record'],
+  ['packaged, below it', packaged({}, LOW_CURVE), 'leak-first', 'add-nothing'],
+  [
+    'packaged, below it, leak found',
+    packaged({ leakSearch: 'found' }, LOW_CURVE),
+    'mend-recover-weigh-in',
+    'add-nothing',
+  ],
+  [
+    'packaged, below it again',
+    packaged({ leakSearch: 'none-found', additionsOnEarlierVisits: 1 }, LOW_CURVE),
+    'locate-mend-weigh-in',
+    'add-nothing',
+  ],
+  ['packaged, below it, no leak found', packaged({ leakSearch: 'none-found' }, LOW_CURVE), 'add-in-steps'],
+  [
+    'packaged, below it, steps used up',
+    orifice({
+      setup: { kind: 'packaged', makersChart: CURVE, ...charged },
+      visit: added(0.7),
+      readings: LOW_CURVE,
+    }),
+    'recover-and-weigh-in',
+    'add-nothing',
+  ],
+  ['packaged, above it', packaged({}, HIGH_CURVE), 'air-test-then-recover', 'add-nothing', 'recover-nothing'],
+  ['packaged, above it, no air', packaged({}, { ...HIGH_CURVE, ...NO_AIR }), 'recover-in-steps', 'add-nothing'],
+  [
+    'packaged valve, below the curve',
+    valve({
+      setup: {
+        kind: 'packaged',
+        targetSubcooling: null,
+        makersChart: { kind: 'liquid-line-approach', unit: 'deltaF', cells: [[4]] },
+      },
+    }),
+    'leak-first',
+    'add-nothing',
+  ],
+  [
+    'a table for the other port',
+    valve({ setup: { targetSubcooling: null, makersChart: { ...SUBCOOLING_TABLE, port: 'discharge' } } }),
+    'find-target-for-this-port',
+    'move-no-refrigerant',
+  ],
+  [
+    'hotter than the table goes',
+    valve({ setup: { targetSubcooling: null, makersChart: SUBCOOLING_TABLE }, readings: { outdoorDryBulb: 62 } }),
+    'reach-a-target',
+    'move-no-refrigerant',
+  ],
+  [
+    'a house warmer than the maker allows',
+    valve({
+      setup: {
+        targetSubcooling: null,
+        makersChart: { ...SUBCOOLING_TABLE, mostReturn: { value: 75, unit: 'degF' } },
+      },
+    }),
+    'cool-the-house',
+    'move-no-refrigerant',
+  ],
+  ['heating, on the maker’s table', heating(330), 'record-heating'],
+  ['heating, below it', heating(290), 'weigh-in-after-heating', 'move-no-refrigerant'],
+  ['heating, above it', heating(370), 'weigh-in-after-heating', 'move-no-refrigerant'],
+  ['heating, nothing read', heating(null), 'take-readings'],
+  [
+    'heating, colder than the table goes',
+    heating(290, { readings: { outdoorDryBulb: 20 } }),
+    'reach-a-target',
+    'move-no-refrigerant',
+  ],
+];
+
 const GROUPS = {
   FIT,
   IMPOSSIBLE,
@@ -957,6 +1075,7 @@ const GROUPS = {
   TOO_CLOSE,
   ORIFICE,
   VALVE,
+  MAKERS,
   WITHIN,
 };
 const CASES: readonly Case[] = Object.values(GROUPS).flat();
@@ -981,11 +1100,13 @@ function factsOf(request: EvaluationRequest): Facts {
     split: judgeSplit(input, derived, targetSplit, unfit),
     target: targetSplit,
   });
+  const method = chargeMethod(input);
   return gatherFacts({
     input,
     derived,
     criteria,
-    target: superheatTarget(input, derived),
+    method,
+    target: method && chargeTarget(input, derived, method),
     unfit,
     impossible: impossibleReadings(input, derived)?.reason ?? null,
     stops: overall.stops,

@@ -96,12 +96,15 @@ const conditions: readonly NextStepRow[] = [
   { when: { condition: ['outdoor-too-cold'] }, step: 'wait-for-warmer-weather', notYet: MOVE_NOTHING },
   { when: { condition: ['outdoor-too-hot'] }, step: 'wait-for-cooler-weather', notYet: MOVE_NOTHING },
   { when: { condition: ['return-too-cool'] }, step: 'warm-the-house', notYet: MOVE_NOTHING },
+  { when: { condition: ['return-too-warm'] }, step: 'cool-the-house', notYet: MOVE_NOTHING },
+  { when: { makersTarget: ['none-here'] }, step: 'reach-a-target', notYet: MOVE_NOTHING },
   { when: { superheatTarget: ['none-here'] }, step: 'reach-a-target', notYet: MOVE_NOTHING },
 ];
 
 const lacking: readonly NextStepRow[] = [
   { when: { lacking: ['readings'] }, step: 'take-readings', notYet: [] },
   { when: { lacking: ['stale'] }, step: 'take-readings-again', notYet: MOVE_NOTHING },
+  { when: { lacking: ['target-port'] }, step: 'find-target-for-this-port', notYet: MOVE_NOTHING },
   { when: { lacking: ['nameplate-target'] }, step: 'find-nameplate-target', notYet: MOVE_NOTHING },
   { when: { lacking: ['port'] }, step: 'read-discharge-pressure', notYet: MOVE_NOTHING },
   { when: { lacking: ['suction-line-table'] }, step: 'find-suction-line-table', notYet: MOVE_NOTHING },
@@ -157,9 +160,22 @@ const lowCharge = (when: Conditions): readonly NextStepRow[] => [
   { when: { ...when, leak: ['add'] }, step: 'add-in-steps', notYet: [] },
 ];
 
+/** No steps of refrigerant in heating: the low side is not where it is in cooling, and the charge is finished in the cooling season. */
+const heating: readonly NextStepRow[] = [
+  { when: { method: ['heating'], overall: ['above', 'below'] }, step: 'weigh-in-after-heating', notYet: MOVE_NOTHING },
+  { when: { method: ['heating'], overall: ['within'] }, step: 'record-heating', notYet: [] },
+];
+
 const outside: readonly NextStepRow[] = [
   { when: { overall: ['above', 'below'], weather: ['low-head'] }, step: 'raise-head', notYet: MOVE_NOTHING },
   { when: { overall: ['above', 'below'], weather: ['cool'] }, step: 'cool-weather-hold', notYet: MOVE_NOTHING },
+];
+
+/** An orifice that is judged by the maker's curve: how full it is, is known before its superheat is looked at. */
+const orificeByMakersMethod: readonly NextStepRow[] = [
+  ...lowCharge({ method: ['makers'], charge: ['low'] }),
+  { when: { method: ['makers'], charge: ['high'], air: ['none'] }, step: 'recover-in-steps', notYet: ADD_NOTHING },
+  { when: { method: ['makers'] }, step: 'air-test-then-recover', notYet: ADD_AND_RECOVER_NOTHING },
 ];
 
 const orifice: readonly NextStepRow[] = [
@@ -243,7 +259,9 @@ export const NEXT_STEP_TABLE: readonly NextStepRow[] = [
   ...quality,
   ...shown,
   ...tooClose,
+  ...heating,
   ...outside,
+  ...forMetering('orifice', orificeByMakersMethod),
   ...forMetering('orifice', orifice),
   ...forMetering('valve', valve),
   ...within,

@@ -20,6 +20,7 @@ export const CEC_2008_INSTALLER: Procedure = {
     toleranceK: differenceRule(5, 'deltaF', ['read', RA_2008]),
     floorK: null,
     enteredTarget: false,
+    makersTable: false,
     chart: 'finer-table',
   },
   subcooling: {
@@ -30,6 +31,7 @@ export const CEC_2008_INSTALLER: Procedure = {
     highAboveK: differenceRule(14, 'deltaF', ['choice', CHOICE]),
   },
   temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', RA_2008]) },
+  makersMethods: null,
   superheatWindow: {
     lowK: differenceRule(4, 'deltaF', ['read', RA_2008]),
     highK: differenceRule(25, 'deltaF', ['read', RA_2008]),

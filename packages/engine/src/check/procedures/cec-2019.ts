@@ -23,6 +23,7 @@ export const CEC_2019_INSTALLER: Procedure = {
     toleranceK: differenceRule(5, 'deltaF', ['read', FORMS_2019]),
     floorK: null,
     enteredTarget: true,
+    makersTable: false,
     chart: 'finer-table',
   },
   subcooling: {
@@ -34,6 +35,7 @@ export const CEC_2019_INSTALLER: Procedure = {
   },
   // the 2019 forms no longer offer the split as a test of airflow; it is shown with the tolerance of 2008
   temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', RA_2008]) },
+  makersMethods: null,
   superheatWindow: {
     lowK: differenceRule(4, 'deltaF', ['read', FORMS_2019]),
     highK: differenceRule(25, 'deltaF', ['read', FORMS_2019]),

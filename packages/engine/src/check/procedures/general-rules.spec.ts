@@ -5,7 +5,7 @@ import { GENERAL_RULES } from './general-rules';
 
 const { superheat, subcooling, superheatWindow, temperatureSplit, airflow, conditions, instruments } = GENERAL_RULES;
 const deltaF = (rule: Rule | null): number => differenceFromK(rule?.value ?? Number.NaN, 'deltaF');
-const degF = (rule: Rule): number => temperatureFromK(rule.value, 'degF');
+const degF = (rule: Rule | null): number => temperatureFromK(rule?.value ?? Number.NaN, 'degF');
 
 describe('general rules', () => {
   it.each([

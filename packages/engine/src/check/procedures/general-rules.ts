@@ -2,6 +2,7 @@
 import { flowToM3PerS, powerToW } from '../../units';
 import type { Procedure } from '../procedure';
 import { differenceRule, plainRule, temperatureRule } from '../procedure';
+import { MAKERS_TOLERANCES } from './makers-tolerances';
 
 const NEW_HOMES_CHECKLIST =
   'Federal new-homes program, HVAC system checklist for raters, rev. 07, items 1.2.11 and 1.2.12';
@@ -20,6 +21,7 @@ export const GENERAL_RULES: Procedure = {
     toleranceK: differenceRule(5, 'deltaF', ['read', `${CHART_A}; ${NEW_HOMES_CHECKLIST}`]),
     floorK: differenceRule(5, 'deltaF', ['read', CHART_A]),
     enteredTarget: true,
+    makersTable: true,
     chart: 'makers-chart-a',
   },
   subcooling: {
@@ -30,6 +32,7 @@ export const GENERAL_RULES: Procedure = {
     highAboveK: differenceRule(14, 'deltaF', ['choice', CHOICE]),
   },
   temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', CEC_2008]) },
+  makersMethods: MAKERS_TOLERANCES,
   superheatWindow: {
     lowK: differenceRule(4, 'deltaF', ['read', CEC_2008]),
     highK: differenceRule(25, 'deltaF', ['read', CEC_2008]),
