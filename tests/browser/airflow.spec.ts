@@ -2,6 +2,7 @@ import {
   airflowPageWords,
   airflowWords,
   checkPageWords,
+  looseChecksWords,
   offlineWords,
   readingWords,
   worksheetWords,
@@ -167,7 +168,8 @@ describe('what was typed', () => {
 
     await check.open();
     await check.setUp('R-22', 'txv');
-    await check.button('New check').filter({ visible: true }).click();
+    await check.button(looseChecksWords.newCheck).filter({ visible: true }).click();
+    await page.waitForTimeout(1000);
     await airflow.open();
     expect(await airflow.field('Amps').count()).toBe(0);
   });
