@@ -33,6 +33,7 @@ export * from './psychrometrics/moist-air-pairs';
 export * from './psychrometrics/inch-pound-enthalpy';
 export * from './psychrometrics/moist-air-range';
 export * from './psychrometrics/standard-atmosphere';
+export * from './psychrometrics/chart-curves';
 export * from './methods/makers-chart/chart-units';
 export * from './methods/makers-chart/kinds';
 export * from './methods/target-comparison';

@@ -1,10 +1,16 @@
-import { attempt, moistAirFromInchPoundEnthalpy, moistAirFromPair, temperatureToK } from '@chargewright/engine';
+import {
+  attempt,
+  MOIST_AIR_PAIRS,
+  moistAirFromInchPoundEnthalpy,
+  moistAirFromPair,
+  temperatureToK,
+} from '@chargewright/engine';
 import type { MoistAir, MoistAirReading } from '@chargewright/engine';
 import { describe, expect, it } from 'vitest';
-import { airRefusal } from './air-refusal';
+import { airRefusal, refusedPairText } from './air-refusal';
 import { airTexts } from './english/moist-air';
 import { names } from './english/names';
-import { formatAmount, formatShift, formatStatedAmount } from './format-amount';
+import { formatAmount, formatShift, formatStatedAmount, formatVapourPressure } from './format-amount';
 
 const pressurePa = 101_325;
 const degF = (value: number) => temperatureToK(value, 'degF');
@@ -41,6 +47,12 @@ describe('why two readings give no air', () => {
     expect(airRefusal(refusal, { pair: ['dryBulbK', 'wetBulbK'], system: 'F-psi' })).toBeNull();
   });
 
+  it('is known of two pairs before anything is typed', () => {
+    expect(refusedPairText(['enthalpyJPerKg', 'wetBulbK'])).toMatch(/^Wet bulb and enthalpy hardly differ/);
+    expect(refusedPairText(['dewPointK', 'humidityRatio'])).toMatch(/^Dew point and humidity ratio say the same/);
+    for (const pair of MOIST_AIR_PAIRS) expect(refusedPairText(pair)).toBe('');
+  });
+
   it('can be said in another language', () => {
     const refusal = refusalOf(() => moistAirFromPair({ pressurePa, wetBulbK: 290, enthalpyJPerKg: 45e3 }));
     const pair: readonly [MoistAirReading, MoistAirReading] = ['wetBulbK', 'enthalpyJPerKg'];
@@ -59,6 +71,11 @@ describe('an amount in its own unit', () => {
     expect(formatAmount(78.26, 'gr/lb')).toBe('78.3 gr/lb');
     expect(formatStatedAmount(31.25, 'kJ/kg')).toBe('31.25 kJ/kg');
     expect(formatStatedAmount(9, 'g/kg')).toBe('9 g/kg');
+  });
+
+  it('is fine enough for the pressure of water vapour', () => {
+    expect(formatVapourPressure(1771, 'F-psi')).toBe('0.257 psia');
+    expect(formatVapourPressure(1771, 'C-bar')).toBe('1.77 kPaa');
   });
 
   it('has a sign where it is a shift', () => {

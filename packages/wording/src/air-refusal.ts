@@ -1,5 +1,5 @@
 /** Why two readings give no moist air, from the engine's refusal: which of them to look at, and the sentence. */
-import { DRY_BULB_LIMITS, humidityRatioFromKgPerKg } from '@chargewright/engine';
+import { DRY_BULB_LIMITS, humidityRatioFromKgPerKg, REFUSED_MOIST_AIR_PAIRS } from '@chargewright/engine';
 import type { EngineError, HumidityRatioUnit, MoistAirReading } from '@chargewright/engine';
 import { airTexts } from './english/moist-air';
 import type { AirFigures } from './english/moist-air';
@@ -44,6 +44,17 @@ const readingOf = ({ details }: EngineError): string =>
 function readingAtFault(refusal: EngineError, { pair }: AirGiven): MoistAirReading {
   const named = readingOf(refusal);
   return pair.find((reading) => reading === named) ?? pair[1];
+}
+
+/** Why a pair determines no air, whatever its values; empty for one that does. */
+export function refusedPairText(
+  pair: readonly MoistAirReading[],
+  language: Pick<Language, 'air' | 'names'> = { air: airTexts, names },
+): string {
+  const refused = REFUSED_MOIST_AIR_PAIRS.find(({ pair: each }) => each.every((reading) => pair.includes(reading)));
+  if (refused === undefined) return '';
+  const code = refused.reason === 'near-parallel-pair' ? 'wet-bulb-and-enthalpy' : 'dew-point-and-humidity-ratio';
+  return messageText(language.air, { code, figures: {} }, { system: 'F-psi', names: language.names });
 }
 
 const OUTSIDE: Readonly<Partial<Record<string, AirCode>>> = {

@@ -26,3 +26,9 @@ export function formatShift(kelvin: number, system: UnitSystem): string {
   const sign = Number(text) > 0 ? '+' : '';
   return `${sign}${text} ${unitLabel(unit)}`;
 }
+
+/** "0.257 psia", "1.77 kPaa": the pressure of water vapour, of which a gauge's decimals would leave little. */
+export const formatVapourPressure = (pressurePa: number, system: UnitSystem): string =>
+  system === 'F-psi'
+    ? `${formatNumber(presentValue('pressurePa', pressurePa, system).value, 3)} ${unitLabel('psia')}`
+    : `${formatNumber(presentValue('pressurePa', pressurePa, 'C-kPa').value, 2)} ${unitLabel('kPaa')}`;

@@ -48,3 +48,5 @@ export * from './worked-example-rows';
 export * from './english/field-safety';
 export * from './english/worksheets';
 export * from './english/airflow-page';
+export * from './english/moist-air';
+export * from './english/moist-air-page';

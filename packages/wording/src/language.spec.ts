@@ -21,6 +21,7 @@ import { offlineWords } from './english/offline';
 import { ownerWords } from './english/owner';
 import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
+import { moistAirWords } from './english/moist-air-page';
 import { propertiesWords } from './english/properties';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
@@ -62,6 +63,7 @@ const english: Language = {
   procedures: procedureWords,
   makersCharts: makersChartWords,
   properties: propertiesWords,
+  moistAir: moistAirWords,
   safety: safetyWords,
   checkPage: checkPageWords,
   looseChecks: looseChecksWords,

@@ -30,6 +30,7 @@ import type { glanceWords } from './english/glance';
 import type { makersDataWords } from './english/makers-data-page';
 import type { ownerWords } from './english/owner';
 import type { targetComparisonWords } from './english/target-comparison';
+import type { moistAirWords } from './english/moist-air-page';
 import type { propertiesWords } from './english/properties';
 import type { readingHelp } from './english/reading-help';
 import type { procedureWords } from './english/procedures';
@@ -120,6 +121,7 @@ export interface Language {
   readonly procedures: typeof procedureWords;
   readonly makersCharts: typeof makersChartWords;
   readonly properties: typeof propertiesWords;
+  readonly moistAir: typeof moistAirWords;
   readonly safety: typeof safetyWords;
   readonly checkPage: typeof checkPageWords;
   readonly looseChecks: typeof looseChecksWords;

@@ -12,6 +12,7 @@ import { makersDataWords } from './english/makers-data-page';
 import { offlineWords } from './english/offline';
 import { targetComparisonWords } from './english/target-comparison';
 import { pageMenuWords } from './english/page-menu';
+import { moistAirWords } from './english/moist-air-page';
 import { propertiesWords } from './english/properties';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
@@ -57,6 +58,7 @@ const roots = Object.entries({
   properties: propertiesWords,
   workedExamples: workedExampleWords,
   workedExampleStories: workedExampleStories('F-psi'),
+  moistAir: moistAirWords,
 });
 
 describe('words of the page', () => {

@@ -1,14 +1,18 @@
 import { ChangeDetectionStrategy, Component } from '@angular/core';
-import { RouterOutlet } from '@angular/router';
+import { RouterLink, RouterLinkActive, RouterOutlet } from '@angular/router';
 import { propertiesWords, safetyWords } from '@chargewright/wording';
 
 /** Two look-ups under one roof. */
 @Component({
   selector: 'app-properties-page',
-  imports: [RouterOutlet],
+  imports: [RouterLink, RouterLinkActive, RouterOutlet],
   template: `
     <main id="main">
       <h1 tabindex="-1">{{ words.title }}</h1>
+      <nav [attr.aria-label]="words.parts">
+        <a routerLink="refrigerant" routerLinkActive="here" ariaCurrentWhenActive="page">{{ words.refrigerant }}</a>
+        <a routerLink="air" routerLinkActive="here" ariaCurrentWhenActive="page">{{ words.air }}</a>
+      </nav>
       <router-outlet />
     </main>
     <footer>{{ standing }}</footer>

@@ -16,6 +16,11 @@ export const propertiesRoutes: Routes = [
         loadComponent: async () => (await import('./refrigerant/refrigerant-properties')).RefrigerantProperties,
         title: `${propertiesWords.refrigerant} · ${title}`,
       },
+      {
+        path: 'air',
+        loadComponent: async () => (await import('./air/air-properties')).AirProperties,
+        title: `${propertiesWords.air} · ${title}`,
+      },
     ],
   },
 ];

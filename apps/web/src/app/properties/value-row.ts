@@ -9,7 +9,8 @@ import { NumberField } from '../quantities/number-field';
   template: `
     <div class="line">
       <div>
-        <label [for]="fieldId()">{{ label() }}</label>
+        <label [for]="fieldId()" [class.seen-by-readers-only]="labelHidden()">{{ label() }}</label>
+        <ng-content />
         @if (note()) {
           <span class="note" [id]="noteId()">{{ note() }}</span>
         }
@@ -36,6 +37,8 @@ import { NumberField } from '../quantities/number-field';
 export class ValueRow {
   readonly fieldId = input.required<string>();
   readonly label = input.required<string>();
+  /** Where what is projected in its place says the same. */
+  readonly labelHidden = input(false);
   readonly note = input('');
   readonly value = input<TypedValue>();
   readonly units = input.required<readonly [string, ...string[]]>();
