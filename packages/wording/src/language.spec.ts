@@ -24,6 +24,7 @@ import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
 import { reasonTexts } from './english/reasons';
+import { separatingTestWords } from './english/separating-tests';
 import { safetyWords } from './english/safety';
 import { setupWords } from './english/setup';
 import { stopTexts } from './english/stops';
@@ -50,6 +51,7 @@ const english: Language = {
   airflow: airflowWords,
   weighIn: weighInWords,
   diagnosis: diagnosisTexts,
+  separatingTests: separatingTestWords,
   readings: readingWords,
   readingHelp,
   setup: setupWords,

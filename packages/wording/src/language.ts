@@ -20,6 +20,7 @@ import type { checkPageWords } from './english/check-page';
 import type { fieldFaultTexts } from './english/field-faults';
 import type { fieldInputWords } from './english/field-inputs';
 import type { DiagnosisTexts } from './english/diagnosis';
+import type { separatingTestWords } from './english/separating-tests';
 import type { looseChecksWords } from './english/loose-checks';
 import type { makersChartWords } from './english/makers-charts';
 import type { offlineWords } from './english/offline';
@@ -108,6 +109,7 @@ export interface Language {
   readonly airflow: typeof airflowWords;
   readonly weighIn: typeof weighInWords;
   readonly diagnosis: DiagnosisTexts;
+  readonly separatingTests: typeof separatingTestWords;
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;

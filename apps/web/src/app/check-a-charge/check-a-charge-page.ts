@@ -22,9 +22,11 @@ import { UnitPreference } from '../quantities/unit-preference';
 import { exampleCheck } from './example-check';
 import { readingKey, typedKey } from './field-key';
 import { afterPaint } from '../loose-checks/after-paint';
+import { DiagnosisCard } from '../diagnosis/diagnosis-card';
+import { SeparatingTests } from '../diagnosis/separating-tests';
 import { FirstSet } from './first-set';
 import { FindingAnnouncer } from './finding-announcer';
-import { goToControl } from './next-step-place';
+import { goToControl, type StepPlace } from './next-step-place';
 import { Glance } from './glance';
 import { Judge } from './judge';
 import { loadLaterParts } from './later-parts';
@@ -56,6 +58,7 @@ const isTextField = (target: EventTarget | null): boolean =>
 @Component({
   selector: 'app-check-a-charge-page',
   imports: [
+    DiagnosisCard,
     FindingAnnouncer,
     FirstSet,
     Glance,
@@ -65,6 +68,7 @@ const isTextField = (target: EventTarget | null): boolean =>
     ReadingRow,
     ResultColumn,
     ResultSheet,
+    SeparatingTests,
     SetupForm,
     SetupPlate,
     StorageNote,
@@ -137,7 +141,7 @@ export class CheckAChargePage {
     const { input, result } = this.evaluation();
     return input && result && { input, result };
   });
-  private readonly pageState = computed<PageState>(() => ({
+  protected readonly pageState = computed<PageState>(() => ({
     draft: this.draft(),
     evaluation: this.evaluation(),
     system: this.system(),
@@ -314,10 +318,12 @@ export class CheckAChargePage {
   protected pressMain(): void {
     const place = this.place();
     if (this.setupOpen()) this.closeSetup();
-    else if (place) {
-      if (place.view === 'setup') this.openSetup();
-      this.goTo(place.control);
-    }
+    else if (place) this.goToPlace(place);
+  }
+
+  protected goToPlace({ view, control }: StepPlace): void {
+    if (view === 'setup') this.openSetup();
+    this.goTo(control);
   }
 
   protected goToNext(): void {

@@ -18,6 +18,16 @@ const PLACES: Readonly<Partial<Record<NextStepCode, StepPlace>>> = {
   'record-conditions': { view: 'readings', control: 'app-visit-clock button' },
   'read-twice': { view: 'readings', control: 'app-first-set button' },
   'leak-first': choice('readings', 'leakSearch'),
+  'bracket-wet-bulb-again': { view: 'readings', control: '#reading-returnWetBulbBefore' },
+  'measure-drier-drop': { view: 'readings', control: '#reading-drierInletTemperature' },
+  'check-bulb-screen-drier': { view: 'readings', control: '#reading-drierInletTemperature' },
+  'find-restriction-recover-nothing': { view: 'readings', control: '#reading-drierInletTemperature' },
+  'air-test-then-recover': { view: 'readings', control: '#reading-standingPressure' },
+  'check-bulb-and-valve': choice('readings', 'bulb'),
+  'check-bulb-and-airflow': choice('readings', 'bulb'),
+  'check-bulb-then-recover': choice('readings', 'bulb'),
+  'check-bulb-and-screen': choice('readings', 'bulb'),
+  'mend-bulb': choice('readings', 'bulb'),
 };
 
 /** Nothing read here can judge such a system, so no reading is asked for. */
