@@ -38,6 +38,7 @@ const check = {
     visit: {
       preflight: { panelsOn: 'ok' },
       runningSince: TIME,
+      tests: { liquidShutIn: true, bulb: 'loose', valve: 'steady' },
       firstSet: { takenAt: TIME, readings: { returnWetBulb: { text: '64,5', unit: 'degF' } } },
     },
     typed: { elevation: { text: '650', unit: 'ft' }, superheatLow: { text: '6', unit: 'deltaF' } },
@@ -101,6 +102,7 @@ describe('a stored row', () => {
     ['an endless text', withBody(reading, { text: '6'.repeat(201) })],
     ['an unknown field', withBody(edit, { field: 'reading:elevation' })],
     ['an unknown metering device', withBody(check, { setup: { meteringDevice: 'tap' } })],
+    ['an unknown state of a bulb', withBody(check, { visit: { preflight: {}, tests: { bulb: 'gone' } } })],
     ['an unknown charge mode', withBody(check, { setup: { chargeMode: true } })],
     ['a target for no port', withBody(check, { setup: { targetSubcoolingPort: 'none' } })],
     ['a missing pre-flight', withBody(check, { visit: {} })],

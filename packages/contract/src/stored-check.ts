@@ -5,6 +5,7 @@
 import {
   AIRFLOW_METHODS,
   AIRFLOW_PATHS,
+  BULB_STATES,
   CHART_PORTS,
   CHART_UNITS,
   HIGH_SIDE_PORTS,
@@ -18,6 +19,7 @@ import {
   READING_IDS,
   STAGES,
   SYSTEM_KINDS,
+  VALVE_MOVES,
 } from '@chargewright/engine';
 import type { ChartDimension } from '@chargewright/engine';
 import * as z from 'zod';
@@ -91,6 +93,13 @@ const visit = z.object({
   leakSearch: z.exactOptional(z.enum(LEAK_SEARCHES)),
   commissioning: z.exactOptional(z.boolean()),
   headRaised: z.exactOptional(z.boolean()),
+  tests: z.exactOptional(
+    z.object({
+      liquidShutIn: z.exactOptional(z.boolean()),
+      bulb: z.exactOptional(z.enum(BULB_STATES)),
+      valve: z.exactOptional(z.enum(VALVE_MOVES)),
+    }),
+  ),
   firstSet: z.exactOptional(
     z.object({ takenAt: time, readings: z.partialRecord(z.enum(READING_IDS), z.object(typedValue)) }),
   ),

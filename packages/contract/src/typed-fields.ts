@@ -13,6 +13,7 @@ export const TYPED_FIELDS = [
   'designAirflow',
   'factoryCharge',
   'maxHighPressure',
+  'expectedCompressorCurrent',
   'lineLength',
   'mostLineLength',
   'lift',

@@ -23,6 +23,7 @@ export type { CheckInput } from './check/input';
 export * from './check/evaluate-check';
 export * from './check/diagnose-check';
 export * from './check/separating-tests';
+export * from './check/current-test';
 export * from './diagnosis/diagnosis-codes';
 export type { AirFinding, AirTest, DrierFinding, DrierTest } from './methods/separating-tests';
 export * from './check/engine-version';

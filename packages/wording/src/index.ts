@@ -41,6 +41,7 @@ export * from './english/airflow';
 export * from './english/field-inputs';
 export * from './english/weigh-in';
 export * from './diagnosis-sentences';
+export * from './english/separating-tests';
 export * from './english/properties';
 export * from './english/worked-examples';
 export * from './english/worked-example-stories';

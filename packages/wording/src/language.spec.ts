@@ -27,6 +27,7 @@ import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
 import { reasonTexts } from './english/reasons';
+import { separatingTestWords } from './english/separating-tests';
 import { safetyWords } from './english/safety';
 import { setupWords } from './english/setup';
 import { stopTexts } from './english/stops';
@@ -57,6 +58,7 @@ const english: Language = {
   fieldSafety: fieldSafetyWords,
   worksheets: worksheetWords,
   airflowPage: airflowPageWords,
+  separatingTests: separatingTestWords,
   readings: readingWords,
   readingHelp,
   setup: setupWords,

@@ -22,6 +22,7 @@ import type { fieldFaultTexts } from './english/field-faults';
 import type { fieldInputWords } from './english/field-inputs';
 import type { DiagnosisTexts } from './english/diagnosis';
 import type { fieldSafetyWords } from './english/field-safety';
+import type { separatingTestWords } from './english/separating-tests';
 import type { looseChecksWords } from './english/loose-checks';
 import type { makersChartWords } from './english/makers-charts';
 import type { offlineWords } from './english/offline';
@@ -115,6 +116,7 @@ export interface Language {
   readonly fieldSafety: typeof fieldSafetyWords;
   readonly worksheets: typeof worksheetWords;
   readonly airflowPage: typeof airflowPageWords;
+  readonly separatingTests: typeof separatingTestWords;
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;

@@ -17,6 +17,7 @@ import { propertiesWords } from './english/properties';
 import { readingHelp } from './english/reading-help';
 import { procedureWords } from './english/procedures';
 import { readingWords } from './english/readings';
+import { separatingTestWords } from './english/separating-tests';
 import { safetyWords } from './english/safety';
 import { listWords, setupWords } from './english/setup';
 import { weighInWords } from './english/weigh-in';
@@ -46,6 +47,7 @@ const roots = Object.entries({
   readings: readingWords,
   readingHelp,
   safety: safetyWords,
+  separatingTests: separatingTestWords,
   setup: setupWords,
   procedures: procedureWords,
   fieldInputs: fieldInputWords,

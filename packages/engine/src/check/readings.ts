@@ -32,6 +32,15 @@ export const READING_IDS = [
 ] as const;
 export type ReadingId = (typeof READING_IDS)[number];
 
+/** What the separating tests measure: it holds however long ago, until the system is adjusted. */
+export const TEST_READING_IDS = [
+  'drierInletTemperature',
+  'drierOutletTemperature',
+  'standingPressure',
+  'standingOutdoorCoilTemperature',
+  'standingIndoorCoilTemperature',
+] as const satisfies readonly ReadingId[];
+
 export const READING_DIMENSIONS: Readonly<Record<ReadingId, Dimension>> = {
   returnDryBulb: 'temperature',
   returnWetBulb: 'temperature',

@@ -1,11 +1,12 @@
 /** What a diagnosis reads off a check: the criteria by their numbers, whatever gate shuts their findings, and the differences between refrigerant and air. */
 import { derive } from '../derivation/derive';
 import type { Quantity } from '../derivation/quantity';
-import { isKnown, leaf, missing } from '../derivation/quantity';
+import { isKnown, missing } from '../derivation/quantity';
 import type { Held, SymptomReadings } from '../diagnosis/read-symptoms';
-import { currentOffExpected, liquidLineApproach, returnOverEvaporating } from '../methods/air-to-refrigerant';
+import { liquidLineApproach, returnOverEvaporating } from '../methods/air-to-refrigerant';
 import type { UsedReadingId } from './assumed-uncertainty';
 import type { CriterionId } from './codes';
+import { currentTest } from './current-test';
 import type { DerivedQuantities } from './derived-quantities';
 import type { CheckInput } from './input';
 import { isFixedOrifice } from './input';
@@ -47,17 +48,9 @@ export function symptomReadings(
     liquidLineApproach: free(
       derive(liquidLineApproach, { liquidLineK: read('liquidLineTemperature'), outdoorK: read('outdoorDryBulb') }),
     ),
-    currentOffExpected: derive(currentOffExpected, {
-      currentA: read('compressorCurrent'),
-      expectedA: expectedCurrent(input),
-    }),
+    currentOffExpected: currentTest(input).offExpected,
   };
 }
-
-const expectedCurrent = ({ setup: { expectedCompressorCurrentA: value } }: CheckInput): Quantity =>
-  value === undefined
-    ? missing()
-    : leaf({ id: 'expectedCompressorCurrent', kind: 'currentA', value, origin: 'entered' });
 
 function airflowPerCapacity({ setup, readings }: CheckInput): number | null {
   const { nominalCapacityW } = setup;

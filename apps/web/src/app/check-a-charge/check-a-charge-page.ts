@@ -24,9 +24,11 @@ import { UnitPreference } from '../quantities/unit-preference';
 import { exampleCheck } from './example-check';
 import { readingKey, typedKey } from './field-key';
 import { afterPaint } from '../loose-checks/after-paint';
+import { DiagnosisCard } from '../diagnosis/diagnosis-card';
+import { SeparatingTests } from '../diagnosis/separating-tests';
 import { FirstSet } from './first-set';
 import { FindingAnnouncer } from './finding-announcer';
-import { goToControl } from './next-step-place';
+import { goToControl, type StepPlace } from './next-step-place';
 import { Glance } from './glance';
 import { Judge } from './judge';
 import { loadLaterParts } from './later-parts';
@@ -58,6 +60,7 @@ const isTextField = (target: EventTarget | null): boolean =>
 @Component({
   selector: 'app-check-a-charge-page',
   imports: [
+    DiagnosisCard,
     FindingAnnouncer,
     FirstSet,
     Glance,
@@ -67,6 +70,7 @@ const isTextField = (target: EventTarget | null): boolean =>
     ReadingRow,
     ResultColumn,
     ResultSheet,
+    SeparatingTests,
     SetupForm,
     SetupPlate,
     StorageNote,
@@ -140,7 +144,7 @@ export class CheckAChargePage {
     const { input, result } = this.evaluation();
     return input && result && { input, result };
   });
-  private readonly pageState = computed<PageState>(() => ({
+  protected readonly pageState = computed<PageState>(() => ({
     draft: this.draft(),
     evaluation: this.evaluation(),
     system: this.system(),
@@ -317,10 +321,17 @@ export class CheckAChargePage {
   protected pressMain(): void {
     const place = this.place();
     if (this.setupOpen()) this.closeSetup();
-    else if (place && 'control' in place) {
-      if (place.view === 'setup') this.openSetup();
-      this.goTo(place.control);
-    } else if (place) void this.router.navigateByUrl(`/${place.view}`);
+    else if (place) this.goToPlace(place);
+  }
+
+  /** A control on this page, or a page of its own. */
+  protected goToPlace(place: StepPlace): void {
+    if (!('control' in place)) {
+      void this.router.navigateByUrl(`/${place.view}`);
+      return;
+    }
+    if (place.view === 'setup') this.openSetup();
+    this.goTo(place.control);
   }
 
   protected goToNext(): void {

@@ -4,6 +4,8 @@
  */
 export const loadLaterParts = (): Promise<unknown> =>
   Promise.allSettled([
+    import('../diagnosis/diagnosis-card'),
+    import('../diagnosis/separating-tests'),
     import('./first-set'),
     import('./glance'),
     import('./preflight'),

@@ -28,6 +28,16 @@ const PLACES: Readonly<Partial<Record<NextStepCode, StepPlace>>> = {
   'mend-recover-weigh-in': { view: 'weigh-in' },
   'locate-mend-weigh-in': { view: 'weigh-in' },
   'recover-and-weigh-in': { view: 'weigh-in' },
+  'bracket-wet-bulb-again': { view: 'readings', control: '#reading-returnWetBulbBefore' },
+  'measure-drier-drop': { view: 'readings', control: '#reading-drierInletTemperature' },
+  'check-bulb-screen-drier': { view: 'readings', control: '#reading-drierInletTemperature' },
+  'find-restriction-recover-nothing': { view: 'readings', control: '#reading-drierInletTemperature' },
+  'air-test-then-recover': { view: 'readings', control: '#reading-standingPressure' },
+  'check-bulb-and-valve': choice('readings', 'bulb'),
+  'check-bulb-and-airflow': choice('readings', 'bulb'),
+  'check-bulb-then-recover': choice('readings', 'bulb'),
+  'check-bulb-and-screen': choice('readings', 'bulb'),
+  'mend-bulb': choice('readings', 'bulb'),
 };
 
 /** Where a page of its own is; null for a place on this one. */

@@ -1,5 +1,5 @@
 /** What the page shows of each field: words, what was typed, how old it is, and what is wrong with it. */
-import type { Fault, ReadingId } from '@chargewright/engine';
+import { TEST_READING_IDS, type Fault, type ReadingId } from '@chargewright/engine';
 import {
   checkPageWords,
   faultText,
@@ -91,7 +91,7 @@ export function fieldView(key: FieldKey, page: PageState): FieldView {
   const brought = workedOut(draft, id);
   if (brought) return { ...shared, label: words.label, note: brought, stale: false, reading: id };
   const age = blank(value) ? undefined : ageSeconds(draft, id, nowMs);
-  const stale = age !== undefined && age > STALE_AFTER_SECONDS;
+  const stale = isStale(id, age);
   return { ...shared, label: words.label, note: noteOf(draft, key, id, age, words.place), stale, reading: id };
 }
 
@@ -103,13 +103,19 @@ function workedOut({ edits, readings }: CheckDraft, id: ReadingId): string | und
   return checkPageWords.readings.workedOut(plusMinus);
 }
 
+/** A test holds until the next adjustment, and a reading from before is meant to be old. */
+const AGELESS: ReadonlySet<ReadingId> = new Set([...TEST_READING_IDS, 'returnWetBulbBefore']);
+
+const isStale = (id: ReadingId, age: number | undefined): boolean =>
+  age !== undefined && age > STALE_AFTER_SECONDS && !AGELESS.has(id);
+
 function noteOf(draft: CheckDraft, key: FieldKey, id: ReadingId, age: number | undefined, place: string): string {
   const words = checkPageWords.readings;
   if (age === undefined) return place;
   const minutes = Math.floor(age / 60);
   // Typed and left before it was committed, as by a dead battery: its age counts, not that it is in a field.
   if (draft.edits[key] && minutes < 1) return words.editing;
-  if (age > STALE_AFTER_SECONDS) return words.staleAgo(minutes);
+  if (isStale(id, age)) return words.staleAgo(minutes);
   return draft.readings[id]?.source === 'example' ? words.example : words.typedAgo(minutes);
 }
 

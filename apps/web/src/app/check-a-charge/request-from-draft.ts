@@ -110,6 +110,7 @@ export function requestFromDraft(draft: CheckDraft, nowMs: number): DraftReadAsR
       'designAirflow',
       'factoryCharge',
       'maxHighPressure',
+      'expectedCompressorCurrent',
     ]),
   };
   const request = {

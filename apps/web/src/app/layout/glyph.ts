@@ -8,6 +8,7 @@ const PATHS = {
   hand: 'M12 3.5l9.2 16.5H2.8zM12 10v4.5M12 17.2v.4',
   clock: 'M12 3.5a8.5 8.5 0 1 0 .01 0M12 7.5V12l3.2 2',
   grid: 'M5 5h5v5H5zM14 5h5v5h-5zM5 14h5v5H5zM14 14h5v5h-5z',
+  probe: 'M10 6a2 2 0 0 1 4 0v8.2a4 4 0 1 1-4 0zM12 9.5v7.5',
   list: 'M4 7h16M4 12h16M4 17h10',
 } as const;
 

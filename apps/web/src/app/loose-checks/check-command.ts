@@ -1,5 +1,5 @@
 /** What a person can do to a loose check. Times and ids are in the command, so that applying it twice, or on two tabs, gives the same. */
-import type { ReadingId } from '@chargewright/engine';
+import type { ReadingId, TestObservations } from '@chargewright/engine';
 import type { TypedField } from '@chargewright/contract/typed-fields';
 import type { DraftEdit, DraftReading, DraftSetup, DraftVisit, FieldKey, TypedValue, WorkedOut } from './check-draft';
 
@@ -25,6 +25,7 @@ export type CheckCommand = Told &
         readonly do: 'take-back-retake';
         readonly retired: readonly string[];
         readonly runningSince: string | undefined;
+        readonly tests: TestObservations | undefined;
       }
     | { readonly do: 'remove' }
     | { readonly do: 'restore' }

@@ -90,7 +90,13 @@ const stepArbitrary: fc.Arbitrary<Step> = fc.oneof(
     weight: 1,
     arbitrary: fc
       .constantFrom(undefined, timeAt(0))
-      .map((runningSince): Step => (n) => ({ ...told(n), do: 'take-back-retake', retired: [], runningSince })),
+      .map((runningSince): Step => (n) => ({
+        ...told(n),
+        do: 'take-back-retake',
+        retired: [],
+        runningSince,
+        tests: undefined,
+      })),
   },
 );
 const commandsArbitrary = fc
@@ -201,6 +207,41 @@ describe('a first set', () => {
   });
 });
 
+describe('a separating test', () => {
+  const WET_BULB = 'reading:returnWetBulb' as const;
+  const DRIER = 'reading:drierInletTemperature' as const;
+  const SEEN = { bulb: 'loose', liquidShutIn: true } as const;
+  const made = play([
+    typing(WET_BULB, '66', 1),
+    committing(WET_BULB, 2),
+    typing(DRIER, '96', 3),
+    committing(DRIER, 4),
+    { ...told(5), do: 'visit', patch: { tests: SEEN } },
+  ]);
+
+  it('need not be made twice for a second set of readings', () => {
+    const { readings, visit } = draftOf(applyCommand(made, { ...told(6), do: 'keep-first-set' }));
+    expect(Object.keys(readings)).toEqual(['drierInletTemperature']);
+    expect(visit.tests).toEqual(SEEN);
+  });
+
+  it('is void after an adjustment, and stands again when that is taken back', () => {
+    const adjusted = applyCommand(made, { ...told(6), do: 'retake' });
+    expect(draftOf(adjusted).readings).toEqual({});
+    expect(draftOf(adjusted).visit.tests).toBeUndefined();
+    const { retired, visit } = made;
+    const undone = applyCommand(adjusted, {
+      ...told(7),
+      do: 'take-back-retake',
+      retired,
+      runningSince: undefined,
+      tests: visit.tests,
+    });
+    expect(Object.keys(draftOf(undone).readings)).toEqual(['returnWetBulb', 'drierInletTemperature']);
+    expect(draftOf(undone).visit.tests).toEqual(SEEN);
+  });
+});
+
 describe('readings', () => {
   const FIELD = 'reading:outdoorDryBulb';
 
@@ -271,7 +312,7 @@ describe('readings', () => {
       { ...told(6), do: 'visit', patch: { runningSince: timeAt(6) } },
       typing(FIELD, '94', 7),
       committing(FIELD, 8),
-      { ...told(9), do: 'take-back-retake', retired: before.retired, runningSince },
+      { ...told(9), do: 'take-back-retake', retired: before.retired, runningSince, tests: before.visit.tests },
     ] as const satisfies readonly CheckCommand[];
     const { readings, visit } = draftOf(after.reduce<CheckState>(applyCommand, before));
     expect(readings.suctionPressure?.text).toBe('118');

@@ -1,5 +1,5 @@
 /** Commands to states, and states to what the page shows. Pure: the page and the phone's store apply the same commands by it. */
-import { READING_IDS, type ReadingId } from '@chargewright/engine';
+import { READING_IDS, TEST_READING_IDS, type ReadingId } from '@chargewright/engine';
 import type { CheckCommand, CheckState, ExampleCheck, KnownEdit } from './check-command';
 import type { TypedField } from '@chargewright/contract/typed-fields';
 import type {
@@ -134,12 +134,22 @@ function fill(state: CheckState, example: ExampleCheck, ids: readonly string[], 
 
 const retire = (state: CheckState): CheckState => ({ ...state, retired: state.readings.map(({ id }) => id) });
 
-/** What stands is set aside to be compared with, and asked again; the clock runs on. */
+/** After an adjustment what was read does not count any more, nor what was seen in the separating tests. */
+function retake(state: CheckState): CheckState {
+  const { tests: _, ...visit } = state.visit;
+  return retire({ ...state, visit });
+}
+
+const IN_TESTS: ReadonlySet<ReadingId> = new Set(TEST_READING_IDS);
+
+/** What stands is set aside to be compared with, and asked again; the clock runs on. A separating test need not be made twice. */
 function keepFirstSet(state: CheckState, at: string): CheckState {
   const readings = Object.fromEntries(
     Object.entries(standingReadings(state)).map(([id, { text, unit }]) => [id, { text, unit }]),
   );
-  return retire({ ...state, visit: { ...state.visit, firstSet: { takenAt: at, readings } } });
+  const again = state.readings.filter(({ id, quantity }) => !IN_TESTS.has(quantity) || state.retired.includes(id));
+  const visit = { ...state.visit, firstSet: { takenAt: at, readings } };
+  return { ...state, visit, retired: again.map(({ id }) => id) };
 }
 
 function forgetFirstSet(state: CheckState): CheckState {
@@ -148,9 +158,11 @@ function forgetFirstSet(state: CheckState): CheckState {
 }
 
 /** What stood before the adjustment stands again; what was read since then stays, too. */
-function takeBackRetake(state: CheckState, retired: readonly string[], runningSince: string | undefined): CheckState {
+function takeBackRetake(state: CheckState, before: Extract<CheckCommand, { do: 'take-back-retake' }>): CheckState {
+  const { retired, runningSince, tests } = before;
   const { runningSince: _, ...visit } = state.visit;
-  return { ...state, retired, visit: { ...visit, ...(runningSince !== undefined && { runningSince }) } };
+  const stood = { ...(runningSince !== undefined && { runningSince }), ...(tests && { tests }) };
+  return { ...state, retired, visit: { ...visit, ...stood } };
 }
 
 function restored(state: CheckState): CheckState {
@@ -177,9 +189,9 @@ function entered(state: CheckState, command: Exclude<CheckCommand, { do: 'open' 
     case 'forget-first-set':
       return forgetFirstSet(state);
     case 'retake':
-      return retire(state);
+      return retake(state);
     case 'take-back-retake':
-      return takeBackRetake(state, command.retired, command.runningSince);
+      return takeBackRetake(state, command);
     case 'restore':
       return state;
   }

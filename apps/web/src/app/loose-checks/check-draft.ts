@@ -19,6 +19,7 @@ import type {
   ReadingId,
   Stage,
   SystemKind,
+  TestObservations,
 } from '@chargewright/engine';
 
 /** What stands in a field: the text as typed and the unit it was typed in. */
@@ -99,6 +100,8 @@ export interface DraftVisit {
   readonly headRaised?: boolean;
   /** A set of readings kept to compare the next one with. */
   readonly firstSet?: FirstSet;
+  /** What was done and seen in the separating tests. */
+  readonly tests?: TestObservations;
 }
 
 export interface FirstSet {

@@ -45,7 +45,13 @@ export class LooseChecks {
   readonly #stored = signal<ReadonlyMap<string, CheckSummary>>(new Map());
   /** What stood before the last adjustment. */
   readonly #retaken = signal<
-    { readonly id: string; readonly retired: readonly string[]; readonly runningSince: string | undefined } | undefined
+    | {
+        readonly id: string;
+        readonly retired: readonly string[];
+        readonly runningSince: string | undefined;
+        readonly tests: DraftVisit['tests'];
+      }
+    | undefined
   >(undefined);
   readonly #removed = signal<{ readonly id: string; readonly wasCurrent: boolean } | undefined>(undefined);
   readonly #setAside = signal(0);
@@ -128,7 +134,7 @@ export class LooseChecks {
   retakeAll(): void {
     this.#commitReadings();
     const { id, retired, visit } = this.#state();
-    this.#retaken.set({ id, retired, runningSince: visit.runningSince });
+    this.#retaken.set({ id, retired, runningSince: visit.runningSince, tests: visit.tests });
     this.#tell({ do: 'retake' });
     this.visit({ runningSince: this.#now().toISOString() });
   }
@@ -148,7 +154,8 @@ export class LooseChecks {
     const before = this.#retaken();
     if (!before) return;
     this.#retaken.set(undefined);
-    this.#tell({ do: 'take-back-retake', retired: before.retired, runningSince: before.runningSince }, before.id);
+    const { id, retired, runningSince, tests } = before;
+    this.#tell({ do: 'take-back-retake', retired, runningSince, tests }, id);
   }
 
   #commitReadings(): void {

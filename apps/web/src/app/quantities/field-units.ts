@@ -18,6 +18,7 @@ const TYPED_DIMENSIONS: Readonly<Record<TypedField, FieldDimension>> = {
   designAirflow: 'airflow',
   factoryCharge: 'mass',
   maxHighPressure: 'pressure',
+  expectedCompressorCurrent: 'current',
   lineLength: 'length',
   mostLineLength: 'length',
   lift: 'length',
