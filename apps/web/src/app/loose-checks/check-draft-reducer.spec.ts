@@ -88,15 +88,13 @@ const stepArbitrary: fc.Arbitrary<Step> = fc.oneof(
   },
   {
     weight: 1,
-    arbitrary: fc
-      .constantFrom(undefined, timeAt(0))
-      .map((runningSince): Step => (n) => ({
-        ...told(n),
-        do: 'take-back-retake',
-        retired: [],
-        runningSince,
-        tests: undefined,
-      })),
+    arbitrary: fc.constantFrom(undefined, timeAt(0)).map((runningSince): Step => (n) => ({
+      ...told(n),
+      do: 'take-back-retake',
+      retired: [],
+      runningSince,
+      tests: undefined,
+    })),
   },
 );
 const commandsArbitrary = fc

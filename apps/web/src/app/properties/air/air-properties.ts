@@ -29,7 +29,7 @@ function readTyped(stored: unknown): AirTyped | undefined {
   const [first, second] = pair as readonly unknown[];
   if (!isReading(first) || !isReading(second) || first === second) return undefined;
   const sound = Object.entries(values).filter(([reading, value]) => isReading(reading) && isTypedValue(value));
-  return { pair: [first, second], values: Object.fromEntries(sound) as AirTyped['values'] };
+  return { pair: [first, second], values: Object.fromEntries(sound) };
 }
 
 /** Moist air from any two readings that settle it: every property, and its place on the psychrometric chart. */
