@@ -32,10 +32,10 @@ export const allSuites = () => [
     command: node('node_modules/@angular/cli/bin/ng.js', 'test'),
     report: 'test-results/web.json',
   },
-  vitest('reference', 90),
-  vitest('property', 240),
+  vitest('reference', 120),
+  vitest('property', 300),
   whole('build', 120, node('apps/launch/build-app.mjs')),
-  { ...vitest('browser', 420), needsChromium: true },
+  { ...vitest('browser', 660), needsChromium: true },
 ];
 
 /** The suites with these names, in their order; all without names. The browser's tests run on the built app. */

@@ -51,3 +51,4 @@ export * from './english/worksheets';
 export * from './english/airflow-page';
 export * from './english/moist-air';
 export * from './english/moist-air-page';
+export * from './english/weigh-in-page';

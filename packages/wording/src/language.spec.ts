@@ -33,6 +33,7 @@ import { setupWords } from './english/setup';
 import { stopTexts } from './english/stops';
 import { structureFaultWords } from './english/structure-faults';
 import { weighInWords } from './english/weigh-in';
+import { weighInPageWords } from './english/weigh-in-page';
 import { workedExampleStories } from './english/worked-example-stories';
 import { workedExampleWords } from './english/worked-examples';
 import { worksheetWords } from './english/worksheets';
@@ -59,6 +60,7 @@ const english: Language = {
   worksheets: worksheetWords,
   airflowPage: airflowPageWords,
   separatingTests: separatingTestWords,
+  weighInPage: weighInPageWords,
   readings: readingWords,
   readingHelp,
   setup: setupWords,

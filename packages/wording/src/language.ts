@@ -39,6 +39,7 @@ import type { readingWords } from './english/readings';
 import type { safetyWords } from './english/safety';
 import type { setupWords } from './english/setup';
 import type { weighInWords } from './english/weigh-in';
+import type { weighInPageWords } from './english/weigh-in-page';
 import type { workedExampleStories } from './english/worked-example-stories';
 import type { workedExampleWords } from './english/worked-examples';
 import type { worksheetWords } from './english/worksheets';
@@ -117,6 +118,7 @@ export interface Language {
   readonly worksheets: typeof worksheetWords;
   readonly airflowPage: typeof airflowPageWords;
   readonly separatingTests: typeof separatingTestWords;
+  readonly weighInPage: typeof weighInPageWords;
   readonly readings: typeof readingWords;
   readonly readingHelp: typeof readingHelp;
   readonly setup: typeof setupWords;

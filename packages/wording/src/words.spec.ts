@@ -21,6 +21,7 @@ import { separatingTestWords } from './english/separating-tests';
 import { safetyWords } from './english/safety';
 import { listWords, setupWords } from './english/setup';
 import { weighInWords } from './english/weigh-in';
+import { weighInPageWords } from './english/weigh-in-page';
 import { workedExampleStories } from './english/worked-example-stories';
 import { workedExampleWords } from './english/worked-examples';
 import { worksheetWords } from './english/worksheets';
@@ -56,6 +57,7 @@ const roots = Object.entries({
   fieldSafety: fieldSafetyWords,
   worksheets: worksheetWords,
   airflowPage: airflowPageWords,
+  weighInPage: weighInPageWords,
   makersCharts: makersChartWords,
   properties: propertiesWords,
   workedExamples: workedExampleWords,

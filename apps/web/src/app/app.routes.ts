@@ -24,5 +24,6 @@ export const routes: Routes = [
     loadChildren: async () => (await import('./worked-examples/worked-examples-routes')).workedExamplesRoutes,
   },
   { path: 'airflow', loadChildren: async () => (await import('./airflow/airflow.routes')).airflowRoutes },
+  { path: 'weigh-in', loadChildren: async () => (await import('./weigh-in/weigh-in.routes')).weighInRoutes },
   { path: '**', redirectTo: '' },
 ];

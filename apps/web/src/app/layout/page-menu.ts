@@ -19,6 +19,5 @@ export class PageMenu {
     { path: '/weigh-in', ...pageMenuWords.weighIn },
     { path: '/properties', ...pageMenuWords.properties },
     { path: '/examples', ...pageMenuWords.examples },
-    { path: '/sources', ...pageMenuWords.sources },
   ] as const;
 }
