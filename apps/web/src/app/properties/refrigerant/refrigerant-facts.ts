@@ -1,5 +1,4 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { RouterLink } from '@angular/router';
 import {
   attempt,
   dewPressurePa,
@@ -19,7 +18,7 @@ const GLIDE_AT_K = temperatureToK(40, 'degF');
 /** What a refrigerant is, and how well it is known. */
 @Component({
   selector: 'app-refrigerant-facts',
-  imports: [RouterLink],
+
   template: `
     <h2>{{ words.title }}</h2>
     <dl>
@@ -28,7 +27,6 @@ const GLIDE_AT_K = temperatureToK(40, 'degF');
         <dd [class.doubt]="fact.doubt">{{ fact.value }}</dd>
       }
     </dl>
-    <a routerLink="/sources" [fragment]="'refrigerant-' + refrigerant()">{{ words.sources }}</a>
   `,
   styles: `
     :host {
