@@ -433,6 +433,7 @@ it('never answers 5xx, whatever the body', async () => {
   );
   const any = fc.oneof({ weight: 4, arbitrary: amount }, anything);
   const fields = (...names: readonly string[]) => fc.dictionary(fc.constantFrom(...names), any);
+  const few = (...names: readonly string[]) => fc.dictionary(fc.constantFrom(...names), any, { maxKeys: 2 });
   const axis = fc.record({ unit: fc.constantFrom(...units), values: fc.array(number, { maxLength: 3 }) });
   const table = fc.record(
     {
@@ -456,9 +457,21 @@ it('never answers 5xx, whatever the body', async () => {
     .map(([required, optional, makersChart]) => ({ ...optional, ...required, ...(makersChart && { makersChart }) }));
   const visit = fields('runningMinutes', 'lowestReturnDryBulb', 'preflight', 'earlier', 'addedThisVisit', 'iceSeen');
   const body = fc.record({ setup, visit, readings: fields(...READING_IDS) }, { requiredKeys: ['setup'] });
+  const changedExample = fc
+    .record({ setup: few('elevation', 'targetSuperheat'), readings: few(...READING_IDS) })
+    .map((changed) => ({
+      ...EVALUATION_EXAMPLE,
+      setup: { ...EVALUATION_EXAMPLE.setup, ...changed.setup },
+      readings: { ...EVALUATION_EXAMPLE.readings, ...changed.readings },
+    }));
+  const bodies = fc.oneof(
+    { weight: 6, arbitrary: body },
+    { weight: 3, arbitrary: changedExample },
+    fc.jsonValue({ maxDepth: 4 }),
+  );
   const statuses = new Set<number>();
   await fc.assert(
-    fc.asyncProperty(fc.oneof({ weight: 9, arbitrary: body }, fc.jsonValue({ maxDepth: 4 })), async (value) => {
+    fc.asyncProperty(bodies, async (value) => {
       const { status } = await server.postJson(PATH, value);
       statuses.add(status);
       expect(status).toBeLessThan(500);
