@@ -1,10 +1,14 @@
 import { checkPageWords, makersChartWords, makersDataWords } from '@chargewright/wording';
 import { describe, expect, it } from 'vitest';
+import { accessibilityFaults } from './harness/axe';
 import { HIGH_SUPERHEAT } from './harness/check-page';
 import { browserSuite } from './harness/suite';
 
 const suite = browserSuite();
 const words = makersDataWords;
+
+/** A table of our own: 20 °F everywhere, but a dash at the hot and dry corner. */
+const TABLE = ['Outdoor\t57\t63\t67', '85\t20\t20\t20', '95\t20\t20\t20', '105\t\t20\t20'].join('\n');
 
 const atTheTables = async () => {
   const phone = await suite.newPhone();
@@ -19,6 +23,31 @@ const atTheTables = async () => {
 };
 
 describe('somebody with the maker’s table in his hand', () => {
+  it('pastes it, sees its picture, and is judged by it', async () => {
+    const { page, check } = await atTheTables();
+    await page.getByRole('button', { name: makersChartWords.kinds.superheat.label }).click();
+    await page.getByText(words.paste, { exact: true }).click();
+    await page.getByRole('textbox', { name: words.pasteHint }).fill(TABLE);
+    await check.button(words.pasteRead).click();
+    await page.getByText(words.pasted(3, 3)).waitFor();
+    await page.getByText(words.complete).waitFor();
+    await page.getByRole('img', { name: words.previewText(makersChartWords.kinds.superheat.label, 3, 3, 1) }).waitFor();
+    expect(await accessibilityFaults(page)).toEqual([]);
+    await check.button(words.done).click();
+    await page.getByRole('link', { name: words.back }).click();
+    await check.goToReadings();
+    // 18.3 °F read, 20 °F by this maker
+    await page
+      .getByText(/^Superheat is within its band, 1\.\d °F below target$/)
+      .first()
+      .waitFor();
+    await page.reload();
+    await page
+      .getByText(/^Superheat is within its band/)
+      .first()
+      .waitFor();
+  });
+
   it('types it row by row with a dash key, is told what is odd, takes it away and brings it back', async () => {
     const { page, check } = await atTheTables();
     await page.getByRole('button', { name: makersChartWords.kinds.superheat.label }).click();

@@ -169,10 +169,10 @@ export interface NextStepFigures {
   'check-metering': never;
   // conditions
   'run-longer': 'minutes';
-  'warm-the-house': never;
-  'cool-the-house': never;
-  'wait-for-warmer-weather': never;
-  'wait-for-cooler-weather': never;
+  'warm-the-house': 'least';
+  'cool-the-house': 'most';
+  'wait-for-warmer-weather': 'least';
+  'wait-for-cooler-weather': 'most';
   'check-instruments': never;
   'make-access-hole': never;
   'reach-a-target': never;

@@ -32,4 +32,8 @@ export const flowFromM3PerS = (m3PerS: number, unit: FlowUnit): number => m3PerS
 export const powerToW = (value: number, unit: PowerUnit): number => value * POWER_W[unit];
 export const powerFromW = (watts: number, unit: PowerUnit): number => watts / POWER_W[unit];
 export const massToKg = (value: number, unit: MassUnit): number => value * MASS_KG[unit];
+const OZ_PER_LB = 16;
+/** Pounds and ounces as a nameplate prints them, in ounces: the ounces go the way of the pounds, also of a pound that is −0. */
+export const ouncesOfPoundsAndOunces = (pounds: number, ounces: number): number =>
+  OZ_PER_LB * pounds + (pounds < 0 || Object.is(pounds, -0) ? -ounces : ounces);
 export const massFromKg = (kg: number, unit: MassUnit): number => kg / MASS_KG[unit];

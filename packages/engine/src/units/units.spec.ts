@@ -33,6 +33,7 @@ import {
   TEMPERATURE_UNITS,
   temperatureFromK,
   temperatureToK,
+  ouncesOfPoundsAndOunces,
 } from './index';
 
 describe('fixed points', () => {
@@ -75,6 +76,15 @@ describe('fixed points', () => {
     expect(humidityRatioToKgPerKg(10, 'g/kg')).toBeCloseTo(0.01, 15);
   });
 });
+
+it.each([
+  [6, 4, 100],
+  [0, 12, 12],
+  [-1, 8, -24],
+  [-0, 8, -8],
+])('%d lb and %d oz are %d oz', (pounds, ounces, together) =>
+  expect(ouncesOfPoundsAndOunces(pounds, ounces)).toBe(together),
+);
 
 it('every unit comes back as it went', () => {
   const there: (readonly [string, number])[] = [

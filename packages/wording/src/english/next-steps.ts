@@ -119,20 +119,20 @@ const steps: NextStepWords['steps'] = {
     'Readings settle only after a while of steady running.',
   ],
   'warm-the-house': [
-    (_, say) =>
-      `Bring the return air to at least ${say.degF(70)}. Heating may warm the house first if the occupant agrees; mind people and animals. Then cool 15 minutes and read.`,
+    (f) =>
+      `Bring the return air to at least ${f.least}. Heating may warm the house first if the occupant agrees; mind people and animals. Then cool 15 minutes and read.`,
     'The targets do not reach down to air this cool.',
   ],
   'cool-the-house': [
-    'Let the system cool the house first, then read.',
+    (f) => `Let the system cool the house to ${f.most} or less first, then read.`,
     'The return air is warmer than the maker allows for this table.',
   ],
   'wait-for-warmer-weather': [
-    (_, say) => `Come back when it is at least ${say.degF(55)} outdoors, or weigh the charge in.`,
+    (f) => `Come back when it is at least ${f.least} outdoors, or weigh the charge in.`,
     'In the cold the pressures do not show the charge.',
   ],
   'wait-for-cooler-weather': [
-    (_, say) => `Come back when it is ${say.degF(115)} outdoors or less; early morning is coolest.`,
+    (f) => `Come back when it is ${f.most} outdoors or less; early morning is coolest.`,
     'In hotter air the test is not allowed.',
   ],
   'check-instruments': [

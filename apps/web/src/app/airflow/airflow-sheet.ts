@@ -11,6 +11,7 @@ import type {
 } from '@chargewright/engine';
 import { fieldInputWords, setupWords } from '@chargewright/wording';
 import { parseNumber } from '../quantities/parse-number';
+import { isDash } from '../quantities/printed-dash';
 import { amountsOf, type FilledSheet, type SheetDimension, type SheetField } from '../worksheets/sheet-fields';
 import type { Worksheet } from '../loose-checks/worksheet';
 
@@ -106,9 +107,8 @@ export const airflowChoices = ({ choices }: Worksheet): AirflowChoices => ({
   airflowUnit: oneOf(TABLE_FLOW_UNITS, choices['airflowUnit']),
 });
 
-/** Printed dashes, and what is left empty in their place. */
-const DASHES: ReadonlySet<string> = new Set(['', '-', '–', '—', '−', '--']);
-export const isDash = (text: string): boolean => DASHES.has(text.trim());
+/** A printed dash, or a place left empty for one. */
+export const isBlankOrDash = (text: string): boolean => text.trim() === '' || isDash(text);
 
 /** The table as entered; rows without a static pressure are not rows yet, a cell that is no number makes it no table yet. */
 export function fanTableOf(
@@ -120,7 +120,7 @@ export function fanTableOf(
     if (pressureText.trim() === '' && flowText.trim() === '') continue;
     const pressure = parseNumber(pressureText);
     const flow = parseNumber(flowText);
-    if (pressure.state !== 'number' || (flow.state !== 'number' && !isDash(flowText))) return undefined;
+    if (pressure.state !== 'number' || (flow.state !== 'number' && !isBlankOrDash(flowText))) return undefined;
     read.push({
       staticPressure: pressure.number.value,
       airflow: flow.state === 'number' ? flow.number.value : null,

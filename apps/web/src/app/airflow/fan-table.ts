@@ -5,7 +5,7 @@ import { PROBLEM_TEXTS } from '../check-a-charge/reading-rows';
 import { Glyph } from '../layout/glyph';
 import type { Worksheet } from '../loose-checks/worksheet';
 import { parseNumber } from '../quantities/parse-number';
-import { isDash, STATIC_UNITS, TABLE_FLOW_UNITS } from './airflow-sheet';
+import { isBlankOrDash, STATIC_UNITS, TABLE_FLOW_UNITS } from './airflow-sheet';
 
 /** Rows shown before anything is typed. */
 const FEWEST_ROWS = 4;
@@ -96,4 +96,4 @@ export class FanTable {
 }
 
 const isFaulty = (text: string, column: number): boolean =>
-  parseNumber(text).state === 'problem' && !(column === 1 && isDash(text));
+  parseNumber(text).state === 'problem' && !(column === 1 && isBlankOrDash(text));

@@ -24,9 +24,10 @@ import { ChoiceGroup } from '../check-a-charge/choice-group';
 import { TickBox } from '../check-a-charge/tick-box';
 import type { TypedChart, TypedValue } from '../loose-checks/check-draft';
 import { NumberField } from '../quantities/number-field';
+import { DASH } from '../quantities/printed-dash';
 import { ChartPreview } from './chart-preview';
 import { parsePaste } from './parse-paste';
-import { DASH, readTypedChart } from './read-typed-chart';
+import { readTypedChart } from './read-typed-chart';
 import {
   emptyChart,
   widthOf,

@@ -1,7 +1,7 @@
 /** A table copied from a spreadsheet or typed with spaces, as rows, columns and cells. An empty cell is a dash. */
-import { parse } from 'papaparse';
 import { parseNumber } from '../quantities/parse-number';
-import { DASH, isDash } from './read-typed-chart';
+import { pastedCells } from '../quantities/pasted-cells';
+import { DASH, isDash } from '../quantities/printed-dash';
 
 export interface PastedTable {
   readonly rows: readonly string[];
@@ -24,14 +24,6 @@ const problem = (of: PasteProblem, place?: string): ParsedPaste => ({
   ...(place !== undefined && { place }),
 });
 
-/** A tab is a spreadsheet's, a semicolon that of one whose decimal mark is the comma; else what stands apart by spaces. */
-function linesOf(text: string): string[][] {
-  const delimiter = ['\t', ';', ', '].find((mark) => text.includes(mark));
-  const source = delimiter === undefined ? text.replace(/[^\S\n]+/g, '\t') : text;
-  const { data } = parse<string[]>(source, { delimiter: delimiter?.trim() || '\t', skipEmptyLines: 'greedy' });
-  return data.map((line) => line.map((cell) => cell.trim()));
-}
-
 /** Titles above or beside the figures fall away. */
 const withoutTitles = (lines: string[][]): string[][] => {
   const first = lines.findIndex((line) => line.filter(isNumber).length >= 2 || line.every((cell) => isNumber(cell)));
@@ -46,16 +38,7 @@ const trimmed = (line: readonly string[]): string[] => {
 /** `twoWays`: the kind of table has a condition along the top as well. */
 export function parsePaste(text: string, twoWays: boolean): ParsedPaste {
   if (text.trim() === '') return problem('empty');
-  const lines = withoutTitles(
-    linesOf(
-      text
-        .trim()
-        .replace(/\r\n?/g, '\n')
-        .split('\n')
-        .map((line) => line.trimEnd())
-        .join('\n'),
-    ),
-  );
+  const lines = withoutTitles(pastedCells(text));
   if (lines.length < 2) return problem('no-table');
   return twoWays ? twoWayTable(lines) : oneWayTable(lines);
 }

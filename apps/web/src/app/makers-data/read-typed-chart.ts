@@ -2,12 +2,7 @@
 import type { ChartAxisInput, MakersChartInput, TemperatureAmount } from '@chargewright/engine';
 import type { TypedAxis, TypedChart, TypedValue } from '../loose-checks/check-draft';
 import { parseNumber } from '../quantities/parse-number';
-
-/** What stands for a printed dash: no target there. */
-export const DASH = '–';
-const DASHES = /^[-\u2010-\u2015\u2212]$/;
-
-export const isDash = (text: string): boolean => DASHES.test(text.trim());
+import { isDash } from '../quantities/printed-dash';
 
 const numberIn = (text: string): number | undefined => {
   const parsed = parseNumber(text);

@@ -1,6 +1,7 @@
 import type { TypedChart } from '../loose-checks/check-draft';
 import { parsePaste } from './parse-paste';
-import { DASH, isDash, readTypedChart } from './read-typed-chart';
+import { DASH, isDash } from '../quantities/printed-dash';
+import { readTypedChart } from './read-typed-chart';
 import { emptyChart, withAxisValue, withCell, withColumn, withoutColumn, withoutRow, withRow } from './typed-chart';
 
 const SUPERHEAT: TypedChart = {

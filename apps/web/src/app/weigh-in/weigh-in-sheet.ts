@@ -2,6 +2,7 @@
 import {
   INSTALLED_LINE_SIZES,
   LINE_SET_KINDS,
+  ouncesOfPoundsAndOunces,
   PROCEDURE_IDS,
   SHORTER_LINE_RULES,
   WEIGH_IN_METHODS,
@@ -163,20 +164,13 @@ export function weighInFields(filled: FilledSheet, choices: WeighInChoices): Wei
   };
 }
 
-const OZ_PER_LB = 16;
-
-/** Pounds and ounces as one amount; the ounces go the way of the pounds. */
+/** Pounds and ounces as one amount. */
 function massOf(filled: FilledSheet, key: string): Amount<MassUnit> | undefined {
   const main = entryOf(filled, { key, dimension: 'mass' });
   if (!main) return undefined;
   const ounces = main.unit === 'lb' ? entryOf(filled, { key: ouncesOf(key), dimension: 'ounces' }) : undefined;
   if (!ounces) return { value: main.value, unit: main.unit as MassUnit };
-  const direction = valueOf(filled, key)
-    ?.text.trim()
-    .match(/^[-−–]/)
-    ? -1
-    : 1;
-  return { value: main.value * OZ_PER_LB + direction * ounces.value, unit: 'oz' };
+  return { value: ouncesOfPoundsAndOunces(main.value, ounces.value), unit: 'oz' };
 }
 
 const pick = (

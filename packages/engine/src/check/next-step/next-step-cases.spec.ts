@@ -1117,6 +1117,43 @@ function factsOf(request: EvaluationRequest): Facts {
   });
 }
 
+describe('a limit that shuts the test', () => {
+  const figuresOf = (request: EvaluationRequest) => {
+    const { code, figures } = evaluate(request).overall.nextStep;
+    return { code, ...figures };
+  };
+  const stated = (limits: Partial<MakersChartInput>, outdoorDryBulb = 80) =>
+    valve({
+      setup: { targetSubcooling: null, makersChart: { ...SUBCOOLING_TABLE, ...limits } },
+      readings: { outdoorDryBulb },
+    });
+  const at = (degF: number) => ({
+    kind: 'temperatureK',
+    value: expect.closeTo(temperatureToK(degF, 'degF'), 9) as number,
+  });
+
+  it('is said in the next step: the maker’s where he states one, else the procedure’s', () => {
+    const cold = { outdoorDryBulb: 50, liquidPressure: 260, liquidLineTemperature: 78 };
+    expect(figuresOf(valve({ readings: cold }))).toEqual({ code: 'wait-for-warmer-weather', least: at(55) });
+    expect(figuresOf(stated({ leastOutdoor: { value: 85, unit: 'degF' } }))).toEqual({
+      code: 'wait-for-warmer-weather',
+      least: at(85),
+    });
+    expect(figuresOf(stated({ mostOutdoor: { value: 75, unit: 'degF' } }))).toEqual({
+      code: 'wait-for-cooler-weather',
+      most: at(75),
+    });
+    expect(figuresOf(stated({ mostReturn: { value: 75, unit: 'degF' } }))).toEqual({
+      code: 'cool-the-house',
+      most: at(75),
+    });
+    expect(figuresOf(stated({ leastReturn: { value: 90, unit: 'degF' } }))).toEqual({
+      code: 'warm-the-house',
+      least: at(90),
+    });
+  });
+});
+
 describe('the cases', () => {
   it('are at least sixty, with names of their own in each group', () => {
     expect(CASES.length).toBeGreaterThanOrEqual(60);

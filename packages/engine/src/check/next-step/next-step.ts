@@ -1,6 +1,7 @@
 /** The next step of a check: the row of the table that holds, with the figures its sentence needs. */
 import type { CriterionResult, NextStep } from '../result';
-import type { NextStepCode, NextStepFigures, NextStepMessage } from '../codes';
+import type { Figure, NextStepCode, NextStepFigures, NextStepMessage } from '../codes';
+import { conditionsGate } from '../criteria/conditions';
 import type { CheckInput } from '../input';
 import type { ReadingId } from '../readings';
 import type { Evidence } from './facts';
@@ -23,8 +24,22 @@ function withFigures(code: NextStepCode, { input, criteria, unfit }: Evidence): 
     const items = unfit?.code === 'not-ready' ? unfit.figures.items : ({ kind: 'preflight', value: [] } as const);
     return { code, figures: { items } };
   }
+  if (code === 'warm-the-house' || code === 'wait-for-warmer-weather') {
+    return { code, figures: { least: limitOf(input, 'least') } };
+  }
+  if (code === 'cool-the-house' || code === 'wait-for-cooler-weather') {
+    return { code, figures: { most: limitOf(input, 'most') } };
+  }
   // a union of messages without figures; the compiler cannot spread the code over its members
   return { code: code satisfies PlainStep, figures: {} } as NextStepMessage;
+}
+
+/** The limit of the gate that is shut: the maker's where he states one, else that of the procedure or the method. */
+function limitOf(input: CheckInput, end: 'least' | 'most'): Figure {
+  const figures: Readonly<Partial<Record<'least' | 'most', Figure>>> = conditionsGate(input)?.figures ?? {};
+  const limit = figures[end];
+  if (limit === undefined) throw new RangeError(`no ${end} limit is passed by these conditions`);
+  return limit;
 }
 
 const minutesLeft = ({ visit, procedure }: CheckInput): number =>
