@@ -122,7 +122,7 @@ describe('a damaged entry in the phone’s store', () => {
 
 describe('a phone that stores nothing', () => {
   it('says so, and judges all the same', async () => {
-    const { page, context, check } = await suite.newPhone();
+    const { page, context, check } = await suite.newPhone({ alone: true });
     await context.addInitScript(() => {
       IDBFactory.prototype.open = () => {
         throw new DOMException('denied', 'SecurityError');

@@ -14,7 +14,7 @@ const suite = browserSuite();
 
 describe('without a network', () => {
   it('the page opens again after the first visit, and a check is judged on it', async () => {
-    const phone = await suite.newPhone();
+    const phone = await suite.newPhone({ alone: true });
     const { page, context, check } = phone;
     await check.open();
     await page.getByText(offlineWords.ready).waitFor({ timeout: 30_000 });
@@ -42,7 +42,7 @@ describe('without a network', () => {
   });
 
   it('the API is not answered out of the app’s cache', async () => {
-    const { page, check } = await suite.newPhone();
+    const { page, check } = await suite.newPhone({ alone: true });
     await check.open();
     await page.getByText(offlineWords.ready).waitFor({ timeout: 30_000 });
     const response = await page.goto('/healthz');
