@@ -3,6 +3,8 @@ import { createApp } from './app';
 import { ConfigError, readConfig } from './config';
 import { DataError } from './db/open-database';
 import { openRecords } from './db/records';
+import { openSessions } from './features/sign-in/sessions';
+import { signInWaits } from './features/sign-in/sign-in-waits';
 import { LIMITS } from './http/limits';
 import { ListenError, closeServer, createServer, listen } from './server';
 
@@ -10,7 +12,9 @@ async function main(): Promise<void> {
   const config = readConfig(process.env);
   const logger = pino({ level: config.logLevel, base: null });
   const records = openRecords(config);
-  const app = createApp({ ...config, logger, limits: LIMITS, isReady: () => records.isReadable() });
+  const sessions = openSessions(records, config);
+  const isReady = () => records.isReadable();
+  const app = createApp({ ...config, logger, limits: LIMITS, records, sessions, waits: signInWaits(), isReady });
   const server = createServer(app, config.tls);
   let ending = false;
   const end = (): void => {

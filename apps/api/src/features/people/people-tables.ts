@@ -1,7 +1,7 @@
 /** Shops, the people who sign in, and who is a member of which shop. Times are ISO 8601 in UTC, by the server's clock. */
+import type { Role } from '@chargewright/contract/sign-in';
 import { sql } from 'drizzle-orm';
 import { index, primaryKey, sqliteTable, text } from 'drizzle-orm/sqlite-core';
-import type { Role } from './roles';
 
 const now = sql`(strftime('%Y-%m-%dT%H:%M:%fZ', 'now'))`;
 

@@ -3,10 +3,6 @@ import { hash, verify } from '@node-rs/argon2';
 
 const OPTIONS = { memoryCost: 19_456, timeCost: 2, parallelism: 1 };
 
-export const LEAST_PASSWORD_LENGTH = 10;
-/** Longer ones cost the server time and nobody types them. */
-export const MOST_PASSWORD_LENGTH = 200;
-
 /** Accents typed on another keyboard may be composed another way. */
 const normalized = (password: string): string => password.normalize('NFKC');
 

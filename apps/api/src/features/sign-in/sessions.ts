@@ -35,7 +35,6 @@ export interface ReadSession {
 }
 
 export interface Sessions {
-  readonly cookieName: string;
   /** A cookie that ends the session in the browser. */
   readonly blankCookie: string;
   /** Starts a session; the answer is the cookie to send. */
@@ -51,7 +50,7 @@ export interface Sessions {
   sweep(): Promise<void>;
 }
 
-const COOKIE = 'chargewright_session';
+export const SESSION_COOKIE = 'chargewright_session';
 const LIFE_DAYS = 60;
 const TOKEN_BYTES = 32;
 const DEVICE_LENGTH = 200;
@@ -61,13 +60,12 @@ const hashOf = (token: string): string => createHash('sha256').update(token).dig
 export function openSessions(records: Records, { secure }: { readonly secure: boolean }): Sessions {
   const lucia = new Lucia(adapterOf(records), {
     sessionExpiresIn: new TimeSpan(LIFE_DAYS, 'd'),
-    sessionCookie: { name: COOKIE, attributes: { secure, sameSite: 'lax', path: '/' } },
+    sessionCookie: { name: SESSION_COOKIE, attributes: { secure, sameSite: 'lax', path: '/' } },
     getSessionAttributes: ({ startedAt, device }) => ({ startedAt, device }),
   });
   const cookieOf = (token: string): string => lucia.createSessionCookie(token).serialize();
 
   return {
-    cookieName: COOKIE,
     blankCookie: lucia.createBlankSessionCookie().serialize(),
 
     async create(personId, device) {
