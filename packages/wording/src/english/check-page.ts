@@ -129,6 +129,7 @@ export const checkPageWords = {
       readings: 'Record it now',
       airflow: 'Find the airflow',
       'weigh-in': 'Weigh in',
+      'makers-data': 'Enter the maker’s table',
     },
     nextReadingLabel: (reading: string) => `Next reading: ${reading}`,
     nextStep: 'Next step',

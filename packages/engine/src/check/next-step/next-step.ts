@@ -2,6 +2,7 @@
 import type { CriterionResult, NextStep } from '../result';
 import type { Figure, NextStepCode, NextStepFigures, NextStepMessage } from '../codes';
 import { conditionsGate } from '../criteria/conditions';
+import { unstatedReason } from '../fit-for-test';
 import type { CheckInput } from '../input';
 import type { ReadingId } from '../readings';
 import type { Evidence } from './facts';
@@ -23,6 +24,12 @@ function withFigures(code: NextStepCode, { input, criteria, unfit }: Evidence): 
   if (code === 'mend-before-test') {
     const items = unfit?.code === 'not-ready' ? unfit.figures.items : ({ kind: 'preflight', value: [] } as const);
     return { code, figures: { items } };
+  }
+  if (code === 'state-the-setup') {
+    const reason = unstatedReason(input);
+    const fields =
+      reason?.code === 'setup-not-stated' ? reason.figures.fields : ({ kind: 'setup', value: [] } as const);
+    return { code, figures: { fields } };
   }
   if (code === 'warm-the-house' || code === 'wait-for-warmer-weather') {
     return { code, figures: { least: limitOf(input, 'least') } };
