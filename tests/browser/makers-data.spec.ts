@@ -1,4 +1,11 @@
-import { checkPageWords, makersChartWords, makersDataWords, procedureWords, setupWords } from '@chargewright/wording';
+import {
+  checkPageWords,
+  makersChartWords,
+  makersDataWords,
+  procedureWords,
+  readingWords,
+  setupWords,
+} from '@chargewright/wording';
 import { describe, expect, it } from 'vitest';
 import { accessibilityFaults } from './harness/axe';
 import { HIGH_SUPERHEAT } from './harness/check-page';
@@ -73,9 +80,17 @@ describe('somebody with the maker’s table in his hand', () => {
     await page.getByRole('textbox', { name: words.pasteHint }).fill(TABLE);
     await check.button(words.pasteRead).click();
     await page.getByText(words.complete).waitFor();
+    await page.getByText(words.conditions, { exact: true }).click();
+    await check.type(words.leastReturn, '80');
     await check.button(words.done).click();
     await page.getByRole('link', { name: words.back }).click();
     await check.goToReadings();
+    // the return air is at 78.2 °F
+    await page
+      .getByText(/the test needs at least 80\.0 °F/)
+      .first()
+      .waitFor();
+    await check.type(readingWords.returnDryBulb.label, '80.4');
     await page
       .getByText(/^Superheat is within its band, 1\.\d °F below target$/)
       .first()

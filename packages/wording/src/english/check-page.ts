@@ -44,6 +44,7 @@ export const checkPageWords = {
     system: 'The system',
     assumed: 'assumed',
     assumedFields: (fields: string) => `Assumed: ${fields}`,
+    unstatedFields: (fields: string) => `Not stated yet: ${fields}`,
     assumedNote: 'Assumed until you say so. Tap what is right.',
     confirmAssumed: 'All as assumed',
     search: 'Search by number',
