@@ -2,6 +2,7 @@
 import * as z from 'zod';
 import { object } from './parsing/object';
 
+export { structureFault } from './parsing/structure-fault';
 export type { ExpectedType, StructureFault } from './parsing/structure-fault';
 
 export const PROBLEM_CODES = [

@@ -1,4 +1,4 @@
-import { structureFault } from '@chargewright/contract/parsing';
+import { structureFault } from '@chargewright/contract/problem';
 import type * as z from 'zod';
 import { HttpProblem } from './http-problem';
 import { structureErrors } from './structure-errors';
