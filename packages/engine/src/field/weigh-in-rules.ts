@@ -46,23 +46,18 @@ const CEC_2019_INSTALLER: WeighInRules = {
   source: FORMS_2019,
 };
 
+const COMMON_PRACTICE: WeighInRules = {
+  role: 'performs',
+  observesBelow: null,
+  promisesBelow: null,
+  vacuumRecord: 'advised',
+  standing: 'practice',
+  source: 'Common practice, no source',
+};
+
 export const WEIGH_IN_RULES: Readonly<Record<ProcedureId, WeighInRules>> = {
-  'general-rules': {
-    role: 'performs',
-    observesBelow: null,
-    promisesBelow: null,
-    vacuumRecord: 'advised',
-    standing: 'practice',
-    source: 'Common practice, no source',
-  },
-  manufacturer: {
-    role: 'performs',
-    observesBelow: null,
-    promisesBelow: null,
-    vacuumRecord: 'advised',
-    standing: 'practice',
-    source: 'Common practice, no source',
-  },
+  'general-rules': COMMON_PRACTICE,
+  manufacturer: COMMON_PRACTICE,
   'cec-ra3.2-2008-installer': CEC_2008_INSTALLER,
   'cec-ra3.2-2008-rater': { ...CEC_2008_INSTALLER, role: 'never' },
   'cec-ra3.2-2019-installer': CEC_2019_INSTALLER,
