@@ -1,4 +1,5 @@
 import { mkdirSync, rmSync } from 'node:fs';
+import { availableParallelism } from 'node:os';
 import path from 'node:path';
 import { prepareChromium } from './chromium.mjs';
 import { closingLine, countTests } from './count-tests.mjs';
@@ -10,6 +11,7 @@ import { allSuites, chooseSuites } from './suites.mjs';
 
 const SHOWN_LOG_LINES = 400;
 const SHOWN_SLOWEST = 10;
+const MOST_AT_ONCE = 2;
 
 /** Never left out quietly: without a browser the suite fails, with the reason. */
 async function chromiumFor(suite) {
@@ -35,8 +37,22 @@ async function runSuite(suite) {
     result = { passed: 0, failed: 1, skipped: 0, why: error.message, tests: [] };
   }
   const why = result.why === null ? '' : ` (${result.why})`;
-  say(`  ${result.passed} passed, ${result.failed} failed${why}`);
+  say(`  ${suite.name}: ${result.passed} passed, ${result.failed} failed${why}`);
   return { ...result, name: suite.name, budgetSeconds: suite.budgetSeconds, milliseconds: performance.now() - start };
+}
+
+/** Two at a time on two cores or more; those that need the machine for themselves after the others. */
+async function runSuites(suites) {
+  const results = new Map();
+  const runNext = async (queue) => {
+    for (let suite = queue.shift(); suite !== undefined; suite = queue.shift()) {
+      results.set(suite.name, await runSuite(suite));
+    }
+  };
+  const shared = suites.filter(({ alone }) => !alone);
+  await Promise.all(Array.from({ length: Math.min(MOST_AT_ONCE, availableParallelism()) }, () => runNext(shared)));
+  await runNext(suites.filter(({ alone }) => alone));
+  return suites.map(({ name }) => results.get(name));
 }
 
 function report(results) {
@@ -65,7 +81,7 @@ export async function test(names) {
     // So that no result of an earlier run is counted.
     rmSync(path.join(ROOT, 'test-results'), { recursive: true, force: true });
     mkdirSync(path.join(ROOT, 'test-results'));
-    for (const suite of suites) results.push(await runSuite(suite));
+    results.push(...(await runSuites(suites)));
     report(results);
   } catch (error) {
     sayFailure(error);

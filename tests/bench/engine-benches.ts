@@ -1,6 +1,13 @@
 /** What the engine's speed is measured on: the same states for us and for what we are compared with. */
 import type { EvaluationRequest } from '@chargewright/engine';
-import { dewTemperatureK, evaluateCheck, readRequest, REFRIGERANT_IDS, saturationRange } from '@chargewright/engine';
+import {
+  dewTemperatureK,
+  diagnoseCheck,
+  evaluateCheck,
+  readRequest,
+  REFRIGERANT_IDS,
+  saturationRange,
+} from '@chargewright/engine';
 import { dewPointKFromVapourPressure } from '../../packages/engine/src/psychrometrics/dew-point';
 import { FREEZING_K } from '../../packages/engine/src/psychrometrics/psychrometric-equation';
 import { waterVapourSaturationPressurePa } from '../../packages/engine/src/psychrometrics/saturation-pressure';
@@ -130,24 +137,57 @@ function saturation(): BenchRow {
   };
 }
 
-function evaluation(): readonly BenchRow[] {
-  const read = readRequest(EXAMPLE);
+function readExample(request: EvaluationRequest) {
+  const read = readRequest(request);
   if (!read.ok) throw new Error('the example was refused');
-  const { input } = read;
-  const [judging, reading] = timePerCall([
+  return read.input;
+}
+
+/** Everything that a check can ask of the engine at once: a maker's table with a dash, and the causes. */
+const WITH_MAKERS_TABLE: EvaluationRequest = {
+  ...EXAMPLE,
+  setup: {
+    ...EXAMPLE.setup,
+    makersChart: {
+      kind: 'superheat',
+      rows: { unit: 'degF', values: [75, 85, 95, 105, 115] },
+      columns: { unit: 'degF', values: [57, 62, 67, 72] },
+      unit: 'deltaF',
+      cells: [
+        [9, 17, 24, 31],
+        [6, 13, 21, 29],
+        [null, 10, 18, 26],
+        [null, 7, 15, 23],
+        [null, null, 11, 20],
+      ],
+    },
+  },
+};
+
+function evaluation(): readonly BenchRow[] {
+  const input = readExample(EXAMPLE);
+  const withTable = readExample(WITH_MAKERS_TABLE);
+  const [judging, whole, reading] = timePerCall([
     { name: 'evaluateCheck', run: () => evaluateCheck(input).criteria.length, calls: 1 },
+    {
+      name: 'evaluateCheck and diagnoseCheck',
+      run: () => diagnoseCheck(withTable, evaluateCheck(withTable)).causes.length,
+      calls: 1,
+    },
     { name: 'readRequest', run: () => Number(readRequest(EXAMPLE).ok), calls: 1 },
   ]);
+  const judgement = (what: string, ns: number): BenchRow => ({
+    what,
+    measured: duration(ns),
+    comparedWith: '',
+    goal: `≤ ${MOST_EVALUATION_US} µs`,
+    met: ns <= 1000 * MOST_EVALUATION_US,
+  });
   return [
+    judgement('`evaluateCheck` of the example of the interface', judging!.ns),
+    judgement('the same by a maker’s table, with its causes (`diagnoseCheck`)', whole!.ns),
     {
-      what: '`evaluateCheck` of the example of the interface',
-      measured: duration(judging!.ns),
-      comparedWith: '',
-      goal: `≤ ${MOST_EVALUATION_US} µs`,
-      met: judging!.ns <= 1000 * MOST_EVALUATION_US,
-    },
-    {
-      what: '`readRequest` of the same',
+      what: '`readRequest` of the example',
       measured: duration(reading!.ns),
       comparedWith: `evaluateCheck: ${(1 / reading!.timesTheFirst).toPrecision(3)} times as long`,
       goal: '',

@@ -60,7 +60,7 @@ describe('somebody with a finding', () => {
     const card = page.locator('app-criterion-card').filter({ has: page.getByRole('heading', { name: /^Superheat/ }) });
     await card.getByRole('button', { name: targetComparisonWords.show }).click();
     const table = card.getByRole('table');
-    expect(await table.getByRole('row').count()).toBe(5);
+    await expect.poll(() => table.getByRole('row').count()).toBe(5);
     const chartA = table.getByRole('row').filter({ hasText: targetComparisonWords.names['makers-chart-a'] });
     expect(await chartA.innerText()).toMatch(new RegExp(`${targetComparisonWords.used}[^]*8\\.8 °F`));
     expect(await accessibilityFaults(page)).toEqual([]);

@@ -91,7 +91,7 @@ export function formatNumber(value: number, decimals: number): string {
 export const formatTrimmed = (value: number, decimals: number): string =>
   decimals === 0 ? formatNumber(value, 0) : formatNumber(value, decimals).replace(/\.?0+$/, '');
 
-const withUnit = (text: string, unit: ContractUnit): string => {
+export const withUnit = (text: string, unit: ContractUnit): string => {
   if (unit === 'd' && text === '1') return '1 day';
   const label = unitLabel(unit);
   return label === '' ? text : `${text} ${label}`;

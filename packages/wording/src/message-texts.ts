@@ -1,6 +1,7 @@
 import type { Figure, MakersChartKind, PreflightItem, ReadingId, SetupField } from '@chargewright/engine';
 import { differenceToK, massToKg, powerToW, temperatureToK } from '@chargewright/engine';
 import { formatNumber, formatShort, formatValue } from './format-value';
+import { type TargetRangeWords, targetRangeWords } from './target-range-words';
 import type { UnitSystem } from './unit-system';
 
 /** Fixed amounts of the trade inside sentences, stated in the units of their source and printed in the reader's. */
@@ -34,6 +35,8 @@ export interface FigureNames {
   readonly preflight: Readonly<Record<PreflightItem, { readonly name: string }>>;
   readonly setup: Readonly<Record<SetupField, { readonly name: string }>>;
   readonly makersChart: Readonly<Record<MakersChartKind, { readonly name: string }>>;
+  /** "at 64 °F wet bulb from 55 to 95 °F outdoors". */
+  targetRange(range: TargetRangeWords): string;
   list(names: readonly string[]): string;
 }
 
@@ -50,6 +53,11 @@ function figureText(figure: Figure, system: UnitSystem, names: FigureNames, prin
   if (figure.kind === 'preflight') return names.list(figure.value.map((id) => names.preflight[id].name));
   if (figure.kind === 'setup') return names.list(figure.value.map((id) => names.setup[id].name));
   if (figure.kind === 'makersCharts') return names.list(figure.value.map((id) => names.makersChart[id].name));
+  if (figure.kind === 'targetRanges') {
+    return targetRangeWords(figure.value, system)
+      .map((range) => names.targetRange(range))
+      .join('; ');
+  }
   return print(figure.kind, figure.value, system);
 }
 

@@ -72,6 +72,18 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   row: { kind: 'count', value: 2 },
   given: { kind: 'count', value: 5 },
   wanted: { kind: 'count', value: 6 },
+  ranges: {
+    kind: 'targetRanges',
+    value: [
+      {
+        along: 'outdoorDryBulb',
+        lowK: temperatureToK(55, 'degF'),
+        highK: temperatureToK(95.4, 'degF'),
+        presentK: temperatureToK(100, 'degF'),
+        at: { condition: 'returnWetBulb', valueK: temperatureToK(64, 'degF') },
+      },
+    ],
+  },
   charts: { kind: 'makersCharts', value: ['superheat', 'liquid-pressure'] },
 };
 

@@ -1,5 +1,5 @@
 /** Every worked example comes out as its key says, and its key says what the published rules say of the figures worked on paper. */
-import type { CheckResult, EvaluationRequest } from '@chargewright/engine';
+import type { CheckResult, Diagnosis, EvaluationRequest } from '@chargewright/engine';
 import { differenceFromK } from '@chargewright/engine';
 import {
   workCheck,
@@ -13,13 +13,14 @@ import { onPaper, requestOf } from './paper';
 
 const CHECKS = WORKED_EXAMPLES.filter((example): example is CheckExample => example.kind === 'check');
 
-function expectKey(result: CheckResult, key: Partial<CheckKey>): void {
+function expectKey(result: CheckResult, { causes }: Diagnosis, key: Partial<CheckKey>): void {
   expect(result.overall.finding).toBe(key.overall);
   expect(result.overall.nextStep.code).toBe(key.nextStep);
   if (key.stops) expect(result.overall.stops.map(({ code }) => code)).toEqual(key.stops);
   const criterion = result.criteria.find((each) => each.criterion === key.criterion);
   if (key.byRule !== undefined) expect(criterion?.byRule).toBe(key.byRule);
   if (key.reason !== undefined && key.criterion) expect(criterion?.reason?.code ?? null).toBe(key.reason);
+  if (key.causes) expect(causes.map(({ cause }) => cause)).toEqual(key.causes);
   const cautions = result.overall.cautions.map(({ code }) => code);
   for (const caution of key.cautions ?? []) expect(cautions).toContain(caution);
 }
@@ -41,10 +42,10 @@ function byRuleOnPaper(example: CheckExample, criterion: CheckKey['criterion'], 
 const hasTarget = ({ byRule }: Partial<CheckKey>): boolean => byRule !== undefined && byRule !== null;
 
 describe.each(CHECKS)('$id', (example) => {
-  const { result, slips } = workCheck(example);
+  const { result, diagnosis, slips } = workCheck(example);
 
   it('comes out as its key says', () => {
-    expectKey(result, example.key);
+    expectKey(result, diagnosis, example.key);
   });
 
   it('passes or fails as the printed rule says of the figures on paper', () => {
@@ -63,12 +64,15 @@ describe.each(CHECKS)('$id', (example) => {
     }
   });
 
-  it.each(slips)('with the slip $slip.id comes out otherwise, as its key says', ({ slip, result: slipped }) => {
-    expectKey(slipped, slip.key);
-    const { criterion, byRule } = slip.key;
-    if (criterion && hasTarget(slip.key)) expect(byRuleOnPaper(example, criterion, slip.id)).toBe(byRule);
-    expect(outcome(slipped, slip)).not.toEqual(outcome(result, { request: example.request }));
-  });
+  it.each(slips)(
+    'with the slip $slip.id comes out otherwise, as its key says',
+    ({ slip, result: slipped, diagnosis: found }) => {
+      expectKey(slipped, found, slip.key);
+      const { criterion, byRule } = slip.key;
+      if (criterion && hasTarget(slip.key)) expect(byRuleOnPaper(example, criterion, slip.id)).toBe(byRule);
+      expect(outcome(slipped, slip)).not.toEqual(outcome(result, { request: example.request }));
+    },
+  );
 });
 
 /** What a person would take away from a check: the finding, what to do, and whether the rule was met. */

@@ -36,7 +36,21 @@ export type Figure =
   | { readonly kind: 'readings'; readonly value: readonly ReadingId[] }
   | { readonly kind: 'preflight'; readonly value: readonly PreflightItem[] }
   | { readonly kind: 'setup'; readonly value: readonly SetupField[] }
-  | { readonly kind: 'makersCharts'; readonly value: readonly MakersChartKind[] };
+  | { readonly kind: 'makersCharts'; readonly value: readonly MakersChartKind[] }
+  | { readonly kind: 'targetRanges'; readonly value: readonly TargetRange[] };
+
+/** What one can wait for or come back to; pressures and line temperatures only follow. */
+export type AwaitedCondition = 'outdoorDryBulb' | 'returnWetBulb' | 'returnDryBulb';
+
+/** From where to where one condition may lie for a target to exist, if the other stays as it is. */
+export interface TargetRange {
+  readonly along: AwaitedCondition;
+  readonly lowK: number;
+  readonly highK: number;
+  readonly presentK: number;
+  /** `null`: the table has one condition. */
+  readonly at: { readonly condition: AwaitedCondition; readonly valueK: number } | null;
+}
 
 /** A message of a catalogue `Names`: code → names of its figures (`never` for none). */
 export type MessageOf<Names> = {
@@ -163,7 +177,7 @@ export interface NextStepFigures {
   'thaw-then-diagnose': never;
   'shut-down-high-pressure': never;
   'shut-down-hot-discharge': never;
-  'come-back-at-higher-target': never;
+  'come-back-at-higher-target': 'least' | 'ranges';
   'reread-wet-bulb-then-airflow': never;
   'check-overcharge-or-air': never;
   'check-metering': never;
@@ -175,7 +189,7 @@ export interface NextStepFigures {
   'wait-for-cooler-weather': 'most';
   'check-instruments': never;
   'make-access-hole': never;
-  'reach-a-target': never;
+  'reach-a-target': 'ranges';
   'record-conditions': never;
   // readings and targets
   'take-readings': 'readings';

@@ -2,6 +2,7 @@ import type { FigureNames } from '../message-texts';
 import { makersChartWords } from './makers-charts';
 import { readingWords } from './readings';
 import { listWords, setupWords } from './setup';
+import { targetRangePhrase } from './target-ranges';
 
 const { mode, kind, stage, highSidePort } = setupWords;
 
@@ -11,5 +12,6 @@ export const names: FigureNames = {
   preflight: setupWords.preflight,
   setup: { mode, kind, stage, highSidePort },
   makersChart: makersChartWords.kinds,
+  targetRange: targetRangePhrase,
   list: listWords,
 };

@@ -21,6 +21,8 @@ const THAW =
 const AFTER_THAW = 'Readings at minutes 10 to 15 after thawing serve the diagnosis only, never the charge.';
 const BULB = 'bulb tight on clean pipe, at the right place, wrapped, its charge not lost';
 
+/** The ranges of a chart, where it has any that one condition alone can reach. */
+const where = (ranges: string): string => (ranges === '' ? '' : `: ${ranges}`);
 const each = (say: Say): string => `Each at most 5 % of the factory charge (not known: at most ${say.ozPerTon(2)})`;
 const add = (say: Say): string =>
   `Add in small steps. ${each(say)}, liquid throttled into the suction side, ${THEN_READ}. Gloves and closed glasses.`;
@@ -99,7 +101,7 @@ const steps: NextStepWords['steps'] = {
     'Oil and valves do not last at this temperature.',
   ],
   'come-back-at-higher-target': [
-    (_, say) => `Come back when the target superheat is ${say.deltaF(8)} or more. Recover nothing today.`,
+    (f) => `Come back when the target superheat is ${f.least} or more${where(f.ranges)}. Recover nothing today.`,
     'At these conditions even a right charge runs near the floor: it cannot be told apart.',
   ],
   'reread-wet-bulb-then-airflow': [
@@ -144,8 +146,9 @@ const steps: NextStepWords['steps'] = {
     'These rules want the air read in the plenum beside the coil, not at a grille.',
   ],
   'reach-a-target': [
-    'Wait for conditions that have a target, or come back. A house that is more humid or weather that is less hot raises the target. Heating may warm the house if the occupant agrees; mind people and animals.',
-    'The chart prints none here: the superheat would be too small to trust.',
+    (f) =>
+      `Wait for conditions that have a target, or come back${where(f.ranges)}. Heating may warm the house if the occupant agrees; mind people and animals.`,
+    'The chart prints none here, or its edge is too near to be sure.',
   ],
   'record-conditions': [
     'Record the running time, the lowest return air and the look-over before reading.',

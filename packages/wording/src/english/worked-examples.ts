@@ -1,5 +1,6 @@
 /** The pages of the worked examples, and the names of what stands on their keys. */
 import type { SlipId, WeighInPart, WorkedFigureId, WorkedStanding } from '@chargewright/engine/training';
+import { separatingTestWords } from './separating-tests';
 
 /** What is read or set up otherwise, and what would come of it. */
 const slips: Readonly<Record<SlipId, { readonly name: string; readonly what: string }>> = {
@@ -93,6 +94,7 @@ export const workedExampleWords = {
     questions: 'Questions',
     showKey: 'Show the key',
     openCheck: 'Open in Check a charge',
+    workIt: { 'moist-air': 'Work it in Moist air', 'weigh-in': 'Work it in Weigh in' },
     openNote: 'Starts a new check with these readings, marked as an example. Your own checks stay as they are.',
     print: 'Print this page',
     own: {
@@ -109,6 +111,7 @@ export const workedExampleWords = {
     math: 'The math',
     mathOf: (what: string) => `The math, ${what}`,
     finding: 'Finding',
+    causes: separatingTestWords.causesTitle,
     nextStep: 'Next step',
     otherwise: 'What if',
     point: 'What stays',

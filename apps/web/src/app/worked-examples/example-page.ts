@@ -28,6 +28,7 @@ export class ExamplePage {
   private readonly window = inject(DOCUMENT).defaultView;
 
   protected readonly words = workedExampleWords.example;
+  protected readonly pages = { 'moist-air': '/properties/air', 'weigh-in': '/weigh-in' } as const;
   protected readonly standing = safetyWords.standing;
   protected readonly count = WORKED_EXAMPLES.length;
   protected readonly chosen = chosenExample();

@@ -1,5 +1,5 @@
 /** What a key says of each kind of example, as texts: the page only lays it out. */
-import type { CheckResult, NextStep } from '@chargewright/engine';
+import type { CheckResult, Diagnosis, NextStep } from '@chargewright/engine';
 import {
   workCheck,
   workMoistAir,
@@ -10,13 +10,16 @@ import {
   type WorkedExample,
 } from '@chargewright/engine/training';
 import {
+  causeText,
   cautionText,
   checkedLines,
+  evidenceText,
   formatStated,
   formatValue,
   nextStepLines,
   otherFigureRows,
   overallHeadline,
+  separatingTestWords as testWords,
   stepsOfLesson,
   stopText,
   weighInSum,
@@ -34,6 +37,7 @@ export interface ExampleKey {
   readonly sums: readonly { readonly title: string; readonly lines: readonly SumLine[] }[];
   /** Empty where nothing is judged. */
   readonly findings: readonly string[];
+  readonly causes: readonly { readonly name: string; readonly signs: readonly string[] }[];
   readonly nextStep: NextStep | undefined;
   readonly otherwise: readonly { readonly what: string; readonly outcome: string }[];
   /** Those that stand beside no step of the math. */
@@ -54,7 +58,7 @@ export function keyOf(example: WorkedExample, system: UnitSystem): ExampleKey {
 }
 
 function checkKey(example: CheckExample, system: UnitSystem): ExampleKey {
-  const { result, slips, figures } = workCheck(example);
+  const { result, diagnosis, slips, figures } = workCheck(example);
   const { stops, cautions, nextStep } = result.overall;
   const steps = stepsOfLesson(result.derivation, figures);
   return {
@@ -64,14 +68,24 @@ function checkKey(example: CheckExample, system: UnitSystem): ExampleKey {
       ...(stops.length > 0 ? stops.map((stop) => stopText(stop, system)) : [`${overallHeadline(result, system)}.`]),
       ...cautions.filter(({ code }) => example.key.cautions.includes(code)).map((each) => cautionText(each, system)),
     ],
+    causes: diagnosis.causes.map(({ cause, fits, doesNotFit }) => ({
+      name: causeText(cause),
+      signs: [
+        ...fits.map((sign) => `${testWords.fits}: ${evidenceText(sign, system)}`),
+        ...doesNotFit.map((sign) => `${testWords.doesNotFit}: ${evidenceText(sign, system)}`),
+      ],
+    })),
     nextStep,
-    otherwise: slips.map(({ slip, result: slipped }) => ({
+    otherwise: slips.map(({ slip, result: slipped, diagnosis: found }) => ({
       what: slipWords[slip.id].what,
-      outcome: outcome(slipped, system),
+      outcome: slip.given ? `${causeNames(found)} ${outcome(slipped, system)}` : outcome(slipped, system),
     })),
     figures: otherFigureRows(figures, steps),
   };
 }
+
+/** What the further readings of a test leave of the causes. */
+const causeNames = ({ causes }: Diagnosis): string => causes.map(({ cause }) => `${causeText(cause)}.`).join(' ');
 
 /** The finding and the first sentence of what to do. */
 const outcome = (result: CheckResult, system: UnitSystem): string =>
@@ -83,6 +97,7 @@ function airKey(example: MoistAirExample, system: UnitSystem): ExampleKey {
     math: checkedLines(steps, figures, system),
     sums: [],
     findings: [],
+    causes: [],
     nextStep: undefined,
     otherwise: [],
     figures: otherFigureRows(figures, steps),
@@ -98,6 +113,7 @@ function weighInKey(example: WeighInExample, system: UnitSystem): ExampleKey {
       lines: weighInSum(result, system),
     })),
     findings: [],
+    causes: [],
     nextStep: undefined,
     otherwise: parts.flatMap(({ part, misprinted }) =>
       misprinted.flatMap(({ actual, difference }) =>

@@ -38,7 +38,7 @@ function temperatureLimits(input: CheckInput, method: ChargeMethod | null): read
   const stated = method?.chart;
   add('outdoor-too-cold', outdoor, leastOutdoorK(input, method));
   add('return-too-cool', lowestReturn(input), stated?.leastReturnK ?? leastReturnK(input));
-  add('outdoor-too-hot', outdoor, stated?.mostOutdoorK ?? mostOutdoorK(input));
+  add('outdoor-too-hot', outdoor, mostOutdoorK(input, method));
   add('return-too-warm', input.readings.returnDryBulb?.quantity, stated?.mostReturnK);
   return limits;
 }
@@ -55,8 +55,12 @@ export function leastOutdoorK({ procedure, setup }: CheckInput, method: ChargeMe
 const leastReturnK = ({ procedure, setup }: CheckInput): number | undefined =>
   setup.mode === 'cooling' ? procedure.conditions.leastReturnK?.value : undefined;
 
-const mostOutdoorK = ({ procedure, setup }: CheckInput): number | undefined =>
-  setup.mode === 'cooling' && isFixedOrifice(setup) ? procedure.conditions.mostOutdoorForSuperheatK?.value : undefined;
+/** The maker's limit, else the procedure's. */
+export function mostOutdoorK({ procedure, setup }: CheckInput, method: ChargeMethod | null): number | undefined {
+  if (method?.chart?.mostOutdoorK !== undefined) return method.chart.mostOutdoorK;
+  const bySuperheat = setup.mode === 'cooling' && isFixedOrifice(setup);
+  return bySuperheat ? procedure.conditions.mostOutdoorForSuperheatK?.value : undefined;
+}
 
 /** The first condition that shuts the test, or `null`. What was not recorded does not shut it here. */
 export function conditionsGate(input: CheckInput, method = chargeMethod(input)): Reason | null {

@@ -1,7 +1,7 @@
 /** What a technician is told, case by case: the review of the next-step table. Every row is reached, each by a system with a name. */
 import { describe, expect, it } from 'vitest';
 import { bubblePressurePa, dewPressurePa } from '../../refrigerants/saturation';
-import { PA_PER_PSI, temperatureToK } from '../../units';
+import { PA_PER_PSI, temperatureFromK, temperatureToK } from '../../units';
 import { airflowEvidence, judgeAirflow, judgeSplit, splitEvidence, splitTarget } from '../criteria/air';
 import { chargeMethod } from '../charge-method';
 import { chargeTarget } from '../criteria/charge-target';
@@ -1035,7 +1035,7 @@ const MAKERS: readonly Case[] = [
     'move-no-refrigerant',
   ],
   [
-    'hotter than the table goes',
+    'colder than the table goes',
     valve({ setup: { targetSubcooling: null, makersChart: SUBCOOLING_TABLE }, readings: { outdoorDryBulb: 62 } }),
     'reach-a-target',
     'move-no-refrigerant',
@@ -1151,6 +1151,57 @@ describe('a limit that shuts the test', () => {
       code: 'warm-the-house',
       least: at(90),
     });
+  });
+});
+
+describe('what would make it verifiable', () => {
+  const degF = (kelvin: number) => Math.round(temperatureFromK(kelvin, 'degF') * 100) / 100;
+  const rangesOf = (request: EvaluationRequest) => {
+    const { figures } = evaluate(request).overall.nextStep;
+    const ranges = 'ranges' in figures && figures.ranges.kind === 'targetRanges' ? figures.ranges.value : null;
+    return ranges?.map(({ along, lowK, highK, presentK, at }) => [
+      along,
+      degF(lowK),
+      degF(highK),
+      degF(presentK),
+      ...(at === null ? [] : [at.condition, degF(at.valueK)]),
+    ]);
+  };
+
+  it('is how hot it may be at this wet bulb, and how humid it has to be in this heat: chart A', () => {
+    // 64 °F: printed from 40 to 95 °F, the test begins at 55; 100 °F: printed from 66 to 76 °F
+    expect(rangesOf(orifice({ readings: { outdoorDryBulb: 100, returnWetBulb: 64 } }))).toEqual([
+      ['outdoorDryBulb', 55, 95, 100, 'returnWetBulb', 64],
+      ['returnWetBulb', 66, 76, 64, 'outdoorDryBulb', 100],
+    ]);
+  });
+
+  it('is what is left where the other condition is beyond the chart', () => {
+    // 49 °F stands before its first column
+    expect(rangesOf(orifice({ readings: { outdoorDryBulb: 80, returnWetBulb: 49 } }))).toEqual([
+      ['returnWetBulb', 58, 76, 49, 'outdoorDryBulb', 80],
+    ]);
+  });
+
+  it('is where the target is 8 °F or more when liquid comes back near the floor', () => {
+    const near = orifice({ readings: { ...superheat(4), outdoorDryBulb: 95, returnWetBulb: 64 } });
+    // column 64: 9 at 90 °F, 6 at 95 °F; row 95: 6 at 64 °F, 10 at 66 °F
+    expect(rangesOf(near)).toEqual([
+      ['outdoorDryBulb', 55, 91.67, 95, 'returnWetBulb', 64],
+      ['returnWetBulb', 65, 76, 64, 'outdoorDryBulb', 95],
+    ]);
+    expect(evaluate(near).overall.nextStep.figures).toMatchObject({
+      least: { kind: 'differenceK', value: expect.closeTo(8 / 1.8, 9) as number },
+    });
+  });
+
+  it('is the range of the maker’s table, or nothing where a number was entered', () => {
+    const beyond = {
+      setup: { targetSubcooling: null, makersChart: SUBCOOLING_TABLE },
+      readings: { outdoorDryBulb: 62 },
+    };
+    expect(rangesOf(valve(beyond))).toEqual([['outdoorDryBulb', 65, 110, 62]]);
+    expect(rangesOf(orifice({ setup: target(7), readings: superheat(1) }))).toEqual([]);
   });
 });
 

@@ -1,4 +1,5 @@
 /** The next step of a check: the row of the table that holds, with the figures its sentence needs. */
+import { differenceToK } from '../../units';
 import type { CriterionResult, NextStep } from '../result';
 import type { Figure, NextStepCode, NextStepFigures, NextStepMessage } from '../codes';
 import { conditionsGate } from '../criteria/conditions';
@@ -7,6 +8,7 @@ import type { ReadingId } from '../readings';
 import type { Evidence } from './facts';
 import { gatherFacts } from './facts';
 import { findRow } from './next-step-table';
+import { targetRanges } from './target-ranges';
 
 export function findNextStep(evidence: Evidence): NextStep {
   const { step, notYet } = findRow(gatherFacts(evidence));
@@ -15,7 +17,8 @@ export function findNextStep(evidence: Evidence): NextStep {
 
 type PlainStep = { [Code in NextStepCode]: [NextStepFigures[Code]] extends [never] ? Code : never }[NextStepCode];
 
-function withFigures(code: NextStepCode, { input, criteria, unfit }: Evidence): NextStepMessage {
+function withFigures(code: NextStepCode, evidence: Evidence): NextStepMessage {
+  const { input, criteria, unfit } = evidence;
   if (code === 'run-longer') return { code, figures: { minutes: { kind: 'minutes', value: minutesLeft(input) } } };
   if (code === 'take-readings' || code === 'take-readings-again') {
     return { code, figures: { readings: { kind: 'readings', value: readingsToTake(criteria) } } };
@@ -30,9 +33,22 @@ function withFigures(code: NextStepCode, { input, criteria, unfit }: Evidence): 
   if (code === 'cool-the-house' || code === 'wait-for-cooler-weather') {
     return { code, figures: { most: limitOf(input, 'most') } };
   }
+  if (code === 'reach-a-target') return { code, figures: { ranges: rangesFigure(evidence) } };
+  if (code === 'come-back-at-higher-target') {
+    const least = { kind: 'differenceK', value: CLEAR_TARGET_K } as const;
+    return { code, figures: { least, ranges: rangesFigure(evidence, CLEAR_TARGET_K) } };
+  }
   // a union of messages without figures; the compiler cannot spread the code over its members
   return { code: code satisfies PlainStep, figures: {} } as NextStepMessage;
 }
+
+/** A target this high can be told from the floor (judged from copy A's ±5 and floor 5). */
+const CLEAR_TARGET_K = differenceToK(8, 'deltaF');
+
+const rangesFigure = (evidence: Evidence, leastK?: number): Figure => ({
+  kind: 'targetRanges',
+  value: targetRanges(evidence, leastK),
+});
 
 /** The limit of the gate that is shut: the maker's where he states one, else that of the procedure or the method. */
 function limitOf(input: CheckInput, end: 'least' | 'most'): Figure {

@@ -31,6 +31,7 @@ export const FORMULA_IN_A_DASH: CheckExample = {
     stops: [],
     nextStep: 'reach-a-target',
     cautions: [],
+    causes: ['overcharge', 'air-in-system', 'condenser-air'],
   },
   figures: [
     read(R22_ZERO_SUPERHEAT_ROW, { what: 'evaporatingDewTemperature', value: 45, unit: 'degF', within: 0.06 }),
@@ -87,6 +88,7 @@ export const SEA_LEVEL_CHART: CheckExample = {
     stops: [],
     nextStep: 'leak-first',
     cautions: [],
+    causes: ['low-charge'],
   },
   figures: [
     {
@@ -122,7 +124,7 @@ export const SEA_LEVEL_CHART: CheckExample = {
     {
       id: 'gauge-at-sea-level',
       request: { ...MILE_HIGH_REQUEST, setup: { ...MILE_HIGH_SETUP, ...AT_SEA_LEVEL } },
-      key: { overall: 'within', nextStep: 'record', criterion: 'superheat', byRule: 'passes' },
+      key: { overall: 'within', nextStep: 'record', criterion: 'superheat', byRule: 'passes', causes: [] },
     },
   ],
 };

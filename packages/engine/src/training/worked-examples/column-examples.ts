@@ -40,6 +40,7 @@ export const WRONG_COLUMN: CheckExample = {
     stops: [],
     nextStep: 'leak-first',
     cautions: ['wrong-column', 'flammable'],
+    causes: ['low-charge'],
   },
   figures: [
     modelled({ what: 'condensingBubbleTemperature', value: 110, unit: 'degF', within: 0.06 }),
@@ -80,6 +81,7 @@ export const WIDE_GLIDE_WRONG_COLUMN: CheckExample = {
     stops: [],
     nextStep: 'record',
     cautions: ['wrong-column'],
+    causes: [],
   },
   figures: [
     modelled({ what: 'evaporatingDewTemperature', value: 40, unit: 'degF', within: 0.06 }),
@@ -121,6 +123,7 @@ export const WRONG_SCALE: CheckExample = {
     stops: [],
     nextStep: 'confirm-refrigerant',
     cautions: ['wrong-refrigerant', 'flammable'],
+    causes: [],
   },
   figures: [
     modelled({ what: 'condensingBubbleTemperature', value: 110, unit: 'degF', within: 0.06 }),
@@ -149,7 +152,13 @@ export const WRONG_SCALE: CheckExample = {
     {
       id: 'scale-of-r410a',
       request: { ...WRONG_SCALE_REQUEST, setup: { ...R454B_VALVE, refrigerant: 'R-410A' } },
-      key: { overall: 'below', nextStep: 'leak-first', criterion: 'subcooling', byRule: 'fails' },
+      key: {
+        overall: 'below',
+        nextStep: 'leak-first',
+        criterion: 'subcooling',
+        byRule: 'fails',
+        causes: ['low-charge'],
+      },
     },
   ],
 };

@@ -13,6 +13,7 @@ const ALL_WELL = {
   stops: [],
   nextStep: 'record',
   cautions: [],
+  causes: [],
 } as const;
 
 export const HEALTHY_ORIFICE: CheckExample = {

@@ -34,6 +34,7 @@ export const LOW_AIRFLOW_FLOODS: CheckExample = {
     stops: ['liquid-return'],
     nextStep: 'reread-wet-bulb-then-airflow',
     cautions: [],
+    causes: ['low-airflow'],
   },
   figures: [
     read(R410A_TABLE, { what: 'evaporatingDewTemperature', value: 35, unit: 'degF', within: 0.31 }),
@@ -61,7 +62,7 @@ export const LOW_AIRFLOW_FLOODS: CheckExample = {
     {
       id: 'without-supply-air',
       request: withoutReadings(LOW_AIRFLOW_REQUEST, 'supplyDryBulb'),
-      key: { overall: 'stop', nextStep: 'check-metering', stops: ['liquid-return'] },
+      key: { overall: 'stop', nextStep: 'check-metering', stops: ['liquid-return'], causes: [] },
     },
   ],
 };
@@ -94,6 +95,7 @@ export const RESTRICTION_WITH_ICE: CheckExample = {
     stops: ['freezing'],
     nextStep: 'thaw-then-drier-drop',
     cautions: [],
+    causes: ['restriction'],
   },
   figures: [
     read(R22_SATURATED, { what: 'evaporatingDewTemperature', value: 24, unit: 'degF', within: 0.06 }),
@@ -110,7 +112,7 @@ export const RESTRICTION_WITH_ICE: CheckExample = {
     {
       id: 'liquid-line-warm',
       request: withReadings(ICE_REQUEST, readInchPound({ liquidLineTemperature: 105 })),
-      key: { overall: 'stop', nextStep: 'thaw-then-leak-search', stops: ['freezing'] },
+      key: { overall: 'stop', nextStep: 'thaw-then-leak-search', stops: ['freezing'], causes: ['low-charge'] },
     },
   ],
 };
@@ -159,6 +161,7 @@ export const OVERCHARGE_OR_AIR: CheckExample = {
     stops: [],
     nextStep: 'air-test-then-recover',
     cautions: [],
+    causes: ['overcharge', 'air-in-system'],
   },
   figures: [
     read(R410A_TABLE, { what: 'condensingBubbleTemperature', value: 113, unit: 'degF', within: 0.33 }),
@@ -183,13 +186,13 @@ export const OVERCHARGE_OR_AIR: CheckExample = {
       id: 'standing-as-printed',
       given: true,
       request: standing(254.1),
-      key: { overall: 'above', nextStep: 'recover-in-steps' },
+      key: { overall: 'above', nextStep: 'recover-in-steps', causes: ['overcharge'] },
     },
     {
       id: 'standing-too-high',
       given: true,
       request: standing(290.8),
-      key: { overall: 'above', nextStep: 'recover-air-weigh-in' },
+      key: { overall: 'above', nextStep: 'recover-air-weigh-in', causes: ['air-in-system'] },
     },
   ],
 };

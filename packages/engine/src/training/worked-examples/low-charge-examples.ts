@@ -41,6 +41,7 @@ export const VALVE_HIDES_LOW_CHARGE: CheckExample = {
     stops: [],
     nextStep: 'leak-first',
     cautions: [],
+    causes: ['low-charge'],
   },
   figures: [
     read(R410A_TABLE, { what: 'evaporatingDewTemperature', value: 40, unit: 'degF', within: 0.37 }),
@@ -56,7 +57,7 @@ export const VALVE_HIDES_LOW_CHARGE: CheckExample = {
     {
       id: 'judged-as-orifice',
       request: { ...VALVE_REQUEST, setup: { ...SETUP_WITHOUT_TARGET, meteringDevice: 'fixed-orifice' } },
-      key: { overall: 'within', nextStep: 'record', criterion: 'superheat', byRule: 'passes' },
+      key: { overall: 'within', nextStep: 'record', criterion: 'superheat', byRule: 'passes', causes: [] },
     },
     {
       id: 'without-liquid-pair',
@@ -91,6 +92,7 @@ export const UNDERCHARGE_LOW_SPLIT: CheckExample = {
     stops: [],
     nextStep: 'leak-first',
     cautions: [],
+    causes: ['low-charge'],
   },
   figures: [
     read(R22_ZERO_SUPERHEAT_ROW, { what: 'evaporatingDewTemperature', value: 37, unit: 'degF', within: 0.08 }),

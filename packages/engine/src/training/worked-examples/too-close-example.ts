@@ -37,6 +37,7 @@ export const TOO_CLOSE_TO_CALL: CheckExample = {
     stops: [],
     nextStep: 'settle-with-another-reading',
     cautions: [],
+    causes: [],
   },
   figures: [
     read(R410A_TABLE, { what: 'condensingBubbleTemperature', value: 110, unit: 'degF', within: 0.32 }),

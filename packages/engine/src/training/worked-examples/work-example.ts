@@ -2,6 +2,7 @@
 import type { CheckResult } from '../../check/result';
 import { bareValue } from '../../derivation/quantity';
 import type { DerivationStep } from '../../derivation/steps';
+import type { Diagnosis } from '../../diagnosis/diagnosis-codes';
 import type { WeighInResult } from '../../methods/weigh-in/evaluate-weigh-in';
 import { evaluateWeighIn } from '../../methods/weigh-in/evaluate-weigh-in';
 import { moistAirEnthalpyBtuPerLb } from '../../units';
@@ -13,7 +14,8 @@ import type { CheckedFigure, CheckExample, MoistAirExample, Slip, WeighInExample
 
 export interface WorkedCheck {
   readonly result: CheckResult;
-  readonly slips: readonly { readonly slip: Slip; readonly result: CheckResult }[];
+  readonly diagnosis: Diagnosis;
+  readonly slips: readonly { readonly slip: Slip; readonly result: CheckResult; readonly diagnosis: Diagnosis }[];
   readonly figures: readonly WorkedFigure[];
 }
 
@@ -22,7 +24,8 @@ export function workCheck(example: CheckExample): WorkedCheck {
   const slips = example.slips.map((slip) => ({ slip, judged: judgeRequest(slip.request) }));
   return {
     result: own.result,
-    slips: slips.map(({ slip, judged }) => ({ slip, result: judged.result })),
+    diagnosis: own.diagnosis,
+    slips: slips.map(({ slip, judged: { result, diagnosis } }) => ({ slip, result, diagnosis })),
     figures: example.figures.map((figure) => {
       const judged = slips.find(({ slip }) => slip.id === figure.of)?.judged ?? own;
       return workedFigure(figure, checkFigureSi(figure, judged));

@@ -4,6 +4,7 @@
  */
 import type { CautionCode, CriterionId, NextStepCode, OverallFinding, ReasonCode, StopCode } from '../../check/codes';
 import type { EvaluationRequest } from '../../check/request';
+import type { Cause } from '../../diagnosis/diagnosis-codes';
 import type { FigureStanding } from '../../methods/sourced-figure';
 import type { WeighInInput } from '../../methods/weigh-in/evaluate-weigh-in';
 import type { WeighInFinding } from '../../methods/weigh-in/weigh-in-codes';
@@ -88,6 +89,8 @@ export interface CheckKey {
   readonly nextStep: NextStepCode;
   /** Those that belong to the lesson; there may be others. */
   readonly cautions: readonly CautionCode[];
+  /** All that the diagnosis lists, in its order. */
+  readonly causes: readonly Cause[];
 }
 
 export const SLIP_IDS = [
