@@ -12,7 +12,10 @@ const standing = z.enum(SOURCE_STANDINGS).meta({
 
 const citation = object({
   text: z.string(),
-  edition: z.string().nullable().meta({ description: 'Year, or month and year, as stated; null where none is.' }),
+  edition: z
+    .string()
+    .nullable()
+    .meta({ description: 'Year, month and year or revision, as stated; null where none is.' }),
 }).meta({ id: 'Citation' });
 
 const sourceEntry = object({

@@ -117,6 +117,8 @@ describe('citation', () => {
     ['CEC Reference Residential Appendices (2008), RA3.2', '2008'],
     ["Makers' superheat chart, copy A (installation manual 506374-01, 03/2010, p. 20)", '03/2010'],
     ['outdoor-unit installation manual, document 506083-01 (03/2008), Table 5', '03/2008'],
+    ['Installation manual 506374-01, 03/2010; checklist for raters, rev. 07', '03/2010, rev. 07'],
+    ['Author (2016, submitted). Title. J. 2016, 1-9. doi:10.1021/j.2012.02.012', '2016'],
     ['ANSI/ASHRAE Standard 34, from memory', null],
     ['Ian H. Bell (2025). Modeling Mixtures. doi:10.1021/acs.jced.4c00699', '2025'],
     ['technical support manual 421 04 6300 01, p. 6', null],

@@ -95,7 +95,7 @@ export interface SourceFigure {
 
 export interface Citation {
   readonly text: string;
-  /** Year, or month and year, as the citation states it; `null`: it states none, or there is no publication. */
+  /** Year, month and year or revision, as the citation states it; `null`: it states none, or there is no publication. */
   readonly edition: string | null;
 }
 
