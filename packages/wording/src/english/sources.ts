@@ -240,6 +240,7 @@ export const sourcesWords = {
   searchHint: 'A word of a name, a source or an edition.',
   standing: 'Stands on',
   all: 'all',
+  meaning: 'What an entry can stand on',
   meanings,
   standings,
   groups,
