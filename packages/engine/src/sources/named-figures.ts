@@ -1,5 +1,6 @@
 /** Figures that belong to no single procedure, with what they are and where they are met. */
 import { ATMOSPHERE_FIGURES } from '../check/atmosphere';
+import { NEXT_STEP_FIGURES } from '../check/next-step/facts';
 import { PULL_DOWN_FIGURES } from '../check/pull-down';
 import { STOP_FIGURES } from '../check/stops';
 import type { QuantityKind } from '../derivation/quantity';
@@ -55,6 +56,10 @@ export const NAMED_FIGURES = {
   steadyWetBulb: limit(PULL_DOWN_FIGURES.steadyWetBulbK, 'differenceK'),
   steady: limit(PULL_DOWN_FIGURES.steadyK, 'differenceK'),
   mostWeather: limit(ATMOSPHERE_FIGURES.mostWeatherPa, 'pressureDifferencePa'),
+  nearFloorTarget: limit(NEXT_STEP_FIGURES.nearFloorTargetK, 'differenceK'),
+  mostAdded: limit(NEXT_STEP_FIGURES.mostAddedFraction, 'fraction'),
+  highHead: limit(NEXT_STEP_FIGURES.highHeadK, 'differenceK'),
+  highHeadOlder: limit(NEXT_STEP_FIGURES.highHeadOlderK, 'differenceK'),
   clearFrom: usual(TEST_FIGURES.clearFrom, 'fraction'),
   mostDrierDrop: usual(TEST_FIGURES.mostDrierDropK, 'differenceK'),
   mostStandingExcess: usual(TEST_FIGURES.mostStandingExcessK, 'differenceK'),

@@ -42,7 +42,7 @@ import type { SourceRow } from './source-rows';
         </p>
       }
       <p class="used">
-        <span class="seen-by-readers-only">{{ words.usedIn }}</span>
+        <span>{{ words.usedIn }}</span>
         @for (place of row().places; track place.path) {
           <a [routerLink]="place.path">{{ place.name }}</a>
         }
