@@ -3,7 +3,7 @@
  * shows.
  */
 import type { ErrorPart } from '../derivation/quantity';
-import { OUR_CHOICE } from '../methods/sourced-figure';
+import { COMMON_PRACTICE, OUR_CHOICE } from '../methods/sourced-figure';
 import type { SourcedFigure } from '../methods/sourced-figure';
 import { differenceToK, flowToM3PerS, pressureDifferenceToPa } from '../units';
 import type { PlusMinus, ReadingInput } from './request';
@@ -24,10 +24,17 @@ const limit = (value: number, of: AssumedLimit['of'], printed: string): AssumedL
   source: OUR_CHOICE,
 });
 
+/** As instruments of the trade are usually sold. */
+const practice = (value: number, printed: string): AssumedLimit => ({
+  ...limit(value, 'absolute', printed),
+  standing: 'practice',
+  source: COMMON_PRACTICE,
+});
+
 const AIR = limit(differenceToK(1, 'deltaF'), 'absolute', '±1 °F');
-const PIPE = limit(differenceToK(1, 'deltaF'), 'absolute', '±1 °F');
-const LIQUID = limit(pressureDifferenceToPa(4, 'psi'), 'absolute', '±4 psi');
-const HUMIDITY = limit(0.03, 'absolute', '±3 points of percent');
+const PIPE = practice(differenceToK(1, 'deltaF'), '±1 °F');
+const LIQUID = practice(pressureDifferenceToPa(4, 'psi'), '±4 psi');
+const HUMIDITY = practice(0.03, '±3 points of percent');
 
 /** ± taken where the person states none, as a limit: a part of the reading, or in its SI unit. What a person wrote down as a saturation has none of its own. */
 export const ASSUMED_LIMITS: Readonly<

@@ -126,7 +126,7 @@ const formulas = (): readonly SourceEntry[] =>
   );
 
 const equations = (): readonly SourceEntry[] => [
-  equation('saturation-of-water', { standing: 'read', source: SATURATION_LIMITS.source }, ['check', 'moist-air']),
+  equation('saturation-of-water', { standing: 'memory', source: SATURATION_LIMITS.source }, ['check', 'moist-air']),
   equation('standard-atmosphere', { standing: 'memory', source: STANDARD_ATMOSPHERE }, [
     'check',
     'airflow',
