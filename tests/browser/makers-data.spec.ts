@@ -1,4 +1,11 @@
-import { checkPageWords, makersChartWords, makersDataWords } from '@chargewright/wording';
+import {
+  checkPageWords,
+  makersChartWords,
+  makersDataWords,
+  procedureWords,
+  readingWords,
+  setupWords,
+} from '@chargewright/wording';
 import { describe, expect, it } from 'vitest';
 import { accessibilityFaults } from './harness/axe';
 import { HIGH_SUPERHEAT } from './harness/check-page';
@@ -46,6 +53,53 @@ describe('somebody with the maker’s table in his hand', () => {
       .getByText(/^Superheat is within its band/)
       .first()
       .waitFor();
+  });
+
+  it('chooses this maker’s data as the rules: nothing is assumed, then the table is asked for and judged by', async () => {
+    const { page, check } = await atTheTables();
+    await page.getByRole('link', { name: words.back }).click();
+    await check.button(checkPageWords.setup.changeLabel).click();
+    await page.getByText(checkPageWords.setup.more, { exact: true }).click();
+    await page.getByRole('radio', { name: procedureWords.manufacturer.name }).click({ force: true });
+    await check.goToReadings();
+    await page
+      .getByText(/^State this first: mode, kind of system, stage, high-side port and elevation\.$/)
+      .first()
+      .waitFor();
+    await check.button(checkPageWords.result.placeButton.setup).filter({ visible: true }).click();
+    await check.button(checkPageWords.setup.confirmAssumed).click();
+    await check.type(setupWords.numbers.elevation.label, '650');
+    await check.goToReadings();
+    await page
+      .getByText(/^Find this unit’s target on the nameplate/)
+      .first()
+      .waitFor();
+    await check.button(checkPageWords.result.placeButton['makers-data']).filter({ visible: true }).click();
+    await page.getByRole('button', { name: makersChartWords.kinds.superheat.label }).click();
+    await page.getByText(words.paste, { exact: true }).click();
+    await page.getByRole('textbox', { name: words.pasteHint }).fill(TABLE);
+    await check.button(words.pasteRead).click();
+    await page.getByText(words.complete).waitFor();
+    await page.getByText(words.conditions, { exact: true }).click();
+    await check.type(words.leastReturn, '80');
+    await check.button(words.done).click();
+    await page.getByRole('link', { name: words.back }).click();
+    await check.goToReadings();
+    // the return air is at 78.2 °F
+    await page
+      .getByText(/the test needs at least 80\.0 °F/)
+      .first()
+      .waitFor();
+    await check.type(readingWords.returnDryBulb.label, '80.4');
+    await page
+      .getByText(/^Superheat is within its band, 1\.\d °F below target$/)
+      .first()
+      .waitFor();
+    await page
+      .getByText(/with the ± of the general rules: the maker’s was not entered/)
+      .first()
+      .waitFor();
+    expect(await accessibilityFaults(page)).toEqual([]);
   });
 
   it('types it row by row with a dash key, is told what is odd, takes it away and brings it back', async () => {

@@ -49,6 +49,11 @@ export const REASONS = namesOf<ReasonCode>({
   'readings-missing': 'reached',
   'target-missing': 'reached',
   'capacity-missing': 'reached',
+  'setup-not-stated': 'reached',
+  'superheat-range-missing': 'reached',
+  'design-airflow-missing': 'reached',
+  'makers-limits-missing': 'reached',
+  'split-not-by-these-rules': 'reached',
   'conditions-not-recorded': 'reached',
   'instruments-not-recorded': 'reached',
   'target-for-other-port': 'reached',
@@ -128,6 +133,7 @@ export const CAUTIONS = namesOf<CautionCode>({
   'unusual-condensing': 'reached',
   'unusual-liquid-line': 'reached',
   'unusual-subcooling': 'reached',
+  'unusual-superheat': 'reached',
 });
 
 export const NEXT_STEPS = namesOf<NextStepCode>({
@@ -137,6 +143,7 @@ export const NEXT_STEPS = namesOf<NextStepCode>({
   'bring-to-full-stage': 'reached',
   'bring-to-charge-mode': 'reached',
   'state-the-port': 'reached',
+  'state-the-setup': 'reached',
   'read-discharge-pressure': 'reached',
   'mend-before-test': 'reached',
   'find-suction-line-table': 'reached',
@@ -178,6 +185,7 @@ export const NEXT_STEPS = namesOf<NextStepCode>({
   'settle-with-another-reading': 'reached',
   'settle-with-better-instrument': 'reached',
   'read-liquid-pair': 'reached',
+  'read-suction-pair': 'reached',
   'cool-weather-hold': 'reached',
   'raise-head': 'reached',
   'leak-first': 'reached',

@@ -1,5 +1,12 @@
 import { isDeepStrictEqual } from 'node:util';
-import type { CheckResult, EvaluationRequest, MakersChartKind, ReadingId, ReasonCode } from '@chargewright/engine';
+import type {
+  CheckResult,
+  EvaluationRequest,
+  MakersChartKind,
+  ProcedureId,
+  ReadingId,
+  ReasonCode,
+} from '@chargewright/engine';
 import { evaluateCheck, PROCEDURES, readRequest } from '@chargewright/engine';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
@@ -38,7 +45,9 @@ describe('laws of judging', () => {
 
   it('where the decision is guarded a wider ± never turns another finding into within', () => {
     let compared = 0;
-    const guarded = statedSystem.map(inchPound).map(({ procedure: _, ...request }) => request);
+    const guarded = fc
+      .tuple(statedSystem, fc.constantFrom(...GUARDED))
+      .map(([drives, procedure]) => inchPound({ ...drives, procedure }));
     const request = fc.tuple(guarded, mutations).map(([whole, changes]) => mutated(whole, changes));
     fc.assert(
       fc.property(request, widening, (asked, wider) => {
@@ -151,7 +160,10 @@ function spareReadings({ setup }: EvaluationRequest): readonly ReadingId[] {
   return SPARE[setup.meteringDevice === 'fixed-orifice' ? 'orifice' : 'valve'].filter((id) => !wanted.includes(id));
 }
 
-const SIMPLE = PROCEDURES.filter(({ decision }) => decision.type === 'simple').map(({ id }) => id);
+const decidedBy = (type: 'simple' | 'guarded'): readonly ProcedureId[] =>
+  PROCEDURES.filter(({ decision }) => decision.type === type).map(({ id }) => id);
+const SIMPLE = decidedBy('simple');
+const GUARDED = decidedBy('guarded');
 
 /** What the uncertainty may decide under every procedure: whether a target exists, and whether readings can be at all. */
 const DOUBTS: readonly string[] = [

@@ -62,6 +62,8 @@ const ORIFICE: Overrides = {
   targetSuperheatF: always(undefined),
 };
 
+const BY_MAKER: Overrides = { procedure: always('manufacturer' as const), elevationM: between(0, 1800) };
+
 const HEATING_KINDS = ['heating-discharge-pressure', 'heating-discharge-temperature'] as const;
 
 const HEATING: Overrides = {
@@ -162,6 +164,10 @@ const SCENARIOS: readonly Overrides[] = [
     kind: always('packaged' as const),
     makersCharts: tables(always('liquid-pressure' as const), { offset: fc.oneof(between(-9, -5), between(5, 9)) }),
   },
+  // a valve by its maker's data alone: nothing left open, its superheat unread, and unusual
+  { ...VALVE, ...BY_MAKER },
+  { ...VALVE, ...BY_MAKER, leftOut: always(['suctionPressure', 'suctionLineTemperature'] as const) },
+  { ...VALVE, ...BY_MAKER, superheatMarginF: between(16, 22), subcoolingMarginF: between(-8, 8) },
   // a packaged unit whose port nobody stated
   { ...CLEAR, kind: always('packaged' as const), highSidePort: always(undefined) },
 ];

@@ -10,7 +10,10 @@ import { openApiRoutes } from './features/openapi/openapi-routes';
 import { psychrometricsRoutes } from './features/psychrometrics/psychrometrics-routes';
 import { refrigerantsRoutes } from './features/refrigerants/refrigerants-routes';
 import { sourcesRoutes } from './features/sources/sources-routes';
+import { signInRoutes } from './features/sign-in/sign-in-routes';
+import type { SignInDeps } from './features/sign-in/sign-in-service';
 import { weighInRoutes } from './features/weigh-in/weigh-in-routes';
+import { guard } from './http/access';
 import { compress } from './http/compress';
 import { limitEvaluations, limitRate } from './http/limits';
 import type { Limits } from './http/limits';
@@ -20,12 +23,13 @@ import { requestLog } from './http/request-log';
 import { securityHeaders } from './http/security';
 import { staticFiles } from './http/static-files';
 
-export interface AppDeps extends HealthDeps {
+export interface AppDeps extends HealthDeps, SignInDeps {
   readonly logger: Logger;
   readonly limits: Limits;
   readonly trustProxy: boolean | number | string;
   readonly secure: boolean;
   readonly webRoot: string;
+  readonly publicUrl: string | undefined;
 }
 
 /** Routes that answer any origin. */
@@ -52,7 +56,7 @@ export function createApp(deps: AppDeps): Express {
   app.use(...securityHeaders({ secure }));
   app.use(compress);
   app.use(OPEN_ROUTES, openCors);
-  app.use('/api', limitRate(limits));
+  app.use('/api', limitRate(limits), guard(deps));
   const limit = limitEvaluations(limits);
   app.use(evaluationsRoutes(limit));
   app.use(airflowRoutes(limit));
@@ -62,6 +66,7 @@ export function createApp(deps: AppDeps): Express {
   app.use(psychrometricsRoutes());
   app.use(sourcesRoutes());
   app.use(openApiRoutes());
+  app.use(signInRoutes(deps));
   app.use('/api', notFound);
   app.use(healthRoutes(deps));
   app.use(staticFiles(webRoot));

@@ -10,6 +10,7 @@ describe('settings', () => {
       host: '127.0.0.1',
       port: 4000,
       dataDir: 'data',
+      migrationsDir: 'apps/api/drizzle',
       webRoot: 'dist/web',
       publicUrl: undefined,
       trustProxy: false,

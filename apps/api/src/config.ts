@@ -6,6 +6,8 @@ export interface Config {
   readonly host: string;
   readonly port: number;
   readonly dataDir: string;
+  /** Folder of the migrations of the records. */
+  readonly migrationsDir: string;
   /** Folder of the built page; the server answers without it too. */
   readonly webRoot: string;
   /** Address in links of mails and reports; never taken from a request's Host header. */
@@ -30,6 +32,7 @@ const environment = z
     HOST: z.string().default('127.0.0.1'),
     PORT: z.coerce.number('has to be a whole number from 0 to 65535').int().min(0).max(65_535).default(4000),
     DATA_DIR: z.string().default('data'),
+    MIGRATIONS_DIR: z.string().default('apps/api/drizzle'),
     WEB_ROOT: z.string().default('dist/web'),
     PUBLIC_URL: z.url({ protocol: /^https?$/, error: 'has to be an http or https address' }).optional(),
     TRUST_PROXY: z.string().default('false').transform(trustProxy),
@@ -56,7 +59,8 @@ export function readConfig(env: Readonly<Record<string, string | undefined>>): C
   if (!parsed.success) {
     throw new ConfigError(parsed.error.issues.map(({ path, message }) => `${path.join('.')} ${message}`).join('; '));
   }
-  const { HOST, PORT, DATA_DIR, WEB_ROOT, PUBLIC_URL, TRUST_PROXY, TLS_CERT, TLS_KEY, LOG_LEVEL } = parsed.data;
+  const { HOST, PORT, DATA_DIR, MIGRATIONS_DIR, WEB_ROOT, PUBLIC_URL, TRUST_PROXY, TLS_CERT, TLS_KEY, LOG_LEVEL } =
+    parsed.data;
   const tls =
     TLS_CERT === undefined || TLS_KEY === undefined
       ? undefined
@@ -65,6 +69,7 @@ export function readConfig(env: Readonly<Record<string, string | undefined>>): C
     host: HOST,
     port: PORT,
     dataDir: DATA_DIR,
+    migrationsDir: MIGRATIONS_DIR,
     webRoot: WEB_ROOT,
     publicUrl: PUBLIC_URL,
     trustProxy: TRUST_PROXY,

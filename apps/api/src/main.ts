@@ -1,22 +1,27 @@
 import pino from 'pino';
 import { createApp } from './app';
 import { ConfigError, readConfig } from './config';
-import { DataError, isReadable, openDatabase } from './db/open-database';
+import { DataError } from './db/open-database';
+import { openRecords } from './db/records';
+import { openSessions } from './features/sign-in/sessions';
+import { signInWaits } from './features/sign-in/sign-in-waits';
 import { LIMITS } from './http/limits';
 import { ListenError, closeServer, createServer, listen } from './server';
 
 async function main(): Promise<void> {
   const config = readConfig(process.env);
   const logger = pino({ level: config.logLevel, base: null });
-  const database = openDatabase(config.dataDir);
-  const app = createApp({ ...config, logger, limits: LIMITS, isReady: () => isReadable(database) });
+  const records = openRecords(config);
+  const sessions = openSessions(records, config);
+  const isReady = () => records.isReadable();
+  const app = createApp({ ...config, logger, limits: LIMITS, records, sessions, waits: signInWaits(), isReady });
   const server = createServer(app, config.tls);
   let ending = false;
   const end = (): void => {
     if (ending) return;
     ending = true;
-    void closeServer(server).then(() => {
-      database.close();
+    void closeServer(server).then(async () => {
+      await records.close();
       logger.info('stopped');
       process.exit(0);
     });
@@ -27,7 +32,7 @@ async function main(): Promise<void> {
     logger.info({ host: config.host, port, tls: config.tls !== undefined }, 'listening');
   } catch (error) {
     // the port or address is for the person to change; the data was opened already
-    database.close();
+    await records.close();
     throw error;
   }
 }

@@ -2,6 +2,7 @@
 import * as z from 'zod';
 import { object } from './parsing/object';
 
+export { structureFault } from './parsing/structure-fault';
 export type { ExpectedType, StructureFault } from './parsing/structure-fault';
 
 export const PROBLEM_CODES = [
@@ -12,6 +13,11 @@ export const PROBLEM_CODES = [
   'not-json',
   'unknown-refrigerant',
   'not-found',
+  'sign-in-refused',
+  'signed-out',
+  'wrong-origin',
+  'forbidden',
+  'wait',
   'method-not-allowed',
   'too-many-requests',
   'busy',

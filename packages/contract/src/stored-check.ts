@@ -68,6 +68,8 @@ const typedChart = z.object({
   tolerance: z.exactOptional(z.object(typedValue)),
   leastOutdoor: z.exactOptional(z.object(typedValue)),
   mostOutdoor: z.exactOptional(z.object(typedValue)),
+  leastReturn: z.exactOptional(z.object(typedValue)),
+  mostReturn: z.exactOptional(z.object(typedValue)),
 });
 
 const setup = z.object({

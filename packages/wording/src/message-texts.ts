@@ -1,4 +1,4 @@
-import type { Figure, MakersChartKind, PreflightItem, ReadingId, SetupField } from '@chargewright/engine';
+import type { AssumedField, Figure, MakersChartKind, PreflightItem, ReadingId } from '@chargewright/engine';
 import { differenceToK, massToKg, powerToW, temperatureToK } from '@chargewright/engine';
 import { formatNumber, formatShort, formatValue } from './format-value';
 import { type TargetRangeWords, targetRangeWords } from './target-range-words';
@@ -33,7 +33,7 @@ export type MessageTexts<Names> = {
 export interface FigureNames {
   readonly reading: Readonly<Record<ReadingId, { readonly name: string }>>;
   readonly preflight: Readonly<Record<PreflightItem, { readonly name: string }>>;
-  readonly setup: Readonly<Record<SetupField, { readonly name: string }>>;
+  readonly setup: Readonly<Record<AssumedField, { readonly name: string }>>;
   readonly makersChart: Readonly<Record<MakersChartKind, { readonly name: string }>>;
   /** "at 64 °F wet bulb from 55 to 95 °F outdoors". */
   targetRange(range: TargetRangeWords): string;

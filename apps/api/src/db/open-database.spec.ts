@@ -3,7 +3,8 @@ import { tmpdir } from 'node:os';
 import path from 'node:path';
 import Database from 'better-sqlite3';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
-import { isReadable, openDatabase } from './open-database';
+import { MIGRATIONS_DIR } from '../testing/temporary-records';
+import { openDatabase } from './open-database';
 
 let folder: string;
 beforeEach(() => {
@@ -11,12 +12,13 @@ beforeEach(() => {
 });
 afterEach(() => rmSync(folder, { recursive: true }));
 
+const open = (dataDir = folder) => openDatabase({ dataDir, migrationsDir: MIGRATIONS_DIR });
 const file = () => path.join(folder, 'chargewright.sqlite');
 
 describe('opening the data', () => {
   it('makes the folder and a file that survives a power cut', () => {
     const nested = path.join(folder, 'a', 'b');
-    const database = openDatabase(nested);
+    const database = open(nested);
     expect(database.name).toBe(path.join(nested, 'chargewright.sqlite'));
     expect(database.pragma('foreign_keys', { simple: true })).toBe(1);
     expect(database.pragma('journal_mode', { simple: true })).toBe('wal');
@@ -31,25 +33,22 @@ describe('opening the data', () => {
     older.exec('CREATE TABLE unit (id TEXT PRIMARY KEY); CREATE TABLE "check" (unit TEXT REFERENCES unit (id));');
     older.exec(`INSERT INTO "check" VALUES ('gone')`);
     older.close();
-    expect(() => openDatabase(folder)).toThrow('1 rows refer to rows that do not exist');
+    expect(() => open()).toThrow('1 rows refer to rows that do not exist');
     // the file is closed again
-    expect(() => openDatabase(folder)).toThrow('1 rows');
+    expect(() => open()).toThrow('1 rows');
   });
 
   it('refuses a file that is no database', () => {
     writeFileSync(file(), 'not a database, but long enough to have a header of its own '.repeat(20));
-    expect(() => openDatabase(folder)).toThrow('file is not a database');
+    expect(() => open()).toThrow('file is not a database');
   });
 
   it('refuses a folder that is none, and says in one line how to name another', () => {
     writeFileSync(path.join(folder, 'file'), '');
-    expect(() => openDatabase(path.join(folder, 'file'))).toThrow(/^Cannot use .*DATA_DIR\.$/);
+    expect(() => open(path.join(folder, 'file'))).toThrow(/^Cannot use .*DATA_DIR\.$/);
   });
 
-  it('tells whether the file can be read', () => {
-    const database = openDatabase(folder);
-    expect(isReadable(database)).toBe(true);
-    database.close();
-    expect(isReadable(database)).toBe(false);
+  it('refuses a file whose migration is not there', () => {
+    expect(() => openDatabase({ dataDir: folder, migrationsDir: folder })).toThrow('meta/_journal.json');
   });
 });

@@ -17,7 +17,12 @@ const TARGET_SOURCES = [
   'airflow-per-capacity',
 ] as const satisfies readonly TargetSource[];
 
-const TOLERANCE_SOURCES = ['procedure', 'makers-data', 'choice'] as const satisfies readonly ToleranceSource[];
+const TOLERANCE_SOURCES = [
+  'procedure',
+  'makers-data',
+  'general-rules',
+  'choice',
+] as const satisfies readonly ToleranceSource[];
 
 const criterion = object({
   criterion: z.enum(CRITERION_IDS),
@@ -30,7 +35,7 @@ const criterion = object({
   toleranceSource: orNull(
     z.enum(TOLERANCE_SOURCES).meta({
       description:
-        'Whose the tolerance is: the procedure’s, the maker’s as entered, or our choice where neither has one.',
+        'Whose the tolerance is: the procedure’s, the maker’s as entered, that of the general rules until it is entered, or our choice.',
     }),
   ),
   byRule: orNull(z.enum(['passes', 'fails'])),

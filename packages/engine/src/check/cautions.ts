@@ -174,9 +174,13 @@ function liquidColderThanAir({ readings }: CheckInput): Caution | null {
 /** Outdoor air warm enough to judge, too cool to move refrigerant on what is read. */
 export function isCoolWeather(input: CheckInput): boolean {
   const outdoor = input.readings.outdoorDryBulb?.quantity.value;
-  const least = leastOutdoorK(input, chargeMethod(input)) ?? 0;
+  const method = chargeMethod(input);
+  const least = leastOutdoorK(input, method) ?? 0;
+  // by the maker's data alone his limit says how cool is too cool
+  const saidByMaker = input.procedure.assumes === 'nothing' && method?.chart?.leastOutdoorK !== undefined;
   return (
     outdoor !== undefined &&
+    !saidByMaker &&
     outdoor >= least - LIMIT_SLACK_K &&
     outdoor < input.procedure.conditions.coolBelowK.value - LIMIT_SLACK_K
   );
@@ -201,10 +205,10 @@ export function lowHead(input: CheckInput): Caution | null {
   return { code: 'low-head', figures: { difference: pressure(liquid - suction), least: pressure(least) } };
 }
 
-function setupCautions({ setup }: CheckInput): readonly Caution[] {
+function setupCautions({ setup, procedure }: CheckInput): readonly Caution[] {
   const found: Caution[] = [];
   if (setup.elevationAssumed) found.push(plain('elevation-assumed'));
-  if (setup.assumed.length > 0) {
+  if (setup.assumed.length > 0 && procedure.assumes === 'the-usual') {
     found.push({ code: 'setup-assumed', figures: { fields: { kind: 'setup', value: setup.assumed } } });
   }
   if (setup.liftM !== undefined && setup.liftM > LONG_LIFT_M) {

@@ -29,13 +29,15 @@ export type Finding = (typeof FINDINGS)[number];
 export type OverallFinding = Finding | 'stop';
 
 export type SetupField = 'mode' | 'kind' | 'stage' | 'highSidePort';
+/** What is taken as usual where it is not stated. */
+export type AssumedField = SetupField | 'elevation';
 
 /** A number, or a list of names, inside a message. */
 export type Figure =
   | { readonly kind: QuantityKind; readonly value: number }
   | { readonly kind: 'readings'; readonly value: readonly ReadingId[] }
   | { readonly kind: 'preflight'; readonly value: readonly PreflightItem[] }
-  | { readonly kind: 'setup'; readonly value: readonly SetupField[] }
+  | { readonly kind: 'setup'; readonly value: readonly AssumedField[] }
   | { readonly kind: 'makersCharts'; readonly value: readonly MakersChartKind[] }
   | { readonly kind: 'targetRanges'; readonly value: readonly TargetRange[] };
 
@@ -66,6 +68,12 @@ export interface ReasonFigures {
   'readings-missing': 'readings';
   'target-missing': never;
   'capacity-missing': never;
+  // by the maker's data alone: what general rules would take as usual
+  'setup-not-stated': 'fields';
+  'superheat-range-missing': never;
+  'design-airflow-missing': never;
+  'makers-limits-missing': never;
+  'split-not-by-these-rules': never;
   'conditions-not-recorded': never;
   'instruments-not-recorded': never;
   'target-for-other-port': never;
@@ -151,6 +159,7 @@ export interface CautionFigures {
   'unusual-condensing': 'actual';
   'unusual-liquid-line': 'actual';
   'unusual-subcooling': 'actual';
+  'unusual-superheat': 'actual';
 }
 export type Caution = MessageOf<CautionFigures>;
 export type CautionCode = keyof CautionFigures;
@@ -164,6 +173,7 @@ export interface NextStepFigures {
   'bring-to-full-stage': never;
   'bring-to-charge-mode': never;
   'state-the-port': never;
+  'state-the-setup': 'fields';
   'read-discharge-pressure': never;
   'mend-before-test': 'items';
   'find-suction-line-table': never;
@@ -214,6 +224,7 @@ export interface NextStepFigures {
   'settle-with-better-instrument': never;
   // outside
   'read-liquid-pair': never;
+  'read-suction-pair': never;
   'cool-weather-hold': never;
   'raise-head': never;
   'leak-first': never;

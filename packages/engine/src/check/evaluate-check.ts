@@ -13,6 +13,7 @@ import {
   judgeAirflow,
   judgeSplit,
   splitCautions,
+  splitCriterion,
   splitEvidence,
   splitTarget,
 } from './criteria/air';
@@ -25,7 +26,7 @@ import type { DerivedQuantities } from './derived-quantities';
 import { deriveQuantities } from './derived-quantities';
 import { engineVersion } from './engine-version';
 import { staleReason } from './evidence';
-import { unfitReason } from './fit-for-test';
+import { unfitReason, unstatedReason } from './fit-for-test';
 import type { CheckInput } from './input';
 import { isFixedOrifice } from './input';
 import { findNextStep } from './next-step/next-step';
@@ -53,6 +54,7 @@ export function evaluateCheck(input: CheckInput): CheckResult {
     input,
     derived,
     unfit,
+    unstated: unstatedReason(input),
     method: method ?? ownMethod(input),
     gates: (judgedBy) => (from) => [
       impossible?.reason ?? null,
@@ -65,7 +67,7 @@ export function evaluateCheck(input: CheckInput): CheckResult {
   });
   const criteria = [
     ...charge,
-    ...(cooling ? [split] : []),
+    ...(cooling ? [splitCriterion(input, split)] : []),
     ...(airflow === null ? [] : [airflow]),
     judgeConditions(input),
     judgeInstruments(input),

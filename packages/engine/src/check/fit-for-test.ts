@@ -3,8 +3,8 @@
  * and the scope of CEC Reference Residential Appendices, RA3.2 (2008, 2019); a mini-split meters outdoors, its small pipe is two-phase.
  */
 import { chargeMethod, hasTargetForOtherPort, isEntered, usableChart } from './charge-method';
-import type { Reason } from './codes';
-import type { CheckInput, CheckVisit } from './input';
+import type { AssumedField, Reason } from './codes';
+import type { CheckInput, CheckSetup, CheckVisit } from './input';
 import type { PreflightItem } from './request';
 
 /** Items that make the test invalid until mended; a dirty filter or an unzeroed gauge only warns. */
@@ -35,6 +35,21 @@ export function unfitReason(input: CheckInput): Reason | null {
 
 const unreadyItems = (visit: CheckVisit): readonly PreflightItem[] =>
   MENDED_FIRST.filter((item) => visit.preflight[item] === 'not-ok');
+
+/** What was not stated, where the procedure assumes nothing; `null` when there is nothing to ask. */
+export function unstatedReason({ procedure, setup }: CheckInput): Reason | null {
+  if (procedure.assumes === 'the-usual') return null;
+  const fields = unstatedFields(setup);
+  return fields.length === 0
+    ? null
+    : { code: 'setup-not-stated', figures: { fields: { kind: 'setup', value: fields } } };
+}
+
+/** In heating the high side is read at the discharge, whatever port is used in cooling. */
+function unstatedFields({ assumed, elevationAssumed, mode }: CheckSetup): readonly AssumedField[] {
+  const wanted = assumed.filter((field) => field !== 'highSidePort' || mode === 'cooling');
+  return elevationAssumed ? [...wanted, 'elevation'] : wanted;
+}
 
 /** Why subcooling cannot be judged at this port, or `null`. The suction side is not affected. */
 export function unfitPortReason(input: CheckInput): Reason | null {

@@ -4,6 +4,7 @@ import { isKnown } from '../derivation/quantity';
 import { differenceToK, temperatureToK } from '../units';
 import type { UsedReadingId } from './assumed-uncertainty';
 import type { Caution } from './codes';
+import { guidingWindow } from './criteria/charge';
 import type { DerivedQuantities } from './derived-quantities';
 import type { CheckInput } from './input';
 
@@ -30,7 +31,8 @@ const MOST_USUAL_SUBCOOLING_K = differenceToK(20, 'deltaF');
 const outside = (quantity: Quantity, { low, high }: Range): number | null =>
   isKnown(quantity) && (quantity.value < low || quantity.value > high) ? quantity.value : null;
 
-export function plausibilityCautions({ readings }: CheckInput, derived: DerivedQuantities): readonly Caution[] {
+export function plausibilityCautions(input: CheckInput, derived: DerivedQuantities): readonly Caution[] {
+  const { readings } = input;
   const found: Caution[] = [];
   for (const [id, range] of USUAL_READINGS) {
     const reading = readings[id]?.quantity;
@@ -50,6 +52,11 @@ export function plausibilityCautions({ readings }: CheckInput, derived: DerivedQ
   const { subcooling } = derived;
   if (isKnown(subcooling) && subcooling.value > MOST_USUAL_SUBCOOLING_K) {
     found.push({ code: 'unusual-subcooling', figures: { actual: { kind: 'differenceK', value: subcooling.value } } });
+  }
+  const window = guidingWindow(input);
+  const superheat = window && outside(derived.superheat, { low: window.lowK, high: window.highK });
+  if (superheat !== null) {
+    found.push({ code: 'unusual-superheat', figures: { actual: { kind: 'differenceK', value: superheat } } });
   }
   const liquid = readings.liquidLineTemperature?.quantity;
   if (liquid !== undefined && isKnown(subcooling) && subcooling.value < -LIQUID_ABOVE_BUBBLE_K) {

@@ -15,6 +15,7 @@ function rulesIn(value: object): readonly Rule[] {
 /** How many figures each holds: one that is added or lost is looked at here. */
 const FIGURES: Readonly<Record<(typeof PROCEDURE_IDS)[number], number>> = {
   'general-rules': 23,
+  manufacturer: 20,
   'cec-ra3.2-2008-installer': 17,
   'cec-ra3.2-2008-rater': 17,
   'cec-ra3.2-2019-installer': 20,

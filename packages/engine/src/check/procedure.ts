@@ -15,6 +15,8 @@ export interface Rule {
   readonly printed: string;
   readonly standing: Standing;
   readonly source: string;
+  /** Whose figure stands in until the maker's own is entered. */
+  readonly takenFrom?: 'general-rules';
 }
 
 type Basis = readonly [standing: Standing, source: string];
@@ -45,8 +47,8 @@ export interface PermittedPath {
 }
 
 export interface AirflowRules {
-  /** Least airflow per nominal capacity, m³/s per W: of a new system, of an alteration, of a small-duct high-velocity system. */
-  readonly leastM3PerSPerW: Rule;
+  /** Least airflow per nominal capacity, m³/s per W: of a new system, of an alteration, of a small-duct high-velocity system; `null`: none. */
+  readonly leastM3PerSPerW: Rule | null;
   readonly leastOfAlterationM3PerSPerW: Rule | null;
   readonly leastOfHighVelocityM3PerSPerW: Rule | null;
   /** Part of the design airflow that is enough where one was entered. */
@@ -79,6 +81,8 @@ export interface Procedure {
   readonly version: number;
   /** Whether packaged units are in its scope. */
   readonly packaged: boolean;
+  /** What happens where something was not stated: the usual is taken, with a caution, or what hangs on it is not judged. */
+  readonly assumes: 'the-usual' | 'nothing';
   readonly decision: Decision;
   readonly superheat: {
     readonly toleranceK: Rule;
@@ -98,14 +102,15 @@ export interface Procedure {
     readonly clearFromK: Rule;
     readonly highAboveK: Rule;
   };
-  readonly temperatureSplit: { readonly toleranceK: Rule };
+  /** `judged`: whether the published table is a target here. Where it is not, it still helps to find the cause of a fault. */
+  readonly temperatureSplit: { readonly toleranceK: Rule; readonly judged: boolean };
   /** The maker's methods beside superheat and subcooling: ± where the maker states none. `null`: these rules do not judge by them. */
   readonly makersMethods: MakersTolerances | null;
   readonly superheatWindow: {
     readonly lowK: Rule;
     readonly highK: Rule;
-    /** The maker's range for the valve takes the window's place, or must hold as well. */
-    readonly makersRange: 'replaces' | 'also';
+    /** The maker's range for the valve takes the window's place, must hold as well, or is all that is judged by: the window then only guides. */
+    readonly makersRange: 'replaces' | 'also' | 'only';
   };
   readonly airflow: AirflowRules;
   readonly conditions: {
@@ -141,6 +146,9 @@ export const temperatureRule = (value: number, unit: Exclude<TemperatureUnit, 'K
   standing: basis[0],
   source: basis[1],
 });
+
+/** A figure of the general rules in rules that go by the maker's: it holds until his own is entered, and is marked in every result. */
+export const asGeneralRules = (rule: Rule): Rule => ({ ...rule, takenFrom: 'general-rules' });
 
 export const plainRule = (value: number, printed: string, basis: Basis): Rule => ({
   value,

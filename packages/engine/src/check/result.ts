@@ -29,8 +29,8 @@ export type TargetSource =
   | 'design-airflow'
   | 'airflow-per-capacity';
 
-/** The procedure's own figure, the maker's as entered, or our choice where neither has one. */
-export type ToleranceSource = 'procedure' | 'makers-data' | 'choice';
+/** The procedure's own figure, the maker's as entered, that of the general rules until his is entered, or our choice where neither has one. */
+export type ToleranceSource = 'procedure' | 'makers-data' | 'general-rules' | 'choice';
 
 /** Limits of the deviation, in its unit; `null` on a side without a limit. */
 export interface Tolerance {

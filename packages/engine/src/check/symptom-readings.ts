@@ -7,6 +7,8 @@ import { liquidLineApproach, returnOverEvaporating } from '../methods/air-to-ref
 import type { UsedReadingId } from './assumed-uncertainty';
 import type { CriterionId } from './codes';
 import { currentTest } from './current-test';
+import { judgeSplit, splitTarget } from './criteria/air';
+import { guidingWindow } from './criteria/charge';
 import type { DerivedQuantities } from './derived-quantities';
 import type { CheckInput } from './input';
 import { isFixedOrifice } from './input';
@@ -28,7 +30,8 @@ export function symptomReadings(
     metering: isFixedOrifice(setup) ? 'orifice' : 'valve',
     refrigerant: setup.refrigerant,
     port: setup.highSidePort === 'discharge' ? 'discharge' : 'liquid',
-    superheat: heldBy(criteria, isFixedOrifice(setup) ? 'superheat' : 'superheat-window'),
+    superheat:
+      heldByWindow(input, derived) ?? heldBy(criteria, isFixedOrifice(setup) ? 'superheat' : 'superheat-window'),
     subcooling: heldBy(criteria, 'subcooling'),
     subcoolingLevels: hasLevels
       ? {
@@ -38,7 +41,7 @@ export function symptomReadings(
           highAboveK: highAboveK.value,
         }
       : null,
-    split: heldBy(criteria, 'temperature-split'),
+    split: procedure.temperatureSplit.judged ? heldBy(criteria, 'temperature-split') : heldByTable(input, derived),
     returnOverEvaporating: derive(returnOverEvaporating, {
       returnDryBulbK: read('returnDryBulb'),
       evaporatingK: derived.meanEvaporatingTemperature,
@@ -51,6 +54,16 @@ export function symptomReadings(
     currentOffExpected: currentTest(input).offExpected,
   };
 }
+
+/** By the usual window of a valve, where its superheat is not judged. */
+function heldByWindow(input: CheckInput, { superheat }: DerivedQuantities): Held | null {
+  const window = guidingWindow(input);
+  return window === null || !isKnown(superheat) ? null : { measured: superheat, low: window.lowK, high: window.highK };
+}
+
+/** By the published table of the split, where these rules do not judge by it. */
+const heldByTable = (input: CheckInput, derived: DerivedQuantities): Held | null =>
+  heldBy([judgeSplit(input, derived, splitTarget(input, derived), null)], 'temperature-split');
 
 function airflowPerCapacity({ setup, readings }: CheckInput): number | null {
   const { nominalCapacityW } = setup;

@@ -11,12 +11,19 @@ export const problemDetails = {
   'unknown-refrigerant':
     'There are no curves for this refrigerant. Its designation is written as in the list, such as R-410A.',
   'not-found': 'There is nothing at this address.',
+  'sign-in-refused': 'No one signs in with this address and password.',
+  'signed-out': 'Sign in first.',
+  'wrong-origin': 'This request came from a page of another server.',
+  forbidden: 'None of your roles may do this.',
+  wait: 'Too many failed attempts. The header Retry-After says how many seconds to wait.',
   'method-not-allowed': 'This address does not take this method; the header Allow says which it takes.',
   'too-many-requests': 'Too many requests from one address. Try again in a second.',
   busy: 'The server has too much to do at once. Try again in a second.',
   'not-ready': 'The server cannot read its data.',
   internal: 'Something went wrong in the server. The log has the details under this id.',
 } as const;
+
+export const passwordTooShort = (least: number): string => `A password has at least ${least} characters.`;
 
 /** What a field takes, after “give”. */
 export const typeNames = {

@@ -66,4 +66,6 @@ export const cautionTexts: MessageTexts<CautionFigures> = {
   'unusual-liquid-line': (f) =>
     `A liquid line at ${f.actual} is warmer than the condensing temperature: unusual. ${UNUSUAL}`,
   'unusual-subcooling': (f) => `Subcooling of ${f.actual} is unusual. ${UNUSUAL}`,
+  'unusual-superheat': (f) =>
+    `Superheat of ${f.actual} is unusual for a valve. It is not judged without the maker’s range: look the range up.`,
 };

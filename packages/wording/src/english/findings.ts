@@ -74,6 +74,7 @@ const SOURCES: Readonly<Record<TargetSource, string>> = {
 const TOLERANCES: Readonly<Record<ToleranceSource, string>> = {
   procedure: '',
   'makers-data': ', with the maker’s ±',
+  'general-rules': ', with the ± of the general rules: the maker’s was not entered',
   choice: ', with a ± of our choice: the maker’s was not entered',
 };
 
@@ -150,15 +151,15 @@ function headline(parts: CriterionParts): string {
 function targetText(parts: CriterionParts): string {
   const { criterion, target, targetSource, toleranceSource, conditions } = parts;
   const source = targetSource === null ? '' : ` ${SOURCES[targetSource]}`;
+  const width = toleranceSource === null ? '' : TOLERANCES[toleranceSource];
   if (criterion === 'superheat-window' || criterion === 'airflow') {
     const band = range(parts);
-    return band === '' ? '' : `${capital(band)}${source}`;
+    return band === '' ? '' : `${capital(band)}${source}${toleranceSource === 'general-rules' ? width : ''}`;
   }
   if (target === null) return '';
   const at = Object.entries(conditions).flatMap(([name, value]) =>
     CONDITIONS[name] ? [`${value} ${CONDITIONS[name]}`] : [],
   );
-  const width = toleranceSource === null ? '' : TOLERANCES[toleranceSource];
   return `Target ${target}${source}${at.length === 0 ? '' : ` at ${at.join(', ')}`}${width}`;
 }
 

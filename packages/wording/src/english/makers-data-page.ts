@@ -35,6 +35,8 @@ export const makersDataWords = {
   toleranceHint: 'Left empty: that of the rules.',
   leastOutdoor: 'Coldest outdoor air for it',
   mostOutdoor: 'Hottest outdoor air for it',
+  leastReturn: 'Coolest return air for it',
+  mostReturn: 'Warmest return air for it',
   conditions: 'Limits the maker prints',
   paste: 'Paste a table',
   pasteHint:

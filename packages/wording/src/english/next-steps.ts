@@ -56,6 +56,10 @@ const steps: NextStepWords['steps'] = {
     'State which high-side port this unit has. The liquid line is the warm pipe after the outdoor coil, the discharge line the hot one before it: it burns.',
     'The two pressures differ by the drop through the outdoor coil.',
   ],
+  'state-the-setup': [
+    (f) => `State this first: ${f.fields}. Look at the unit and its nameplate; where you do not know, find out.`,
+    'These rules go by the maker’s data alone: nothing is taken as usual.',
+  ],
   'read-discharge-pressure': [
     'Type the high-side pressure as discharge pressure. Judge it only against a target made for that port.',
     'This unit has a discharge port only.',
@@ -299,6 +303,10 @@ const steps: NextStepWords['steps'] = {
   'read-liquid-pair': [
     'Read the liquid pressure and the liquid line next.',
     'They tell low charge from a restriction.',
+  ],
+  'read-suction-pair': [
+    'Read the suction pressure and the suction line next.',
+    'Superheat tells a low charge from a valve that floods or starves.',
   ],
   'weigh-in-after-heating': [
     `Weigh the charge in; leave it as it is until then. Search for a leak first. To weigh in: ${WEIGH_IN}. Check it again in the cooling season.`,

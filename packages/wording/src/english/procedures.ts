@@ -17,6 +17,11 @@ export const procedureWords: Readonly<Record<ProcedureId, ProcedureWords>> = {
     short: 'General rules',
     note: 'What a careful practitioner holds a system to without the maker’s own data. The table of temperature split is from memory, not read in the print.',
   },
+  manufacturer: {
+    name: 'This maker’s data',
+    short: 'Maker’s data',
+    note: 'For a unit whose nameplate, chart or manual is at hand. Targets, limits and ± as entered for it; nothing is taken as usual, so kind, mode, stage, port and elevation must be stated. Where the maker’s ± is not entered, that of the general rules stands in and is marked. The table of temperature split, which is from memory, judges nothing here.',
+  },
   'cec-ra3.2-2008-installer': {
     name: 'California RA3.2 (2008), installer',
     short: 'RA3.2 2008, installer',

@@ -6,6 +6,13 @@ export const reasonTexts: MessageTexts<ReasonFigures> = {
   'readings-missing': (f) => `Not read yet: ${f.readings}.`,
   'target-missing': 'There is no target yet: take it from the nameplate or the maker’s data.',
   'capacity-missing': 'The nominal capacity is missing: without it there is no least airflow.',
+  'setup-not-stated': (f) => `By the maker’s data nothing is assumed. State first: ${f.fields}.`,
+  'superheat-range-missing':
+    'The maker’s superheat range for this valve is not entered: superheat is shown, not judged. Look in the manual.',
+  'design-airflow-missing': 'The design airflow is not entered: take it from the maker’s blower data.',
+  'makers-limits-missing':
+    'The maker’s limits for outdoor and return air are not entered: they stand beside his table or in the manual.',
+  'split-not-by-these-rules': 'The published split table is not this maker’s: these rules do not judge by it.',
   'conditions-not-recorded': 'Running time, lowest return air or the look-over before reading are not recorded.',
   'instruments-not-recorded': 'It is not recorded when the instruments were last checked.',
   'target-for-other-port': 'The target holds for another high-side port than the one this pressure was read at.',

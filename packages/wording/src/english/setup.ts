@@ -108,7 +108,7 @@ const numbers = {
   targetSuperheat: field(
     'Target superheat',
     'target superheat',
-    'From this maker’s chart at today’s conditions. Empty: the printed makers’ chart is used.',
+    'From this maker’s chart at today’s conditions. Empty: the printed makers’ chart is used where the rules allow it.',
   ),
   superheatRange: field('Superheat range', 'superheat range', 'The maker’s range for the valve.'),
   superheatLow: field('Least superheat', 'least superheat', 'The maker’s range for the valve; it takes both ends.'),

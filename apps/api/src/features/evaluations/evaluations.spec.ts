@@ -162,6 +162,26 @@ describe('a check that can be judged', () => {
     expect(overall.finding).toBe(superheat?.finding);
   });
 
+  it('is judged by the maker’s data alone where that is asked for: what is not entered is asked for, and whose the ± is, is said', async () => {
+    const asked = { ...EVALUATION_EXAMPLE, procedure: 'manufacturer' };
+    const without = await evaluated(asked);
+    expect(without.procedure).toEqual({ id: 'manufacturer', version: 1 });
+    expect(without.overall).toMatchObject({ finding: 'not-judged', nextStep: { code: 'find-nameplate-target' } });
+    const targetSuperheat = { value: 13, unit: 'deltaF' };
+    const { criteria } = await evaluated({ ...asked, setup: { ...asked.setup, targetSuperheat } });
+    expect(criteria.find(({ criterion }) => criterion === 'superheat')).toMatchObject({
+      targetSource: 'entered',
+      toleranceSource: 'general-rules',
+      required: true,
+    });
+    const { stage: _, ...setup } = asked.setup;
+    const { overall } = await evaluated({ ...asked, setup: { ...setup, targetSuperheat } });
+    expect(overall.nextStep).toMatchObject({
+      code: 'state-the-setup',
+      text: expect.stringContaining('State this first: stage.') as unknown,
+    });
+  });
+
   it('says the enthalpy on the datum of its unit', async () => {
     const { derived } = await evaluated(EVALUATION_EXAMPLE);
     const humidityRatio = derived.returnHumidityRatio?.value ?? NaN;

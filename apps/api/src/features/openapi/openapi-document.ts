@@ -10,8 +10,10 @@ import {
   saturationParameters,
 } from '@chargewright/contract/refrigerant';
 import { sourcesAnswer } from '@chargewright/contract/sources';
+import { passwordChange, sessionList, signedIn, signInRequest } from '@chargewright/contract/sign-in';
 import { weighInAnswer, weighInRequest } from '@chargewright/contract/weigh-in';
 import * as z from 'zod';
+import { SESSION_COOKIE } from '../sign-in/sessions';
 
 type JsonObject = Readonly<Record<string, unknown>>;
 
@@ -29,11 +31,13 @@ const answer = (description: string, schema: JsonObject): JsonObject => ({ 200: 
 
 const PROBLEMS = {
   400: 'The body is not JSON, or the address cannot be read.',
-  404: 'There is no such refrigerant.',
+  401: 'Not signed in, or not with this address and password.',
+  403: 'The request came from a page of another server.',
+  404: 'There is no such thing.',
   413: 'The body is over 100 kB.',
   415: 'The body is not declared as JSON.',
   422: 'What cannot be; every fault at once.',
-  429: 'Too many requests from one address within a second.',
+  429: 'Too many requests from one address within a second, or failed attempts: Retry-After says how long to wait.',
   503: 'Busy or not ready: try again.',
 } as const;
 
@@ -90,6 +94,9 @@ const computation = (
     },
   },
 });
+
+const SIGNED_IN: JsonObject = { security: [{ session: [] }] };
+const nothing = (description: string): JsonObject => ({ 204: { description } });
 
 const PATHS: Readonly<Record<string, JsonObject>> = {
   '/api/v1/evaluations': computation('evaluateCheck', 'Judges one check of airflow and charge.', {
@@ -154,6 +161,58 @@ const PATHS: Readonly<Record<string, JsonObject>> = {
       responses: { ...answer('OpenAPI 3.1.', { type: 'object' }), ...problems(429) },
     },
   },
+  '/api/v1/session': {
+    post: {
+      operationId: 'signIn',
+      summary: 'Signs in; the answer sets the session’s cookie.',
+      requestBody: { required: true, ...json(reference(signInRequest)) },
+      responses: { ...answer('Signed in.', reference(signedIn)), ...problems(400, 401, 403, 413, 415, 422, 429) },
+    },
+    get: {
+      operationId: 'readSession',
+      summary: 'Who is signed in.',
+      ...SIGNED_IN,
+      responses: { ...answer('The person and her shops.', reference(signedIn)), ...problems(401, 429) },
+    },
+    delete: {
+      operationId: 'signOut',
+      summary: 'Ends this session.',
+      ...SIGNED_IN,
+      responses: { ...nothing('Signed out.'), ...problems(401, 403, 429) },
+    },
+  },
+  '/api/v1/sessions': {
+    get: {
+      operationId: 'listSessions',
+      summary: 'Where the person is signed in.',
+      ...SIGNED_IN,
+      responses: { ...answer('All sessions.', reference(sessionList)), ...problems(401, 429) },
+    },
+    delete: {
+      operationId: 'signOutEverywhere',
+      summary: 'Ends all sessions of the person.',
+      ...SIGNED_IN,
+      responses: { ...nothing('Signed out everywhere.'), ...problems(401, 403, 429) },
+    },
+  },
+  '/api/v1/sessions/{id}': {
+    delete: {
+      operationId: 'endSession',
+      summary: 'Ends one of the person’s sessions.',
+      ...SIGNED_IN,
+      parameters: [{ name: 'id', in: 'path', required: true, schema: { type: 'string' } }],
+      responses: { ...nothing('Ended.'), ...problems(401, 403, 404, 429) },
+    },
+  },
+  '/api/v1/password': {
+    put: {
+      operationId: 'changePassword',
+      summary: 'Changes the person’s password; her other sessions end.',
+      ...SIGNED_IN,
+      requestBody: { required: true, ...json(reference(passwordChange)) },
+      responses: { ...nothing('Changed.'), ...problems(400, 401, 403, 413, 415, 422, 429) },
+    },
+  },
   '/healthz': {
     get: {
       operationId: 'isAlive',
@@ -190,9 +249,12 @@ export const openApiDocument = (): JsonObject => ({
     title: 'Chargewright',
     version: '1',
     description:
-      'Verifies airflow and refrigerant charge. Open to any origin, without credentials. Fields may be added to answers, never renamed.',
+      'Verifies airflow and refrigerant charge. What computes is open to any origin, without credentials; records are for members of a shop. Fields may be added to answers, never renamed.',
   },
   servers: [{ url: '/' }],
   paths: PATHS,
-  components: { schemas: namedSchemas() },
+  components: {
+    schemas: namedSchemas(),
+    securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: SESSION_COOKIE } },
+  },
 });

@@ -1,9 +1,8 @@
-import type { Router } from 'express';
-import pino from 'pino';
 import { format } from 'prettier';
-import { describe, expect, it } from 'vitest';
-import { createApp } from '../../app';
-import { LIMITS } from '../../http/limits';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { servedRoutes } from '../../testing/served-routes';
+import type { TestServer } from '../../testing/test-server';
+import { startTestServer } from '../../testing/test-server';
 import { openApiDocument } from './openapi-document';
 
 const document = openApiDocument() as {
@@ -17,32 +16,14 @@ interface Operation {
   readonly responses: Readonly<Record<string, unknown>>;
 }
 
-interface Layer {
-  readonly route?: { readonly path: string; readonly stack: readonly { readonly method?: string }[] };
-  readonly handle: { readonly stack?: readonly Layer[] };
-}
+let server: TestServer;
+beforeAll(async () => {
+  server = await startTestServer();
+});
+afterAll(() => server.close());
 
-/** Files of the page are no part of the API. */
-const PAGE_ROUTES = ['/robots.txt', '/{*path}'];
-
-function servedOperations(): readonly string[] {
-  const app = createApp({
-    logger: pino({ level: 'silent' }),
-    limits: LIMITS,
-    trustProxy: false,
-    secure: false,
-    webRoot: 'no-such-folder',
-    isReady: () => true,
-  });
-  const routes = (layers: readonly Layer[]): readonly string[] =>
-    layers.flatMap(({ route, handle }) => {
-      if (route === undefined) return routes(handle.stack ?? []);
-      if (PAGE_ROUTES.includes(route.path)) return [];
-      const methods = route.stack.flatMap(({ method }) => (method === undefined ? [] : [method]));
-      return methods.map((method) => `${method} ${route.path.replace(/:(\w+)/g, '{$1}')}`);
-    });
-  return routes((app.router as Router as unknown as { readonly stack: readonly Layer[] }).stack);
-}
+const servedOperations = (): readonly string[] =>
+  servedRoutes(server.app).map((route) => route.replace(/:(\w+)/g, '{$1}'));
 
 const everyReference = (value: unknown): readonly string[] => {
   if (typeof value !== 'object' || value === null) return [];
@@ -56,7 +37,7 @@ describe('the description of the API', () => {
     const described = Object.entries(document.paths).flatMap(([path, operations]) =>
       Object.keys(operations).map((method) => `${method} ${path}`),
     );
-    expect([...described].sort()).toEqual([...new Set(servedOperations())].sort());
+    expect([...described].sort()).toEqual([...servedOperations()].sort());
   });
 
   it('refers to nothing that is not there, and describes nothing that is not referred to', () => {

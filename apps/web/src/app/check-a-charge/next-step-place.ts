@@ -1,5 +1,5 @@
 /** Where on the page a next step can be done, so that its button leads there. */
-import type { NextStepCode, Reason } from '@chargewright/engine';
+import type { AssumedField, CriterionResult, NextStepCode } from '@chargewright/engine';
 
 export type StepPlace =
   | {
@@ -8,7 +8,7 @@ export type StepPlace =
       readonly control: string;
     }
   /** A page of its own, at the path of this name. */
-  | { readonly view: 'airflow' | 'weigh-in' };
+  | { readonly view: 'airflow' | 'weigh-in' | 'makers-data' };
 
 const choice = (view: 'setup' | 'readings', name: string): StepPlace => ({ view, control: `input[name="${name}"]` });
 
@@ -49,9 +49,24 @@ const REFUSALS: ReadonlySet<NextStepCode> = new Set(['cooling-season-or-weigh-in
 
 export const isRefusal = (code: NextStepCode): boolean => REFUSALS.has(code);
 
-/** `reason`: why the deciding criterion is not judged. A target for another port is not sought anew before its port is stated. */
-export const placeOfStep = (code: NextStepCode, reason: Reason | null): StepPlace | null =>
-  reason?.code === 'target-for-other-port' ? choice('readings', 'targetSubcoolingPort') : (PLACES[code] ?? null);
+/**
+ * Where the step is done, by why the deciding criterion is not judged. A target for another port is not sought anew before its port is stated; that of
+ * an orifice is entered as the maker's table.
+ */
+export function placeOfStep(code: NextStepCode, deciding: CriterionResult | null): StepPlace | null {
+  const reason = deciding?.reason;
+  if (reason?.code === 'target-for-other-port') return choice('readings', 'targetSubcoolingPort');
+  if (reason?.code === 'setup-not-stated' && reason.figures.fields.kind === 'setup') {
+    return placeOfField(reason.figures.fields.value[0]);
+  }
+  if (code === 'find-nameplate-target' && deciding?.criterion === 'superheat') return { view: 'makers-data' };
+  return PLACES[code] ?? null;
+}
+
+const placeOfField = (field: AssumedField | undefined): StepPlace =>
+  field === undefined || field === 'elevation'
+    ? { view: 'setup', control: '#typed-elevation' }
+    : choice('setup', field);
 
 /** Brings a control into sight and gives it the focus, whatever it is folded into. */
 export function goToControl(page: HTMLElement, control: string): void {

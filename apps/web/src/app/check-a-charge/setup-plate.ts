@@ -76,10 +76,12 @@ const rulesText = (procedure: ProcedureId = 'general-rules'): string => inSenten
 const portText = (port: HighSidePort): string =>
   `${inSentence(setupWords.highSidePort.label)}: ${inSentence(setupWords.highSidePort.options[port].label)}`;
 
-/** "Assumed: stage and high-side port"; empty when the person has said everything. */
+/** "Assumed: stage and high-side port"; empty when the person has said everything. By the maker's data alone nothing is assumed. */
 export function plateAssumptions({ setup }: CheckDraft): string {
   const open = (['kind', 'mode', 'stage', 'highSidePort'] as const).filter((field) => setup[field] === undefined);
-  return open.length === 0 ? '' : words.assumedFields(listWords(open.map((field) => setupWords[field].name)));
+  if (open.length === 0) return '';
+  const fields = listWords(open.map((field) => setupWords[field].name));
+  return setup.procedure === 'manufacturer' ? words.unstatedFields(fields) : words.assumedFields(fields);
 }
 
 /** "Fixed orifice" inside a sentence; an abbreviation (TXV) keeps its capitals. */

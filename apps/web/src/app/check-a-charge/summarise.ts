@@ -47,18 +47,18 @@ function reasonToSay(reason: Reason | null, { overall }: CheckResult, system: Un
   return isNews || reason.code === 'target-for-other-port' ? reasonText(reason, system) : '';
 }
 
-const decidingReason = (result: CheckResult): Reason | null =>
-  result.criteria.find((criterion) => decides(result, criterion))?.reason ?? null;
+const decidingCriterion = (result: CheckResult): CriterionResult | null =>
+  result.criteria.find((criterion) => decides(result, criterion)) ?? null;
 
 /** Before the first reading there is nothing to report: what comes first is the headline. */
 function beforeReadings(result: CheckResult, system: UnitSystem): ResultSummary {
   const { nextStep } = result.overall;
-  const reason = decidingReason(result);
+  const deciding = decidingCriterion(result);
   if (nextStep.code === 'take-readings') return bareSummary(words.noReadings);
   return {
     ...bareSummary(firstSentence(nextStepLines(nextStep, system).step)),
-    reason: reasonToSay(reason, result, system),
-    place: placeOfStep(nextStep.code, reason),
+    reason: reasonToSay(deciding?.reason ?? null, result, system),
+    place: placeOfStep(nextStep.code, deciding),
     isRefused: isRefusal(nextStep.code),
   };
 }
@@ -70,7 +70,7 @@ export function summarise(evaluation: Evaluation, hasReadings: boolean, system: 
   if (!hasReadings) return beforeReadings(result, system);
   const { nextStep } = result.overall;
   const { notYet, step } = nextStepLines(nextStep, system);
-  const reason = decidingReason(result);
+  const deciding = decidingCriterion(result);
   const headline = overallHeadline(result, system);
   const leading = leadingCriterion(result);
   const leadingName = leading ? criterionName(leading.criterion) : '';
@@ -78,8 +78,8 @@ export function summarise(evaluation: Evaluation, hasReadings: boolean, system: 
     headline,
     notYet,
     step: firstSentence(step),
-    reason: reasonToSay(reason, result, system),
-    place: placeOfStep(nextStep.code, reason),
+    reason: reasonToSay(deciding?.reason ?? null, result, system),
+    place: placeOfStep(nextStep.code, deciding),
     isRefused: isRefusal(nextStep.code),
     isStop: result.overall.finding === 'stop',
     leading,

@@ -76,7 +76,7 @@ export interface TypedAxis {
 }
 
 /** A maker's table in the words of the person who types it off: it may be unfinished. */
-export interface TypedChart {
+export interface TypedChart extends Readonly<Partial<Record<ChartLimit, TypedValue>>> {
   readonly kind: MakersChartKind;
   /** Left out: one figure that always holds. */
   readonly rows?: TypedAxis;
@@ -85,9 +85,11 @@ export interface TypedChart {
   readonly cells: readonly (readonly string[])[];
   readonly port?: ChartPort;
   readonly tolerance?: TypedValue;
-  readonly leastOutdoor?: TypedValue;
-  readonly mostOutdoor?: TypedValue;
 }
+
+/** Weather and house that the maker allows for a table. */
+export const CHART_LIMITS = ['leastOutdoor', 'mostOutdoor', 'leastReturn', 'mostReturn'] as const;
+export type ChartLimit = (typeof CHART_LIMITS)[number];
 
 export interface DraftVisit {
   /** When the system was started or last adjusted, ISO 8601 in UTC: the visit clock. */

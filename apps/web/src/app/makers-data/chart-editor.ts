@@ -22,7 +22,7 @@ import {
 import { makersChartWords, makersDataWords, unitLabel, type UnitSystem } from '@chargewright/wording';
 import { ChoiceGroup } from '../check-a-charge/choice-group';
 import { TickBox } from '../check-a-charge/tick-box';
-import type { TypedChart, TypedValue } from '../loose-checks/check-draft';
+import { CHART_LIMITS, type ChartLimit, type TypedChart, type TypedValue } from '../loose-checks/check-draft';
 import { NumberField } from '../quantities/number-field';
 import { DASH } from '../quantities/printed-dash';
 import { ChartPreview } from './chart-preview';
@@ -40,7 +40,7 @@ import {
   withRow,
 } from './typed-chart';
 
-type Limit = 'tolerance' | 'leastOutdoor' | 'mostOutdoor';
+type Limit = 'tolerance' | ChartLimit;
 
 /** Types off one table: pasted at once, or row by row with one field under another, as a phone has room for. */
 @Component({
@@ -65,6 +65,7 @@ export class ChartEditor {
   protected readonly words = makersDataWords;
   protected readonly unitLabel = unitLabel;
   protected readonly DASH = DASH;
+  protected readonly limits = CHART_LIMITS;
   protected readonly facts = computed(() => MAKERS_CHART_FACTS[this.chart().kind]);
   protected readonly name = computed(() => makersChartWords.kinds[this.chart().kind].label);
   protected readonly rowName = computed(() => makersChartWords.conditions[this.facts().rows]);
@@ -85,7 +86,7 @@ export class ChartEditor {
     if (this.facts().cells === 'pressure') return this.system() === 'F-psi' ? ['psi'] : ['kPa', 'bar'];
     return this.system() === 'F-psi' ? ['deltaF'] : ['deltaC'];
   });
-  protected readonly outdoorUnits = computed((): readonly [string, ...string[]] =>
+  protected readonly temperatureUnits = computed((): readonly [string, ...string[]] =>
     this.system() === 'F-psi' ? ['degF'] : ['degC'],
   );
   protected readonly oneFigure = computed(() => this.chart().rows === undefined);

@@ -1,6 +1,6 @@
 /** A maker's table as it was typed, as the engine takes it: texts until all of it can be read. Pure. */
 import type { ChartAxisInput, MakersChartInput, TemperatureAmount } from '@chargewright/engine';
-import type { TypedAxis, TypedChart, TypedValue } from '../loose-checks/check-draft';
+import type { ChartLimit, TypedAxis, TypedChart, TypedValue } from '../loose-checks/check-draft';
 import { parseNumber } from '../quantities/parse-number';
 import { isDash } from '../quantities/printed-dash';
 
@@ -50,11 +50,13 @@ export function readTypedChart(chart: TypedChart): ChartReading {
       ...amount('tolerance', chart.tolerance),
       ...amount('leastOutdoor', chart.leastOutdoor),
       ...amount('mostOutdoor', chart.mostOutdoor),
+      ...amount('leastReturn', chart.leastReturn),
+      ...amount('mostReturn', chart.mostReturn),
     },
   };
 }
 
-type AmountField = 'tolerance' | 'leastOutdoor' | 'mostOutdoor';
+type AmountField = 'tolerance' | ChartLimit;
 
 /** A text that is no number is left out: the field beside it says so. */
 function amount(name: AmountField, typed: TypedValue | undefined): Partial<Pick<MakersChartInput, AmountField>> {

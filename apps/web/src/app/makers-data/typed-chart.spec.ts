@@ -62,8 +62,16 @@ describe('a typed table', () => {
       ...SUPERHEAT,
       tolerance: { text: '3', unit: 'deltaF' },
       leastOutdoor: { text: 'x', unit: 'degF' },
+      leastReturn: { text: '70', unit: 'degF' },
+      mostReturn: { text: '27', unit: 'degC' },
     });
-    expect(reading).toMatchObject({ chart: { tolerance: { value: 3, unit: 'deltaF' } } });
+    expect(reading).toMatchObject({
+      chart: {
+        tolerance: { value: 3, unit: 'deltaF' },
+        leastReturn: { value: 70, unit: 'degF' },
+        mostReturn: { value: 27, unit: 'degC' },
+      },
+    });
     expect(reading.state === 'complete' && reading.chart).not.toHaveProperty('leastOutdoor');
   });
 });

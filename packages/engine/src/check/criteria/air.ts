@@ -10,11 +10,11 @@ import { LIMIT_SLACK_K } from '../conformance';
 import { staleReason } from '../evidence';
 import type { DerivedQuantities } from '../derived-quantities';
 import type { CheckInput, CheckSetup } from '../input';
-import type { AirflowEvidence, AirflowRules, Procedure, SplitEvidence } from '../procedure';
+import type { AirflowEvidence, AirflowRules, Procedure, Rule, SplitEvidence } from '../procedure';
 import type { CriterionResult, TargetSource } from '../result';
 import { conditionsGate } from './conditions';
 import { judgeCriterion, unjudged } from './criterion';
-import { halfWidth, symmetric } from './tolerance';
+import { halfWidth, sourceOf, symmetric } from './tolerance';
 
 /** Target of the split, for its criterion and for the gate. */
 export function splitTarget({ readings }: CheckInput, { returnWetBulb }: DerivedQuantities): Quantity {
@@ -45,6 +45,18 @@ export function judgeSplit(
   });
 }
 
+/** The split among the criteria: a table that is not this maker's judges nothing where his data alone count. */
+export const splitCriterion = ({ procedure }: CheckInput, split: CriterionResult): CriterionResult =>
+  procedure.temperatureSplit.judged || split.reason?.code === 'readings-missing'
+    ? split
+    : unjudged(
+        'temperature-split',
+        false,
+        'not-judged',
+        { code: 'split-not-by-these-rules', figures: {} },
+        split.actual,
+      );
+
 function noSplitTarget({ readings }: CheckInput, { returnWetBulb }: DerivedQuantities): number {
   const dryBulb = readings.returnDryBulb?.quantity;
   if (dryBulb === undefined || !isKnown(returnWetBulb)) return 0;
@@ -63,7 +75,8 @@ export function judgeAirflow(input: CheckInput): CriterionResult | null {
   if (measured === undefined) return null;
   const least = leastAirflow(input);
   if (least === null) {
-    return unjudged('airflow', false, 'not-judged', { code: 'capacity-missing', figures: {} }, measured.quantity);
+    const code = procedure.airflow.leastM3PerSPerW === null ? 'design-airflow-missing' : 'capacity-missing';
+    return unjudged('airflow', false, 'not-judged', { code, figures: {} }, measured.quantity);
   }
   return judgeCriterion({
     criterion: 'airflow',
@@ -75,7 +88,7 @@ export function judgeAirflow(input: CheckInput): CriterionResult | null {
       low: procedure.airflow.limitPasses ? 0 : LEAST_EXCESS_M3_PER_S,
       high: null,
       floored: false,
-      source: 'procedure',
+      source: sourceOf(least.rule),
     }),
     decision: procedure.decision,
     gates: (evidence) => [staleReason(input, evidence)],
@@ -85,25 +98,36 @@ export function judgeAirflow(input: CheckInput): CriterionResult | null {
 /** A limit that must be exceeded: by more than the slack of the comparison, far less than any instrument shows. */
 const LEAST_EXCESS_M3_PER_S = 2 * LIMIT_SLACK_K;
 
-function leastAirflow({ procedure, setup }: CheckInput): { target: Known; source: TargetSource } | null {
-  const { leastDesignFraction } = procedure.airflow;
+interface LeastAirflow {
+  readonly target: Known;
+  readonly source: TargetSource;
+  readonly rule: Rule;
+}
+
+function leastAirflow({ procedure, setup }: CheckInput): LeastAirflow | null {
+  const { leastDesignFraction: rule } = procedure.airflow;
   const entered = (value: number): Known => leaf({ id: 'leastAirflow', kind: 'flowM3PerS', value, origin: 'entered' });
-  if (setup.designAirflowM3PerS !== undefined && leastDesignFraction !== null) {
-    return { target: entered(leastDesignFraction.value * setup.designAirflowM3PerS), source: 'design-airflow' };
+  if (setup.designAirflowM3PerS !== undefined && rule !== null) {
+    return { target: entered(rule.value * setup.designAirflowM3PerS), source: 'design-airflow', rule };
   }
-  if (setup.nominalCapacityW !== undefined) {
-    const target = entered(leastPerCapacity(procedure.airflow, setup) * setup.nominalCapacityW);
-    return { target, source: 'airflow-per-capacity' };
-  }
-  return null;
+  const perCapacity = leastPerCapacity(procedure.airflow, setup);
+  return setup.nominalCapacityW === undefined || perCapacity === null
+    ? null
+    : {
+        target: entered(perCapacity.value * setup.nominalCapacityW),
+        source: 'airflow-per-capacity',
+        rule: perCapacity,
+      };
 }
 
 /** The limit of an alteration or a high-velocity system where the procedure has one; of the two the lower. */
-function leastPerCapacity(rules: AirflowRules, { alteration, highVelocity }: CheckSetup): number {
-  const limits = [rules.leastM3PerSPerW];
-  if (alteration && rules.leastOfAlterationM3PerSPerW !== null) limits.push(rules.leastOfAlterationM3PerSPerW);
-  if (highVelocity && rules.leastOfHighVelocityM3PerSPerW !== null) limits.push(rules.leastOfHighVelocityM3PerSPerW);
-  return Math.min(...limits.map(({ value }) => value));
+function leastPerCapacity(rules: AirflowRules, { alteration, highVelocity }: CheckSetup): Rule | null {
+  const limits = [
+    rules.leastM3PerSPerW,
+    alteration ? rules.leastOfAlterationM3PerSPerW : null,
+    highVelocity ? rules.leastOfHighVelocityM3PerSPerW : null,
+  ].filter((rule) => rule !== null);
+  return limits.reduce<Rule | null>((least, rule) => (least === null || rule.value < least.value ? rule : least), null);
 }
 
 /**

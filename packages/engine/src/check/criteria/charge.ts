@@ -7,6 +7,7 @@ import type { Reason } from '../codes';
 import type { DerivedQuantities } from '../derived-quantities';
 import { unfitPortReason } from '../fit-for-test';
 import type { CheckInput, CheckSetup } from '../input';
+import { isFixedOrifice } from '../input';
 import type { Procedure } from '../procedure';
 import type { CriterionResult, ToleranceSource } from '../result';
 import type { ChargeTarget } from './charge-target';
@@ -18,6 +19,8 @@ export interface ChargeJudgement {
   readonly input: CheckInput;
   readonly derived: DerivedQuantities;
   readonly unfit: Reason | null;
+  /** What the person has to state before the procedure judges anything. */
+  readonly unstated: Reason | null;
   /** By what the charge is decided: its criterion is required. */
   readonly method: ChargeMethod;
   /** Gates shared by all charge criteria, with the limits of the method that is judged by: impossible readings, conditions, age, airflow. */
@@ -35,11 +38,12 @@ export function negativeDifference({ subcooling, superheat }: DerivedQuantities)
 
 const isMissing = ({ quantity }: ChargeTarget): boolean => quantity.state === 'missing' && quantity.inputs.length === 0;
 
-export function judgeSuperheat({ input, derived, unfit, method, gates }: ChargeJudgement): CriterionResult {
+export function judgeSuperheat({ input, derived, unfit, unstated, method, gates }: ChargeJudgement): CriterionResult {
   const { procedure } = input;
   const actual = derived.superheat;
   const required = method.kind === 'superheat';
   if (unfit !== null) return unjudged('superheat', required, 'not-verifiable', unfit, actual);
+  if (unstated !== null) return unjudged('superheat', required, 'not-judged', unstated, actual);
   const own = methodOf(input, 'superheat');
   const target = chargeTarget(input, derived, own);
   if (isMissing(target) && isKnown(actual)) {
@@ -67,11 +71,12 @@ const methodOf = (input: CheckInput, kind: 'superheat' | 'subcooling'): ChargeMe
   chart: isEntered(input, kind) ? null : usableChart(input, kind),
 });
 
-export function judgeSubcooling({ input, derived, unfit, method, gates }: ChargeJudgement): CriterionResult {
+export function judgeSubcooling({ input, derived, unfit, unstated, method, gates }: ChargeJudgement): CriterionResult {
   const { procedure } = input;
   const required = method.kind === 'subcooling';
   const actual = derived.subcooling;
   if (unfit !== null) return unjudged('subcooling', required, 'not-verifiable', unfit, actual);
+  if (unstated !== null) return unjudged('subcooling', required, 'not-judged', unstated, actual);
   const unfitPort = unfitPortReason(input);
   if (unfitPort !== null) {
     // a wrong kind of reading is there and cannot be used; the other cases lack something
@@ -99,14 +104,21 @@ export function judgeSubcooling({ input, derived, unfit, method, gates }: Charge
   });
 }
 
-export function judgeSuperheatWindow({ input, derived, unfit, method, gates }: ChargeJudgement): CriterionResult {
+export function judgeSuperheatWindow(judgement: ChargeJudgement): CriterionResult {
+  const { input, derived, unfit, unstated, method, gates } = judgement;
   const { procedure, setup } = input;
   const actual = derived.superheat;
-  if (unfit !== null) return unjudged('superheat-window', true, 'not-verifiable', unfit, actual);
   const range = windowOf(procedure.superheatWindow, setup.superheatRange);
+  const required = range !== null;
+  if (unfit !== null) return unjudged('superheat-window', required, 'not-verifiable', unfit, actual);
+  if (unstated !== null) return unjudged('superheat-window', required, 'not-judged', unstated, actual);
+  if (range === null) {
+    const reason = { code: 'superheat-range-missing', figures: {} } as const;
+    return unjudged('superheat-window', required, 'not-judged', reason, actual);
+  }
   return judgeWindow({
     criterion: 'superheat-window',
-    required: true,
+    required,
     actual,
     targetSource: range.source,
     tolerance: { low: range.lowK, high: range.highK, floored: false, source: range.toleranceSource },
@@ -123,14 +135,33 @@ interface SuperheatWindow {
   readonly toleranceSource: ToleranceSource;
 }
 
-/** The procedure's window, the maker's range in its place, or what both allow. */
+/** The procedure's window, the maker's range in its place, or what both allow; `null`: only a range is judged by, and none was entered. */
 function windowOf(
   { lowK, highK, makersRange }: Procedure['superheatWindow'],
   entered: CheckSetup['superheatRange'],
-): SuperheatWindow {
+): SuperheatWindow | null {
   const own = { lowK: lowK.value, highK: highK.value };
-  if (entered === undefined) return { ...own, source: 'procedure-window', toleranceSource: sourceOf(lowK) };
-  if (makersRange === 'replaces') return { ...entered, source: 'entered-range', toleranceSource: 'makers-data' };
-  const both = { lowK: Math.max(own.lowK, entered.lowK), highK: Math.min(own.highK, entered.highK) };
-  return { ...both, source: 'window-and-range', toleranceSource: sourceOf(lowK) };
+  if (entered === undefined) {
+    if (makersRange === 'only') return null;
+    return { ...own, source: 'procedure-window', toleranceSource: sourceOf(lowK) };
+  }
+  switch (makersRange) {
+    case 'only':
+    case 'replaces':
+      return { ...entered, source: 'entered-range', toleranceSource: 'makers-data' };
+    case 'also': {
+      const both = { lowK: Math.max(own.lowK, entered.lowK), highK: Math.min(own.highK, entered.highK) };
+      return { ...both, source: 'window-and-range', toleranceSource: sourceOf(lowK) };
+    }
+  }
+}
+
+/** The usual window of a valve whose superheat is not judged for want of the maker's range: it guides the next step and the search for a cause. */
+export function guidingWindow({
+  procedure,
+  setup,
+}: CheckInput): { readonly lowK: number; readonly highK: number } | null {
+  const { lowK, highK } = procedure.superheatWindow;
+  const guides = !isFixedOrifice(setup) && windowOf(procedure.superheatWindow, setup.superheatRange) === null;
+  return guides ? { lowK: lowK.value, highK: highK.value } : null;
 }

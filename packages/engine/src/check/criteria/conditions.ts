@@ -137,6 +137,9 @@ export function judgeConditions(input: CheckInput): CriterionResult {
   if (!conditionsRecorded(input)) {
     return unjudged('conditions', required, 'not-judged', { code: 'conditions-not-recorded', figures: {} });
   }
+  if (input.procedure.assumes === 'nothing' && temperatureLimits(input, chargeMethod(input)).length === 0) {
+    return unjudged('conditions', required, 'not-judged', { code: 'makers-limits-missing', figures: {} });
+  }
   const noHole = accessHoleReason(input);
   if (noHole === null) return met('conditions', required);
   return input.visit.preflight.accessHole === 'not-ok'

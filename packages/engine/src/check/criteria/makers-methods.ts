@@ -20,12 +20,13 @@ import { halfWidth, sourceOf, symmetric } from './tolerance';
 type MakersMethod = ChargeMethod & { readonly kind: OtherMethod };
 
 export function judgeMakersMethod(judgement: ChargeJudgement, own: MakersMethod): CriterionResult {
-  const { input, derived, unfit, method, gates } = judgement;
+  const { input, derived, unfit, unstated, method, gates } = judgement;
   const { procedure, setup } = input;
   const { kind } = own;
   const required = method.kind === kind;
   const actual = actualOf(input, kind);
   if (unfit !== null) return unjudged(kind, required, 'not-verifiable', unfit, actual);
+  if (unstated !== null) return unjudged(kind, required, 'not-judged', unstated, actual);
   const unfitPort = kind === 'liquid-pressure' ? unfitPortReason(input) : null;
   if (unfitPort?.code === 'liquid-reading-at-discharge-port') {
     return unjudged(kind, required, 'not-verifiable', unfitPort, actual);

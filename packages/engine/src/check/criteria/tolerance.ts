@@ -13,7 +13,8 @@ export const halfWidth = (chart: CheckMakersChart | null, rule: Rule): HalfWidth
     ? { half: rule.value, source: sourceOf(rule) }
     : { half: chart.tolerance, source: 'makers-data' };
 
-export const sourceOf = ({ standing }: Rule): ToleranceSource => (standing === 'choice' ? 'choice' : 'procedure');
+export const sourceOf = ({ standing, takenFrom }: Rule): ToleranceSource =>
+  takenFrom ?? (standing === 'choice' ? 'choice' : 'procedure');
 
 export const symmetric = ({ half, source }: HalfWidth): Tolerance => ({
   low: -half,
@@ -22,8 +23,9 @@ export const symmetric = ({ half, source }: HalfWidth): Tolerance => ({
   source,
 });
 
-/** The measured value itself must not pass under the floor, whatever the target allows. */
+/** The measured value itself must not pass under the floor, whatever the target allows; a floor that only stands in ends where the maker states a ±. */
 export function floored({ half, source }: HalfWidth, target: number, floor: Rule | null): Tolerance {
-  const least = floor === null ? -half : Math.max(floor.value - target, -half);
+  const holds = floor !== null && !(floor.takenFrom !== undefined && source === 'makers-data');
+  const least = holds ? Math.max(floor.value - target, -half) : -half;
   return { low: least, high: half, floored: least > -half, source };
 }

@@ -7,6 +7,7 @@ import { conditionsGate, recordGate } from '../criteria/conditions';
 import { airflowGate } from '../criteria/air';
 import { differenceRule, plainRule } from '../procedure';
 import type { AirflowEvidence, SplitEvidence } from '../procedure';
+import { guidingWindow } from '../criteria/charge';
 import type { ChargeTarget } from '../criteria/charge-target';
 import { NEWER_REFRIGERANTS } from '../../diagnosis/usual-bands';
 import { MAKERS_CHART_FACTS } from '../../methods/makers-chart/kinds';
@@ -35,6 +36,7 @@ export interface Facts {
   /** Why a required criterion has no number, or `none`. */
   readonly lacking:
     | 'none'
+    | 'setup'
     | 'readings'
     | 'stale'
     | 'nameplate-target'
@@ -50,7 +52,7 @@ export interface Facts {
   readonly makersTarget: 'clear' | 'none-here';
   /** How full the system is by the maker's method, where that decides. */
   readonly charge: 'unknown' | 'low' | 'within' | 'high';
-  /** Where nothing counts, what the split shows: it may still tell the cause of a stop. */
+  /** Where nothing counts, what the split shows: it may still tell the cause of a stop; of a stop alone, where these rules do not judge by it. */
   readonly airflow: AirflowEvidence;
   readonly airSeen: 'yes' | 'no';
   readonly quality:
@@ -120,12 +122,12 @@ export function gatherFacts(evidence: Evidence): Facts {
     method: methodFact(evidence),
     makersTarget: makersTargetFact(evidence),
     charge: chargeFact(evidence),
-    airflow: airflow === 'nothing' ? evidence.split : airflow,
+    airflow: airflow === 'nothing' ? splitShown(evidence) : airflow,
     airSeen: readings.supplyDryBulb !== undefined || readings.airflow !== undefined ? 'yes' : 'no',
     quality: readingQuality(evidence.cautions),
     overall,
     settling: canSettle(evidence) ? 'possible' : 'impossible',
-    superheat: sideOf(criteria, isFixedOrifice(setup) ? 'superheat' : 'superheat-window'),
+    superheat: superheatSide(evidence),
     subcooling: subcoolingSide(evidence),
     subcoolingLevel: subcoolingLevel(evidence),
     weather: weatherFact(input),
@@ -160,6 +162,7 @@ const impossibility = (reason: Reason | null): Facts['impossible'] =>
 /** The first required criterion without a finding says what is lacking; readings come before targets. */
 function whatIsLacking(criteria: readonly CriterionResult[]): Facts['lacking'] {
   const codes = criteria.filter(({ required }) => required).map(({ reason }) => reason?.code);
+  if (codes.includes('setup-not-stated')) return 'setup';
   if (codes.includes('readings-missing')) return 'readings';
   if (codes.includes('stale')) return 'stale';
   if (codes.includes('target-for-other-port')) return 'target-port';
@@ -196,6 +199,19 @@ function chargeFact({ method, criteria }: Evidence): Facts['charge'] {
   const side = sideOf(criteria, method.kind);
   if (side === 'unknown' || side === 'within') return side;
   return side === MAKERS_CHART_FACTS[method.kind].overchargeIs ? 'high' : 'low';
+}
+
+const splitShown = ({ input, split, stops }: Evidence): SplitEvidence =>
+  input.procedure.temperatureSplit.judged || stops.length > 0 ? split : 'nothing';
+
+/** Of a valve whose superheat is not judged: against the usual window. */
+function superheatSide({ input, derived, criteria }: Evidence): Side {
+  const window = guidingWindow(input);
+  if (window === null) return sideOf(criteria, isFixedOrifice(input.setup) ? 'superheat' : 'superheat-window');
+  const { superheat } = derived;
+  if (!isKnown(superheat)) return 'unknown';
+  if (superheat.value < window.lowK - LIMIT_SLACK_K) return 'below';
+  return superheat.value > window.highK + LIMIT_SLACK_K ? 'above' : 'within';
 }
 
 const SUBCOOLING_OF_CHARGE = { unknown: 'unknown', low: 'below', within: 'within', high: 'above' } as const;

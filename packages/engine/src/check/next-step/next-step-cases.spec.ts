@@ -345,6 +345,18 @@ const LACKING: readonly Case[] = [
     'move-no-refrigerant',
   ],
   [
+    'by the maker’s data alone, the stage not stated',
+    valve({ procedure: 'manufacturer', setup: { stage: null } }),
+    'state-the-setup',
+    'move-no-refrigerant',
+  ],
+  [
+    'by the maker’s data alone, an orifice without a target',
+    orifice({ procedure: 'manufacturer' }),
+    'find-nameplate-target',
+    'move-no-refrigerant',
+  ],
+  [
     'a liquid pressure at a discharge port',
     valve({ setup: { highSidePort: 'discharge', targetSubcoolingPort: 'discharge' } }),
     'read-discharge-pressure',
@@ -590,6 +602,12 @@ const ORIFICE: readonly Case[] = [
 ];
 
 const VALVE: readonly Case[] = [
+  [
+    'low charge by the maker’s data alone, superheat unread',
+    valve({ procedure: 'manufacturer', readings: { ...LOW_VALVE, suctionLineTemperature: null } }),
+    'read-suction-pair',
+    'move-no-refrigerant',
+  ],
   ['low charge in the window', valve({ readings: LOW_VALVE }), 'leak-first', 'add-nothing'],
   [
     'low charge above the window',
@@ -937,6 +955,12 @@ const WITHIN: readonly Case[] = [
     valve({ readings: { outdoorDryBulb: 65, liquidPressure: 300, liquidLineTemperature: 86.5 } }),
     'record',
   ],
+  [
+    'valve within by the maker’s data alone, superheat unread',
+    valve({ procedure: 'manufacturer', readings: { suctionLineTemperature: null } }),
+    'read-suction-pair',
+  ],
+  ['valve within by the maker’s data alone', valve({ procedure: 'manufacturer' }), 'record'],
   ['orifice within, airflow unseen', orifice({ readings: { supplyDryBulb: null } }), 'read-supply-or-airflow'],
   [
     'orifice within, airflow measured',

@@ -24,6 +24,7 @@ const VALUES = {
   runningTime: ['recorded', 'unrecorded'],
   lacking: [
     'none',
+    'setup',
     'readings',
     'stale',
     'nameplate-target',
@@ -165,6 +166,17 @@ describe('the next-step table', () => {
       for (const other of others)
         if (possible(other, overall))
           expect(() => findRow(judged({ ...other, metering: 'valve', overall }))).not.toThrow();
+  });
+
+  it('asks for the superheat of a valve that is judged without it, before any refrigerant is moved', () => {
+    for (const overall of ['above', 'below', 'within'] as const)
+      for (const other of combinations('subcooling', 'weather', 'leak', 'head', 'bulb', 'drier')) {
+        const facts = judged({ ...other, metering: 'valve', overall, superheat: 'unknown' });
+        const { step, notYet } = findRow(facts);
+        if (facts.weather === 'warm' && facts.drier !== 'drop' && facts.bulb !== 'wrong')
+          expect(step).toBe('read-suction-pair');
+        if (overall !== 'within') expect(notYet).toEqual(['move-no-refrigerant']);
+      }
   });
 
   it('names the combination that no row answers', () => {

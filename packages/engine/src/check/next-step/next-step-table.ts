@@ -92,6 +92,7 @@ const stops: readonly NextStepRow[] = [
 ];
 
 const conditions: readonly NextStepRow[] = [
+  { when: { lacking: ['setup'] }, step: 'state-the-setup', notYet: MOVE_NOTHING },
   { when: { condition: ['running-time'] }, step: 'run-longer', notYet: ['do-not-judge-yet'] },
   { when: { condition: ['outdoor-too-cold'] }, step: 'wait-for-warmer-weather', notYet: MOVE_NOTHING },
   { when: { condition: ['outdoor-too-hot'] }, step: 'wait-for-cooler-weather', notYet: MOVE_NOTHING },
@@ -216,6 +217,7 @@ function starvedOrFlooded(when: Conditions, step: NextStepCode, notYet: NextStep
 }
 
 const valve: readonly NextStepRow[] = [
+  { when: { superheat: ['unknown'] }, step: 'read-suction-pair', notYet: MOVE_NOTHING },
   ...starvedOrFlooded({ subcooling: ['below'], superheat: ['below'] }, 'check-bulb-and-valve', MOVE_NOTHING),
   ...lowCharge({ subcooling: ['below'] }),
   ...starvedOrFlooded({ subcooling: ['within'], superheat: ['above'] }, 'check-bulb-screen-drier', MOVE_NOTHING),
@@ -247,6 +249,7 @@ const within: readonly NextStepRow[] = [
     step: 'read-supply-or-airflow',
     notYet: [],
   },
+  { when: { overall: ['within'], metering: ['valve'], superheat: ['unknown'] }, step: 'read-suction-pair', notYet: [] },
   { when: { overall: ['within'] }, step: 'record', notYet: [] },
 ];
 

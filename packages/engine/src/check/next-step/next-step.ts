@@ -3,6 +3,7 @@ import { differenceToK } from '../../units';
 import type { CriterionResult, NextStep } from '../result';
 import type { Figure, NextStepCode, NextStepFigures, NextStepMessage } from '../codes';
 import { conditionsGate } from '../criteria/conditions';
+import { unstatedReason } from '../fit-for-test';
 import type { CheckInput } from '../input';
 import type { ReadingId } from '../readings';
 import type { Evidence } from './facts';
@@ -26,6 +27,12 @@ function withFigures(code: NextStepCode, evidence: Evidence): NextStepMessage {
   if (code === 'mend-before-test') {
     const items = unfit?.code === 'not-ready' ? unfit.figures.items : ({ kind: 'preflight', value: [] } as const);
     return { code, figures: { items } };
+  }
+  if (code === 'state-the-setup') {
+    const reason = unstatedReason(input);
+    const fields =
+      reason?.code === 'setup-not-stated' ? reason.figures.fields : ({ kind: 'setup', value: [] } as const);
+    return { code, figures: { fields } };
   }
   if (code === 'warm-the-house' || code === 'wait-for-warmer-weather') {
     return { code, figures: { least: limitOf(input, 'least') } };

@@ -15,6 +15,7 @@ export const CEC_2008_INSTALLER: Procedure = {
   id: 'cec-ra3.2-2008-installer',
   version: 1,
   packaged: false,
+  assumes: 'the-usual',
   decision: { type: 'simple', clearFrom: plainRule(0.8, '0.80', ['choice', CHOICE]) },
   superheat: {
     toleranceK: differenceRule(5, 'deltaF', ['read', RA_2008]),
@@ -30,7 +31,7 @@ export const CEC_2008_INSTALLER: Procedure = {
     clearFromK: differenceRule(8, 'deltaF', ['choice', CHOICE]),
     highAboveK: differenceRule(14, 'deltaF', ['choice', CHOICE]),
   },
-  temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', RA_2008]) },
+  temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', RA_2008]), judged: true },
   makersMethods: null,
   superheatWindow: {
     lowK: differenceRule(4, 'deltaF', ['read', RA_2008]),
@@ -69,7 +70,7 @@ export const CEC_2008_RATER: Procedure = {
   id: 'cec-ra3.2-2008-rater',
   superheat: { ...CEC_2008_INSTALLER.superheat, toleranceK: differenceRule(6, 'deltaF', ['read', RA_2008]) },
   subcooling: { ...CEC_2008_INSTALLER.subcooling, toleranceK: differenceRule(4, 'deltaF', ['memory', RA_2008]) },
-  temperatureSplit: { toleranceK: differenceRule(4, 'deltaF', ['read', RA_2008]) },
+  temperatureSplit: { toleranceK: differenceRule(4, 'deltaF', ['read', RA_2008]), judged: true },
   superheatWindow: {
     lowK: differenceRule(3, 'deltaF', ['read', RA_2008]),
     highK: differenceRule(26, 'deltaF', ['read', RA_2008]),

@@ -18,6 +18,7 @@ export const CEC_2019_INSTALLER: Procedure = {
   id: 'cec-ra3.2-2019-installer',
   version: 1,
   packaged: true,
+  assumes: 'the-usual',
   decision: { type: 'simple', clearFrom: plainRule(0.8, '0.80', ['choice', CHOICE]) },
   superheat: {
     toleranceK: differenceRule(5, 'deltaF', ['read', FORMS_2019]),
@@ -34,7 +35,7 @@ export const CEC_2019_INSTALLER: Procedure = {
     highAboveK: differenceRule(14, 'deltaF', ['choice', CHOICE]),
   },
   // the 2019 forms no longer offer the split as a test of airflow; it is shown with the tolerance of 2008
-  temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', RA_2008]) },
+  temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', RA_2008]), judged: true },
   makersMethods: null,
   superheatWindow: {
     lowK: differenceRule(4, 'deltaF', ['read', FORMS_2019]),

@@ -16,6 +16,7 @@ export const GENERAL_RULES: Procedure = {
   id: 'general-rules',
   version: 1,
   packaged: true,
+  assumes: 'the-usual',
   decision: { type: 'guarded', clearFrom: plainRule(0.8, '0.80', ['choice', CHOICE]) },
   superheat: {
     toleranceK: differenceRule(5, 'deltaF', ['read', `${CHART_A}; ${NEW_HOMES_CHECKLIST}`]),
@@ -31,7 +32,7 @@ export const GENERAL_RULES: Procedure = {
     clearFromK: differenceRule(8, 'deltaF', ['choice', CHOICE]),
     highAboveK: differenceRule(14, 'deltaF', ['choice', CHOICE]),
   },
-  temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', CEC_2008]) },
+  temperatureSplit: { toleranceK: differenceRule(3, 'deltaF', ['read', CEC_2008]), judged: true },
   makersMethods: MAKERS_TOLERANCES,
   superheatWindow: {
     lowK: differenceRule(4, 'deltaF', ['read', CEC_2008]),
