@@ -27,6 +27,7 @@ const ENGINE_LAYERS = [
   ['check'],
   ['field'],
   ['training'],
+  ['sources'],
 ];
 
 const layer = (name) => `engine-${name}`;
@@ -47,7 +48,7 @@ const elements = [
 ];
 
 const files = [
-  { category: 'engine-door', pattern: 'packages/engine/src/{index,training/index}.ts' },
+  { category: 'engine-door', pattern: 'packages/engine/src/{index,training/index,sources/index}.ts' },
   { category: 'engine-errors', pattern: 'packages/engine/src/{errors,result}.ts' },
   { category: 'wording-door', pattern: 'packages/wording/src/index.ts' },
   { category: 'contract-door', pattern: 'packages/contract/src/*.ts' },

@@ -9,6 +9,7 @@ import type { HealthDeps } from './features/health/health-routes';
 import { openApiRoutes } from './features/openapi/openapi-routes';
 import { psychrometricsRoutes } from './features/psychrometrics/psychrometrics-routes';
 import { refrigerantsRoutes } from './features/refrigerants/refrigerants-routes';
+import { sourcesRoutes } from './features/sources/sources-routes';
 import { signInRoutes } from './features/sign-in/sign-in-routes';
 import type { SignInDeps } from './features/sign-in/sign-in-service';
 import { weighInRoutes } from './features/weigh-in/weigh-in-routes';
@@ -39,6 +40,7 @@ const OPEN_ROUTES = [
   '/api/v1/weigh-in',
   '/api/v1/refrigerants',
   '/api/v1/psychrometrics',
+  '/api/v1/sources',
   '/api/v1/openapi.json',
   '/healthz',
   '/readyz',
@@ -62,6 +64,7 @@ export function createApp(deps: AppDeps): Express {
   app.use(weighInRoutes(limit));
   app.use(refrigerantsRoutes());
   app.use(psychrometricsRoutes());
+  app.use(sourcesRoutes());
   app.use(openApiRoutes());
   app.use(signInRoutes(deps));
   app.use('/api', notFound);

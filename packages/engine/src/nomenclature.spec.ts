@@ -8,6 +8,7 @@ import * as cyclePoints from './methods/cycle-points';
 import { SUPERHEAT_CHART_A } from './methods/data/superheat-chart-a';
 import * as separatingTests from './methods/separating-tests';
 import * as targets from './methods/targets';
+import * as sources from './sources/index';
 import * as training from './training/index';
 
 const text = readFileSync(new URL('../NOMENCLATURE.md', import.meta.url), 'utf8');
@@ -49,6 +50,11 @@ describe('NOMENCLATURE.md', () => {
   it('lists what the door of teaching exports', () => {
     const listed = named((section) => section.startsWith('Teaching'));
     expect([...listed].sort()).toEqual(Object.keys(training).sort());
+  });
+
+  it('lists what the door of the sources exports', () => {
+    const listed = named((section) => section.startsWith('Sources'));
+    expect([...listed].sort()).toEqual(Object.keys(sources).sort());
   });
 
   it('lists every reading and every derived quantity', () => {

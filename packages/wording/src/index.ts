@@ -52,3 +52,5 @@ export * from './english/airflow-page';
 export * from './english/moist-air';
 export * from './english/moist-air-page';
 export * from './english/weigh-in-page';
+export * from './english/sources';
+export * from './source-lines';

@@ -30,6 +30,7 @@ import { reasonTexts } from './english/reasons';
 import { separatingTestWords } from './english/separating-tests';
 import { safetyWords } from './english/safety';
 import { setupWords } from './english/setup';
+import { sourcesWords } from './english/sources';
 import { stopTexts } from './english/stops';
 import { structureFaultWords } from './english/structure-faults';
 import { weighInWords } from './english/weigh-in';
@@ -77,6 +78,7 @@ const english: Language = {
   makersData: makersDataWords,
   owner: ownerWords,
   targetComparison: targetComparisonWords,
+  sources: sourcesWords,
   workedExamples: workedExampleWords,
   workedExampleStories,
 };

@@ -38,6 +38,7 @@ import type { procedureWords } from './english/procedures';
 import type { readingWords } from './english/readings';
 import type { safetyWords } from './english/safety';
 import type { setupWords } from './english/setup';
+import type { sourcesWords } from './english/sources';
 import type { weighInWords } from './english/weigh-in';
 import type { weighInPageWords } from './english/weigh-in-page';
 import type { workedExampleStories } from './english/worked-example-stories';
@@ -135,6 +136,7 @@ export interface Language {
   readonly makersData: typeof makersDataWords;
   readonly owner: typeof ownerWords;
   readonly targetComparison: typeof targetComparisonWords;
+  readonly sources: typeof sourcesWords;
   readonly workedExamples: typeof workedExampleWords;
   readonly workedExampleStories: typeof workedExampleStories;
 }

@@ -20,6 +20,7 @@ import { readingWords } from './english/readings';
 import { separatingTestWords } from './english/separating-tests';
 import { safetyWords } from './english/safety';
 import { listWords, setupWords } from './english/setup';
+import { sourcesWords } from './english/sources';
 import { weighInWords } from './english/weigh-in';
 import { weighInPageWords } from './english/weigh-in-page';
 import { workedExampleStories } from './english/worked-example-stories';
@@ -63,6 +64,7 @@ const roots = Object.entries({
   workedExamples: workedExampleWords,
   workedExampleStories: workedExampleStories('F-psi'),
   moistAir: moistAirWords,
+  sources: sourcesWords,
 });
 
 describe('words of the page', () => {

@@ -19,6 +19,7 @@ export const ACCESS = {
   'GET /api/v1/refrigerants': 'open',
   'GET /api/v1/refrigerants/:id/saturation': 'open',
   'GET /api/v1/psychrometrics': 'open',
+  'GET /api/v1/sources': 'open',
   'GET /api/v1/openapi.json': 'open',
   'POST /api/v1/session': 'open',
   'GET /api/v1/session': 'signed-in',

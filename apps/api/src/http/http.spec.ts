@@ -16,6 +16,7 @@ const OPEN_PATHS = [
   '/api/v1/refrigerants',
   '/api/v1/refrigerants/R-410A/saturation?pressure=118&unit=psig',
   '/api/v1/psychrometrics?dryBulb=80&wetBulb=67&unit=degF',
+  '/api/v1/sources',
   '/api/v1/openapi.json',
   '/healthz',
   '/readyz',

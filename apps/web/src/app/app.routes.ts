@@ -25,5 +25,6 @@ export const routes: Routes = [
   },
   { path: 'airflow', loadChildren: async () => (await import('./airflow/airflow.routes')).airflowRoutes },
   { path: 'weigh-in', loadChildren: async () => (await import('./weigh-in/weigh-in.routes')).weighInRoutes },
+  { path: 'sources', loadChildren: async () => (await import('./sources/sources.routes')).sourcesRoutes },
   { path: '**', redirectTo: '' },
 ];

@@ -1,57 +1,72 @@
 /**
- * The ± of a reading as standard uncertainties: stated by the person, else what a digital instrument of the trade is usually good for
- * (limits; practice or choice, no published source), and the step it shows.
+ * The ± of a reading as standard uncertainties: stated by the person, else what a digital instrument of the trade is usually good for, and the step it
+ * shows.
  */
 import type { ErrorPart } from '../derivation/quantity';
+import { COMMON_PRACTICE, OUR_CHOICE } from '../methods/sourced-figure';
+import type { SourcedFigure } from '../methods/sourced-figure';
 import { differenceToK, flowToM3PerS, pressureDifferenceToPa } from '../units';
 import type { PlusMinus, ReadingInput } from './request';
 import type { ReadingId } from './readings';
 
-const AIR_LIMIT_K = differenceToK(1, 'deltaF');
-const PIPE_LIMIT_K = differenceToK(1, 'deltaF');
-const SUCTION_LIMIT_PA = pressureDifferenceToPa(2, 'psi');
-const LIQUID_LIMIT_PA = pressureDifferenceToPa(4, 'psi');
-const HUMIDITY_LIMIT = 0.03;
-const AIRFLOW_LIMIT_FRACTION = 0.07;
-const CURRENT_LIMIT_FRACTION = 0.03;
-
 /** Readings that enter a computation. The others are kept with the check. */
 export type UsedReadingId = Exclude<ReadingId, 'returnStaticPressure' | 'supplyStaticPressure' | 'lineVoltage'>;
 
-function assumedLimit(id: UsedReadingId, value: number): number {
-  switch (id) {
-    case 'returnDryBulb':
-    case 'returnWetBulb':
-    case 'returnWetBulbBefore':
-    case 'supplyDryBulb':
-    case 'supplyWetBulb':
-    case 'outdoorDryBulb':
-      return AIR_LIMIT_K;
-    case 'suctionLineTemperature':
-    case 'liquidLineTemperature':
-    case 'dischargeLineTemperature':
-    case 'drierInletTemperature':
-    case 'drierOutletTemperature':
-    case 'standingOutdoorCoilTemperature':
-    case 'standingIndoorCoilTemperature':
-      return PIPE_LIMIT_K;
-    case 'writtenEvaporatingTemperature':
-    case 'writtenCondensingTemperature':
-      return 0;
-    case 'suctionPressure':
-      return SUCTION_LIMIT_PA;
-    case 'liquidPressure':
-    case 'dischargePressure':
-    case 'standingPressure':
-      return LIQUID_LIMIT_PA;
-    case 'returnRelativeHumidity':
-    case 'supplyRelativeHumidity':
-      return HUMIDITY_LIMIT;
-    case 'airflow':
-      return AIRFLOW_LIMIT_FRACTION * Math.abs(value);
-    case 'compressorCurrent':
-      return CURRENT_LIMIT_FRACTION * value;
-  }
+export interface AssumedLimit extends SourcedFigure {
+  readonly of: 'reading' | 'absolute';
+}
+
+const limit = (value: number, of: AssumedLimit['of'], printed: string): AssumedLimit => ({
+  value,
+  of,
+  printed,
+  standing: 'choice',
+  source: OUR_CHOICE,
+});
+
+/** As instruments of the trade are usually sold. */
+const practice = (value: number, printed: string): AssumedLimit => ({
+  ...limit(value, 'absolute', printed),
+  standing: 'practice',
+  source: COMMON_PRACTICE,
+});
+
+const AIR = limit(differenceToK(1, 'deltaF'), 'absolute', '±1 °F');
+const PIPE = practice(differenceToK(1, 'deltaF'), '±1 °F');
+const LIQUID = practice(pressureDifferenceToPa(4, 'psi'), '±4 psi');
+const HUMIDITY = practice(0.03, '±3 points of percent');
+
+/** ± taken where the person states none, as a limit: a part of the reading, or in its SI unit. What a person wrote down as a saturation has none of its own. */
+export const ASSUMED_LIMITS: Readonly<
+  Record<Exclude<UsedReadingId, 'writtenEvaporatingTemperature' | 'writtenCondensingTemperature'>, AssumedLimit>
+> = {
+  returnDryBulb: AIR,
+  returnWetBulb: AIR,
+  returnWetBulbBefore: AIR,
+  supplyDryBulb: AIR,
+  supplyWetBulb: AIR,
+  outdoorDryBulb: AIR,
+  suctionLineTemperature: PIPE,
+  liquidLineTemperature: PIPE,
+  dischargeLineTemperature: PIPE,
+  drierInletTemperature: PIPE,
+  drierOutletTemperature: PIPE,
+  standingOutdoorCoilTemperature: PIPE,
+  standingIndoorCoilTemperature: PIPE,
+  suctionPressure: limit(pressureDifferenceToPa(2, 'psi'), 'absolute', '±2 psi'),
+  liquidPressure: LIQUID,
+  dischargePressure: LIQUID,
+  standingPressure: LIQUID,
+  returnRelativeHumidity: HUMIDITY,
+  supplyRelativeHumidity: HUMIDITY,
+  airflow: limit(0.07, 'reading', '±7 %'),
+  compressorCurrent: limit(0.03, 'reading', '±3 %'),
+};
+
+function assumedLimit(id: UsedReadingId, reading: number): number {
+  if (id === 'writtenEvaporatingTemperature' || id === 'writtenCondensingTemperature') return 0;
+  const { value, of } = ASSUMED_LIMITS[id];
+  return of === 'reading' ? value * Math.abs(reading) : value;
 }
 
 /** Half-width of a stated ± in the SI unit of the reading. `%` of an airflow is relative to it, of a humidity absolute. */

@@ -19,6 +19,8 @@ export interface Rule {
   readonly takenFrom?: 'general-rules';
 }
 
+type Basis = readonly [standing: Standing, source: string];
+
 /** How a deviation becomes a finding (JCGM 106:2012, 8.2 and 8.3). */
 export interface Decision {
   /** `simple`: by the rule alone. `guarded`: clear only at a probability of `clearFrom` or more; between that and its complement too close to call. */
@@ -53,6 +55,8 @@ export interface AirflowRules {
   readonly leastDesignFraction: Rule | null;
   /** Whether the limit itself is enough. */
   readonly limitPasses: boolean;
+  /** What the two that follow rest on. */
+  readonly evidenceBasis: Basis;
   /** Which evidence shuts the charge criteria. */
   readonly gates: readonly AirflowEvidence[];
   /** Whether the temperature split is evidence at all. */
@@ -128,8 +132,6 @@ export interface Procedure {
 }
 
 export type SuperheatChartId = 'makers-chart-a' | 'finer-table';
-
-type Basis = readonly [standing: Standing, source: string];
 
 export const differenceRule = (value: number, unit: Exclude<DifferenceUnit, 'K'>, basis: Basis): Rule => ({
   value: differenceToK(value, unit),

@@ -1,33 +1,43 @@
-/** What ends the check at once: the compressor, the coil or the person is at risk. Figures: see each; `choice` is ours, open to better evidence. */
+/** What ends the check at once: the compressor, the coil or the person is at risk. */
 import type { Quantity } from '../derivation/quantity';
 import { bareValue, expandedUncertainty, isKnown } from '../derivation/quantity';
+import { SUPERHEAT_CHART_A } from '../methods/data/superheat-chart-a';
+import { COMMON_PRACTICE, OUR_CHOICE } from '../methods/sourced-figure';
 import type { RefrigerantId } from '../refrigerants/catalogue';
-import { differenceToK, pressureDifferenceToPa, temperatureToK } from '../units';
+import { pressureDifferenceToPa } from '../units';
 import type { Caution, Stop } from './codes';
 import { LIMIT_SLACK_K } from './conformance';
 import type { DerivedQuantities } from './derived-quantities';
 import type { CheckInput } from './input';
 import { isFixedOrifice } from './input';
+import { differenceRule, plainRule, temperatureRule } from './procedure';
+import type { Rule } from './procedure';
 
-/** Mean evaporating temperature at which frost is certain to grow (choice), and at which it may (water's freezing point). */
-const FREEZING_STOP_K = temperatureToK(28, 'degF');
-const FREEZING_K = temperatureToK(32, 'degF');
-/** Fall of the suction pressure from one set of readings to the next that is more than its needle's unrest (choice). */
-const FALL_PA = pressureDifferenceToPa(2, 'psi');
-/** Least superheat at the suction port of a fixed orifice (makers' chart, copy A), whatever the procedure. */
-const FLOOR_K = differenceToK(5, 'deltaF');
-/** Condensing over outdoor air (choice). */
-const MOST_CONDENSING_OVER_AIR_K = differenceToK(45, 'deltaF');
-/** Discharge line (common practice, no source). */
-const MOST_DISCHARGE_K = temperatureToK(225, 'degF');
+const gaugePressure = (psig: number): Rule =>
+  plainRule(pressureDifferenceToPa(psig, 'psi'), `${psig} psig`, ['choice', OUR_CHOICE]);
 
-/** High-side gauge pressure without a limit of the unit's own (choice). */
-const MOST_HIGH_SIDE_GAUGE_PA: Readonly<Partial<Record<RefrigerantId, number>>> = {
-  'R-410A': pressureDifferenceToPa(560, 'psi'),
-  'R-32': pressureDifferenceToPa(560, 'psi'),
-  'R-454B': pressureDifferenceToPa(560, 'psi'),
-  'R-22': pressureDifferenceToPa(370, 'psi'),
-  'R-407C': pressureDifferenceToPa(370, 'psi'),
+const HIGH_SIDE = gaugePressure(560);
+const HIGH_SIDE_OLDER = gaugePressure(370);
+
+export const STOP_FIGURES = {
+  /** Mean evaporating temperature at which frost is certain to grow, and at which it may. */
+  freezingStopK: temperatureRule(28, 'degF', ['choice', OUR_CHOICE]),
+  freezingK: temperatureRule(32, 'degF', ['practice', 'Freezing point of water']),
+  /** Fall of the suction pressure from one set of readings to the next that is more than its needle's unrest. */
+  fallPa: plainRule(pressureDifferenceToPa(2, 'psi'), '2 psi', ['choice', OUR_CHOICE]),
+  /** Least superheat at the suction port of a fixed orifice, whatever the procedure. */
+  floorK: differenceRule(5, 'deltaF', ['read', SUPERHEAT_CHART_A.source]),
+  mostCondensingOverAirK: differenceRule(45, 'deltaF', ['choice', OUR_CHOICE]),
+  mostDischargeK: temperatureRule(225, 'degF', ['practice', COMMON_PRACTICE]),
+} as const;
+
+/** High-side gauge pressure without a limit of the unit's own. */
+export const MOST_HIGH_SIDE_GAUGE_PA: Readonly<Partial<Record<RefrigerantId, Rule>>> = {
+  'R-410A': HIGH_SIDE,
+  'R-32': HIGH_SIDE,
+  'R-454B': HIGH_SIDE,
+  'R-22': HIGH_SIDE_OLDER,
+  'R-407C': HIGH_SIDE_OLDER,
 };
 
 /** Metered at the coil at full speed: elsewhere the usual figures of the cycle do not hold. */
@@ -53,7 +63,7 @@ function liquidReturn(input: CheckInput, { superheat }: DerivedQuantities): Stop
   const uncertainty = expandedUncertainty(superheat);
   // far below zero the readings contradict each other: `saturation-impossible` says so
   if (superheat.value < -uncertainty) return null;
-  const floor = isFixedOrifice(input.setup) ? FLOOR_K : 0;
+  const floor = isFixedOrifice(input.setup) ? STOP_FIGURES.floorK.value : 0;
   if (superheat.value - uncertainty > 0 && superheat.value >= floor - LIMIT_SLACK_K) return null;
   return {
     code: 'liquid-return',
@@ -73,14 +83,14 @@ function freezing(input: CheckInput, { meanEvaporatingTemperature }: DerivedQuan
   const mean = coolingCoil(input, meanEvaporatingTemperature);
   if (mean === null) return null;
   const worsening = input.visit.iceSeen || isFalling(input);
-  if (mean > FREEZING_STOP_K && !(mean <= FREEZING_K && worsening)) return null;
+  if (mean > STOP_FIGURES.freezingStopK.value && !(mean <= STOP_FIGURES.freezingK.value && worsening)) return null;
   return { code: 'freezing', figures: { evaporating: { kind: 'temperatureK', value: mean } } };
 }
 
 /** The coil is at the freezing point but neither iced nor getting colder. */
 export function freezeRisk(input: CheckInput, derived: DerivedQuantities): Caution | null {
   const mean = coolingCoil(input, derived.meanEvaporatingTemperature);
-  if (mean === null || mean > FREEZING_K || freezing(input, derived) !== null) return null;
+  if (mean === null || mean > STOP_FIGURES.freezingK.value || freezing(input, derived) !== null) return null;
   return { code: 'freeze-risk', figures: { evaporating: { kind: 'temperatureK', value: mean } } };
 }
 
@@ -91,7 +101,7 @@ const coolingCoil = ({ setup, visit }: CheckInput, mean: Quantity): number | nul
 function isFalling({ visit, readings }: CheckInput): boolean {
   const before = visit.earlier?.readings.suctionPressure?.quantity;
   const now = readings.suctionPressure?.quantity;
-  return before !== undefined && now !== undefined && before.value - now.value > FALL_PA;
+  return before !== undefined && now !== undefined && before.value - now.value > STOP_FIGURES.fallPa.value;
 }
 
 function highPressure(input: CheckInput, derived: DerivedQuantities): Stop | null {
@@ -100,8 +110,8 @@ function highPressure(input: CheckInput, derived: DerivedQuantities): Stop | nul
   const highest = Math.max(...pressures);
   const { condensingBubbleTemperature, condensingOverAmbient } = derived;
   const overAirK = bareValue(condensingOverAmbient) ?? 0;
-  const overAir = inFullCooling(input) && !visit.headRaised && overAirK > MOST_CONDENSING_OVER_AIR_K;
-  const generalLimit = inFullCooling(input) ? MOST_HIGH_SIDE_GAUGE_PA[setup.refrigerant] : undefined;
+  const overAir = inFullCooling(input) && !visit.headRaised && overAirK > STOP_FIGURES.mostCondensingOverAirK.value;
+  const generalLimit = inFullCooling(input) ? MOST_HIGH_SIDE_GAUGE_PA[setup.refrigerant]?.value : undefined;
   const limit = setup.maxHighPressurePa ?? (generalLimit && generalLimit + setup.atmosphere.value);
   if (!overAir && !(limit !== undefined && highest > limit)) return null;
   const condensingK = bareValue(condensingBubbleTemperature);
@@ -115,6 +125,7 @@ function highPressure(input: CheckInput, derived: DerivedQuantities): Stop | nul
 /** In cooling and in heating alike; an inverter or a part stage has its own figure. */
 function hotDischarge(input: CheckInput): Stop | null {
   const discharge = input.readings.dischargeLineTemperature?.quantity;
-  if (discharge === undefined || !atFullStage(input) || discharge.value <= MOST_DISCHARGE_K) return null;
+  if (discharge === undefined || !atFullStage(input) || discharge.value <= STOP_FIGURES.mostDischargeK.value)
+    return null;
   return { code: 'hot-discharge', figures: { discharge: { kind: 'temperatureK', value: discharge.value } } };
 }

@@ -4,7 +4,7 @@ import { ELEVATION_LIMITS, standardAtmospherePressurePa } from '../psychrometric
 import { isGaugeUnit, lengthToM, pressureAsReadToPa, pressureToPa, temperatureToK } from '../units';
 import type { LengthUnit, PressureUnit, TemperatureUnit } from '../units';
 import type { AtmosphereInput } from './atmosphere';
-import { MOST_WEATHER_PA } from './atmosphere';
+import { ATMOSPHERE_FIGURES } from './atmosphere';
 import type { FaultMessage } from './codes';
 import type { Amount, ReadingInput } from './request';
 import type { Dimension } from './readings';
@@ -134,7 +134,7 @@ export class Faults<More = never> {
     if (elevationM === null || stationPa === null) return false;
     if (elevationM === undefined || stationPa === undefined) return true;
     const expected = standardAtmospherePressurePa(elevationM);
-    if (Math.abs(stationPa - expected) <= MOST_WEATHER_PA) return true;
+    if (Math.abs(stationPa - expected) <= ATMOSPHERE_FIGURES.mostWeatherPa.value) return true;
     const figures = {
       stated: { kind: 'pressurePa', value: stationPa },
       expected: { kind: 'pressurePa', value: expected },

@@ -1,8 +1,4 @@
-/**
- * Which way each fault moves what is read, against the healthy system: the fault table of the trade. Directions are common practice; they accord with the
- * rule tables of Rossi & Braun (HVAC&R Research 3(1), 1997), Breuker & Braun (HVAC&R Research 4(3), 1998) and Kim, Yoon, Payne & Domanski (NIST SP 1087,
- * 2008), whose existence and method were read and whose tables were not opened: from memory. The subcooling of a restriction was read in a trade article.
- */
+/** Which way each fault moves what is read, against the healthy system: the fault table of the trade. */
 import type { Cause } from './diagnosis-codes';
 
 export type Change = 'up' | 'little' | 'down';
@@ -20,10 +16,17 @@ export const COLUMNS = [
 ] as const;
 export type Column = (typeof COLUMNS)[number];
 
+/** By the standing of a cell. */
+export const FAULT_PATTERN_SOURCES = {
+  practice:
+    'Common practice; accords with the rule tables of Rossi & Braun (HVAC&R Research 3(1), 1997), Breuker & Braun (HVAC&R Research 4(3), 1998) and Kim, Yoon, Payne & Domanski (NIST SP 1087, 2008), whose existence and method were read and whose tables were not opened',
+  read: 'Trade article on restrictions',
+} as const;
+
 export interface Cell {
   /** Two for "little or …", for "slightly …", and for what a valve holds until it is wide open. */
   readonly changes: readonly Change[];
-  readonly standing: 'practice' | 'read';
+  readonly standing: keyof typeof FAULT_PATTERN_SOURCES;
   /** Without this sign the fault is not there: a reading clearly on its target contradicts it. */
   readonly leading: boolean;
 }

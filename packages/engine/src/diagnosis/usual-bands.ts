@@ -44,14 +44,14 @@ export const returnOverEvaporatingBand = (airflowPerCapacity: number | null): Us
       : difference(45, 'read', 'About 40 °F at 350 cfm/ton, ± 5: trade teaching page'),
 });
 
-/** Made when systems condensed nearer to the air. */
-const NEWER: readonly RefrigerantId[] = ['R-410A', 'R-32', 'R-454B'];
+/** Of systems made to condense nearer to the air. */
+export const NEWER_REFRIGERANTS: readonly RefrigerantId[] = ['R-410A', 'R-32', 'R-454B'];
 /** Drop through the outdoor coil, which a discharge port has on top. */
 const COIL_DROP_K = differenceToK(3, 'deltaF');
 
 /** Condensing over outdoor air: 15 to 25 °F newer, about 30 older. The low end allows for large outdoor coils. */
 export function condensingOverAirBand(refrigerant: RefrigerantId, port: 'liquid' | 'discharge'): UsualBand {
-  const high = difference(NEWER.includes(refrigerant) ? 25 : 30, 'practice', PRACTICE);
+  const high = difference(NEWER_REFRIGERANTS.includes(refrigerant) ? 25 : 30, 'practice', PRACTICE);
   return {
     low: difference(10, 'choice', CHOICE),
     high: port === 'liquid' ? high : { ...high, value: high.value + COIL_DROP_K, standing: 'choice', source: CHOICE },

@@ -5,11 +5,20 @@ import { relativeHumidityFromHumidityRatio } from '../psychrometrics/humidity-ra
 import { enthalpyJPerKg } from '../psychrometrics/moist-air';
 import { humidityRatioFromWetBulb, wetBulbKFromRelativeHumidity } from '../psychrometrics/wet-bulb';
 import { differenceToK } from '../units';
+import { COMMON_PRACTICE } from './sourced-figure';
+import type { SourcedFigure } from './sourced-figure';
 
-/** Sampling a plenum at one point: ±1.5 °F as a limit; practice, no source. */
+/** Sampling a plenum at one point, ±, as a limit. */
+export const SINGLE_POINT_LIMIT: SourcedFigure = {
+  value: differenceToK(1.5, 'deltaF'),
+  printed: '±1.5 °F',
+  standing: 'practice',
+  source: COMMON_PRACTICE,
+};
+
 export const SINGLE_POINT_SAMPLING: ErrorPart = {
   key: 'placement:split',
-  u: differenceToK(1.5, 'deltaF') / Math.sqrt(3),
+  u: SINGLE_POINT_LIMIT.value / Math.sqrt(3),
   shape: 'rectangular',
 };
 

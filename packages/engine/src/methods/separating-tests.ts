@@ -1,7 +1,4 @@
-/**
- * Tests that tell apart faults with like readings. Figures: 3 °F over a drier and 3 °F of standing pressure are common practice, no source; how sure a
- * finding must be is our choice.
- */
+/** Tests that tell apart faults with like readings. */
 import { derive } from '../derivation/derive';
 import type { Known, Quantity } from '../derivation/quantity';
 import { expandedUncertainty, isKnown } from '../derivation/quantity';
@@ -11,17 +8,31 @@ import type { RefrigerantId } from '../refrigerants/catalogue';
 import { differenceToK } from '../units';
 import type { SaturationFormula } from './cycle-points';
 import { condensingBubbleTemperature, saturationModelError } from './cycle-points';
+import { COMMON_PRACTICE, OUR_CHOICE } from './sourced-figure';
+import type { SourcedFigure } from './sourced-figure';
 
-/** Probability from which something is called clear (choice, as in the general rules). */
+/** Probability from which something is called clear. */
 export const CLEAR_FROM = 0.8;
-/** Drop over a drier, strainer or piece of line that is a restriction. */
-export const MOST_DRIER_DROP_K = differenceToK(3, 'deltaF');
-/** Standing pressure over saturation that is air, as a temperature. */
-export const MOST_STANDING_EXCESS_K = differenceToK(3, 'deltaF');
-/** Coils within this of each other hold one saturation pressure. */
-const ALIKE_K = differenceToK(3, 'deltaF');
-/** Two wet bulbs of one visit within this of each other count as their mean. */
-const SAME_WET_BULB_K = differenceToK(1, 'deltaF');
+
+const differenceF = (value: number): SourcedFigure => ({
+  value: differenceToK(value, 'deltaF'),
+  printed: `${value} °F`,
+  standing: 'practice',
+  source: COMMON_PRACTICE,
+});
+
+export const TEST_FIGURES = {
+  clearFrom: { value: CLEAR_FROM, printed: `${CLEAR_FROM}`, standing: 'choice', source: OUR_CHOICE },
+  /** Drop over a drier, strainer or piece of line that is a restriction. */
+  mostDrierDropK: differenceF(3),
+  /** Standing pressure over saturation that is air, as a temperature. */
+  mostStandingExcessK: differenceF(3),
+  /** Coils within this of each other hold one saturation pressure. */
+  coilsAlikeK: differenceF(3),
+  /** Two wet bulbs of one visit within this of each other count as their mean. */
+  sameWetBulbK: differenceF(1),
+} as const satisfies Readonly<Record<string, SourcedFigure>>;
+
 /** Rounding of the conversions. */
 const SLACK_K = 1e-9;
 
@@ -71,7 +82,7 @@ export interface DrierTest {
 export function testDrier(from: { readonly inletK: Quantity; readonly outletK: Quantity }): DrierTest {
   const drop = derive(drierDrop, from);
   if (!isKnown(drop)) return { finding: 'unmeasured', drop };
-  const above = probabilityBetween(drop.value, drop.u, MOST_DRIER_DROP_K + SLACK_K, Infinity);
+  const above = probabilityBetween(drop.value, drop.u, TEST_FIGURES.mostDrierDropK.value + SLACK_K, Infinity);
   if (above >= CLEAR_FROM) return { finding: 'drop', drop };
   return { finding: above <= 1 - CLEAR_FROM ? 'small' : 'unclear', drop };
 }
@@ -105,24 +116,32 @@ export function testAir(system: StandingSystem): AirTest {
   const coilK = colder && !liquidShutIn ? indoorCoilK : outdoorCoilK;
   const excess = derive(standingExcess, { standingK, coilK });
   if (excess.state === 'missing') return { finding: 'untested', excess };
-  const alike = areWithin(outdoorCoilK, indoorCoilK, ALIKE_K);
+  const alike = areWithin(outdoorCoilK, indoorCoilK, TEST_FIGURES.coilsAlikeK.value);
   if (!liquidShutIn && !alike) return { finding: 'not-valid', excess };
   return { finding: isKnown(excess) ? judgeExcess(excess) : 'unclear', excess };
 }
 
 function judgeExcess(excess: Known): AirFinding {
   const { value, u } = excess;
-  if (Math.abs(value) > MOST_STANDING_EXCESS_K + SLACK_K && Math.abs(value) > expandedUncertainty(excess)) {
+  if (
+    Math.abs(value) > TEST_FIGURES.mostStandingExcessK.value + SLACK_K &&
+    Math.abs(value) > expandedUncertainty(excess)
+  ) {
     return value > 0 ? 'found' : 'below';
   }
-  const none = probabilityBetween(value, u, -MOST_STANDING_EXCESS_K, MOST_STANDING_EXCESS_K);
+  const none = probabilityBetween(
+    value,
+    u,
+    -TEST_FIGURES.mostStandingExcessK.value,
+    TEST_FIGURES.mostStandingExcessK.value,
+  );
   return none >= CLEAR_FROM ? 'none' : 'unclear';
 }
 
 /** Two wet bulbs, before and after the readings outdoors: their mean while they agree, else none. The drift between them adds to its uncertainty. */
 export function bracketWetBulb(from: { readonly beforeK: Known; readonly afterK: Known }): Quantity | null {
   const { beforeK, afterK } = from;
-  if (!areWithin(beforeK, afterK, SAME_WET_BULB_K)) return null;
+  if (!areWithin(beforeK, afterK, TEST_FIGURES.sameWetBulbK.value)) return null;
   const u = Math.abs(afterK.value - beforeK.value) / 2 / Math.sqrt(3);
   return derive(bracketedWetBulb, from, [{ key: 'drift:returnWetBulb', u, shape: 'rectangular' }]);
 }

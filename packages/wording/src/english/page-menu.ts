@@ -7,4 +7,5 @@ export const pageMenuWords = {
   weighIn: { name: 'Weigh in', does: 'The charge by the scale, line set and vacuum' },
   properties: { name: 'Properties', does: 'Saturation of a refrigerant, state of moist air' },
   examples: { name: 'Worked examples', does: 'To learn from, to print, each with its key' },
+  sources: { name: 'Sources', does: 'Every figure, table and formula: where it is from' },
 };

@@ -9,6 +9,7 @@ import {
   saturationByTemperature,
   saturationParameters,
 } from '@chargewright/contract/refrigerant';
+import { sourcesAnswer } from '@chargewright/contract/sources';
 import { passwordChange, sessionList, signedIn, signInRequest } from '@chargewright/contract/sign-in';
 import { weighInAnswer, weighInRequest } from '@chargewright/contract/weigh-in';
 import * as z from 'zod';
@@ -144,6 +145,13 @@ const PATHS: Readonly<Record<string, JsonObject>> = {
         ...answer('Every property; inch-pound units for °F, else SI.', reference(psychrometricsAnswer)),
         ...problems(422, 429),
       },
+    },
+  },
+  '/api/v1/sources': {
+    get: {
+      operationId: 'listSources',
+      summary: 'Every figure, table and formula with its source, edition, standing and where it is used.',
+      responses: { ...answer('All of them, figures in SI units.', reference(sourcesAnswer)), ...problems(429) },
     },
   },
   '/api/v1/openapi.json': {

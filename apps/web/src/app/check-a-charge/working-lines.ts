@@ -1,11 +1,12 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { RouterLink } from '@angular/router';
 import { checkPageWords, type DerivationLine } from '@chargewright/wording';
 import { MathText } from './math-text';
 
 /** A derivation in the order a person would write it on paper. */
 @Component({
   selector: 'app-working-lines',
-  imports: [MathText],
+  imports: [MathText, RouterLink],
   template: `
     @for (line of lines(); track line.id) {
       <dl>
@@ -18,7 +19,9 @@ import { MathText } from './math-text';
       <p>{{ words.empty }}</p>
     }
     @if (sources()) {
-      <p class="sources">{{ resultWords.sources }}: {{ sources() }}</p>
+      <p class="sources">
+        <a routerLink="/sources">{{ resultWords.sources }}</a>: {{ sources() }}
+      </p>
     }
   `,
   styleUrl: './math-lines.scss',

@@ -19,5 +19,6 @@ export class PageMenu {
     { path: '/weigh-in', ...pageMenuWords.weighIn },
     { path: '/properties', ...pageMenuWords.properties },
     { path: '/examples', ...pageMenuWords.examples },
+    { path: '/sources', ...pageMenuWords.sources },
   ] as const;
 }

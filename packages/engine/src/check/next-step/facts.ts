@@ -1,16 +1,17 @@
 /** What the next-step table looks at: a handful of closed facts, each with a few values, drawn from the finished criteria. */
 import { isKnown } from '../../derivation/quantity';
 import { probabilityBetween } from '../../numerics/normal-distribution';
-import type { RefrigerantId } from '../../refrigerants/catalogue';
-import { differenceToK } from '../../units';
 import { isCoolWeather, lowHead } from '../cautions';
 import type { Caution, OverallFinding, Reason, ReasonCode, Stop, StopCode } from '../codes';
 import { conditionsGate, recordGate } from '../criteria/conditions';
 import { airflowGate } from '../criteria/air';
+import { differenceRule, plainRule } from '../procedure';
 import type { AirflowEvidence, SplitEvidence } from '../procedure';
 import { guidingWindow } from '../criteria/charge';
 import type { ChargeTarget } from '../criteria/charge-target';
+import { NEWER_REFRIGERANTS } from '../../diagnosis/usual-bands';
 import { MAKERS_CHART_FACTS } from '../../methods/makers-chart/kinds';
+import { OUR_CHOICE } from '../../methods/sourced-figure';
 import type { ChargeMethod } from '../charge-method';
 import { LIMIT_SLACK_K } from '../conformance';
 import type { DerivedQuantities } from '../derived-quantities';
@@ -90,19 +91,18 @@ export interface Evidence {
   readonly overall: OverallFinding;
 }
 
-/** Up to this target even a right charge runs near the floor (judged from copy A's ±5 and floor 5). */
-const NEAR_FLOOR_TARGET_K = differenceToK(7, 'deltaF');
-/** Steps of one visit add up to at most this part of the factory charge before the charge is recovered and weighed (choice). */
-const MOST_ADDED_FRACTION = 0.1;
+export const NEXT_STEP_FIGURES = {
+  /** Up to this target even a right charge runs near the floor. */
+  nearFloorTargetK: differenceRule(7, 'deltaF', ['choice', "Our choice, by the ± and the floor of the makers' chart"]),
+  /** Steps of one visit add up to at most this part of the factory charge before the charge is recovered and weighed. */
+  mostAddedFraction: plainRule(0.1, '10 %', ['choice', OUR_CHOICE]),
+  /** Condensing over outdoor air that suggests air in the system when subcooling is high: of newer systems, and of others. */
+  highHeadK: differenceRule(20, 'deltaF', ['choice', OUR_CHOICE]),
+  highHeadOlderK: differenceRule(30, 'deltaF', ['choice', OUR_CHOICE]),
+} as const;
+
 /** Rounding of the conversions; far below any scale. */
 const SLACK_KG = 1e-9;
-/** Condensing over outdoor air that suggests air in the system when subcooling is high (choice). */
-const HIGH_HEAD_K: Readonly<Partial<Record<RefrigerantId, number>>> = {
-  'R-410A': differenceToK(20, 'deltaF'),
-  'R-32': differenceToK(20, 'deltaF'),
-  'R-454B': differenceToK(20, 'deltaF'),
-};
-const HIGH_HEAD_OTHERS_K = differenceToK(30, 'deltaF');
 
 export function gatherFacts(evidence: Evidence): Facts {
   const { input, derived, criteria, overall, airflow } = evidence;
@@ -177,7 +177,8 @@ function superheatTargetFact({ method, target, criteria }: Evidence): Facts['sup
   const reason = criteria.find(({ criterion }) => criterion === 'superheat')?.reason?.code;
   if (target.quantity.state === 'refused' && target.source !== 'entered') return 'none-here';
   if (reason === 'no-target-here' || reason === 'target-may-not-exist') return 'none-here';
-  const nearFloor = isKnown(target.quantity) && target.quantity.value <= NEAR_FLOOR_TARGET_K + LIMIT_SLACK_K;
+  const nearFloor =
+    isKnown(target.quantity) && target.quantity.value <= NEXT_STEP_FIGURES.nearFloorTargetK.value + LIMIT_SLACK_K;
   return nearFloor ? 'near-floor' : 'clear';
 }
 
@@ -278,7 +279,8 @@ function leakFact({ setup, visit }: CheckInput): Facts['leak'] {
   if (visit.leakSearch !== 'none-found') return 'search';
   const { factoryChargeKg } = setup;
   const used =
-    factoryChargeKg !== undefined && visit.addedThisVisitKg >= MOST_ADDED_FRACTION * factoryChargeKg - SLACK_KG;
+    factoryChargeKg !== undefined &&
+    visit.addedThisVisitKg >= NEXT_STEP_FIGURES.mostAddedFraction.value * factoryChargeKg - SLACK_KG;
   return used ? 'recover' : 'add';
 }
 
@@ -290,7 +292,8 @@ function weatherFact(input: CheckInput): Facts['weather'] {
 }
 
 function isHeadHigh({ setup }: CheckInput, { condensingOverAmbient }: DerivedQuantities): boolean {
-  const limit = HIGH_HEAD_K[setup.refrigerant] ?? HIGH_HEAD_OTHERS_K;
+  const { highHeadK, highHeadOlderK } = NEXT_STEP_FIGURES;
+  const limit = (NEWER_REFRIGERANTS.includes(setup.refrigerant) ? highHeadK : highHeadOlderK).value;
   return isKnown(condensingOverAmbient) && condensingOverAmbient.value > limit;
 }
 

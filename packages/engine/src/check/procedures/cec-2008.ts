@@ -44,6 +44,7 @@ export const CEC_2008_INSTALLER: Procedure = {
     leastOfHighVelocityM3PerSPerW: null,
     leastDesignFraction: null,
     limitPasses: false,
+    evidenceBasis: ['read', RA_2008],
     gates: ['measured-low', 'split-above', 'nothing'],
     splitCounts: true,
     splitCautions: ['split-below'],

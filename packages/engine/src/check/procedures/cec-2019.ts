@@ -48,6 +48,7 @@ export const CEC_2019_INSTALLER: Procedure = {
     leastOfHighVelocityM3PerSPerW: cfmPerTon(250),
     leastDesignFraction: null,
     limitPasses: true,
+    evidenceBasis: ['read', FORMS_2019],
     gates: ['measured-low', 'nothing'],
     splitCounts: false,
     splitCautions: ['split-above', 'split-below'],

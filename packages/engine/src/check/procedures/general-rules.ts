@@ -45,6 +45,7 @@ export const GENERAL_RULES: Procedure = {
     leastOfHighVelocityM3PerSPerW: null,
     leastDesignFraction: plainRule(0.85, '−15 % of design', ['memory', 'ANSI/ACCA 5 QI']),
     limitPasses: true,
+    evidenceBasis: ['choice', CHOICE],
     gates: ['measured-low', 'split-above'],
     splitCounts: true,
     splitCautions: [],

@@ -4,10 +4,11 @@ import type { RefrigerantId } from '../generated/saturation-curves';
 export type SafetyClass = 'A1' | 'A2L' | 'A2' | 'A3' | 'B1' | 'B2L';
 
 /**
- * Standing of every class below: written from memory of ANSI/ASHRAE Standard 34, not laid beside its tables.
+ * Standing of every class below: not laid beside the tables of the standard.
  * Complete on purpose: a new refrigerant does not compile without a class, so none becomes A1 by omission.
  */
 export const SAFETY_CLASS_STANDING = 'memory';
+export const SAFETY_CLASS_SOURCE = 'ANSI/ASHRAE Standard 34, from memory';
 
 export const SAFETY_CLASSES: Readonly<Record<RefrigerantId, SafetyClass>> = {
   'R-11': 'A1',

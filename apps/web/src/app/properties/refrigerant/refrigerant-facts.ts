@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { RouterLink } from '@angular/router';
 import {
   attempt,
   dewPressurePa,
@@ -18,7 +19,7 @@ const GLIDE_AT_K = temperatureToK(40, 'degF');
 /** What a refrigerant is, and how well it is known. */
 @Component({
   selector: 'app-refrigerant-facts',
-
+  imports: [RouterLink],
   template: `
     <h2>{{ words.title }}</h2>
     <dl>
@@ -27,6 +28,7 @@ const GLIDE_AT_K = temperatureToK(40, 'degF');
         <dd [class.doubt]="fact.doubt">{{ fact.value }}</dd>
       }
     </dl>
+    <a routerLink="/sources" [queryParams]="{ search: refrigerant() }">{{ words.sources }}</a>
   `,
   styles: `
     :host {
