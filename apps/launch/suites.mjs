@@ -35,7 +35,7 @@ export const allSuites = () => [
   vitest('launch', 60),
   vitest('contract', 60),
   { ...whole('build', 120, node('apps/launch/build-app.mjs')), alone: true },
-  { ...vitest('browser', 660), needsChromium: true, alone: true },
+  { ...vitest('browser', 780), needsChromium: true, alone: true },
 ];
 
 /** The suites with these names, in their order; all without names. The browser's tests run on the built app. */
