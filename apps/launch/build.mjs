@@ -3,7 +3,7 @@ import path from 'node:path';
 import { hashOfFiles, listFiles } from './hash.mjs';
 import { withLock } from './lock.mjs';
 import { ROOT, workFolder } from './paths.mjs';
-import { mustRun, toolEnv } from './run.mjs';
+import { mustRun } from './run.mjs';
 import { step } from './say.mjs';
 import { stampIs, writeStamp } from './stamp.mjs';
 
@@ -29,10 +29,7 @@ export const sourceHash = (root = ROOT) => hashOfFiles(root, listFiles(root, SOU
 async function buildWeb(root, folder) {
   const ng = path.join(root, 'node_modules/@angular/cli/bin/ng.js');
   const output = path.relative(root, path.join(folder, 'ng'));
-  await mustRun('build-web', process.execPath, [ng, 'build', '--output-path', output], {
-    root,
-    env: toolEnv({ NG_BUILD_OPTIMIZE_CHUNKS: '1' }),
-  });
+  await mustRun('build-web', process.execPath, [ng, 'build', '--output-path', output], { root });
   // Given on the command line, the output path loses angular.json's `browser: ""`, and the app lies one folder deeper.
   renameSync(path.join(folder, 'ng/browser'), path.join(folder, 'web'));
   rmSync(path.join(folder, 'ng'), { recursive: true });
