@@ -2,14 +2,13 @@
  * Who may ask what: one table of every route of the API, in front of all of them. A route that is not in it is not reached, so that none can be
  * forgotten; a test walks the routes and compares.
  */
-import type { Role } from '@chargewright/contract/sign-in';
 import type { RequestHandler } from 'express';
 import { HttpProblem } from './http-problem';
 import type { Session, Sessions } from '../features/sign-in/sessions';
 import { isOwnOrigin, SESSION_COOKIE } from '../features/sign-in/sessions';
 
-/** `open`: anybody. `signed-in`: anybody with a session. Roles: a member, with one of them, of the shop in the path. */
-export type Access = 'open' | 'signed-in' | readonly Role[];
+/** `open`: anybody. `signed-in`: anybody with a session. */
+type Access = 'open' | 'signed-in';
 
 export const ACCESS = {
   'POST /api/v1/evaluations': 'open',

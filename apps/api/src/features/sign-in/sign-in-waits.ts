@@ -6,6 +6,7 @@ export interface SignInWaits {
   /** Whole seconds before the next attempt; 0 where it may be made now. */
   secondsToWait(key: string): number;
   failed(key: string): void;
+  /** Takes back the failure that was counted beforehand, and those before it. */
   succeeded(key: string): void;
 }
 
@@ -54,6 +55,8 @@ export function signInWaits(now: () => number = Date.now): SignInWaits {
       if (failuresOf.size > MOST_KEYS) failuresOf.delete(failuresOf.keys().next().value!);
     },
     succeeded(key) {
+      const ofAll = thisMinute();
+      ofAll.failures = Math.max(ofAll.failures - 1, 0);
       failuresOf.delete(key);
     },
   };
