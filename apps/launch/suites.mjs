@@ -22,7 +22,7 @@ export const allSuites = () => [
   whole('lint', 300, node('node_modules/eslint/bin/eslint.js', '.', '--max-warnings', '0')),
   whole('typecheck', 240, [...npmCommand(), 'run', 'typecheck']),
   vitest('engine', 180),
-  vitest('api', 120),
+  vitest('api', 180),
   {
     name: 'web',
     budgetSeconds: 180,
