@@ -21,8 +21,8 @@ const THAW =
 const AFTER_THAW = 'Readings at minutes 10 to 15 after thawing serve the diagnosis only, never the charge.';
 const BULB = 'bulb tight on clean pipe, at the right place, wrapped, its charge not lost';
 
-/** The ranges of a chart, where it has any that one condition alone can reach. */
-const where = (ranges: string): string => (ranges === '' ? '' : `: ${ranges}`);
+/** The ranges of a chart, where it has any that one condition alone can reach; a sentence of its own, as the first serves as a title. */
+const where = (ranges: string): string => (ranges === '' ? '' : ` That is ${ranges}.`);
 const each = (say: Say): string => `Each at most 5 % of the factory charge (not known: at most ${say.ozPerTon(2)})`;
 const add = (say: Say): string =>
   `Add in small steps. ${each(say)}, liquid throttled into the suction side, ${THEN_READ}. Gloves and closed glasses.`;
@@ -105,7 +105,7 @@ const steps: NextStepWords['steps'] = {
     'Oil and valves do not last at this temperature.',
   ],
   'come-back-at-higher-target': [
-    (f) => `Come back when the target superheat is ${f.least} or more${where(f.ranges)}. Recover nothing today.`,
+    (f) => `Come back when the target superheat is ${f.least} or more.${where(f.ranges)} Recover nothing today.`,
     'At these conditions even a right charge runs near the floor: it cannot be told apart.',
   ],
   'reread-wet-bulb-then-airflow': [
@@ -151,7 +151,7 @@ const steps: NextStepWords['steps'] = {
   ],
   'reach-a-target': [
     (f) =>
-      `Wait for conditions that have a target, or come back${where(f.ranges)}. Heating may warm the house if the occupant agrees; mind people and animals.`,
+      `Wait for conditions that have a target, or come back.${where(f.ranges)} Heating may warm the house if the occupant agrees; mind people and animals.`,
     'The chart prints none here, or its edge is too near to be sure.',
   ],
   'record-conditions': [
