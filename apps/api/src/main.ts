@@ -8,6 +8,8 @@ import { signInWaits } from './features/sign-in/sign-in-waits';
 import { LIMITS } from './http/limits';
 import { ListenError, closeServer, createServer, listen } from './server';
 
+const ONE_DAY_MS = 24 * 60 * 60_000;
+
 async function main(): Promise<void> {
   const config = readConfig(process.env);
   const logger = pino({ level: config.logLevel, base: null });
@@ -15,6 +17,12 @@ async function main(): Promise<void> {
   const sessions = openSessions(records, config);
   const isReady = () => records.isReadable();
   const app = createApp({ ...config, logger, limits: LIMITS, records, sessions, waits: signInWaits(), isReady });
+  const sweep = () => {
+    sessions.sweep().catch((error: unknown) => logger.error({ err: error }, 'expired sessions were not removed'));
+  };
+  sweep();
+  // does not keep the process alive
+  setInterval(sweep, ONE_DAY_MS).unref();
   const server = createServer(app, config.tls);
   let ending = false;
   const end = (): void => {

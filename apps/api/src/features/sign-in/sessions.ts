@@ -44,8 +44,7 @@ export interface Sessions {
   list(personId: string): Promise<readonly Session[]>;
   /** Ends one of the person's sessions; false where she has none of that id. */
   end(personId: string, sessionId: string): Promise<boolean>;
-  /** Ends all sessions of a person, or all but one. */
-  endAllOf(personId: string, exceptSessionId?: string): Promise<void>;
+  endAllOf(personId: string): Promise<void>;
   /** Removes what has expired. */
   sweep(): Promise<void>;
 }
@@ -99,21 +98,20 @@ export function openSessions(records: Records, { secure }: { readonly secure: bo
       });
     },
 
-    async endAllOf(personId, exceptSessionId) {
-      const ofPerson = eq(sessions.userId, personId);
-      await records.write(async (db) => {
-        await db
-          .delete(sessions)
-          .where(exceptSessionId === undefined ? ofPerson : and(ofPerson, ne(sessions.id, exceptSessionId)));
-      });
-    },
+    endAllOf: (personId) => records.write((db) => on(db).deleteUserSessions(personId)),
 
     sweep: () => lucia.deleteExpiredSessions(),
   };
 }
 
+const on = (db: Db): Adapter => new DrizzleSQLiteAdapter(db, sessions, people);
+
+/** Ends the person's other sessions, within a write. */
+export async function endOtherSessions(db: Db, { id, personId }: Session): Promise<void> {
+  await db.delete(sessions).where(and(eq(sessions.userId, personId), ne(sessions.id, id)));
+}
+
 function adapterOf(records: Records): Adapter {
-  const on = (db: Db) => new DrizzleSQLiteAdapter(db, sessions, people);
   const reading = on(records.read);
   const writing = (work: (adapter: Adapter) => Promise<void>) => records.write((db) => work(on(db)));
   return {

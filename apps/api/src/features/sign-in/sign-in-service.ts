@@ -13,6 +13,7 @@ import {
 } from '../people/people-store';
 import { hashPassword, verifyPassword } from './passwords';
 import type { Session, Sessions } from './sessions';
+import { endOtherSessions } from './sessions';
 import type { SignInWaits } from './sign-in-waits';
 
 export interface SignInDeps {
@@ -69,7 +70,7 @@ export async function listSessions(sessions: Sessions, current: Session): Promis
 
 /** Changes the password; the person's other sessions end. Wrong current passwords are waited for as at signing in. */
 export async function changePassword(
-  { records, sessions, waits }: SignInDeps,
+  { records, waits }: SignInDeps,
   body: unknown,
   { session, address }: { readonly session: Session; readonly address: string },
 ): Promise<void> {
@@ -83,6 +84,9 @@ export async function changePassword(
     verifyPassword(await findPasswordHash(records.read, session.personId), current),
   );
   const passwordHash = await hashPassword(next);
-  await records.write((db) => setPasswordHash(db, session.personId, passwordHash));
-  await sessions.endAllOf(session.personId, session.id);
+  // together, so that no session outlives a password that was changed because of it
+  await records.write(async (db) => {
+    await setPasswordHash(db, session.personId, passwordHash);
+    await endOtherSessions(db, session);
+  });
 }
