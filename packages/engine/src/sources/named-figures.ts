@@ -57,6 +57,7 @@ export const NAMED_FIGURES = {
   steady: limit(PULL_DOWN_FIGURES.steadyK, 'differenceK'),
   mostWeather: limit(ATMOSPHERE_FIGURES.mostWeatherPa, 'pressureDifferencePa'),
   nearFloorTarget: limit(NEXT_STEP_FIGURES.nearFloorTargetK, 'differenceK'),
+  clearTarget: limit(NEXT_STEP_FIGURES.clearTargetK, 'differenceK'),
   mostAdded: limit(NEXT_STEP_FIGURES.mostAddedFraction, 'fraction'),
   highHead: limit(NEXT_STEP_FIGURES.highHeadK, 'differenceK'),
   highHeadOlder: limit(NEXT_STEP_FIGURES.highHeadOlderK, 'differenceK'),

@@ -106,6 +106,7 @@ const figures: Readonly<Record<NamedFigureId, string>> = {
   steady: 'Other readings are steady within',
   mostWeather: 'A barometer that is further off shows another elevation',
   nearFloorTarget: 'Target superheat so low that a right charge runs near the floor',
+  clearTarget: 'Target superheat high enough to be told from the floor',
   mostAdded: 'Most of the factory charge that one visit adds',
   highHead: 'Head that suggests air, newer systems, condensing over outdoor air',
   highHeadOlder: 'Head that suggests air, older systems, condensing over outdoor air',

@@ -94,6 +94,8 @@ export interface Evidence {
 export const NEXT_STEP_FIGURES = {
   /** Up to this target even a right charge runs near the floor. */
   nearFloorTargetK: differenceRule(7, 'deltaF', ['choice', "Our choice, by the ± and the floor of the makers' chart"]),
+  /** A target this high can be told from the floor. */
+  clearTargetK: differenceRule(8, 'deltaF', ['choice', "Our choice, by the ± and the floor of the makers' chart"]),
   /** Steps of one visit add up to at most this part of the factory charge before the charge is recovered and weighed. */
   mostAddedFraction: plainRule(0.1, '10 %', ['choice', OUR_CHOICE]),
   /** Condensing over outdoor air that suggests air in the system when subcooling is high: of newer systems, and of others. */

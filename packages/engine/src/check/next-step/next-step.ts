@@ -1,5 +1,4 @@
 /** The next step of a check: the row of the table that holds, with the figures its sentence needs. */
-import { differenceToK } from '../../units';
 import type { CriterionResult, NextStep } from '../result';
 import type { Figure, NextStepCode, NextStepFigures, NextStepMessage } from '../codes';
 import { conditionsGate } from '../criteria/conditions';
@@ -7,7 +6,7 @@ import { unstatedReason } from '../fit-for-test';
 import type { CheckInput } from '../input';
 import type { ReadingId } from '../readings';
 import type { Evidence } from './facts';
-import { gatherFacts } from './facts';
+import { gatherFacts, NEXT_STEP_FIGURES } from './facts';
 import { findRow } from './next-step-table';
 import { targetRanges } from './target-ranges';
 
@@ -42,15 +41,12 @@ function withFigures(code: NextStepCode, evidence: Evidence): NextStepMessage {
   }
   if (code === 'reach-a-target') return { code, figures: { ranges: rangesFigure(evidence) } };
   if (code === 'come-back-at-higher-target') {
-    const least = { kind: 'differenceK', value: CLEAR_TARGET_K } as const;
-    return { code, figures: { least, ranges: rangesFigure(evidence, CLEAR_TARGET_K) } };
+    const { value } = NEXT_STEP_FIGURES.clearTargetK;
+    return { code, figures: { least: { kind: 'differenceK', value }, ranges: rangesFigure(evidence, value) } };
   }
   // a union of messages without figures; the compiler cannot spread the code over its members
   return { code: code satisfies PlainStep, figures: {} } as NextStepMessage;
 }
-
-/** A target this high can be told from the floor (judged from copy A's ±5 and floor 5). */
-const CLEAR_TARGET_K = differenceToK(8, 'deltaF');
 
 const rangesFigure = (evidence: Evidence, leastK?: number): Figure => ({
   kind: 'targetRanges',
